@@ -1,0 +1,103 @@
+package binspan.counting;
+
+import binspan.optics.AnalyzerPaths;
+import binspan.optics.OpticalPath;
+import binspan.scenario.Arm;
+import java.util.List;
+
+/** Light of one arm at its detectors. */
+public final class ArmLight {
+    private final Arm arm;
+    private final AnalyzerPaths paths;
+    private final double photons;
+    private final double strayPhotonsPerSecond;
+    private final double[] detection;
+    private final double[] shorts;
+    private final double[] longs;
+
+    private ArmLight(Arm arm, OpticalPath path, double photons) {
+        this.arm = arm;
+        this.paths = AnalyzerPaths.of(arm.analyzer());
+        this.photons = photons;
+        this.strayPhotonsPerSecond = path.strayPhotonsPerSecond();
+        int ports = arm.detectors().size();
+        this.detection = new double[ports];
+        this.shorts = new double[ports];
+        this.longs = new double[ports];
+        for (int port = 0; port < ports; port++) {
+            detection[port] = arm.detectors().get(port).efficiency() * path.transmittance();
+            shorts[port] = detection[port] * paths.shortTo(port);
+            longs[port] = detection[port] * paths.longTo(port);
+        }
+    }
+
+    /**
+     * Light of an arm.
+     *
+     * @param arm the arm
+     * @param path its path with the analyzer's excess loss
+     * @param photons photons of the source inside the arm's filters, before any loss, per cycle; continuous: per second
+     */
+    public static ArmLight of(Arm arm, OpticalPath path, double photons) {
+        return new ArmLight(arm, path, photons);
+    }
+
+    /** The arm. */
+    public Arm arm() {
+        return arm;
+    }
+
+    /** Shares of the analyzer's paths. */
+    public AnalyzerPaths paths() {
+        return paths;
+    }
+
+    /** Photons of the source inside the arm's filters, before any loss, per cycle; continuous: per second. */
+    public double photons() {
+        return photons;
+    }
+
+    /** Number of detected ports. */
+    public int ports() {
+        return detection.length;
+    }
+
+    /** Probability that a photon of the arm is detected if it takes a path with share 1 into the port. */
+    public double detection(int port) {
+        return detection[port];
+    }
+
+    /** Share of the arm's photons that the port detects through its short path. */
+    public double shortTo(int port) {
+        return shorts[port];
+    }
+
+    /** Share of the arm's photons that the port detects through its long path. */
+    public double longTo(int port) {
+        return longs[port];
+    }
+
+    /** Share of the arm's photons that the port detects at all. */
+    public double into(int port) {
+        return shorts[port] + longs[port];
+    }
+
+    /**
+     * Loads of all ports.
+     *
+     * @param cyclesPerSecond cycles, 1/s; 1 for a continuous pump
+     * @param slotsPerSecond slots, 1/s; infinite for a continuous pump
+     */
+    public List<DetectorLoad> loads(double cyclesPerSecond, double slotsPerSecond) {
+        DetectorLoad first = load(0, cyclesPerSecond, slotsPerSecond);
+        return ports() == 1 ? List.of(first) : List.of(first, load(1, cyclesPerSecond, slotsPerSecond));
+    }
+
+    private DetectorLoad load(int port, double cyclesPerSecond, double slotsPerSecond) {
+        double stray = strayPhotonsPerSecond
+                * paths.into(port)
+                * arm.detectors().get(port).efficiency();
+        return DetectorLoad.of(
+                arm.detectors().get(port), photons * cyclesPerSecond * into(port), stray, slotsPerSecond);
+    }
+}

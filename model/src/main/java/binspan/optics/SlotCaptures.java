@@ -1,0 +1,47 @@
+package binspan.optics;
+
+/**
+ * Captured shares of photons and pairs by how many slots away from the window they belong.
+ *
+ * <p>A photon of slot j seen by the window of slot a has the offset j - a; slots whose tails do not reach the window are left at 0.
+ */
+public final class SlotCaptures {
+    private final int reach;
+    private final double[][] singlesA;
+    private final double[][] singlesB;
+    private final PairCaptures[][] joint;
+    private final ArrivalTime arrival;
+
+    SlotCaptures(int reach, double[][] singlesA, double[][] singlesB, PairCaptures[][] joint, ArrivalTime arrival) {
+        this.reach = reach;
+        this.singlesA = singlesA;
+        this.singlesB = singlesB;
+        this.joint = joint;
+        this.arrival = arrival;
+    }
+
+    /** Largest offset kept, in slots. */
+    public int reach() {
+        return reach;
+    }
+
+    /** Spread of the light. */
+    public ArrivalTime arrival() {
+        return arrival;
+    }
+
+    /** Captured share of alice's photons. */
+    public double alice(int port, int offset) {
+        return Math.abs(offset) > reach ? 0.0 : singlesA[port][offset + reach];
+    }
+
+    /** Captured share of bob's photons. */
+    public double bob(int port, int offset) {
+        return Math.abs(offset) > reach ? 0.0 : singlesB[port][offset + reach];
+    }
+
+    /** Captured shares of the pairs of two ports. */
+    public PairCaptures pairs(int portA, int portB) {
+        return joint[portA][portB];
+    }
+}

@@ -1,0 +1,136 @@
+package binspan.optics;
+
+import java.util.List;
+
+/** Computes the captures of a pulsed source. */
+public final class SlotCapturing {
+    private static final int THREE_SLOTS = 2;
+    private static final int MOST_SLOTS = 40;
+    private static final int NEIGHBOURS = 2;
+    private static final double FAR = 9.0;
+    private static final double TAIL_TIMES = 45.0;
+
+    private final CaptureInputs in;
+    private final JointCapture pairs;
+    private final int reach;
+
+    private SlotCapturing(CaptureInputs in) {
+        this.in = in;
+        this.pairs = new JointCapture(in.spectrum(), in.betaA(), in.betaB());
+        this.reach = in.endless() ? endlessReach() : THREE_SLOTS;
+    }
+
+    /** Captured shares of all slots. */
+    public static SlotCaptures of(CaptureInputs in) {
+        SlotCapturing capturing = new SlotCapturing(in);
+        return new SlotCaptures(
+                capturing.reach,
+                capturing.singles(true),
+                capturing.singles(false),
+                capturing.joint(),
+                capturing.pairs.arrival());
+    }
+
+    /** Slots within nine rms of the window, never more than {@value #MOST_SLOTS}: farther spread is cautioned about elsewhere. */
+    private int endlessReach() {
+        double widest = 0.0;
+        for (int port = 0; port < in.portsA().size(); port++) {
+            widest = Math.max(
+                    widest, extent(in.portsA().get(port), pairs.arrival().singlesA()) + Math.abs(in.lateA()));
+        }
+        for (int port = 0; port < in.portsB().size(); port++) {
+            widest = Math.max(
+                    widest, extent(in.portsB().get(port), pairs.arrival().singlesB()) + Math.abs(in.lateB()));
+        }
+        double slots = (widest + in.windowWidth() / 2.0) / in.separation();
+        return (int) Math.max(1.0, Math.min(MOST_SLOTS, Math.ceil(slots)));
+    }
+
+    private static double extent(PortTiming port, double lightVariance) {
+        return FAR * Math.sqrt(lightVariance + port.variance()) + (port.tailed() ? TAIL_TIMES * port.tailTime() : 0.0);
+    }
+
+    private double[][] singles(boolean alice) {
+        List<PortTiming> ports = alice ? in.portsA() : in.portsB();
+        double[][] captures = new double[ports.size()][];
+        for (int port = 0; port < captures.length; port++) {
+            captures[port] =
+                    port > 0 && ports.get(port).equals(ports.get(0)) ? captures[0] : singles(alice, ports.get(port));
+        }
+        return captures;
+    }
+
+    private double[] singles(boolean alice, PortTiming port) {
+        ArrivalTime arrival = pairs.arrival();
+        double variance = alice ? arrival.singlesA() : arrival.singlesB();
+        double extent = extent(port, variance);
+        double[] captures = new double[2 * reach + 1];
+        for (int offset = -reach; offset <= reach; offset++) {
+            Window window = window(alice, offset);
+            if (reaches(window, extent)) {
+                captures[offset + reach] = single(alice, port, window, Math.sqrt(variance + port.variance()));
+            }
+        }
+        return captures;
+    }
+
+    private double single(boolean alice, PortTiming port, Window window, double sigma) {
+        PairSpectrum spectrum = in.spectrum();
+        Passband filters = alice ? spectrum.alice() : spectrum.bob();
+        return filters.gaussian()
+                ? port.capture(window.from(), window.to(), sigma)
+                : BoxedCapture.singles(filters, spectrum.inversePump(), alice ? in.betaA() : in.betaB(), port, window);
+    }
+
+    private PairCaptures[][] joint() {
+        PairCaptures[][] joint =
+                new PairCaptures[in.portsA().size()][in.portsB().size()];
+        for (int a = 0; a < joint.length; a++) {
+            for (int b = 0; b < joint[a].length; b++) {
+                int likeA = in.portsA().get(a).equals(in.portsA().get(0)) ? 0 : a;
+                int likeB = in.portsB().get(b).equals(in.portsB().get(0)) ? 0 : b;
+                joint[a][b] = likeA < a || likeB < b
+                        ? joint[likeA][likeB]
+                        : joint(in.portsA().get(a), in.portsB().get(b));
+            }
+        }
+        return joint;
+    }
+
+    private PairCaptures joint(PortTiming a, PortTiming b) {
+        double extentA = extent(a, pairs.arrival().pairA());
+        double extentB = extent(b, pairs.arrival().pairB());
+        int side = 2 * reach + 1;
+        double[] captures = new double[side * side];
+        for (int i = -reach; i <= reach; i++) {
+            Window windowA = window(true, i);
+            if (!reaches(windowA, extentA)) {
+                continue;
+            }
+            for (int k = lowest(i); k <= highest(i); k++) {
+                Window windowB = window(false, k);
+                if (reaches(windowB, extentB)) {
+                    captures[(i + reach) * side + k + reach] = pairs.of(a, b, windowA, windowB);
+                }
+            }
+        }
+        return new PairCaptures(reach, captures);
+    }
+
+    /** In an endless train only photons born within a few slots of one another can be partners. */
+    private int lowest(int offset) {
+        return in.endless() ? Math.max(-reach, offset - NEIGHBOURS) : -reach;
+    }
+
+    private int highest(int offset) {
+        return in.endless() ? Math.min(reach, offset + NEIGHBOURS) : reach;
+    }
+
+    private Window window(boolean alice, int offset) {
+        return Window.of(in.windowWidth(), (alice ? in.lateA() : in.lateB()) + offset * in.separation());
+    }
+
+    private static boolean reaches(Window window, double extent) {
+        return window.from() < extent && window.to() > -extent;
+    }
+}

@@ -1,0 +1,97 @@
+package binspan.prediction;
+
+import binspan.scenario.Arm;
+import binspan.scenario.Detector;
+import binspan.scenario.LinkLength;
+import binspan.scenario.PumpMode;
+import binspan.scenario.Scenario;
+import java.util.ArrayList;
+import java.util.List;
+
+/** The quantities of a link that can drift, each with the step from which a search for its limit starts. */
+final class DriftingQuantities {
+    /**
+     * One quantity.
+     *
+     * @param path scenario path
+     * @param firstStep first step of the search where the planned value is 0, in the parameter's unit
+     * @param bothWays whether too little can fail a requirement as well as too much
+     */
+    record Quantity(String path, double firstStep, boolean bothWays) {}
+
+    private final Scenario scenario;
+    private final List<Quantity> quantities = new ArrayList<>();
+
+    private DriftingQuantities(Scenario scenario) {
+        this.scenario = scenario;
+    }
+
+    /** The quantities of a scenario, in the order in which an engineer asks for them. */
+    static List<Quantity> of(Scenario scenario) {
+        DriftingQuantities drifting = new DriftingQuantities(scenario);
+        drifting.link();
+        drifting.pump();
+        drifting.arm("alice", scenario.alice());
+        drifting.arm("bob", scenario.bob());
+        return drifting.quantities;
+    }
+
+    private void link() {
+        if (new LinkLength().value(scenario).orElse(0.0) > 0.0) {
+            add(LinkLength.PATH, 1.0);
+            add("timing.cableTemperatureStepK", 0.1);
+        }
+        quantities.add(new Quantity("timing.windowWidthPs", 1.0, true));
+        quantities.add(
+                new Quantity(scenario.pulsed() ? "source.meanPairsPerCycle" : "source.pairRatePerSecond", 1e-4, true));
+    }
+
+    private void pump() {
+        boolean interferometer = scenario.source().pump().madeByInterferometer();
+        add("source.pump.frequencyDriftRmsMHz", 1.0);
+        if (scenario.source().pump().mode() == PumpMode.PULSE_PAIR) {
+            add("source.pump.mismatchPs", 0.1);
+        }
+        if (interferometer) {
+            add("source.pump.phaseNoiseRmsRad", 0.01);
+        }
+    }
+
+    private void arm(String name, Arm arm) {
+        add(name + ".repairMarginDb", 0.1);
+        add(name + ".delayErrorPs", 1.0);
+        add(name + ".clockJitterRmsPs", 1.0);
+        add(name + ".analyzer.mismatchPs", 0.1);
+        add(name + ".analyzer.phaseNoiseRmsRad", 0.01);
+        add(name + ".analyzer.temperatureRmsMilliK", 0.5);
+        List<Detector> detectors = arm.detectors();
+        boolean alike = detectors.size() == 1
+                || (detectors.get(0).jitterFwhmPs() == detectors.get(1).jitterFwhmPs()
+                        && noise(detectors.get(0)) == noise(detectors.get(1))
+                        && detectors.get(0).gate().isPresent()
+                                == detectors.get(1).gate().isPresent());
+        if (alike) {
+            detector(name + ".detectors", detectors.get(0));
+        } else {
+            detector(name + ".detectors[0]", detectors.get(0));
+            detector(name + ".detectors[1]", detectors.get(1));
+        }
+    }
+
+    private void detector(String path, Detector detector) {
+        add(path + ".jitterFwhmPs", 1.0);
+        if (detector.gate().isPresent()) {
+            add(path + ".gate.darkProbability", 1e-8);
+        } else {
+            add(path + ".darkCountsPerSecond", 1.0);
+        }
+    }
+
+    private static double noise(Detector detector) {
+        return detector.gate().isPresent() ? detector.gate().get().darkProbability() : detector.darkCountsPerSecond();
+    }
+
+    private void add(String path, double firstStep) {
+        quantities.add(new Quantity(path, firstStep, false));
+    }
+}

@@ -1,0 +1,155 @@
+package binspan.prediction;
+
+import binspan.merit.FiniteKey;
+import binspan.merit.FiniteKeyBlock;
+import binspan.merit.FiniteKeyBound;
+import binspan.scenario.Parameter;
+import binspan.scenario.ParameterPaths;
+import binspan.scenario.Range;
+import binspan.scenario.Scenario;
+import binspan.units.Scale;
+import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import org.apache.commons.numbers.rootfinder.BrentSolver;
+
+/**
+ * Finds the nearest value of each drifting quantity at which the first requirement fails: steps that double outwards until one fails, then a root
+ * search for the least margin.
+ */
+final class HeadroomSearch {
+    private static final BrentSolver ROOT = new BrentSolver(1e-7, 1e-15, 0.0);
+    private static final double FIRST_SHARE = 0.02;
+    private static final double NEGLIGIBLE = 1e-6;
+    private static final int MOST_STEPS = 80;
+
+    private final Scenario scenario;
+    private final LinkPredictor predictor = new LinkPredictor();
+    private final Map<Requirement, Double> held = new EnumMap<>(Requirement.class);
+
+    private HeadroomSearch(Scenario scenario, List<RequirementOutcome> outcomes) {
+        this.scenario = scenario;
+        for (RequirementOutcome outcome : outcomes) {
+            if (outcome.met()) {
+                held.put(outcome.requirement(), outcome.required());
+            }
+        }
+    }
+
+    /** The headroom of every drifting quantity that has a limit, for the requirements that are met. */
+    static List<Headroom> of(Scenario scenario, List<RequirementOutcome> outcomes) {
+        HeadroomSearch search = new HeadroomSearch(scenario, outcomes);
+        List<Headroom> headroom = new ArrayList<>();
+        if (!search.held.isEmpty()) {
+            DriftingQuantities.of(scenario).forEach(quantity -> search.add(quantity, headroom));
+        }
+        return headroom;
+    }
+
+    private void add(DriftingQuantities.Quantity quantity, List<Headroom> headroom) {
+        Parameter parameter = ParameterPaths.find(scenario, quantity.path());
+        double planned = parameter.value(scenario).orElse(0.0);
+        double outward = planned < 0.0 ? -1.0 : 1.0;
+        if (quantity.bothWays()) {
+            limit(parameter, planned, -outward * FIRST_SHARE * planned)
+                    .ifPresent(limit -> headroom.add(headroom(parameter, planned, limit)));
+        }
+        double step = Math.max(quantity.firstStep(), FIRST_SHARE * Math.abs(planned));
+        limit(parameter, planned, outward * step).ifPresent(limit -> headroom.add(headroom(parameter, planned, limit)));
+    }
+
+    private Headroom headroom(Parameter parameter, double planned, double limit) {
+        return new Headroom(parameter.path(), parameter.unit(), planned, limit, worst(parameter, limit));
+    }
+
+    private OptionalDouble limit(Parameter parameter, double planned, double firstStep) {
+        double good = planned;
+        double step = firstStep;
+        for (int i = 0; i < MOST_STEPS; i++) {
+            double next = inside(parameter.range(), good, tamed(good, step));
+            if (next == good || Math.abs(next) < NEGLIGIBLE * Math.abs(planned)) {
+                return OptionalDouble.empty();
+            }
+            if (!(leastMargin(parameter, next) >= 0.0)) {
+                return OptionalDouble.of(ROOT.findRoot(
+                        x -> finite(leastMargin(parameter, x)), Math.min(good, next), Math.max(good, next)));
+            }
+            good = next;
+            step *= 2.0;
+        }
+        return OptionalDouble.empty();
+    }
+
+    /** One step on, but towards zero never more than half of the way. */
+    private static double tamed(double from, double step) {
+        return from * step < 0.0 && Math.abs(step) > Math.abs(from) / 2.0 ? from / 2.0 : from + step;
+    }
+
+    /** The next value, pulled back into the range; half-way to an end that is itself excluded. */
+    private static double inside(Range range, double from, double to) {
+        if (to > range.highest()) {
+            return range.highestOpen() ? (from + range.highest()) / 2.0 : range.highest();
+        }
+        if (to < range.lowest() || (to == range.lowest() && range.lowestOpen())) {
+            return range.lowestOpen() ? (from + range.lowest()) / 2.0 : range.lowest();
+        }
+        return to;
+    }
+
+    private static double finite(double margin) {
+        return margin >= -1.0 ? Math.min(margin, 1.0) : -1.0;
+    }
+
+    private double leastMargin(Parameter parameter, double value) {
+        LinkPrediction prediction = predictor.of(parameter.with(scenario, value));
+        double least = Double.POSITIVE_INFINITY;
+        for (Map.Entry<Requirement, Double> each : held.entrySet()) {
+            double margin = margin(each.getKey(), each.getValue(), prediction);
+            least = margin <= least ? margin : Double.isNaN(margin) ? Double.NEGATIVE_INFINITY : least;
+        }
+        return least;
+    }
+
+    private Requirement worst(Parameter parameter, double value) {
+        LinkPrediction prediction = predictor.of(parameter.with(scenario, value));
+        Requirement worst = held.keySet().iterator().next();
+        double least = Double.POSITIVE_INFINITY;
+        for (Map.Entry<Requirement, Double> each : held.entrySet()) {
+            double margin = margin(each.getKey(), each.getValue(), prediction);
+            if (!(margin >= least)) {
+                least = margin;
+                worst = each.getKey();
+            }
+        }
+        return worst;
+    }
+
+    /** Margin as a share of the requirement, so that different units compare; for the first key the key length at the deadline per key bit. */
+    private static double margin(Requirement requirement, double required, LinkPrediction prediction) {
+        if (requirement == Requirement.FIRST_KEY) {
+            return keyAtDeadline(prediction, required * Scale.HOUR);
+        }
+        double scale = required > 0.0 ? required : 1.0;
+        double margin = requirement.margin(requirement.predicted(prediction, null), required) / scale;
+        return requirement == Requirement.FIVE_SIGMA ? rate(margin) : margin;
+    }
+
+    /** A time that runs to infinity becomes a rate that runs to 0, so that the search sees a finite slope. */
+    private static double rate(double margin) {
+        return margin >= 0.0 ? margin : 1.0 / (1.0 - margin) - 1.0;
+    }
+
+    /** Key length per key bit when the deadline comes; the quicker bound decides where it already finds a key. */
+    private static double keyAtDeadline(LinkPrediction prediction, double deadline) {
+        if (Double.isNaN(prediction.key().asymptoticPerSecond())) {
+            return Double.NaN;
+        }
+        FiniteKey key = FiniteKeyOutlook.key(prediction);
+        FiniteKeyBlock block = key.block(deadline * prediction.uptimeShare());
+        double quick = FiniteKeyBound.TOMAMICHEL_2012.bits(block);
+        double bits = quick >= 1.0 ? quick : key.bits(deadline * prediction.uptimeShare());
+        return (bits - 1.0) / Math.max(1.0, block.keyBits());
+    }
+}

@@ -1,0 +1,103 @@
+package binspan.prediction;
+
+import binspan.counting.LinkCounts;
+import binspan.merit.BellTest;
+import binspan.merit.FringeVisibility;
+import binspan.merit.SecretKey;
+import binspan.merit.VisibilityBudget;
+import binspan.optics.ArrivalTime;
+import binspan.optics.Imbalances;
+import binspan.optics.OpticalPath;
+import binspan.optics.PairSpectrum;
+import binspan.optics.PortTiming;
+import binspan.optics.TwoPhotonCoherence;
+import binspan.scenario.Arm;
+import binspan.scenario.PumpMode;
+import binspan.scenario.Scenario;
+import binspan.units.Scale;
+import java.util.List;
+
+/**
+ * Everything predicted of a link with every intermediate, finite-key statistics apart.
+ *
+ * @param scenario the link
+ * @param spectrum joint spectrum of the pairs
+ * @param pathA alice's path
+ * @param pathB bob's path
+ * @param portsA timing of alice's ports
+ * @param portsB timing of bob's ports
+ * @param arrival spread of the arrival times by the light; continuous: of no meaning for singles
+ * @param imbalances delays of the interferometers
+ * @param coherence two-photon coherence by cause
+ * @param counts counts
+ * @param fringe fringe of ports (1,1)
+ * @param budget visibility budget
+ * @param bell CHSH test
+ * @param key error rates, sifted and asymptotic key
+ */
+public record LinkPrediction(
+        Scenario scenario,
+        PairSpectrum spectrum,
+        OpticalPath pathA,
+        OpticalPath pathB,
+        List<PortTiming> portsA,
+        List<PortTiming> portsB,
+        ArrivalTime arrival,
+        Imbalances imbalances,
+        TwoPhotonCoherence coherence,
+        LinkCounts counts,
+        FringeVisibility fringe,
+        VisibilityBudget budget,
+        BellTest bell,
+        SecretKey key) {
+
+    /** Pump cycles per second: stated for a pulse pair, one each period for a train; NaN for a continuous pump. */
+    public double cyclesPerSecond() {
+        return cyclesPerSecond(scenario);
+    }
+
+    static double cyclesPerSecond(Scenario scenario) {
+        return switch (scenario.source().pump().mode()) {
+            case PULSE_PAIR -> scenario.source().pump().repetitionRateMHz().orElseThrow() * Scale.MEGA;
+            case PULSE_TRAIN -> 1.0 / (scenario.imbalanceNs() * Scale.NANO);
+            case CONTINUOUS -> Double.NaN;
+        };
+    }
+
+    /** Mean pairs of the brighter bin of a cycle; NaN for a continuous pump. */
+    public double binPairs() {
+        double mean = scenario.source().meanPairsPerCycle().orElse(Double.NaN);
+        double early = scenario.source().pump().earlyPairFraction();
+        return scenario.source().pump().mode() == PumpMode.PULSE_PAIR ? mean * Math.max(early, 1.0 - early) : mean;
+    }
+
+    /** Window width, s. */
+    public double windowWidth() {
+        return scenario.timing().windowWidthPs() * Scale.PICO;
+    }
+
+    /** How late an arm's photons arrive against its windows, s: its delay error and the cables' temperature step at its worst. */
+    public static double late(Arm arm, OpticalPath path) {
+        return arm.delayErrorPs() * Scale.PICO + path.thermalDelay();
+    }
+
+    /** Share of the acquisition time in which the link works. */
+    public double uptimeShare() {
+        return scenario.acquisition().uptimeShare();
+    }
+
+    /** Working seconds of the acquisition. */
+    public double uptime() {
+        return scenario.acquisition().durationS() * uptimeShare();
+    }
+
+    /** Mean counts of a point of the fringe scan. */
+    public double countsPerPoint() {
+        return fringe.meanPerSecond() * scenario.acquisition().secondsPerPoint();
+    }
+
+    /** Counting error of the raw visibility of that scan. */
+    public double visibilitySigma() {
+        return FringeVisibility.sigma(fringe.raw(), scenario.acquisition().fringePoints(), countsPerPoint());
+    }
+}

@@ -1,0 +1,203 @@
+package binspan.prediction;
+
+import binspan.counting.DetectorLoad;
+import binspan.counting.LinkCounts;
+import binspan.merit.PhotonStatistics;
+import binspan.merit.RepeaterlessBound;
+import binspan.optics.ArrivalTime;
+import binspan.optics.OpticalPath;
+import binspan.optics.PairSpectrum;
+import binspan.optics.Passband;
+import binspan.scenario.PumpMode;
+import binspan.units.Decibels;
+import binspan.units.Scale;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.function.ToDoubleFunction;
+
+/** The registry of result fields, in the order of the result. */
+public final class ResultFields {
+    private static final double NOT_APPLICABLE = Double.NaN;
+
+    /** All figures of a check. */
+    public static final List<ResultField> ALL = all();
+
+    private ResultFields() {}
+
+    private static List<ResultField> all() {
+        List<ResultField> fields = new ArrayList<>();
+        source(fields);
+        arm(fields, "alice", true);
+        arm(fields, "bob", false);
+        coincidence(fields);
+        merit(fields);
+        key(fields);
+        return List.copyOf(fields);
+    }
+
+    private static void source(List<ResultField> fields) {
+        add(fields, "source.cyclesPerSecond", "1/s", LinkPrediction::cyclesPerSecond);
+        add(
+                fields,
+                "source.schmidtNumber",
+                "",
+                p -> p.scenario().pulsed() ? p.spectrum().schmidtNumber() : NOT_APPLICABLE);
+        add(fields, "source.apparentMeanPairs", "", ResultFields::apparentMeanPairs);
+    }
+
+    private static void arm(List<ResultField> fields, String name, boolean alice) {
+        add(fields, name + ".lossDb", "dB", p -> path(p, alice).lossDb());
+        add(fields, name + ".fibreLossDb", "dB", p -> path(p, alice).fibreLossDb());
+        add(fields, name + ".dispersionPsPerNm", "ps/nm", p -> path(p, alice).dispersionPsPerNm());
+        add(
+                fields,
+                name + ".arrivalRmsPs",
+                "ps",
+                p -> p.scenario().pulsed() ? TimingCautions.arrivalRms(p, alice) / Scale.PICO : NOT_APPLICABLE);
+        add(fields, name + ".delayErrorPs", "ps", p -> late(p, alice) / Scale.PICO);
+        perPort(
+                fields,
+                name + ".singlesPerSecond",
+                "1/s",
+                (c, port) -> loads(c.prediction(), alice).get(port).recordedPerSecond());
+        perPort(
+                fields,
+                name + ".liveFraction",
+                "",
+                (c, port) -> loads(c.prediction(), alice).get(port).liveFraction());
+        add(fields, name + ".backgroundPerSecond", "1/s", p -> background(loads(p, alice)));
+        add(
+                fields,
+                name + ".coincidencesPerSingle",
+                "",
+                p -> p.counts().central().sum(0.0) / LinkCounts.recorded(loads(p, alice)));
+        add(fields, name + ".partnerPassProbability", "", p -> partnerPass(p.spectrum(), alice));
+        add(
+                fields,
+                name + ".unheraldedG2",
+                "",
+                p -> p.scenario().pulsed() ? PairSpectrum.unheraldedG2(modes(p, alice)) : NOT_APPLICABLE);
+        add(fields, name + ".heraldedG2", "", p -> p.scenario().pulsed() ? heraldedG2(p, alice) : NOT_APPLICABLE);
+    }
+
+    private static void coincidence(List<ResultField> fields) {
+        add(fields, "coincidence.fringeMaxPerSecond", "1/s", p -> p.fringe().maxPerSecond());
+        add(fields, "coincidence.fringeMinPerSecond", "1/s", p -> p.fringe().minPerSecond());
+        add(fields, "coincidence.accidentalPerSecond", "1/s", p -> p.fringe().accidentalPerSecond());
+        add(
+                fields,
+                "coincidence.allPortsPerSecond",
+                "1/s",
+                p -> p.counts().central().sum(0.0));
+        add(fields, "coincidence.sidePerSecond", "1/s", p -> p.counts().sidePerSecond());
+        add(fields, "coincidence.car", "", p -> p.fringe().car());
+        add(
+                fields,
+                "coincidence.correlationRmsPs",
+                "ps",
+                p -> p.scenario().pulsed() ? NOT_APPLICABLE : correlationRms(p) / Scale.PICO);
+    }
+
+    private static void merit(List<ResultField> fields) {
+        add(fields, "visibility.raw", "", p -> p.fringe().raw());
+        add(fields, "visibility.net", "", p -> p.fringe().net());
+        add(fields, "visibility.sigma", "", LinkPrediction::visibilitySigma);
+        add(fields, "visibility.countsPerPoint", "", LinkPrediction::countsPerPoint);
+        add(fields, "bell.chsh", "", p -> p.bell().chsh());
+        add(fields, "bell.sigma", "", p -> p.bell().sigma(p.uptime()));
+        add(fields, "bell.secondsToThreeSigma", "s", p -> p.bell().secondsTo(3.0) / p.uptimeShare());
+        add(fields, "bell.secondsToFiveSigma", "s", p -> p.bell().secondsTo(Requirement.FIVE) / p.uptimeShare());
+        add(fields, "qber.phase", "", p -> p.key().errors().phase());
+        add(fields, "qber.time", "", p -> p.key().errors().time());
+    }
+
+    private static void key(List<ResultField> fields) {
+        add(fields, "key.siftedPhaseBps", "bit/s", p -> p.key().siftedPhasePerSecond());
+        add(fields, "key.siftedTimeBps", "bit/s", p -> p.key().siftedTimePerSecond());
+        add(fields, "key.asymptoticBps", "bit/s", p -> p.key().asymptoticPerSecond());
+        fields.add(new ResultField(
+                "key.finiteBits", "bit", false, (c, port) -> c.finite().bits()));
+        fields.add(new ResultField(
+                "key.finiteBps", "bit/s", false, (c, port) -> c.finite().bitsPerSecond()));
+        fields.add(new ResultField(
+                "key.secondsToFirstKey", "s", false, (c, port) -> c.finite().secondsToFirstKey()));
+        add(fields, "key.repeaterlessBoundBps", "bit/s", ResultFields::repeaterlessBound);
+    }
+
+    private static void add(
+            List<ResultField> fields, String name, String unit, ToDoubleFunction<LinkPrediction> reading) {
+        fields.add(new ResultField(name, unit, false, (check, port) -> reading.applyAsDouble(check.prediction())));
+    }
+
+    private static void perPort(List<ResultField> fields, String name, String unit, ResultField.Reading reading) {
+        fields.add(new ResultField(name, unit, true, reading));
+    }
+
+    private static OpticalPath path(LinkPrediction p, boolean alice) {
+        return alice ? p.pathA() : p.pathB();
+    }
+
+    private static List<DetectorLoad> loads(LinkPrediction p, boolean alice) {
+        return alice ? p.counts().loadsA() : p.counts().loadsB();
+    }
+
+    private static double late(LinkPrediction p, boolean alice) {
+        return alice
+                ? LinkPrediction.late(p.scenario().alice(), p.pathA())
+                : LinkPrediction.late(p.scenario().bob(), p.pathB());
+    }
+
+    private static double background(List<DetectorLoad> loads) {
+        double sum = 0.0;
+        for (DetectorLoad load : loads) {
+            sum += load.backgroundPerSecond();
+        }
+        return sum;
+    }
+
+    /** Probability that the partner of an arm's photon passes its own filters. */
+    private static double partnerPass(PairSpectrum spectrum, boolean alice) {
+        return alice ? spectrum.bobPassesGivenAlice() : spectrum.alicePassesGivenBob();
+    }
+
+    private static double modes(LinkPrediction p, boolean alice) {
+        return alice ? p.spectrum().armSchmidtA() : p.spectrum().armSchmidtB();
+    }
+
+    private static double heraldedG2(LinkPrediction p, boolean alice) {
+        double pass = p.spectrum().alicePassesGivenBob() * p.spectrum().bobPassesGivenAlice();
+        return PhotonStatistics.heraldedG2(p.binPairs(), pass, p.spectrum().schmidtNumber(), modes(p, alice));
+    }
+
+    private static double apparentMeanPairs(LinkPrediction p) {
+        return PhotonStatistics.apparentMeanPairs(
+                LinkCounts.recorded(p.counts().loadsA()),
+                LinkCounts.recorded(p.counts().loadsB()),
+                p.counts().allSlotsPerSecond(),
+                p.cyclesPerSecond());
+    }
+
+    /** Rms of t_A - t_B of ports (1,1) with a continuous pump, s. */
+    static double correlationRms(LinkPrediction p) {
+        double beta = p.pathA().groupDelayDispersion() + p.pathB().groupDelayDispersion();
+        return Math.sqrt(ArrivalTime.differenceVariance(p.spectrum(), beta)
+                + p.portsA().get(0).variance()
+                + p.portsB().get(0).variance());
+    }
+
+    private static double repeaterlessBound(LinkPrediction p) {
+        double transmittance =
+                Decibels.transmittance(p.pathA().fibreLossDb() + p.pathB().fibreLossDb());
+        return RepeaterlessBound.bitsPerMode(transmittance) * modesPerSecond(p);
+    }
+
+    /** Modes that the source can fill per second: f 2K, f K for a train, those of the mirrored passband with a continuous pump. */
+    static double modesPerSecond(LinkPrediction p) {
+        if (!p.scenario().pulsed()) {
+            Passband both = p.spectrum().mirrored();
+            return both.modesPerSecond();
+        }
+        double bins = p.scenario().source().pump().mode() == PumpMode.PULSE_PAIR ? 2.0 : 1.0;
+        return p.cyclesPerSecond() * bins * p.spectrum().schmidtNumber();
+    }
+}

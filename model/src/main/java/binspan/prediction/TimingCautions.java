@@ -1,0 +1,106 @@
+package binspan.prediction;
+
+import binspan.optics.PortTiming;
+import binspan.scenario.LinkLength;
+import binspan.scenario.PumpMode;
+import binspan.scenario.Scenario;
+import binspan.units.Scale;
+import java.util.List;
+
+/** Where windows, slots and arrival times strain the model. */
+final class TimingCautions {
+    private static final double CLEAR_OF_NEIGHBOURS = 6.0;
+    private static final double MISMATCH_WITHOUT_SELECTION = 0.3e-12;
+    private static final double LITTLE = 1.02;
+
+    private TimingCautions() {}
+
+    static void add(LinkPrediction p, Cautions cautions) {
+        double separation = p.imbalances().common();
+        double window = p.windowWidth();
+        cautions.when(
+                window > separation,
+                "window-wider-than-separation",
+                "The window (%.0f ps) is wider than the slot separation (%.0f ps): neighbouring slots are counted as central ones.",
+                window / Scale.PICO,
+                separation / Scale.PICO);
+        double rms = Math.max(arrivalRms(p, true), arrivalRms(p, false));
+        cautions.when(
+                separation < CLEAR_OF_NEIGHBOURS * rms,
+                "slots-overlap",
+                "The slot separation (%.0f ps) is less than six rms of the arrival times (%.0f ps rms): slots run into one another.",
+                separation / Scale.PICO,
+                rms / Scale.PICO);
+        cycle(p, separation, window, cautions);
+        selection(p, window, cautions);
+        rising(p, cautions);
+    }
+
+    /** Rms arrival of an arm's worst port: of its singles, or of the time difference with a continuous pump. */
+    static double arrivalRms(LinkPrediction p, boolean alice) {
+        if (!p.scenario().pulsed()) {
+            return ResultFields.correlationRms(p);
+        }
+        double light = alice ? p.arrival().singlesA() : p.arrival().singlesB();
+        return Math.sqrt(light + worst(alice ? p.portsA() : p.portsB()));
+    }
+
+    private static double worst(List<PortTiming> ports) {
+        double worst = 0.0;
+        for (PortTiming port : ports) {
+            worst = Math.max(worst, port.variance());
+        }
+        return worst;
+    }
+
+    private static void cycle(LinkPrediction p, double separation, double window, Cautions cautions) {
+        boolean pair = p.scenario().source().pump().mode() == PumpMode.PULSE_PAIR;
+        double cycle = 1.0 / p.cyclesPerSecond();
+        cautions.when(
+                pair && 3.0 * separation + window > cycle,
+                "cycle-too-short",
+                "Three separations and a window (%.2f ns) do not fit into the pump cycle (%.2f ns): slots of successive cycles mix.",
+                (3.0 * separation + window) / Scale.NANO,
+                cycle / Scale.NANO);
+    }
+
+    private static void selection(LinkPrediction p, double window, Cautions cautions) {
+        double mismatch = Math.max(
+                Math.abs(p.imbalances().alice() - p.imbalances().pump()),
+                Math.abs(p.imbalances().bob() - p.imbalances().pump()));
+        double farA = Math.abs(p.pathA().groupDelayDispersion())
+                * Math.sqrt(p.spectrum().alice().variance());
+        double farB = Math.abs(p.pathB().groupDelayDispersion())
+                * Math.sqrt(p.spectrum().bob().variance());
+        cautions.when(
+                mismatch > MISMATCH_WITHOUT_SELECTION && window < 4.0 * Math.max(farA, farB),
+                "window-selects-spectrum",
+                "An imbalance is off by %.2f ps and the window is narrow against the dispersed light: it selects part of the spectrum, so the spectral"
+                        + " loss of visibility is overstated.",
+                mismatch / Scale.PICO);
+    }
+
+    private static void rising(LinkPrediction p, Cautions cautions) {
+        double visibility = p.fringe().raw();
+        Scenario scenario = p.scenario();
+        LinkLength length = new LinkLength();
+        double present = length.value(scenario).orElse(0.0);
+        boolean withLength = present > 0.0
+                && LITTLE * present <= length.range().highest()
+                && LinkPredictor.predict(length.with(scenario, LITTLE * present))
+                                .fringe()
+                                .raw()
+                        > visibility * (1.0 + 1e-7);
+        cautions.when(
+                withLength,
+                "visibility-rises-with-length",
+                "The visibility rises a little with length: the narrow window cuts accidentals more than pairs. True, and no reason to add fibre.");
+        boolean withJitter =
+                LinkPredictor.predict(MoreJitter.of(scenario, LITTLE)).fringe().raw() > visibility * (1.0 + 1e-7);
+        cautions.when(
+                withJitter,
+                "visibility-rises-with-jitter",
+                "The visibility rises a little with detector jitter: the narrow window cuts accidentals more than pairs. True, and no reason to want"
+                        + " jitter.");
+    }
+}

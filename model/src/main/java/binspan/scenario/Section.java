@@ -1,0 +1,169 @@
+package binspan.scenario;
+
+import java.lang.reflect.Constructor;
+import java.lang.reflect.InvocationTargetException;
+import java.lang.reflect.RecordComponent;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * One kind of object in the scenario file and the record it becomes; its fields stand in the order of the record's
+ * components.
+ */
+public final class Section {
+    private final String name;
+    private final Class<? extends Record> type;
+    private final List<Field> fields;
+    private final Constructor<?> constructor;
+    private final List<Alternatives> alternatives = new ArrayList<>();
+    private RecordComponent[] components;
+
+    /**
+     * Fields of which at most one may be given.
+     *
+     * @param fields their names
+     * @param needed whether one of them must be given
+     */
+    public record Alternatives(List<String> fields, boolean needed) {}
+
+    /**
+     * Describes a record.
+     *
+     * @param name word for the object in listings
+     * @param type its record
+     * @param fields its fields in the order of the components
+     */
+    public Section(String name, Class<? extends Record> type, Field... fields) {
+        this.name = name;
+        this.type = type;
+        this.fields = List.of(fields);
+        this.constructor = type.getDeclaredConstructors()[0];
+    }
+
+    /** Declares fields of which exactly one must be given. */
+    Section exactlyOneOf(String... names) {
+        alternatives.add(new Alternatives(List.of(names), true));
+        return this;
+    }
+
+    /** Declares fields of which at most one may be given. */
+    Section atMostOneOf(String... names) {
+        alternatives.add(new Alternatives(List.of(names), false));
+        return this;
+    }
+
+    /** Groups of fields that exclude one another. */
+    public List<Alternatives> alternatives() {
+        return List.copyOf(alternatives);
+    }
+
+    /** Word for the object in listings. */
+    public String name() {
+        return name;
+    }
+
+    /** Its fields in the order of the record's components. */
+    public List<Field> fields() {
+        return fields;
+    }
+
+    /** The record that the object becomes. */
+    public Class<? extends Record> type() {
+        return type;
+    }
+
+    /** The field of a name. */
+    public Optional<Field> field(String fieldName) {
+        int index = indexOf(fieldName);
+        return index < 0 ? Optional.empty() : Optional.of(fields.get(index));
+    }
+
+    /** Position of a field, -1 if there is none of that name. */
+    int indexOf(String fieldName) {
+        for (int i = 0; i < fields.size(); i++) {
+            if (fields.get(i).name().equals(fieldName)) {
+                return i;
+            }
+        }
+        return -1;
+    }
+
+    boolean describes(Record element) {
+        return type.isInstance(element);
+    }
+
+    /** Makes the record from its components. */
+    Record construct(Object[] values) {
+        try {
+            return (Record) constructor.newInstance(values);
+        } catch (InvocationTargetException e) {
+            throw new IllegalStateException("section " + name, e.getCause());
+        } catch (ReflectiveOperationException e) {
+            throw new IllegalStateException("section " + name, e);
+        }
+    }
+
+    /** Reads one component of a record. */
+    Object component(Record element, int index) {
+        try {
+            return components()[index].getAccessor().invoke(element);
+        } catch (ReflectiveOperationException e) {
+            throw new IllegalStateException("section " + name, e);
+        }
+    }
+
+    /** The same record with one component exchanged. */
+    Record with(Record element, int index, Object value) {
+        Object[] values = new Object[fields.size()];
+        for (int i = 0; i < values.length; i++) {
+            values[i] = i == index ? value : component(element, i);
+        }
+        return construct(values);
+    }
+
+    /**
+     * The object that stands in a record and leaves no room for a field, such as the gate of a detector for its dark
+     * counts.
+     */
+    Optional<Field> excluding(Record element, Field field) {
+        return alternatives.stream()
+                .filter(group -> group.fields().contains(field.name()))
+                .flatMap(group -> group.fields().stream())
+                .map(name -> fields.get(indexOf(name)))
+                .filter(other ->
+                        component(element, indexOf(other.name())) instanceof Optional<?> found && found.isPresent())
+                .findFirst();
+    }
+
+    /** The same record with one number stated and those that it excludes left out. */
+    Record stating(Record element, Field field, double value) {
+        Record cleared = element;
+        for (Alternatives group : alternatives) {
+            if (group.fields().contains(field.name())) {
+                cleared = without(cleared, group, field.name());
+            }
+        }
+        return with(cleared, indexOf(field.name()), field.component(value));
+    }
+
+    private Record without(Record element, Alternatives group, String kept) {
+        Record cleared = element;
+        for (String name : group.fields()) {
+            Field field = fields.get(indexOf(name));
+            if (!name.equals(kept)
+                    && field.presence() == Field.Presence.OPTIONAL
+                    && field.kind().numeric()) {
+                cleared = with(cleared, indexOf(name), field.absent());
+            }
+        }
+        return cleared;
+    }
+
+    private synchronized RecordComponent[] components() {
+        if (components == null) {
+            components = type.getRecordComponents();
+        }
+        return components;
+    }
+}
