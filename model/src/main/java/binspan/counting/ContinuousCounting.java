@@ -65,8 +65,8 @@ public final class ContinuousCounting {
     private record Peaks(Captured central, Captured aliceLong, Captured bobLong) {}
 
     private Peaks peaks(int a, int b) {
-        int likeA = in.portsA().get(a).equals(in.portsA().get(0)) ? 0 : a;
-        int likeB = in.portsB().get(b).equals(in.portsB().get(0)) ? 0 : b;
+        int likeA = in.portsA().get(a).same(in.portsA().get(0)) ? 0 : a;
+        int likeB = in.portsB().get(b).same(in.portsB().get(0)) ? 0 : b;
         if (known[likeA][likeB] == null) {
             known[likeA][likeB] = capturePeaks(likeA, likeB);
         }

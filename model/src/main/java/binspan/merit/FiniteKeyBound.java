@@ -1,11 +1,5 @@
 package binspan.merit;
 
-import org.apache.commons.math3.optim.MaxEval;
-import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
-import org.apache.commons.math3.optim.univariate.BrentOptimizer;
-import org.apache.commons.math3.optim.univariate.SearchInterval;
-import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
-import org.apache.commons.math3.optim.univariate.UnivariatePointValuePair;
 import org.apache.commons.numbers.rootfinder.BrentSolver;
 
 /** Published lower bounds of the secret key length of a finite block; both hold at the stated failure probabilities, so the longer counts. */
@@ -35,16 +29,21 @@ public enum FiniteKeyBound {
         public double bits(FiniteKeyBlock block) {
             double widest = 0.5 - block.phaseError();
             double target = Math.log(block.secrecy() / 2.0);
-            if (!(widest > 0.0) || LimTail.log(block, widest) >= target) {
+            if (!(widest > 0.0) || logTail(block, widest) >= target) {
                 return Double.NEGATIVE_INFINITY;
             }
-            double start = ROOT.findRoot(nu -> LimTail.log(block, nu) - target, SHARE_OF_WIDEST * widest, widest);
-            return best(nu -> LimTail.bits(block, nu), start, Math.min(widest, 2.0 * start));
+            double least = ROOT.findRoot(nu -> logTail(block, nu) - target, NARROWEST * widest, widest);
+            double from = least * (1.0 + CLEAR_OF_LEAST);
+            return limBits(block, best(block, from, Math.max(from, CLEAR_OF_WIDEST * widest)));
         }
     };
 
-    private static final BrentSolver ROOT = new BrentSolver(1e-7, 1e-12, 1e-9);
-    private static final double SHARE_OF_WIDEST = 1e-9;
+    private static final BrentSolver ROOT = new BrentSolver(1e-8, 1e-15, 0.0);
+    private static final double NARROWEST = 1e-9;
+    private static final double CLEAR_OF_LEAST = 1e-6;
+
+    /** At the widest deviation itself the entropy is flat and the slope no longer tells. */
+    private static final double CLEAR_OF_WIDEST = 0.999;
 
     /** Length of the secret key in bits, not rounded; 0 or less means no key. */
     public abstract double bits(FiniteKeyBlock block);
@@ -62,14 +61,34 @@ public enum FiniteKeyBound {
         return x < 0.5 ? SecretKey.binaryEntropy(x) : 1.0;
     }
 
-    /** Largest value of a function with one maximum inside an interval. */
-    static double best(org.apache.commons.math3.analysis.UnivariateFunction function, double from, double to) {
-        UnivariatePointValuePair best = new BrentOptimizer(1e-7, 1e-14)
-                .optimize(
-                        new UnivariateObjectiveFunction(function),
-                        GoalType.MAXIMIZE,
-                        new SearchInterval(from, to),
-                        MaxEval.unlimited());
-        return best.getValue();
+    /** The deviation nu at which the key is longest: where its slope changes sign. */
+    private static double best(FiniteKeyBlock block, double from, double to) {
+        if (limSlope(block, from) <= 0.0) {
+            return from;
+        }
+        return limSlope(block, to) >= 0.0 ? to : ROOT.findRoot(nu -> limSlope(block, nu), from, to);
+    }
+
+    private static double logTail(FiniteKeyBlock block, double nu) {
+        LimTail tail = new LimTail(block, nu);
+        return tail.log(tail.bestSplit());
+    }
+
+    private static double limBits(FiniteKeyBlock block, double nu) {
+        double left = block.secrecy() - 2.0 * Math.exp(logTail(block, nu));
+        return block.keyBits() * (1.0 - entropyUpToHalf(block.phaseError() + nu))
+                - block.leaked()
+                + log2(block.correctness())
+                + 2.0 * log2(2.0 * left);
+    }
+
+    /** Derivative of the key length with respect to nu, bits. */
+    private static double limSlope(FiniteKeyBlock block, double nu) {
+        LimTail tail = new LimTail(block, nu);
+        double xi = tail.bestSplit();
+        double failure = Math.exp(tail.log(xi));
+        double error = block.phaseError() + nu;
+        double entropySlope = block.keyBits() * log2((1.0 - error) / error);
+        return -entropySlope - 4.0 / Math.log(2.0) * failure * tail.logSlope(xi) / (block.secrecy() - 2.0 * failure);
     }
 }

@@ -44,7 +44,7 @@ public final class BivariateNormal {
     }
 
     private static double panel(double start, double stop, double fromX, double toX, double fromY, double toY) {
-        GaussLegendre rule = GaussLegendre.TWELVE;
+        GaussLegendre rule = GaussLegendre.twelve();
         double half = (stop - start) / 2.0;
         double middle = (stop + start) / 2.0;
         double sum = 0.0;

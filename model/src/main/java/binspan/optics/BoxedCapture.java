@@ -6,42 +6,63 @@ import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactor
 /**
  * Captures where a flat-top filter shapes the spectrum, so that dispersion spreads the light into a box instead of a Gaussian.
  *
- * <p>A pair is born at a common time t0 (rms of the pulse) with detunings W_A, W_B and arrives at t0 + beta_X W_X, each photon blurred by its own
- * near field, detector and clock: captures are conditional on t0 and the detunings and then averaged over both.
+ * <p>A pair is born at a common time t0 (rms of the pulse) with detunings W_A, W_B and arrives at t0 + beta_X W_X, each photon blurred by its own near
+ * field, detector and clock: captures are conditional on t0 and the detunings and then averaged over both.
  */
 final class BoxedCapture {
-    private static final GaussIntegrator BIRTH = new GaussIntegratorFactory().hermite(7);
     private static final double SQRT_TWO = Math.sqrt(2.0);
     private static final double SQRT_PI = Math.sqrt(Math.PI);
+    private static final double REACH = 6.5;
 
-    private BoxedCapture() {}
+    private final PairSpectrum spectrum;
+    private final double betaA;
+    private final double betaB;
+    private final SpectralGrid grid;
+    private final double birthRms;
 
-    /** The two ports of a coincidence. */
-    record Ports(PortTiming a, PortTiming b) {}
+    BoxedCapture(PairSpectrum spectrum, double betaA, double betaB) {
+        this.spectrum = spectrum;
+        this.betaA = betaA;
+        this.betaB = betaB;
+        this.grid = SpectralGrid.of(spectrum.alice(), spectrum.bob(), spectrum.pumpRms(), 1);
+        this.birthRms = Math.sqrt(spectrum.inversePump()) / 2.0;
+    }
 
-    /** Captured share of the pairs. */
-    static double of(PairSpectrum spectrum, double betaA, double betaB, Ports ports, Window windowA, Window windowB) {
-        SpectralGrid grid = SpectralGrid.of(spectrum.alice(), spectrum.bob(), spectrum.pumpRms(), 1);
-        double sigmaA = Math.sqrt(0.25 / spectrum.alice().variance() + ports.a().variance());
-        double sigmaB = Math.sqrt(0.25 / spectrum.bob().variance() + ports.b().variance());
-        double birthRms = Math.sqrt(spectrum.inversePump()) / 2.0;
+    /** Times of birth, weighted as a Gaussian pulse. */
+    private static final class Birth {
+        static final GaussIntegrator RULE = new GaussIntegratorFactory().hermite(7);
+    }
+
+    /** Captured share of the pairs, the windows about each photon's mean arrival. */
+    double of(PortTiming a, PortTiming b, Window windowA, Window windowB) {
+        GaussIntegrator birth = Birth.RULE;
+        double earliest = SQRT_TWO * birthRms * Math.abs(birth.getPoint(0));
+        CaptureTable captureA = table(spectrum.alice(), a, windowA, earliest + Math.abs(betaA) * grid.farthestAlice());
+        CaptureTable captureB = table(spectrum.bob(), b, windowB, earliest + Math.abs(betaB) * grid.farthestBob());
         double sum = 0.0;
-        for (int birth = 0; birth < BIRTH.getNumberOfPoints(); birth++) {
-            double t0 = SQRT_TWO * birthRms * BIRTH.getPoint(birth);
-            double captured = 0.0;
-            double lastDetuning = Double.NaN;
-            double captureA = 0.0;
-            for (int i = 0; i < grid.probability.length; i++) {
-                if (grid.alice[i] != lastDetuning) {
-                    lastDetuning = grid.alice[i];
-                    captureA = capture(ports.a(), windowA, t0 + betaA * lastDetuning, sigmaA);
-                }
-                captured +=
-                        grid.probability[i] * captureA * capture(ports.b(), windowB, t0 + betaB * grid.bob[i], sigmaB);
-            }
-            sum += BIRTH.getWeight(birth) / SQRT_PI * captured;
+        for (int i = 0; i < birth.getNumberOfPoints(); i++) {
+            double t0 = SQRT_TWO * birthRms * birth.getPoint(i);
+            sum += birth.getWeight(i) / SQRT_PI * captured(captureA, captureB, t0);
         }
         return sum;
+    }
+
+    private static CaptureTable table(Passband filters, PortTiming port, Window window, double latest) {
+        return CaptureTable.of(port, window, Math.sqrt(0.25 / filters.variance() + port.variance()), latest);
+    }
+
+    private double captured(CaptureTable captureA, CaptureTable captureB, double t0) {
+        double captured = 0.0;
+        double lastDetuning = Double.NaN;
+        double ofAlice = 0.0;
+        for (int i = 0; i < grid.probability.length; i++) {
+            if (grid.alice[i] != lastDetuning) {
+                lastDetuning = grid.alice[i];
+                ofAlice = captureA.at(t0 + betaA * lastDetuning);
+            }
+            captured += grid.probability[i] * ofAlice * captureB.at(t0 + betaB * grid.bob[i]);
+        }
+        return captured;
     }
 
     /**
@@ -58,22 +79,19 @@ final class BoxedCapture {
         if (filters.flat() && !port.tailed()) {
             return WindowCapture.box(window.from(), window.to(), 2.0 * filters.halfWidth() * Math.abs(beta), sigma);
         }
-        GaussLegendre rule = GaussLegendre.SIXTEEN;
-        double reach = Math.min(filters.halfWidth(), 6.5 * filters.gaussianRms());
+        GaussLegendre rule = GaussLegendre.sixteen();
+        double reach = Math.min(filters.halfWidth(), REACH * filters.gaussianRms());
         double captured = 0.0;
         double mass = 0.0;
         for (int panel = -2; panel < 2; panel++) {
             for (int i = 0; i < rule.nodes.length; i++) {
                 double detuning = reach * (panel + 0.5 + 0.5 * rule.nodes[i]) / 2.0;
                 double weight = rule.weights[i] * filters.at(detuning);
+                double late = beta * detuning;
                 mass += weight;
-                captured += weight * capture(port, window, beta * detuning, sigma);
+                captured += weight * port.capture(window.from() - late, window.to() - late, sigma);
             }
         }
         return captured / mass;
-    }
-
-    private static double capture(PortTiming port, Window window, double late, double sigma) {
-        return port.capture(window.from() - late, window.to() - late, sigma);
     }
 }

@@ -39,7 +39,7 @@ public record CaptureInputs(
                 && lateA == other.lateA
                 && lateB == other.lateB
                 && endless == other.endless
-                && portsA.equals(other.portsA)
-                && portsB.equals(other.portsB);
+                && PortTiming.same(portsA, other.portsA)
+                && PortTiming.same(portsB, other.portsB);
     }
 }

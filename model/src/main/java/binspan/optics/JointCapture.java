@@ -9,16 +9,12 @@ final class JointCapture {
     private static final double STRONGEST_WITH_TAILS = 1.0 - 1e-5;
     private static final double SQRT_TWO_PI = Math.sqrt(2.0 * Math.PI);
 
-    private final PairSpectrum spectrum;
-    private final double betaA;
-    private final double betaB;
     private final ArrivalTime arrival;
+    private final BoxedCapture boxed;
 
     JointCapture(PairSpectrum spectrum, double betaA, double betaB) {
-        this.spectrum = spectrum;
-        this.betaA = betaA;
-        this.betaB = betaB;
         this.arrival = ArrivalTime.of(spectrum, betaA, betaB);
+        this.boxed = spectrum.gaussian() ? null : new BoxedCapture(spectrum, betaA, betaB);
     }
 
     /** Spread of the light. */
@@ -28,8 +24,8 @@ final class JointCapture {
 
     /** The captured share of the pairs, the windows about each photon's own mean arrival. */
     double of(PortTiming a, PortTiming b, Window windowA, Window windowB) {
-        if (!spectrum.gaussian()) {
-            return BoxedCapture.of(spectrum, betaA, betaB, new BoxedCapture.Ports(a, b), windowA, windowB);
+        if (boxed != null) {
+            return boxed.of(a, b, windowA, windowB);
         }
         double sigmaA = Math.sqrt(arrival.pairA() + a.variance());
         double sigmaB = Math.sqrt(arrival.pairB() + b.variance());

@@ -36,6 +36,11 @@ public record Passband(double gaussianRms, double halfWidth) {
         return new Passband(1.0 / Math.sqrt(inverse), Math.min(halfWidth, other.halfWidth));
     }
 
+    /** Whether the other filters are exactly the same. */
+    boolean same(Passband other) {
+        return gaussianRms == other.gaussianRms && halfWidth == other.halfWidth;
+    }
+
     /** Whether only Gaussian filters stand here. */
     public boolean gaussian() {
         return halfWidth == Double.POSITIVE_INFINITY;

@@ -39,6 +39,20 @@ public record PortTiming(double variance, double tailFraction, double tailTime) 
                 tailed ? detector.jitterTailPs() * Scale.PICO : 0.0);
     }
 
+    /** Whether another port tells the time exactly as well. */
+    public boolean same(PortTiming other) {
+        return variance == other.variance && tailFraction == other.tailFraction && tailTime == other.tailTime;
+    }
+
+    /** Whether all ports of one list tell the time exactly as well as those of another. */
+    static boolean same(List<PortTiming> ports, List<PortTiming> others) {
+        boolean same = ports.size() == others.size();
+        for (int i = 0; same && i < ports.size(); i++) {
+            same = ports.get(i).same(others.get(i));
+        }
+        return same;
+    }
+
     /** Whether clicks have an exponential tail. */
     public boolean tailed() {
         return tailFraction > 0.0;

@@ -55,7 +55,7 @@ public final class SlotCapturing {
         double[][] captures = new double[ports.size()][];
         for (int port = 0; port < captures.length; port++) {
             captures[port] =
-                    port > 0 && ports.get(port).equals(ports.get(0)) ? captures[0] : singles(alice, ports.get(port));
+                    port > 0 && ports.get(port).same(ports.get(0)) ? captures[0] : singles(alice, ports.get(port));
         }
         return captures;
     }
@@ -87,8 +87,8 @@ public final class SlotCapturing {
                 new PairCaptures[in.portsA().size()][in.portsB().size()];
         for (int a = 0; a < joint.length; a++) {
             for (int b = 0; b < joint[a].length; b++) {
-                int likeA = in.portsA().get(a).equals(in.portsA().get(0)) ? 0 : a;
-                int likeB = in.portsB().get(b).equals(in.portsB().get(0)) ? 0 : b;
+                int likeA = in.portsA().get(a).same(in.portsA().get(0)) ? 0 : a;
+                int likeB = in.portsB().get(b).same(in.portsB().get(0)) ? 0 : b;
                 joint[a][b] = likeA < a || likeB < b
                         ? joint[likeA][likeB]
                         : joint(in.portsA().get(a), in.portsB().get(b));

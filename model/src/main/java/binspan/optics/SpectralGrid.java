@@ -27,7 +27,7 @@ final class SpectralGrid {
     private SpectralGrid(Passband a, Passband b, double pumpRms, int refinement) {
         double reachA = reach(a, b, pumpRms);
         double[] edges = panels(reachA, pumpRms, refinement);
-        GaussLegendre rule = GaussLegendre.SIXTEEN;
+        GaussLegendre rule = GaussLegendre.sixteen();
         int inner = pumpRms > 0 ? rule.nodes.length * refinement : 1;
         int size = (edges.length - 1) * rule.nodes.length * inner;
         alice = new double[size];
@@ -63,6 +63,24 @@ final class SpectralGrid {
         return new SpectralGrid(a, b, pumpRms, refinement);
     }
 
+    /** Largest detuning of alice's photon, rad/s. */
+    double farthestAlice() {
+        return farthest(alice);
+    }
+
+    /** Largest detuning of bob's photon, rad/s. */
+    double farthestBob() {
+        return farthest(bob);
+    }
+
+    private static double farthest(double[] detunings) {
+        double farthest = 0.0;
+        for (double detuning : detunings) {
+            farthest = Math.max(farthest, Math.abs(detuning));
+        }
+        return farthest;
+    }
+
     private void fill(double wa, double weight, Passband b, double pumpRms, int refinement) {
         if (pumpRms == 0.0) {
             put(wa, -wa, weight * b.at(wa));
@@ -71,7 +89,7 @@ final class SpectralGrid {
         double reachB = Math.min(b.halfWidth(), REACH * b.gaussianRms());
         double low = Math.max(-REACH * pumpRms, wa - reachB);
         double high = Math.max(low, Math.min(REACH * pumpRms, wa + reachB));
-        GaussLegendre rule = GaussLegendre.SIXTEEN;
+        GaussLegendre rule = GaussLegendre.sixteen();
         double half = (high - low) / (2.0 * refinement);
         for (int panel = 0; panel < refinement; panel++) {
             double middle = low + (2 * panel + 1) * half;

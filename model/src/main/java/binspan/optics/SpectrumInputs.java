@@ -32,6 +32,17 @@ public record SpectrumInputs(
         double measuredG2,
         double measuredPartnerPass) {
 
+    /** Whether the other inputs are equal. */
+    public boolean same(SpectrumInputs other) {
+        return alice.same(other.alice)
+                && bob.same(other.bob)
+                && pumpRms == other.pumpRms
+                && energyMismatchHz == other.energyMismatchHz
+                && Double.compare(statedSchmidt, other.statedSchmidt) == 0
+                && Double.compare(measuredG2, other.measuredG2) == 0
+                && Double.compare(measuredPartnerPass, other.measuredPartnerPass) == 0;
+    }
+
     /** Gathers them from a scenario. */
     public static SpectrumInputs of(Scenario scenario) {
         Source source = scenario.source();

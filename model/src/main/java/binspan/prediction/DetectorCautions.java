@@ -3,84 +3,115 @@ package binspan.prediction;
 import binspan.counting.DetectorLoad;
 import binspan.scenario.Arm;
 import binspan.scenario.Detector;
+import binspan.scenario.DetectorClass;
 import binspan.scenario.Gate;
 import binspan.units.Scale;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Predicate;
+import java.util.function.ToDoubleFunction;
 
-/** Where detectors strain the model. */
+/** Where detectors strain the model; ports with the same trouble share one caution. */
 final class DetectorCautions {
     private static final double MOSTLY_READY = 0.9;
     private static final double FEW_PER_WINDOW = 0.05;
     private static final double ALIKE = 0.1;
 
-    private DetectorCautions() {}
+    private final LinkPrediction p;
+    private final List<Port> ports = new ArrayList<>();
+
+    private DetectorCautions(LinkPrediction p) {
+        this.p = p;
+        addPorts("alice", p.scenario().alice(), p.counts().loadsA());
+        addPorts("bob", p.scenario().bob(), p.counts().loadsB());
+    }
+
+    /** One detector with its load and the wavelength that it sees. */
+    private record Port(String name, Detector detector, DetectorLoad load, double wavelengthNm) {
+        boolean outsideClass() {
+            return detector.detectorClass()
+                    .map(known -> wavelengthNm < known.shortestNm() || wavelengthNm > known.longestNm())
+                    .orElse(false);
+        }
+    }
 
     static void add(LinkPrediction p, Cautions cautions) {
-        side(p, "alice", p.scenario().alice(), p.counts().loadsA(), cautions);
-        side(p, "bob", p.scenario().bob(), p.counts().loadsB(), cautions);
+        DetectorCautions detectors = new DetectorCautions(p);
+        detectors.load(cautions);
+        detectors.gates(cautions);
+        detectors.wavelengths(cautions);
+        unequal("alice", p.scenario().alice(), cautions);
+        unequal("bob", p.scenario().bob(), cautions);
     }
 
-    private static void side(LinkPrediction p, String name, Arm arm, List<DetectorLoad> loads, Cautions cautions) {
-        double wavelength = p.scenario().bandOf(arm).centreNm();
+    private void addPorts(String side, Arm arm, List<DetectorLoad> loads) {
         for (int port = 0; port < loads.size(); port++) {
-            String at = name + " port " + (port + 1);
-            Detector detector = arm.detectors().get(port);
-            load(p, at, loads.get(port), cautions);
-            gate(p, at, detector, loads.get(port), cautions);
-            detector.detectorClass()
-                    .ifPresent(known -> cautions.when(
-                            wavelength < known.shortestNm() || wavelength > known.longestNm(),
-                            "detector-wavelength",
-                            "%s: a detector of class %s works from %.0f to %.0f nm, the photon has %.1f nm.",
-                            at,
-                            known.text(),
-                            known.shortestNm(),
-                            known.longestNm(),
-                            wavelength));
+            String name = side + " port " + (port + 1);
+            ports.add(new Port(
+                    name,
+                    arm.detectors().get(port),
+                    loads.get(port),
+                    p.scenario().bandOf(arm).centreNm()));
         }
-        ports(name, arm, cautions);
     }
 
-    private static void load(LinkPrediction p, String at, DetectorLoad load, Cautions cautions) {
+    private void load(Cautions cautions) {
+        List<Port> busy = with(port -> port.load().liveFraction() < MOSTLY_READY);
         cautions.when(
-                load.liveFraction() < MOSTLY_READY,
+                !busy.isEmpty(),
                 "dead-time",
-                "%s: the detector is ready %.0f %% of the time only; the dead-time model is a mean-rate one.",
-                at,
-                100.0 * load.liveFraction());
+                "%s: ready %.0f %% of the time only; the dead-time model is a mean-rate one.",
+                names(busy),
+                100.0 * least(busy, port -> port.load().liveFraction()));
+        List<Port> crowded = with(port -> port.load().recordedPerSecond() * p.windowWidth() > FEW_PER_WINDOW);
         cautions.when(
-                load.recordedPerSecond() * p.windowWidth() > FEW_PER_WINDOW,
+                !crowded.isEmpty(),
                 "singles-crowd-window",
                 "%s: %.2f singles per window on average; accidentals are no longer a small correction.",
-                at,
-                load.recordedPerSecond() * p.windowWidth());
+                names(crowded),
+                -least(crowded, port -> -port.load().recordedPerSecond()) * p.windowWidth());
+        List<Port> blind = with(port -> port.load().deadTime() > p.imbalances().common());
         cautions.when(
-                load.deadTime() > p.imbalances().common(),
+                !blind.isEmpty(),
                 "dead-time-blinds-slots",
-                "%s: the dead time is longer than the slot separation, so a click blinds the later slots of its cycle.",
-                at);
+                "%s: the dead time is longer than the slot separation, so a click blinds the slots that follow it.",
+                names(blind));
     }
 
-    private static void gate(LinkPrediction p, String at, Detector detector, DetectorLoad load, Cautions cautions) {
-        if (detector.gate().isEmpty()) {
-            return;
-        }
-        Gate gate = detector.gate().get();
+    private void gates(Cautions cautions) {
+        List<Port> missing = with(port -> port.load().gateShare() < 1.0);
         cautions.when(
-                load.gateShare() < 1.0,
+                !missing.isEmpty(),
                 "gates-miss-slots",
-                "%s: gates reach %.0f %% of the slots (one gate for each slot is three per cycle of a pulse pair); the other cycles are lost.",
-                at,
-                100.0 * load.gateShare());
+                "%s: gates reach %.0f %% of the slots (one gate for each slot is three per cycle of a pulse pair); the"
+                        + " other cycles are lost.",
+                names(missing),
+                100.0 * least(missing, port -> port.load().gateShare()));
+        List<Port> narrow = with(port ->
+                port.detector().gate().map(Gate::widthNs).orElse(Double.MAX_VALUE) * Scale.NANO < p.windowWidth());
         cautions.when(
-                gate.widthNs() * Scale.NANO < p.windowWidth(),
+                !narrow.isEmpty(),
                 "gate-narrower-than-window",
-                "%s: the gate (%.2f ns) is narrower than the window; photons outside it are counted all the same.",
-                at,
-                gate.widthNs());
+                "%s: the gate is narrower than the window; photons outside it are counted all the same.",
+                names(narrow));
     }
 
-    private static void ports(String name, Arm arm, Cautions cautions) {
+    private void wavelengths(Cautions cautions) {
+        for (Port port : with(Port::outsideClass)) {
+            DetectorClass known = port.detector().detectorClass().orElseThrow();
+            cautions.when(
+                    true,
+                    "detector-wavelength",
+                    "%s: a detector of class %s works from %.0f to %.0f nm, the photon has %.1f nm.",
+                    port.name(),
+                    known.text(),
+                    known.shortestNm(),
+                    known.longestNm(),
+                    port.wavelengthNm());
+        }
+    }
+
+    private static void unequal(String side, Arm arm, Cautions cautions) {
         if (arm.detectors().size() < 2) {
             return;
         }
@@ -90,6 +121,20 @@ final class DetectorCautions {
                 Math.abs(first - second) > ALIKE * Math.max(first, second),
                 "ports-differ",
                 "%s: the efficiencies of the two ports differ by more than 10 %%, so that the bits are biased.",
-                name);
+                side);
+    }
+
+    private List<Port> with(Predicate<Port> trouble) {
+        return ports.stream().filter(trouble).toList();
+    }
+
+    private String names(List<Port> some) {
+        return some.size() == ports.size()
+                ? "all ports"
+                : String.join(", ", some.stream().map(Port::name).toList());
+    }
+
+    private static double least(List<Port> some, ToDoubleFunction<Port> figure) {
+        return some.stream().mapToDouble(figure).min().orElse(Double.NaN);
     }
 }

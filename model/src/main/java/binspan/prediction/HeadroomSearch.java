@@ -13,16 +13,19 @@ import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.function.DoubleFunction;
 import org.apache.commons.numbers.rootfinder.BrentSolver;
 
 /**
- * Finds the nearest value of each drifting quantity at which the first requirement fails: steps that double outwards until one fails, then a root
+ * Finds the nearest value of each drifting quantity at which the first requirement fails: steps that quadruple outwards until one fails, then a root
  * search for the least margin.
  */
 final class HeadroomSearch {
-    private static final BrentSolver ROOT = new BrentSolver(1e-7, 1e-15, 0.0);
-    private static final double FIRST_SHARE = 0.02;
+    private static final BrentSolver ROOT = new BrentSolver(1e-6, 1e-15, 0.0);
+    private static final double FIRST_SHARE = 0.05;
+    private static final double STEEPEST = 10.0;
     private static final double NEGLIGIBLE = 1e-6;
+    private static final double GROWTH = 4.0;
     private static final int MOST_STEPS = 80;
 
     private final Scenario scenario;
@@ -50,34 +53,39 @@ final class HeadroomSearch {
 
     private void add(DriftingQuantities.Quantity quantity, List<Headroom> headroom) {
         Parameter parameter = ParameterPaths.find(scenario, quantity.path());
-        double planned = parameter.value(scenario).orElse(0.0);
-        double outward = planned < 0.0 ? -1.0 : 1.0;
+        Axis axis = new Axis(
+                parameter, parameter.over(scenario), parameter.value(scenario).orElse(0.0));
+        double outward = axis.planned() < 0.0 ? -1.0 : 1.0;
         if (quantity.bothWays()) {
-            limit(parameter, planned, -outward * FIRST_SHARE * planned)
-                    .ifPresent(limit -> headroom.add(headroom(parameter, planned, limit)));
+            limit(axis, -outward * FIRST_SHARE * axis.planned())
+                    .ifPresent(limit -> headroom.add(headroom(axis, limit)));
         }
-        double step = Math.max(quantity.firstStep(), FIRST_SHARE * Math.abs(planned));
-        limit(parameter, planned, outward * step).ifPresent(limit -> headroom.add(headroom(parameter, planned, limit)));
+        double step = Math.max(quantity.firstStep(), FIRST_SHARE * Math.abs(axis.planned()));
+        limit(axis, outward * step).ifPresent(limit -> headroom.add(headroom(axis, limit)));
     }
 
-    private Headroom headroom(Parameter parameter, double planned, double limit) {
-        return new Headroom(parameter.path(), parameter.unit(), planned, limit, worst(parameter, limit));
+    /** One quantity with the scenarios along it. */
+    private record Axis(Parameter parameter, DoubleFunction<Scenario> scenarios, double planned) {}
+
+    private Headroom headroom(Axis axis, double limit) {
+        return new Headroom(
+                axis.parameter().path(), axis.parameter().unit(), axis.planned(), limit, worst(axis, limit));
     }
 
-    private OptionalDouble limit(Parameter parameter, double planned, double firstStep) {
-        double good = planned;
+    private OptionalDouble limit(Axis axis, double firstStep) {
+        double good = axis.planned();
         double step = firstStep;
         for (int i = 0; i < MOST_STEPS; i++) {
-            double next = inside(parameter.range(), good, tamed(good, step));
-            if (next == good || Math.abs(next) < NEGLIGIBLE * Math.abs(planned)) {
+            double next = inside(axis.parameter().range(), good, tamed(good, step));
+            if (next == good || Math.abs(next) < NEGLIGIBLE * Math.abs(axis.planned())) {
                 return OptionalDouble.empty();
             }
-            if (!(leastMargin(parameter, next) >= 0.0)) {
-                return OptionalDouble.of(ROOT.findRoot(
-                        x -> finite(leastMargin(parameter, x)), Math.min(good, next), Math.max(good, next)));
+            if (!(leastMargin(axis, next) >= 0.0)) {
+                return OptionalDouble.of(
+                        ROOT.findRoot(x -> finite(leastMargin(axis, x)), Math.min(good, next), Math.max(good, next)));
             }
             good = next;
-            step *= 2.0;
+            step *= GROWTH;
         }
         return OptionalDouble.empty();
     }
@@ -99,11 +107,11 @@ final class HeadroomSearch {
     }
 
     private static double finite(double margin) {
-        return margin >= -1.0 ? Math.min(margin, 1.0) : -1.0;
+        return margin >= -STEEPEST ? Math.min(margin, STEEPEST) : -STEEPEST;
     }
 
-    private double leastMargin(Parameter parameter, double value) {
-        LinkPrediction prediction = predictor.of(parameter.with(scenario, value));
+    private double leastMargin(Axis axis, double value) {
+        LinkPrediction prediction = predictor.of(axis.scenarios().apply(value));
         double least = Double.POSITIVE_INFINITY;
         for (Map.Entry<Requirement, Double> each : held.entrySet()) {
             double margin = margin(each.getKey(), each.getValue(), prediction);
@@ -112,8 +120,8 @@ final class HeadroomSearch {
         return least;
     }
 
-    private Requirement worst(Parameter parameter, double value) {
-        LinkPrediction prediction = predictor.of(parameter.with(scenario, value));
+    private Requirement worst(Axis axis, double value) {
+        LinkPrediction prediction = predictor.of(axis.scenarios().apply(value));
         Requirement worst = held.keySet().iterator().next();
         double least = Double.POSITIVE_INFINITY;
         for (Map.Entry<Requirement, Double> each : held.entrySet()) {
@@ -126,19 +134,19 @@ final class HeadroomSearch {
         return worst;
     }
 
-    /** Margin as a share of the requirement, so that different units compare; for the first key the key length at the deadline per key bit. */
+    /**
+     * Margin as the logarithm of the ratio of prediction and requirement, so that different units compare and the search sees
+     * a smooth slope; for the first key the key length at the deadline per key bit.
+     */
     private static double margin(Requirement requirement, double required, LinkPrediction prediction) {
         if (requirement == Requirement.FIRST_KEY) {
             return keyAtDeadline(prediction, required * Scale.HOUR);
         }
-        double scale = required > 0.0 ? required : 1.0;
-        double margin = requirement.margin(requirement.predicted(prediction, null), required) / scale;
-        return requirement == Requirement.FIVE_SIGMA ? rate(margin) : margin;
-    }
-
-    /** A time that runs to infinity becomes a rate that runs to 0, so that the search sees a finite slope. */
-    private static double rate(double margin) {
-        return margin >= 0.0 ? margin : 1.0 / (1.0 - margin) - 1.0;
+        double predicted = requirement.predicted(prediction, null);
+        if (!(required > 0.0)) {
+            return requirement.margin(predicted, required);
+        }
+        return requirement.atLeast() ? Math.log(predicted / required) : Math.log(required / predicted);
     }
 
     /** Key length per key bit when the deadline comes; the quicker bound decides where it already finds a key. */

@@ -24,7 +24,7 @@ final class OpticsMemory {
 
     PairSpectrum spectrum(Scenario scenario) {
         SpectrumInputs inputs = SpectrumInputs.of(scenario);
-        if (!inputs.equals(spectrumInputs)) {
+        if (spectrumInputs == null || !inputs.same(spectrumInputs)) {
             spectrum = PairSpectra.of(inputs);
             spectrumInputs = inputs;
         }

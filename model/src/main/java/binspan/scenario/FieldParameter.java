@@ -6,6 +6,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.DoubleFunction;
 import java.util.stream.Collectors;
 
 /** A numeric field of the scenario, or several of the same meaning moved together. */
@@ -50,18 +51,27 @@ public final class FieldParameter implements Parameter {
 
     @Override
     public Scenario with(Scenario scenario, double value) {
-        boolean whole = field().kind() != Field.Kind.COUNT || value == Math.rint(value);
-        if (!range().contains(value) || !whole) {
-            throw new IllegalArgumentException(
-                    path + ": found " + Range.plain(value) + "; allowed " + field().allowed());
-        }
+        return over(scenario).apply(value);
+    }
+
+    @Override
+    public DoubleFunction<Scenario> over(Scenario scenario) {
         PumpMode mode = scenario.source().pump().mode();
         PumpFields.insteadOf(field().name(), mode).ifPresent(other -> refuse("a " + mode.text() + " pump", other));
-        Record changed = scenario;
-        for (Address address : addresses) {
-            changed = with(changed, address.steps(), value);
+        DoubleFunction<Record> first = edit(scenario, addresses.get(0).steps());
+        if (addresses.size() == 1) {
+            return value -> (Scenario) first.apply(allowed(value));
         }
-        return (Scenario) changed;
+        List<Step> second = addresses.get(1).steps();
+        return value -> (Scenario) edit(first.apply(allowed(value)), second).apply(value);
+    }
+
+    private double allowed(double value) {
+        boolean whole = field().kind() != Field.Kind.COUNT || value == Math.rint(value);
+        if (range().contains(value) && whole) {
+            return value;
+        }
+        throw new IllegalArgumentException(path + ": found " + Range.plain(value) + "; allowed " + field().allowed());
     }
 
     private static OptionalDouble value(Record node, List<Step> steps) {
@@ -84,18 +94,36 @@ public final class FieldParameter implements Parameter {
         return component instanceof List<?> list ? (Record) list.get(Math.max(item, 0)) : (Record) component;
     }
 
-    private Record with(Record node, List<Step> steps, double value) {
-        Step step = steps.get(0);
-        Section section = step.section();
+    /** The record at the start of some steps as a function of the number at their end. */
+    private DoubleFunction<Record> edit(Record node, List<Step> steps) {
+        Section section = steps.get(0).section();
+        Field field = steps.get(0).field();
+        int index = section.indexOf(field.name());
         if (steps.size() == 1) {
-            section.excluding(node, step.field()).ifPresent(this::refuseBeside);
-            return section.stating(node, step.field(), value);
+            section.excluding(node, field).ifPresent(this::refuseBeside);
+            Object[] components = section.componentsFor(node, field);
+            return value -> section.construct(components, index, field.component(value));
         }
-        int index = section.indexOf(step.field().name());
-        return section.with(
-                node,
-                index,
-                changed(section.component(node, index), step.item(), steps.subList(1, steps.size()), value));
+        Object[] components = section.components(node);
+        DoubleFunction<Object> part = part(components[index], steps.get(0).item(), steps.subList(1, steps.size()));
+        return value -> section.construct(components, index, part.apply(value));
+    }
+
+    private DoubleFunction<Object> part(Object component, int item, List<Step> rest) {
+        if (component instanceof Optional<?> optional) {
+            DoubleFunction<Record> inside = edit((Record) optional.orElseThrow(), rest);
+            return value -> Optional.of(inside.apply(value));
+        }
+        if (!(component instanceof List<?> list)) {
+            DoubleFunction<Record> inside = edit((Record) component, rest);
+            return inside::apply;
+        }
+        List<DoubleFunction<Record>> items = new ArrayList<>();
+        for (int i = 0; i < list.size(); i++) {
+            Record present = (Record) list.get(i);
+            items.add(item == PathParser.ALL || item == i ? edit(present, rest) : value -> present);
+        }
+        return value -> items.stream().map(each -> each.apply(value)).toList();
     }
 
     private void refuseBeside(Field standing) {
@@ -110,21 +138,5 @@ public final class FieldParameter implements Parameter {
     private void refuse(String reason, String instead) {
         String parent = path.substring(0, path.length() - field().name().length());
         throw new IllegalArgumentException(path + ": does not go with " + reason + "; vary " + parent + instead);
-    }
-
-    private Object changed(Object component, int item, List<Step> rest, double value) {
-        if (component instanceof Optional<?> optional) {
-            return optional.map(element -> with((Record) element, rest, value));
-        }
-        if (!(component instanceof List<?> list)) {
-            return with((Record) component, rest, value);
-        }
-        List<Object> items = new ArrayList<>(list);
-        for (int i = 0; i < items.size(); i++) {
-            if (item == PathParser.ALL || item == i) {
-                items.set(i, with((Record) items.get(i), rest, value));
-            }
-        }
-        return items;
     }
 }

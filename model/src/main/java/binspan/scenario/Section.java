@@ -113,13 +113,20 @@ public final class Section {
         }
     }
 
-    /** The same record with one component exchanged. */
-    Record with(Record element, int index, Object value) {
+    /** Reads all components of a record. */
+    Object[] components(Record element) {
         Object[] values = new Object[fields.size()];
         for (int i = 0; i < values.length; i++) {
-            values[i] = i == index ? value : component(element, i);
+            values[i] = component(element, i);
         }
-        return construct(values);
+        return values;
+    }
+
+    /** Makes the record from the given components with one of them exchanged. */
+    Record construct(Object[] values, int index, Object value) {
+        Object[] changed = values.clone();
+        changed[index] = value;
+        return construct(changed);
     }
 
     /**
@@ -136,28 +143,25 @@ public final class Section {
                 .findFirst();
     }
 
-    /** The same record with one number stated and those that it excludes left out. */
-    Record stating(Record element, Field field, double value) {
-        Record cleared = element;
+    /** The components of a record without the numbers that a field excludes, ready for that field to be stated. */
+    Object[] componentsFor(Record element, Field field) {
+        Object[] values = components(element);
         for (Alternatives group : alternatives) {
             if (group.fields().contains(field.name())) {
-                cleared = without(cleared, group, field.name());
+                group.fields().forEach(name -> clear(values, name, field.name()));
             }
         }
-        return with(cleared, indexOf(field.name()), field.component(value));
+        return values;
     }
 
-    private Record without(Record element, Alternatives group, String kept) {
-        Record cleared = element;
-        for (String name : group.fields()) {
-            Field field = fields.get(indexOf(name));
-            if (!name.equals(kept)
-                    && field.presence() == Field.Presence.OPTIONAL
-                    && field.kind().numeric()) {
-                cleared = with(cleared, indexOf(name), field.absent());
-            }
+    private void clear(Object[] values, String name, String kept) {
+        int index = indexOf(name);
+        Field field = fields.get(index);
+        if (!name.equals(kept)
+                && field.presence() == Field.Presence.OPTIONAL
+                && field.kind().numeric()) {
+            values[index] = field.absent();
         }
-        return cleared;
     }
 
     private synchronized RecordComponent[] components() {
