@@ -51,7 +51,8 @@ public final class FieldParameter implements Parameter {
 
     @Override
     public Scenario with(Scenario scenario, double value) {
-        return over(scenario).apply(value);
+        double checked = allowed(value);
+        return over(scenario).apply(checked);
     }
 
     @Override
