@@ -28,21 +28,32 @@ public final class Nearest {
                 .toList();
     }
 
-    /** Number of letters to insert, delete or exchange (Levenshtein distance). */
+    /** Number of letters to insert, delete or exchange, or of neighbours to swap (optimal string alignment). */
     static int distance(String a, String b) {
+        int[] before = new int[b.length() + 1];
+        int[] above = new int[b.length() + 1];
         int[] row = new int[b.length() + 1];
         for (int j = 0; j <= b.length(); j++) {
             row[j] = j;
         }
         for (int i = 1; i <= a.length(); i++) {
-            int diagonal = row[0];
+            int[] free = before;
+            before = above;
+            above = row;
+            row = free;
             row[0] = i;
             for (int j = 1; j <= b.length(); j++) {
-                int exchanged = diagonal + (a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1);
-                diagonal = row[j];
-                row[j] = Math.min(exchanged, 1 + Math.min(row[j], row[j - 1]));
+                boolean same = a.charAt(i - 1) == b.charAt(j - 1);
+                row[j] = Math.min(above[j - 1] + (same ? 0 : 1), 1 + Math.min(above[j], row[j - 1]));
+                if (swapped(a, i, b, j)) {
+                    row[j] = Math.min(row[j], before[j - 2] + 1);
+                }
             }
         }
         return row[b.length()];
+    }
+
+    private static boolean swapped(String a, int i, String b, int j) {
+        return i > 1 && j > 1 && a.charAt(i - 1) == b.charAt(j - 2) && a.charAt(i - 2) == b.charAt(j - 1);
     }
 }

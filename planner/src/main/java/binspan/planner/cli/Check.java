@@ -1,0 +1,102 @@
+package binspan.planner.cli;
+
+import binspan.planner.io.InvalidScenarioException;
+import binspan.planner.io.ScenarioReader;
+import binspan.planner.report.LinkCheck;
+import binspan.planner.report.ResultJson;
+import binspan.planner.report.Verdict;
+import binspan.planner.report.WorksheetText;
+import binspan.scenario.Scenario;
+import java.io.PrintStream;
+import java.util.List;
+
+/** Checks scenarios one after the other. */
+final class Check {
+    static final String STANDARD_INPUT = "-";
+
+    private final Console console;
+    private final Form form;
+    private final boolean several;
+    private int printed;
+
+    /** What is printed about each scenario. */
+    enum Form {
+        VERDICT,
+        JSON,
+        WORKSHEET
+    }
+
+    private Check(Console console, Form form, boolean several) {
+        this.console = console;
+        this.form = form;
+        this.several = several;
+    }
+
+    /**
+     * Checks files, each one whatever befell those before it.
+     *
+     * @param files file names, "-" for standard input
+     * @param form what to print
+     * @param console where to print it
+     * @return the worst exit status
+     */
+    static int run(List<String> files, Form form, Console console) {
+        Check check = new Check(console, form, files.size() > 1);
+        int worst = ExitStatus.MET;
+        for (String file : files) {
+            worst = Math.max(worst, check.statusOf(file));
+            if (console.abandoned()) {
+                return worst;
+            }
+        }
+        check.end();
+        return worst;
+    }
+
+    private int statusOf(String file) {
+        try {
+            Scenario scenario = read(file);
+            LinkCheck outcome = LinkCheck.of(scenario);
+            print(file, scenario, outcome);
+            return outcome.met() ? ExitStatus.MET : ExitStatus.UNMET;
+        } catch (InvalidScenarioException | RuntimeException e) {
+            return ExitStatus.of(e, console);
+        }
+    }
+
+    private Scenario read(String file) throws InvalidScenarioException {
+        return file.equals(STANDARD_INPUT)
+                ? ScenarioReader.read(console.in(), "(standard input)")
+                : ScenarioReader.read(file);
+    }
+
+    private void print(String file, Scenario scenario, LinkCheck outcome) {
+        PrintStream out = console.out();
+        begin(file, out);
+        switch (form) {
+            case JSON -> ResultJson.write(scenario, outcome, out);
+            case WORKSHEET -> WorksheetText.print(scenario, outcome, out);
+            default -> Verdict.print(scenario, outcome, out, console.colour());
+        }
+    }
+
+    /** Several results are told apart by the file's name, or as items of one JSON list. */
+    private void begin(String file, PrintStream out) {
+        if (several && form == Form.JSON) {
+            out.print(printed == 0 ? "[\n" : ",\n");
+        } else if (several) {
+            out.print(printed == 0 ? "" : "\n");
+            out.println(file + ":");
+        }
+        printed++;
+    }
+
+    private void end() {
+        PrintStream out = console.out();
+        if (form == Form.JSON && several) {
+            out.print(printed == 0 ? "[]\n" : "\n]\n");
+        } else if (form == Form.JSON && printed > 0) {
+            out.print("\n");
+        }
+    }
+}

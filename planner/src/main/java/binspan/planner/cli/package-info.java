@@ -1,0 +1,2 @@
+/** The commands: what each reads, prints and returns. */
+package binspan.planner.cli;

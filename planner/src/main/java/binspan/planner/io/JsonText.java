@@ -1,0 +1,88 @@
+package binspan.planner.io;
+
+import java.io.StringWriter;
+import java.util.List;
+import java.util.Map;
+import tools.jackson.core.JsonGenerator;
+import tools.jackson.core.ObjectWriteContext;
+import tools.jackson.core.PrettyPrinter;
+import tools.jackson.core.json.JsonFactory;
+import tools.jackson.core.util.DefaultIndenter;
+import tools.jackson.core.util.DefaultPrettyPrinter;
+import tools.jackson.core.util.Separators;
+
+/** Writes maps, lists, texts, numbers and flags as JSON, indented by two blanks. */
+public final class JsonText {
+    private static final JsonFactory FACTORY = new JsonFactory();
+    private static final double LARGEST_PLAIN = 1e7;
+
+    private JsonText() {}
+
+    /**
+     * The JSON text of a tree of values, without a line end.
+     *
+     * @param tree maps in their order, lists, texts, numbers and flags
+     * @throws IllegalArgumentException if it holds anything else, a NaN or an infinity
+     */
+    public static String of(Object tree) {
+        StringWriter text = new StringWriter();
+        try (JsonGenerator json = FACTORY.createGenerator(new Indented(), text)) {
+            value(json, tree);
+        }
+        return text.toString();
+    }
+
+    private static void value(JsonGenerator json, Object value) {
+        if (value instanceof Map<?, ?> map) {
+            object(json, map);
+        } else if (value instanceof List<?> list) {
+            list(json, list);
+        } else if (value instanceof Boolean flag) {
+            json.writeBoolean(flag);
+        } else if (value instanceof Number number) {
+            number(json, number.doubleValue());
+        } else if (value instanceof String text) {
+            json.writeString(text);
+        } else {
+            throw new IllegalArgumentException("found " + value + "; allowed maps, lists, texts, numbers and flags");
+        }
+    }
+
+    private static void object(JsonGenerator json, Map<?, ?> map) {
+        json.writeStartObject();
+        for (Map.Entry<?, ?> entry : map.entrySet()) {
+            json.writeName((String) entry.getKey());
+            value(json, entry.getValue());
+        }
+        json.writeEndObject();
+    }
+
+    private static void list(JsonGenerator json, List<?> list) {
+        json.writeStartArray();
+        for (Object item : list) {
+            value(json, item);
+        }
+        json.writeEndArray();
+    }
+
+    private static void number(JsonGenerator json, double value) {
+        if (!Double.isFinite(value)) {
+            throw new IllegalArgumentException("found " + value + "; allowed a finite number");
+        }
+        if (value == Math.rint(value) && Math.abs(value) < LARGEST_PLAIN) {
+            json.writeNumber((long) value);
+        } else {
+            json.writeNumber(value);
+        }
+    }
+
+    /** Layout of the text, the same on every system. */
+    private static final class Indented extends ObjectWriteContext.Base {
+        @Override
+        public PrettyPrinter getPrettyPrinter() {
+            Separators separators =
+                    Separators.createDefaultInstance().withObjectNameValueSpacing(Separators.Spacing.AFTER);
+            return new DefaultPrettyPrinter(separators).withObjectIndenter(new DefaultIndenter("  ", "\n"));
+        }
+    }
+}

@@ -1,0 +1,10 @@
+package binspan.planner.io;
+
+/** A file that is not written, with the reason. */
+public final class OutputFileException extends Exception {
+    private static final long serialVersionUID = 1L;
+
+    OutputFileException(String message) {
+        super(Printable.line(message));
+    }
+}

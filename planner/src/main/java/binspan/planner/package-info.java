@@ -1,0 +1,7 @@
+/**
+ * The planning tool around the model: entry point of the command line.
+ *
+ * <p>{@code io} reads and writes files, {@code report} presents a result, {@code cli} holds the commands; {@code cli}
+ * uses both, they do not use it.
+ */
+package binspan.planner;
