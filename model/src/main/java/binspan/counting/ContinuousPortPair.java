@@ -16,6 +16,6 @@ public record ContinuousPortPair(double basePerSecond, double amplitudePerSecond
 
     @Override
     public double pairContrast() {
-        return amplitudePerSecond / basePerSecond;
+        return basePerSecond > 0.0 ? amplitudePerSecond / basePerSecond : 0.0;
     }
 }

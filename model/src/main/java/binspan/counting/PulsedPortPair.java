@@ -34,6 +34,6 @@ public record PulsedPortPair(
 
     @Override
     public double pairContrast() {
-        return amplitude / base;
+        return base > 0.0 ? amplitude / base : 0.0;
     }
 }

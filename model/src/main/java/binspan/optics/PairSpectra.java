@@ -5,6 +5,7 @@ import org.apache.commons.numbers.gamma.Erfc;
 /** Computes joint spectra; the formulas stand with {@link PairSpectrum}. */
 public final class PairSpectra {
     private static final double SQRT_TWO_PI = Math.sqrt(2.0 * Math.PI);
+    private static final double HARDLY_EVER = 1e-12;
 
     private PairSpectra() {}
 
@@ -88,8 +89,13 @@ public final class PairSpectra {
                 schmidt(in, p, aa, bb, ab),
                 Math.sqrt(1.0 + a / p),
                 Math.sqrt(1.0 + b / p),
-                measured ? in.measuredPartnerPass() : bobPasses * detuned,
-                measured ? in.measuredPartnerPass() : alicePasses * detuned);
+                measured ? in.measuredPartnerPass() : probability(bobPasses * detuned),
+                measured ? in.measuredPartnerPass() : probability(alicePasses * detuned));
+    }
+
+    /** At most 1 in spite of rounding; centres that miss the pump by many widths leave so much that photon numbers stay finite. */
+    private static double probability(double pass) {
+        return Math.max(HARDLY_EVER, Math.min(1.0, pass));
     }
 
     /** Centres that miss energy conservation by m: exp(-(2 pi m)^2 / (2 (s_A^2 + s_B^2 + s_P^2))). */

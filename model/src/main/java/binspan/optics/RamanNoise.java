@@ -21,9 +21,9 @@ public final class RamanNoise {
      */
     public static double forward(
             double launched, double crossSectionTimesBandwidth, double classical, double quantum, double lengthKm) {
-        double x = (quantum - classical) * lengthKm;
+        double x = Math.abs(quantum - classical) * lengthKm;
         double path = x == 0.0 ? lengthKm : -Math.expm1(-x) / x * lengthKm;
-        return launched * crossSectionTimesBandwidth * Math.exp(-classical * lengthKm) * path;
+        return launched * crossSectionTimesBandwidth * Math.exp(-Math.min(classical, quantum) * lengthKm) * path;
     }
 
     /**

@@ -43,10 +43,10 @@ public record TwoPhotonCoherence(double pump, double spectral, double phase, dou
      * Modulus of the pump's degree of coherence: exp(-T/tc) Lorentzian, exp(-(T/tc)^2) Gaussian.
      *
      * @param pump pump; 1 where neither coherence time nor line width is stated
-     * @param delay delay T of the two emissions, s
+     * @param delay delay T of the two emissions, s, of either sign
      */
     public static double pumpCoherence(Pump pump, double delay) {
-        double ratio = delay / coherenceTime(pump);
+        double ratio = Math.abs(delay) / coherenceTime(pump);
         return Math.exp(pump.lineshape() == Lineshape.LORENTZIAN ? -ratio : -ratio * ratio);
     }
 

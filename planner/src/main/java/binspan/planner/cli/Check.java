@@ -2,10 +2,10 @@ package binspan.planner.cli;
 
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.ScenarioReader;
-import binspan.planner.report.LinkCheck;
 import binspan.planner.report.ResultJson;
 import binspan.planner.report.Verdict;
 import binspan.planner.report.WorksheetText;
+import binspan.prediction.LinkCheck;
 import binspan.scenario.Scenario;
 import java.io.PrintStream;
 import java.util.List;
@@ -55,9 +55,8 @@ final class Check {
 
     private int statusOf(String file) {
         try {
-            Scenario scenario = read(file);
-            LinkCheck outcome = LinkCheck.of(scenario);
-            print(file, scenario, outcome);
+            LinkCheck outcome = LinkCheck.of(read(file));
+            print(file, outcome);
             return outcome.met() ? ExitStatus.MET : ExitStatus.UNMET;
         } catch (InvalidScenarioException | RuntimeException e) {
             return ExitStatus.of(e, console);
@@ -70,13 +69,13 @@ final class Check {
                 : ScenarioReader.read(file);
     }
 
-    private void print(String file, Scenario scenario, LinkCheck outcome) {
+    private void print(String file, LinkCheck outcome) {
         PrintStream out = console.out();
         begin(file, out);
         switch (form) {
-            case JSON -> ResultJson.write(scenario, outcome, out);
-            case WORKSHEET -> WorksheetText.print(scenario, outcome, out);
-            default -> Verdict.print(scenario, outcome, out, console.colour());
+            case JSON -> ResultJson.write(outcome, out);
+            case WORKSHEET -> WorksheetText.print(outcome, out);
+            default -> Verdict.print(outcome, out, console.colour());
         }
     }
 

@@ -1,7 +1,7 @@
 package binspan.planner.report;
 
 import binspan.planner.io.JsonText;
-import binspan.scenario.Scenario;
+import binspan.prediction.LinkCheck;
 import java.io.PrintStream;
 import java.util.Map;
 
@@ -12,11 +12,10 @@ public final class ResultJson {
     /**
      * Writes one JSON object, without a line end.
      *
-     * @param scenario what was checked
-     * @param check its outcome
+     * @param check the outcome
      * @param out where to write
      */
-    public static void write(Scenario scenario, LinkCheck check, PrintStream out) {
-        out.print(JsonText.of(Map.of("scenario", scenario.name())));
+    public static void write(LinkCheck check, PrintStream out) {
+        out.print(JsonText.of(Map.of("scenario", check.prediction().scenario().name())));
     }
 }

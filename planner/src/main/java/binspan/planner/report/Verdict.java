@@ -1,6 +1,6 @@
 package binspan.planner.report;
 
-import binspan.scenario.Scenario;
+import binspan.prediction.LinkCheck;
 import java.io.PrintStream;
 
 /** The outcome of a check in words. */
@@ -10,12 +10,11 @@ public final class Verdict {
     /**
      * Prints the verdict.
      *
-     * @param scenario what was checked
-     * @param check its outcome
+     * @param check the outcome
      * @param out where to print
      * @param colour whether to use colours
      */
-    public static void print(Scenario scenario, LinkCheck check, PrintStream out, boolean colour) {
-        out.println(scenario.name());
+    public static void print(LinkCheck check, PrintStream out, boolean colour) {
+        out.println(check.prediction().scenario().name());
     }
 }

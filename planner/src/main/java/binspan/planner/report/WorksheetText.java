@@ -1,6 +1,6 @@
 package binspan.planner.report;
 
-import binspan.scenario.Scenario;
+import binspan.prediction.LinkCheck;
 import java.io.PrintStream;
 
 /** The outcome of a check with its intermediate results. */
@@ -10,11 +10,10 @@ public final class WorksheetText {
     /**
      * Prints the worksheet.
      *
-     * @param scenario what was checked
-     * @param check its outcome
+     * @param check the outcome
      * @param out where to print
      */
-    public static void print(Scenario scenario, LinkCheck check, PrintStream out) {
-        out.println(scenario.name());
+    public static void print(LinkCheck check, PrintStream out) {
+        out.println(check.prediction().scenario().name());
     }
 }

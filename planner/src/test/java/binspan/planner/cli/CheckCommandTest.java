@@ -39,6 +39,16 @@ final class CheckCommandTest {
     }
 
     @Test
+    void unmetRequirementIsStatusOneWhateverElseIsMet() throws IOException {
+        String good = file("good.json", GOOD);
+        String unmet = file("unmet.json", GOOD.replace("\"chshAtLeast\": 2.3", "\"chshAtLeast\": 2.82"));
+        assertThat(Run.of("check", unmet).status()).isEqualTo(ExitStatus.UNMET);
+        assertThat(Run.of("check", unmet, good).status()).isEqualTo(ExitStatus.UNMET);
+        assertThat(Run.of("check", unmet, "no.json", good).status()).isEqualTo(ExitStatus.REFUSED);
+        assertThat(Run.of("check", unmet).err()).isEmpty();
+    }
+
+    @Test
     void badScenarioGetsItsErrorsOnStandardError() throws IOException {
         String file = file("bad.json", GOOD.replace("\"imbalanceNs\": 2.0", "\"imbalanceNs\": -2.0"));
         Run run = Run.of("check", file);
