@@ -1,8 +1,5 @@
 package binspan.optics;
 
-import org.apache.commons.math3.analysis.integration.gauss.GaussIntegrator;
-import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactory;
-
 /**
  * Captures where a flat-top filter shapes the spectrum, so that dispersion spreads the light into a box instead of a Gaussian.
  *
@@ -10,45 +7,70 @@ import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactor
  * field, detector and clock: captures are conditional on t0 and the detunings and then averaged over both.
  */
 final class BoxedCapture {
-    private static final double SQRT_TWO = Math.sqrt(2.0);
-    private static final double SQRT_PI = Math.sqrt(Math.PI);
+    private static final double BIRTH_REACH = 5.0;
+    private static final double BIRTH_STEP = 1.2;
+    private static final int MOST_BIRTHS = 40;
+    private static final double SIGMAS_PER_PANEL = 12.0;
+    private static final int MOST_PANELS = 8;
     private static final double REACH = 6.5;
 
     private final PairSpectrum spectrum;
     private final double betaA;
     private final double betaB;
-    private final SpectralGrid grid;
     private final double birthRms;
+    private SpectralGrid grid;
+    private int panelsAlice;
+    private int panelsSum;
 
     BoxedCapture(PairSpectrum spectrum, double betaA, double betaB) {
         this.spectrum = spectrum;
         this.betaA = betaA;
         this.betaB = betaB;
-        this.grid = SpectralGrid.of(spectrum.alice(), spectrum.bob(), spectrum.pumpRms(), 1);
         this.birthRms = Math.sqrt(spectrum.inversePump()) / 2.0;
-    }
-
-    /** Times of birth, weighted as a Gaussian pulse. */
-    private static final class Birth {
-        static final GaussIntegrator RULE = new GaussIntegratorFactory().hermite(7);
     }
 
     /** Captured share of the pairs, the windows about each photon's mean arrival. */
     double of(PortTiming a, PortTiming b, Window windowA, Window windowB) {
-        GaussIntegrator birth = Birth.RULE;
-        double earliest = SQRT_TWO * birthRms * Math.abs(birth.getPoint(0));
-        CaptureTable captureA = table(spectrum.alice(), a, windowA, earliest + Math.abs(betaA) * grid.farthestAlice());
-        CaptureTable captureB = table(spectrum.bob(), b, windowB, earliest + Math.abs(betaB) * grid.farthestBob());
+        double sigmaA = Math.sqrt(0.25 / spectrum.alice().variance() + a.variance());
+        double sigmaB = Math.sqrt(0.25 / spectrum.bob().variance() + b.variance());
+        double step = birthStep(sigmaA, sigmaB);
+        int steps = (int) Math.ceil(BIRTH_REACH * birthRms / step);
+        resolve(sigmaA, sigmaB);
+        double earliest = steps * step;
+        CaptureTable captureA = CaptureTable.of(a, windowA, sigmaA, earliest + Math.abs(betaA) * grid.farthestAlice());
+        CaptureTable captureB = CaptureTable.of(b, windowB, sigmaB, earliest + Math.abs(betaB) * grid.farthestBob());
         double sum = 0.0;
-        for (int i = 0; i < birth.getNumberOfPoints(); i++) {
-            double t0 = SQRT_TWO * birthRms * birth.getPoint(i);
-            sum += birth.getWeight(i) / SQRT_PI * captured(captureA, captureB, t0);
+        double mass = 0.0;
+        for (int i = -steps; i <= steps; i++) {
+            double x = i * step / birthRms;
+            double weight = Math.exp(-x * x / 2.0);
+            mass += weight;
+            sum += weight * captured(captureA, captureB, i * step);
         }
-        return sum;
+        return sum / mass;
     }
 
-    private static CaptureTable table(Passband filters, PortTiming port, Window window, double latest) {
-        return CaptureTable.of(port, window, Math.sqrt(0.25 / filters.variance() + port.variance()), latest);
+    /** Makes the grid so fine that a panel spreads the arrivals over few of the widths by which the clicks are blurred. */
+    private void resolve(double sigmaA, double sigmaB) {
+        double blursPerDetuning = Math.max(Math.abs(betaA) / sigmaA, Math.abs(betaB) / sigmaB) / SIGMAS_PER_PANEL;
+        int alice = panels(
+                blursPerDetuning * SpectralGrid.widestPanel(spectrum.alice(), spectrum.bob(), spectrum.pumpRms()));
+        int sum = panels(Math.abs(betaB) / sigmaB / SIGMAS_PER_PANEL * 2.0 * REACH * spectrum.pumpRms());
+        if (grid == null || alice != panelsAlice || sum != panelsSum) {
+            grid = SpectralGrid.of(spectrum.alice(), spectrum.bob(), spectrum.pumpRms(), alice, sum);
+            panelsAlice = alice;
+            panelsSum = sum;
+        }
+    }
+
+    private static int panels(double wanted) {
+        return (int) Math.max(1.0, Math.min(MOST_PANELS, Math.ceil(wanted)));
+    }
+
+    /** Step of the trapezoidal rule over the time of birth: it converges exponentially once the blur of the clicks is resolved. */
+    private double birthStep(double sigmaA, double sigmaB) {
+        double fine = Math.sqrt(1.0 / (birthRms * birthRms) + 1.0 / (sigmaA * sigmaA) + 1.0 / (sigmaB * sigmaB));
+        return Math.max(BIRTH_STEP / fine, BIRTH_REACH * birthRms / MOST_BIRTHS);
     }
 
     private double captured(CaptureTable captureA, CaptureTable captureB, double t0) {

@@ -41,7 +41,7 @@ public final class PairSpectra {
     }
 
     private static PairSpectrum boxed(SpectrumInputs in) {
-        SpectralGrid grid = SpectralGrid.of(in.alice(), in.bob(), in.pumpRms(), 1);
+        SpectralGrid grid = SpectralGrid.of(in.alice(), in.bob(), in.pumpRms(), 2);
         double aa = 0.0;
         double bb = 0.0;
         double ab = 0.0;

@@ -24,11 +24,11 @@ final class SpectralGrid {
 
     private int filled;
 
-    private SpectralGrid(Passband a, Passband b, double pumpRms, int refinement) {
+    private SpectralGrid(Passband a, Passband b, double pumpRms, int ofAlice, int ofSum) {
         double reachA = reach(a, b, pumpRms);
-        double[] edges = panels(reachA, pumpRms, refinement);
+        double[] edges = panels(reachA, pumpRms, ofAlice);
         GaussLegendre rule = GaussLegendre.sixteen();
-        int inner = pumpRms > 0 ? rule.nodes.length * refinement : 1;
+        int inner = pumpRms > 0 ? rule.nodes.length * ofSum : 1;
         int size = (edges.length - 1) * rule.nodes.length * inner;
         alice = new double[size];
         bob = new double[size];
@@ -38,7 +38,7 @@ final class SpectralGrid {
             double middle = (edges[panel + 1] + edges[panel]) / 2.0;
             for (int i = 0; i < rule.nodes.length; i++) {
                 double wa = middle + half * rule.nodes[i];
-                fill(wa, half * rule.weights[i] * a.at(wa), b, pumpRms, refinement);
+                fill(wa, half * rule.weights[i] * a.at(wa), b, pumpRms, ofSum);
             }
         }
         double sum = 0.0;
@@ -60,7 +60,26 @@ final class SpectralGrid {
      * @param refinement 1 for smooth integrands, more panels for ones that oscillate
      */
     static SpectralGrid of(Passband a, Passband b, double pumpRms, int refinement) {
-        return new SpectralGrid(a, b, pumpRms, refinement);
+        return of(a, b, pumpRms, refinement, refinement);
+    }
+
+    /**
+     * Makes the grid with different refinements of its two directions.
+     *
+     * @param a filters of alice's arm
+     * @param b filters of bob's arm
+     * @param pumpRms rms bandwidth of the pump pulse, rad/s; 0 for a continuous pump
+     * @param ofAlice refinement over the detuning of alice's photon
+     * @param ofSum refinement over the sum of both detunings
+     */
+    static SpectralGrid of(Passband a, Passband b, double pumpRms, int ofAlice, int ofSum) {
+        return new SpectralGrid(a, b, pumpRms, ofAlice, ofSum);
+    }
+
+    /** Width of the widest unrefined panel over alice's detuning, rad/s. */
+    static double widestPanel(Passband a, Passband b, double pumpRms) {
+        double[] edges = panels(reach(a, b, pumpRms), pumpRms, 1);
+        return Math.max(edges[1] - edges[0], edges[2] - edges[1]);
     }
 
     /** Largest detuning of alice's photon, rad/s. */

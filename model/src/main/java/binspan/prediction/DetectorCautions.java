@@ -120,7 +120,8 @@ final class DetectorCautions {
         cautions.when(
                 Math.abs(first - second) > ALIKE * Math.max(first, second),
                 "ports-differ",
-                "%s: the efficiencies of the two ports differ by more than 10 %%, so that the bits are biased.",
+                "%s: the efficiencies of the two ports differ by more than 10 %%, so that the bits are biased; S and key are overstated where both sides'"
+                        + " ports differ.",
                 side);
     }
 

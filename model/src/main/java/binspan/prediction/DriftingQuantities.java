@@ -2,7 +2,9 @@ package binspan.prediction;
 
 import binspan.scenario.Arm;
 import binspan.scenario.Detector;
+import binspan.scenario.FibreSpan;
 import binspan.scenario.LinkLength;
+import binspan.scenario.PathElement;
 import binspan.scenario.PumpMode;
 import binspan.scenario.Scenario;
 import java.util.ArrayList;
@@ -15,9 +17,12 @@ final class DriftingQuantities {
      *
      * @param path scenario path
      * @param firstStep first step of the search where the planned value is 0, in the parameter's unit
+     * @param widestStep widest step, so that no slot is stepped over where lateness by a whole slot looks like none
      * @param bothWays whether too little can fail a requirement as well as too much
      */
-    record Quantity(String path, double firstStep, boolean bothWays) {}
+    record Quantity(String path, double firstStep, double widestStep, boolean bothWays) {}
+
+    private static final double SHARE_OF_WINDOW = 0.3;
 
     private final Scenario scenario;
     private final List<Quantity> quantities = new ArrayList<>();
@@ -39,11 +44,24 @@ final class DriftingQuantities {
     private void link() {
         if (new LinkLength().value(scenario).orElse(0.0) > 0.0) {
             add(LinkLength.PATH, 1.0);
-            add("timing.cableTemperatureStepK", 0.1);
+            double widest = lateness() / Math.max(psPerK(scenario.alice()), psPerK(scenario.bob()));
+            quantities.add(new Quantity("timing.cableTemperatureStepK", Math.min(0.1, widest), widest, false));
         }
-        quantities.add(new Quantity("timing.windowWidthPs", 1.0, true));
-        quantities.add(
-                new Quantity(scenario.pulsed() ? "source.meanPairsPerCycle" : "source.pairRatePerSecond", 1e-4, true));
+        bothWays("timing.windowWidthPs", 1.0);
+        bothWays(scenario.pulsed() ? "source.meanPairsPerCycle" : "source.pairRatePerSecond", 1e-4);
+    }
+
+    /** A lateness that no window can miss, ps. */
+    private double lateness() {
+        return SHARE_OF_WINDOW * scenario.timing().windowWidthPs();
+    }
+
+    private static double psPerK(Arm arm) {
+        double sum = 0.0;
+        for (PathElement element : arm.path()) {
+            sum += element instanceof FibreSpan span ? Math.abs(span.delayPsPerKmK()) * span.lengthKm() : 0.0;
+        }
+        return sum;
     }
 
     private void pump() {
@@ -59,7 +77,7 @@ final class DriftingQuantities {
 
     private void arm(String name, Arm arm) {
         add(name + ".repairMarginDb", 0.1);
-        add(name + ".delayErrorPs", 1.0);
+        quantities.add(new Quantity(name + ".delayErrorPs", 1.0, lateness(), false));
         add(name + ".clockJitterRmsPs", 1.0);
         add(name + ".analyzer.mismatchPs", 0.1);
         add(name + ".analyzer.phaseNoiseRmsRad", 0.01);
@@ -92,6 +110,10 @@ final class DriftingQuantities {
     }
 
     private void add(String path, double firstStep) {
-        quantities.add(new Quantity(path, firstStep, false));
+        quantities.add(new Quantity(path, firstStep, Double.POSITIVE_INFINITY, false));
+    }
+
+    private void bothWays(String path, double firstStep) {
+        quantities.add(new Quantity(path, firstStep, Double.POSITIVE_INFINITY, true));
     }
 }

@@ -57,11 +57,12 @@ final class HeadroomSearch {
                 parameter, parameter.over(scenario), parameter.value(scenario).orElse(0.0));
         double outward = axis.planned() < 0.0 ? -1.0 : 1.0;
         if (quantity.bothWays()) {
-            limit(axis, -outward * FIRST_SHARE * axis.planned())
+            limit(axis, -outward * FIRST_SHARE * axis.planned(), quantity.widestStep())
                     .ifPresent(limit -> headroom.add(headroom(axis, limit)));
         }
         double step = Math.max(quantity.firstStep(), FIRST_SHARE * Math.abs(axis.planned()));
-        limit(axis, outward * step).ifPresent(limit -> headroom.add(headroom(axis, limit)));
+        limit(axis, outward * Math.min(step, quantity.widestStep()), quantity.widestStep())
+                .ifPresent(limit -> headroom.add(headroom(axis, limit)));
     }
 
     /** One quantity with the scenarios along it. */
@@ -72,7 +73,7 @@ final class HeadroomSearch {
                 axis.parameter().path(), axis.parameter().unit(), axis.planned(), limit, worst(axis, limit));
     }
 
-    private OptionalDouble limit(Axis axis, double firstStep) {
+    private OptionalDouble limit(Axis axis, double firstStep, double widestStep) {
         double good = axis.planned();
         double step = firstStep;
         for (int i = 0; i < MOST_STEPS; i++) {
@@ -85,7 +86,7 @@ final class HeadroomSearch {
                         ROOT.findRoot(x -> finite(leastMargin(axis, x)), Math.min(good, next), Math.max(good, next)));
             }
             good = next;
-            step *= GROWTH;
+            step = Math.copySign(Math.min(Math.abs(step) * GROWTH, widestStep), step);
         }
         return OptionalDouble.empty();
     }

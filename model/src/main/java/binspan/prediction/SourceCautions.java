@@ -20,12 +20,12 @@ final class SourceCautions {
         filters(p, cautions);
         pump(p, cautions);
         energy(p, cautions);
-        double load = p.binPairs()
-                / (p.spectrum().alicePassesGivenBob() * p.spectrum().bobPassesGivenAlice());
+        double mean = p.scenario().source().meanPairsPerCycle().orElse(0.0);
+        double load = mean / (p.spectrum().alicePassesGivenBob() * p.spectrum().bobPassesGivenAlice());
         cautions.when(
                 load > WEAK_HERALD,
                 "herald-not-weak",
-                "The mean pairs before the partner's filter are %.2f per bin: the heralded g2 assumes far fewer than one.",
+                "The mean pairs per cycle before the partner's filter are %.2f: the heralded g2 assumes far fewer than one.",
                 load);
     }
 

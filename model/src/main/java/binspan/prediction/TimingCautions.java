@@ -12,6 +12,8 @@ final class TimingCautions {
     private static final double CLEAR_OF_NEIGHBOURS = 6.0;
     private static final double MISMATCH_WITHOUT_SELECTION = 0.3e-12;
     private static final double LITTLE = 1.02;
+    /** Less than this comes from the saturation of the detectors, not from the window. */
+    private static final double NOTICEABLE = 5e-6;
 
     private TimingCautions() {}
 
@@ -32,8 +34,18 @@ final class TimingCautions {
                 separation / Scale.PICO,
                 rms / Scale.PICO);
         cycle(p, separation, window, cautions);
+        double late = late(p);
+        cautions.when(
+                late > window / 2.0,
+                "windows-missed",
+                "The photons arrive %.0f ps off the centre of windows of %.0f ps, so that most of them miss: align the windows more often or correct"
+                        + " the delay.",
+                late / Scale.PICO,
+                window / Scale.PICO);
         selection(p, window, cautions);
-        rising(p, cautions);
+        if (late <= window / 2.0) {
+            rising(p, cautions);
+        }
     }
 
     /** Rms arrival of an arm's worst port: of its singles, or of the time difference with a continuous pump. */
@@ -64,20 +76,32 @@ final class TimingCautions {
                 cycle / Scale.NANO);
     }
 
+    /** With a continuous pump only the difference of the imbalances and the sum of the dispersions matter. */
     private static void selection(LinkPrediction p, double window, Cautions cautions) {
-        double mismatch = Math.max(
-                Math.abs(p.imbalances().alice() - p.imbalances().pump()),
-                Math.abs(p.imbalances().bob() - p.imbalances().pump()));
-        double farA = Math.abs(p.pathA().groupDelayDispersion())
-                * Math.sqrt(p.spectrum().alice().variance());
-        double farB = Math.abs(p.pathB().groupDelayDispersion())
-                * Math.sqrt(p.spectrum().bob().variance());
+        double offA = p.imbalances().alice() - p.imbalances().pump();
+        double offB = p.imbalances().bob() - p.imbalances().pump();
+        double betaA = p.pathA().groupDelayDispersion();
+        double betaB = p.pathB().groupDelayDispersion();
+        boolean pulsed = p.scenario().pulsed();
+        double mismatch = pulsed ? Math.max(Math.abs(offA), Math.abs(offB)) : Math.abs(offA - offB);
+        double far = pulsed
+                ? Math.max(
+                        Math.abs(betaA) * Math.sqrt(p.spectrum().alice().variance()),
+                        Math.abs(betaB) * Math.sqrt(p.spectrum().bob().variance()))
+                : Math.abs(betaA + betaB) * Math.sqrt(p.spectrum().varianceA());
         cautions.when(
-                mismatch > MISMATCH_WITHOUT_SELECTION && window < 4.0 * Math.max(farA, farB),
+                mismatch > MISMATCH_WITHOUT_SELECTION && window < 4.0 * far,
                 "window-selects-spectrum",
                 "An imbalance is off by %.2f ps and the window is narrow against the dispersed light: it selects part of the spectrum, so the spectral"
                         + " loss of visibility is overstated.",
                 mismatch / Scale.PICO);
+    }
+
+    /** How far the photons arrive off the centres of their windows, s; with a continuous pump only the difference of the arms counts. */
+    private static double late(LinkPrediction p) {
+        double lateA = LinkPrediction.late(p.scenario().alice(), p.pathA());
+        double lateB = LinkPrediction.late(p.scenario().bob(), p.pathB());
+        return p.scenario().pulsed() ? Math.max(Math.abs(lateA), Math.abs(lateB)) : Math.abs(lateA - lateB);
     }
 
     private static void rising(LinkPrediction p, Cautions cautions) {
@@ -90,13 +114,13 @@ final class TimingCautions {
                 && LinkPredictor.predict(length.with(scenario, LITTLE * present))
                                 .fringe()
                                 .raw()
-                        > visibility * (1.0 + 1e-7);
+                        > visibility * (1.0 + NOTICEABLE);
         cautions.when(
                 withLength,
                 "visibility-rises-with-length",
                 "The visibility rises a little with length: the narrow window cuts accidentals more than pairs. True, and no reason to add fibre.");
         boolean withJitter =
-                LinkPredictor.predict(MoreJitter.of(scenario, LITTLE)).fringe().raw() > visibility * (1.0 + 1e-7);
+                LinkPredictor.predict(MoreJitter.of(scenario, LITTLE)).fringe().raw() > visibility * (1.0 + NOTICEABLE);
         cautions.when(
                 withJitter,
                 "visibility-rises-with-jitter",

@@ -3,6 +3,7 @@ package binspan.planner.cli;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.ScenarioReader;
 import binspan.planner.report.ResultJson;
+import binspan.planner.report.TextStyle;
 import binspan.planner.report.Verdict;
 import binspan.planner.report.WorksheetText;
 import binspan.prediction.LinkCheck;
@@ -74,8 +75,8 @@ final class Check {
         begin(file, out);
         switch (form) {
             case JSON -> ResultJson.write(outcome, out);
-            case WORKSHEET -> WorksheetText.print(outcome, out);
-            default -> Verdict.print(outcome, out, console.colour());
+            case WORKSHEET -> WorksheetText.print(outcome, out, TextStyle.ofStandardOutput(console.colour()));
+            default -> Verdict.print(outcome, out, TextStyle.ofStandardOutput(console.colour()));
         }
     }
 

@@ -6,14 +6,19 @@ import java.util.Map;
 import tools.jackson.core.JsonGenerator;
 import tools.jackson.core.ObjectWriteContext;
 import tools.jackson.core.PrettyPrinter;
+import tools.jackson.core.StreamWriteFeature;
 import tools.jackson.core.json.JsonFactory;
 import tools.jackson.core.util.DefaultIndenter;
 import tools.jackson.core.util.DefaultPrettyPrinter;
 import tools.jackson.core.util.Separators;
 
-/** Writes maps, lists, texts, numbers and flags as JSON, indented by two blanks. */
+/**
+ * Writes maps, lists, texts, numbers (as the shortest text that reads back) and flags as JSON, indented by two blanks.
+ */
 public final class JsonText {
-    private static final JsonFactory FACTORY = new JsonFactory();
+    private static final JsonFactory FACTORY = JsonFactory.builder()
+            .enable(StreamWriteFeature.USE_FAST_DOUBLE_WRITER)
+            .build();
     private static final double LARGEST_PLAIN = 1e7;
 
     private JsonText() {}

@@ -1,20 +1,45 @@
 package binspan.planner.report;
 
 import binspan.prediction.LinkCheck;
-import java.io.PrintStream;
+import java.io.IOException;
+import java.io.UncheckedIOException;
 
-/** The outcome of a check in words. */
+/**
+ * The verdict on a link for a person: whether it meets its requirements, what it costs where, how much may drift, and
+ * what to be careful about. ASCII or UTF-8 text of at most 80 columns.
+ */
 public final class Verdict {
     private Verdict() {}
 
     /**
      * Prints the verdict.
      *
-     * @param check the outcome
-     * @param out where to print
-     * @param colour whether to use colours
+     * @param check what was found
+     * @param out where to
+     * @param style colour and characters
+     * @throws UncheckedIOException if the output refuses
      */
-    public static void print(LinkCheck check, PrintStream out, boolean colour) {
-        out.println(check.prediction().scenario().name());
+    public static void print(LinkCheck check, Appendable out, TextStyle style) {
+        try {
+            out.append(text(check, style));
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    /** The verdict as a text that ends with a line break. */
+    public static String text(LinkCheck check, TextStyle style) {
+        TextPage page = new TextPage(style);
+        VerdictHead.write(check, page);
+        VerdictRequirements.write(check, page);
+        VerdictFailure.write(check, page);
+        VerdictBudget.write(check, page);
+        VerdictRates.write(check, page);
+        VerdictKey.write(check, page);
+        VerdictArms.write(check, page);
+        VerdictHeadroom.write(check, page);
+        VerdictStability.write(check, page);
+        VerdictNotes.write(check, page);
+        return page.toString();
     }
 }

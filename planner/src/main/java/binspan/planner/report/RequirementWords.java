@@ -1,0 +1,97 @@
+package binspan.planner.report;
+
+import binspan.prediction.Requirement;
+import binspan.units.Digits;
+
+/** Requirements in the words and units of the trade. */
+final class RequirementWords {
+    private static final double HOUR = 3600.0;
+    private static final double PERCENT = 100.0;
+    private static final int FEWEST_DIGITS = 3;
+    private static final int MOST_DIGITS = 9;
+
+    private RequirementWords() {}
+
+    /** Name of the required figure. */
+    static String name(Requirement requirement) {
+        return switch (requirement) {
+            case RAW_VISIBILITY -> "raw visibility";
+            case CHSH -> "CHSH S";
+            case PHASE_QBER -> "phase-basis error rate";
+            case TIME_QBER -> "time-basis error rate";
+            case KEY_RATE -> "secret key rate";
+            case CAR -> "coincidences/accidentals";
+            case FIRST_KEY -> "time to the first key";
+            case FIVE_SIGMA -> "time to S > 2 by 5 sigma";
+        };
+    }
+
+    /** The required figure as the subject of a sentence. */
+    static String subject(Requirement requirement) {
+        return switch (requirement) {
+            case CHSH -> "S of the CHSH test";
+            case PHASE_QBER -> "The error rate of the phase basis";
+            case TIME_QBER -> "The error rate of the time basis";
+            case CAR -> "The ratio of coincidences to accidentals";
+            default -> "The " + name(requirement);
+        };
+    }
+
+    /** What it means that there is no figure. */
+    static String absent(Requirement requirement) {
+        return switch (requirement) {
+            case FIRST_KEY -> "There never is a first key";
+            case FIVE_SIGMA -> "S does not exceed 2";
+            case TIME_QBER -> "There is no time basis";
+            default -> "There is no " + name(requirement);
+        };
+    }
+
+    /** The required figure as it was stated. */
+    static String required(Requirement requirement, double value) {
+        return switch (requirement) {
+            case PHASE_QBER, TIME_QBER -> Figure.stated(value * PERCENT, "%");
+            case KEY_RATE -> value < 1000.0 ? Figure.stated(value, "bit/s") : Figure.bits(value);
+            case FIRST_KEY, FIVE_SIGMA -> Figure.stated(value, "h");
+            default -> Figure.stated(value, "");
+        };
+    }
+
+    /** The predicted figure, with as many digits as it takes to tell it from the required one. */
+    static String predicted(Requirement requirement, double value, double required) {
+        int digits = FEWEST_DIGITS;
+        while (digits < MOST_DIGITS && value != required && rounded(value, digits) == required) {
+            digits++;
+        }
+        return switch (requirement) {
+            case PHASE_QBER, TIME_QBER -> Figure.digits(value * PERCENT, digits, "%");
+            case KEY_RATE -> digits == FEWEST_DIGITS ? Figure.bits(value) : Figure.digits(value, digits, "bit/s");
+            case FIRST_KEY, FIVE_SIGMA ->
+                digits == FEWEST_DIGITS ? Figure.duration(value * HOUR) : Figure.digits(value, digits, "h");
+            default -> Figure.digits(value, digits, "");
+        };
+    }
+
+    /** How much room is left, with its sign, in the requirement's own unit. */
+    static String margin(Requirement requirement, double margin) {
+        return switch (requirement) {
+            case PHASE_QBER, TIME_QBER -> Figure.signed(margin * PERCENT, "%");
+            case KEY_RATE -> Figure.signedRate(margin, "bit/s");
+            case FIRST_KEY, FIVE_SIGMA -> Figure.signed(margin, "h");
+            default -> Figure.signed(margin, "");
+        };
+    }
+
+    /** A missing amount, without a sign. */
+    static String amount(Requirement requirement, double missing) {
+        return switch (requirement) {
+            case FIRST_KEY, FIVE_SIGMA -> Figure.duration(missing * HOUR);
+            case PHASE_QBER, TIME_QBER -> Figure.digits(missing * PERCENT, 2, "percentage points");
+            default -> margin(requirement, -missing).substring(1);
+        };
+    }
+
+    private static double rounded(double value, int digits) {
+        return Double.parseDouble(Digits.significant(value, digits));
+    }
+}

@@ -1,0 +1,50 @@
+package binspan.planner.report;
+
+import binspan.prediction.LinkCheck;
+import binspan.prediction.Requirement;
+import binspan.prediction.RequirementOutcome;
+
+/** For a link that fails, in plain sentences: which requirement by how much, and what costs most. */
+final class VerdictFailure {
+    private final LargestCost cost;
+    private final TextPage page;
+
+    private VerdictFailure(LinkCheck check, TextPage page) {
+        this.cost = new LargestCost(check);
+        this.page = page;
+    }
+
+    static void write(LinkCheck check, TextPage page) {
+        if (check.met()) {
+            return;
+        }
+        VerdictFailure failure = new VerdictFailure(check, page);
+        page.heading("Why not");
+        String told = "";
+        for (RequirementOutcome outcome : check.outcomes()) {
+            if (!outcome.met()) {
+                String why = failure.cost.of(outcome.requirement());
+                failure.tell(outcome, why.equals(told) ? "The cause is the same." : why);
+                told = why;
+            }
+        }
+    }
+
+    private void tell(RequirementOutcome outcome, String why) {
+        page.wrapped("  - ", "    ", missed(outcome) + " " + why);
+    }
+
+    private static String missed(RequirementOutcome outcome) {
+        Requirement requirement = outcome.requirement();
+        String required = RequirementWords.required(requirement, outcome.required());
+        if (outcome.margin().isEmpty()) {
+            return RequirementWords.absent(requirement) + "; " + required + " is required.";
+        }
+        double missing = Math.abs(outcome.margin().getAsDouble());
+        String size = RequirementWords.amount(requirement, missing);
+        double ratio = missing / outcome.required();
+        String share = ratio <= 1.0 ? " (" + Figure.percent(ratio) + " of it)" : "";
+        return RequirementWords.subject(requirement) + (requirement.atLeast() ? " falls short of " : " exceeds ")
+                + required + " by " + size + share + ".";
+    }
+}
