@@ -101,19 +101,13 @@ final class BoxedCapture {
         if (filters.flat() && !port.tailed()) {
             return WindowCapture.box(window.from(), window.to(), 2.0 * filters.halfWidth() * Math.abs(beta), sigma);
         }
-        GaussLegendre rule = GaussLegendre.sixteen();
-        double reach = Math.min(filters.halfWidth(), REACH * filters.gaussianRms());
+        DetuningNodes nodes =
+                DetuningNodes.of(filters, beta, new DetuningNodes.View(window, sigma, port.tailTime(), 0.0));
         double captured = 0.0;
-        double mass = 0.0;
-        for (int panel = -2; panel < 2; panel++) {
-            for (int i = 0; i < rule.nodes.length; i++) {
-                double detuning = reach * (panel + 0.5 + 0.5 * rule.nodes[i]) / 2.0;
-                double weight = rule.weights[i] * filters.at(detuning);
-                double late = beta * detuning;
-                mass += weight;
-                captured += weight * port.capture(window.from() - late, window.to() - late, sigma);
-            }
+        for (int i = 0; i < nodes.count(); i++) {
+            double late = beta * nodes.detuning[i];
+            captured += nodes.weight[i] * port.capture(window.from() - late, window.to() - late, sigma);
         }
-        return captured / mass;
+        return captured / filters.area();
     }
 }

@@ -23,12 +23,13 @@ public final class DifferenceCapture {
         if (both.flat() && !a.tailed() && !b.tailed()) {
             return WindowCapture.box(window.from(), window.to(), 2.0 * both.halfWidth() * Math.abs(betaSum), sigma);
         }
-        SpectralGrid grid = SpectralGrid.of(spectrum.alice(), spectrum.bob(), 0.0, 1);
+        DetuningNodes.View view = new DetuningNodes.View(window, sigma, a.tailTime(), b.tailTime());
+        DetuningNodes nodes = DetuningNodes.of(both, betaSum, view);
         double captured = 0.0;
-        for (int i = 0; i < grid.probability.length; i++) {
-            captured += grid.probability[i] * difference(window.shifted(-betaSum * grid.alice[i]), sigma, a, b);
+        for (int i = 0; i < nodes.count(); i++) {
+            captured += nodes.weight[i] * difference(window.shifted(-betaSum * nodes.detuning[i]), sigma, a, b);
         }
-        return captured;
+        return captured / both.area();
     }
 
     /** Difference of two clicks that may each have a tail: alice's tail makes it later, bob's earlier. */

@@ -60,7 +60,7 @@ final class SpectralGrid {
      * @param refinement 1 for smooth integrands, more panels for ones that oscillate
      */
     static SpectralGrid of(Passband a, Passband b, double pumpRms, int refinement) {
-        return of(a, b, pumpRms, refinement, refinement);
+        return of(a, b, pumpRms, refinement, 2 * refinement);
     }
 
     /**
@@ -133,7 +133,7 @@ final class SpectralGrid {
     }
 
     private static double[] panels(double reach, double pumpRms, int refinement) {
-        double edge = Math.min(reach / 2.0, Math.max(REACH * pumpRms, reach / 8.0));
+        double edge = Math.min(reach / 2.0, Math.max(2.0 * REACH * pumpRms, reach / 8.0));
         double[] coarse = {-reach, -reach + edge, reach - edge, reach};
         double[] fine = new double[3 * refinement + 1];
         for (int i = 0; i < fine.length; i++) {

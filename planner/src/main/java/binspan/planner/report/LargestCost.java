@@ -3,6 +3,7 @@ package binspan.planner.report;
 import binspan.counting.DetectorLoad;
 import binspan.counting.LinkCounts;
 import binspan.merit.VisibilityBudget;
+import binspan.prediction.Caution;
 import binspan.prediction.LinkCheck;
 import binspan.prediction.LinkPrediction;
 import binspan.prediction.Requirement;
@@ -13,13 +14,30 @@ final class LargestCost {
     private static final double HARDLY_ANY_KEY = 0.2;
 
     private final LinkPrediction p;
+    private final boolean windowsMissed;
 
     LargestCost(LinkCheck check) {
         this.p = check.prediction();
+        this.windowsMissed = has(check, "windows-missed");
+    }
+
+    private static boolean has(LinkCheck check, String code) {
+        for (Caution caution : check.cautions()) {
+            if (caution.code().equals(code)) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** A sentence on what costs the requirement most. */
     String of(Requirement requirement) {
+        return windowsMissed
+                ? "Most photons miss their windows: they arrive too far off the centre (see the caution below)."
+                : ofAligned(requirement);
+    }
+
+    private String ofAligned(Requirement requirement) {
         return switch (requirement) {
             case RAW_VISIBILITY -> visibility(0.0);
             case CHSH, PHASE_QBER -> visibility(p.coherence().phaseOffset());
