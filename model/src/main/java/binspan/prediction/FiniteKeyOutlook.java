@@ -17,16 +17,11 @@ public record FiniteKeyOutlook(double bits, double bitsPerSecond, double seconds
         if (Double.isNaN(prediction.key().asymptoticPerSecond())) {
             return NONE;
         }
-        FiniteKey key = key(prediction);
+        FiniteKey key = prediction.finiteKey();
         double bits = Math.max(0.0, Math.floor(key.bits(prediction.uptime())));
         return new FiniteKeyOutlook(
                 bits,
                 bits / prediction.scenario().acquisition().durationS(),
                 key.secondsToFirstBit() / prediction.uptimeShare());
-    }
-
-    static FiniteKey key(LinkPrediction prediction) {
-        return FiniteKey.of(
-                prediction.counts(), prediction.key(), prediction.scenario().protocol());
     }
 }

@@ -155,7 +155,7 @@ final class HeadroomSearch {
         if (Double.isNaN(prediction.key().asymptoticPerSecond())) {
             return Double.NaN;
         }
-        FiniteKey key = FiniteKeyOutlook.key(prediction);
+        FiniteKey key = prediction.finiteKey();
         FiniteKeyBlock block = key.block(deadline * prediction.uptimeShare());
         double quick = FiniteKeyBound.TOMAMICHEL_2012.bits(block);
         double bits = quick >= 1.0 ? quick : key.bits(deadline * prediction.uptimeShare());

@@ -2,6 +2,7 @@ package binspan.prediction;
 
 import binspan.counting.LinkCounts;
 import binspan.merit.BellTest;
+import binspan.merit.FiniteKey;
 import binspan.merit.FringeVisibility;
 import binspan.merit.SecretKey;
 import binspan.merit.VisibilityBudget;
@@ -99,5 +100,39 @@ public record LinkPrediction(
     /** Counting error of the raw visibility of that scan. */
     public double visibilitySigma() {
         return FringeVisibility.sigma(fringe.raw(), scenario.acquisition().fringePoints(), countsPerPoint());
+    }
+
+    /** Rms of t_A - t_B of ports (1,1) with a continuous pump, s. */
+    public double correlationRms() {
+        double beta = pathA.groupDelayDispersion() + pathB.groupDelayDispersion();
+        return Math.sqrt(ArrivalTime.differenceVariance(spectrum, beta)
+                + portsA.get(0).variance()
+                + portsB.get(0).variance());
+    }
+
+    /** Rms arrival of an arm's singles at its worst port, detector tails not counted, s; with a continuous pump that of the time difference. */
+    public double arrivalRms(boolean alice) {
+        if (!scenario.pulsed()) {
+            return correlationRms();
+        }
+        double worst = 0.0;
+        for (PortTiming port : alice ? portsA : portsB) {
+            worst = Math.max(worst, port.variance());
+        }
+        return Math.sqrt((alice ? arrival.singlesA() : arrival.singlesB()) + worst);
+    }
+
+    /** Modes that the source can fill per second: f 2K, f K for a train, those of the mirrored passband with a continuous pump. */
+    public double modesPerSecond() {
+        if (!scenario.pulsed()) {
+            return spectrum.mirrored().modesPerSecond();
+        }
+        double bins = scenario.source().pump().mode() == PumpMode.PULSE_PAIR ? 2.0 : 1.0;
+        return cyclesPerSecond() * bins * spectrum.schmidtNumber();
+    }
+
+    /** Finite key that the link collects with time. */
+    public FiniteKey finiteKey() {
+        return FiniteKey.of(counts, key, scenario.protocol());
     }
 }

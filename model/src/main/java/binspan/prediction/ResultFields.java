@@ -4,11 +4,8 @@ import binspan.counting.DetectorLoad;
 import binspan.counting.LinkCounts;
 import binspan.merit.PhotonStatistics;
 import binspan.merit.RepeaterlessBound;
-import binspan.optics.ArrivalTime;
 import binspan.optics.OpticalPath;
 import binspan.optics.PairSpectrum;
-import binspan.optics.Passband;
-import binspan.scenario.PumpMode;
 import binspan.units.Decibels;
 import binspan.units.Scale;
 import java.util.ArrayList;
@@ -53,7 +50,7 @@ public final class ResultFields {
                 fields,
                 name + ".arrivalRmsPs",
                 "ps",
-                p -> p.scenario().pulsed() ? TimingCautions.arrivalRms(p, alice) / Scale.PICO : NOT_APPLICABLE);
+                p -> p.scenario().pulsed() ? p.arrivalRms(alice) / Scale.PICO : NOT_APPLICABLE);
         add(fields, name + ".delayErrorPs", "ps", p -> late(p, alice) / Scale.PICO);
         perPort(
                 fields,
@@ -95,7 +92,7 @@ public final class ResultFields {
                 fields,
                 "coincidence.correlationRmsPs",
                 "ps",
-                p -> p.scenario().pulsed() ? NOT_APPLICABLE : correlationRms(p) / Scale.PICO);
+                p -> p.scenario().pulsed() ? NOT_APPLICABLE : p.correlationRms() / Scale.PICO);
     }
 
     private static void merit(List<ResultField> fields) {
@@ -177,27 +174,9 @@ public final class ResultFields {
                 p.cyclesPerSecond());
     }
 
-    /** Rms of t_A - t_B of ports (1,1) with a continuous pump, s. */
-    static double correlationRms(LinkPrediction p) {
-        double beta = p.pathA().groupDelayDispersion() + p.pathB().groupDelayDispersion();
-        return Math.sqrt(ArrivalTime.differenceVariance(p.spectrum(), beta)
-                + p.portsA().get(0).variance()
-                + p.portsB().get(0).variance());
-    }
-
     private static double repeaterlessBound(LinkPrediction p) {
         double transmittance =
                 Decibels.transmittance(p.pathA().fibreLossDb() + p.pathB().fibreLossDb());
-        return RepeaterlessBound.bitsPerMode(transmittance) * modesPerSecond(p);
-    }
-
-    /** Modes that the source can fill per second: f 2K, f K for a train, those of the mirrored passband with a continuous pump. */
-    static double modesPerSecond(LinkPrediction p) {
-        if (!p.scenario().pulsed()) {
-            Passband both = p.spectrum().mirrored();
-            return both.modesPerSecond();
-        }
-        double bins = p.scenario().source().pump().mode() == PumpMode.PULSE_PAIR ? 2.0 : 1.0;
-        return p.cyclesPerSecond() * bins * p.spectrum().schmidtNumber();
+        return RepeaterlessBound.bitsPerMode(transmittance) * p.modesPerSecond();
     }
 }

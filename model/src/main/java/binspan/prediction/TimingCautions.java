@@ -1,11 +1,9 @@
 package binspan.prediction;
 
-import binspan.optics.PortTiming;
 import binspan.scenario.LinkLength;
 import binspan.scenario.PumpMode;
 import binspan.scenario.Scenario;
 import binspan.units.Scale;
-import java.util.List;
 
 /** Where windows, slots and arrival times strain the model. */
 final class TimingCautions {
@@ -26,7 +24,7 @@ final class TimingCautions {
                 "The window (%.0f ps) is wider than the slot separation (%.0f ps): neighbouring slots are counted as central ones.",
                 window / Scale.PICO,
                 separation / Scale.PICO);
-        double rms = Math.max(arrivalRms(p, true), arrivalRms(p, false));
+        double rms = Math.max(p.arrivalRms(true), p.arrivalRms(false));
         cautions.when(
                 separation < CLEAR_OF_NEIGHBOURS * rms,
                 "slots-overlap",
@@ -46,23 +44,6 @@ final class TimingCautions {
         if (late <= window / 2.0) {
             rising(p, cautions);
         }
-    }
-
-    /** Rms arrival of an arm's worst port: of its singles, or of the time difference with a continuous pump. */
-    static double arrivalRms(LinkPrediction p, boolean alice) {
-        if (!p.scenario().pulsed()) {
-            return ResultFields.correlationRms(p);
-        }
-        double light = alice ? p.arrival().singlesA() : p.arrival().singlesB();
-        return Math.sqrt(light + worst(alice ? p.portsA() : p.portsB()));
-    }
-
-    private static double worst(List<PortTiming> ports) {
-        double worst = 0.0;
-        for (PortTiming port : ports) {
-            worst = Math.max(worst, port.variance());
-        }
-        return worst;
     }
 
     private static void cycle(LinkPrediction p, double separation, double window, Cautions cautions) {

@@ -143,8 +143,7 @@ final class PredictionPropertiesTest {
         links.satisfy(check -> {
             LinkPrediction p = check.prediction();
             double worse = Math.max(p.pathA().fibreLossDb(), p.pathB().fibreLossDb());
-            double bound =
-                    RepeaterlessBound.bitsPerMode(Decibels.transmittance(worse)) * ResultFields.modesPerSecond(p);
+            double bound = RepeaterlessBound.bitsPerMode(Decibels.transmittance(worse)) * p.modesPerSecond();
             double key = zeroIfNone(p.key().asymptoticPerSecond());
             boolean biased = !alike(p.scenario().alice()) || !alike(p.scenario().bob());
             return biased || key <= bound ? "" : "key " + key + ", bound " + bound;

@@ -1,8 +1,8 @@
 package binspan.planner.report;
 
 import binspan.prediction.LinkCheck;
-import binspan.prediction.Worksheet;
-import binspan.prediction.WorksheetLine;
+import binspan.worksheet.Worksheet;
+import binspan.worksheet.WorksheetLine;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 

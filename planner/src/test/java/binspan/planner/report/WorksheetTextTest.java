@@ -3,9 +3,9 @@ package binspan.planner.report;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import binspan.prediction.LinkCheck;
-import binspan.prediction.Worksheet;
-import binspan.prediction.WorksheetLine;
 import binspan.scenario.Values;
+import binspan.worksheet.Worksheet;
+import binspan.worksheet.WorksheetLine;
 import java.util.Map;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
