@@ -143,7 +143,10 @@ final class RandomScenarios {
             pump.number("repetitionRateMHz", 10.0, 250.0).word("preparation");
             pump.perhaps(0.4, "mismatchPs", -3.0, 3.0).perhaps(0.4, "earlyPairFraction", 0.3, 0.7);
         }
-        if (mode != PumpMode.CONTINUOUS) {
+        if (mode == PumpMode.PULSE_TRAIN) {
+            // Pulses as long as many periods take long to count as well.
+            pump.put("pairEmissionFwhmPs", pump.between(2.0, 200.0));
+        } else if (mode == PumpMode.PULSE_PAIR) {
             pump.number("pairEmissionFwhmPs", 5.0, 200.0);
         }
         if (pump.chance(0.3)) {

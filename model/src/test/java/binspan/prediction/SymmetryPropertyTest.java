@@ -53,6 +53,10 @@ final class SymmetryPropertyTest {
         for (ResultField field : ResultFields.ALL) {
             ResultField other = FIELDS.get(exchanged(field.name()));
             double rounding = rounding(field, check.prediction());
+            if (tolerance > EXACT && field.name().startsWith("bell.secondsTo")) {
+                // Runs to infinity where S comes down to 2, and any error of S with it.
+                continue;
+            }
             for (int port = 0; port < field.count(check); port++) {
                 double before = field.reading().at(check, port);
                 double after = other.reading().at(exchanged, port);
