@@ -17,7 +17,7 @@ public record BellTest(double chsh, double coincidencesPerSecond) {
 
     /**
      * S of a link. Both ports on both sides: E(delta - pi/4) + 2 E(delta + pi/4) - E(delta + 3 pi/4) with E from the four port pairs; otherwise
-     * 2 sqrt2 V cos(delta) from sixteen settings.
+     * 2 sqrt2 V cos(delta) from settings half a turn apart, in which all detected port pairs count.
      *
      * @param counts counts
      * @param visibility raw visibility of ports (1,1)

@@ -5,6 +5,9 @@ import binspan.counting.LinkCounts;
 /**
  * Coincidences of all port pairs that sifting keeps, at the static phase error of the link, 1/s.
  *
+ * <p>Where a side detects one port only, right and wrong outcomes need settings half a turn apart: the central rate is then
+ * the mean over both.
+ *
  * @param central interfering windows
  * @param earlyEarly both photons early and short; 0 without a time basis, as the next three
  * @param lateLate both photons late and long
@@ -20,7 +23,9 @@ public record SiftedRates(double central, double earlyEarly, double lateLate, do
      */
     public static SiftedRates of(LinkCounts counts, double phaseOffset) {
         double cosine = Math.cos(phaseOffset);
-        double central = counts.central().sum(cosine);
+        double central = counts.bothPorts()
+                ? counts.central().sum(cosine)
+                : (counts.central().sum(cosine) + counts.central().sum(-cosine)) / 2.0;
         return counts.hasTimeBasis()
                 ? new SiftedRates(
                         central,

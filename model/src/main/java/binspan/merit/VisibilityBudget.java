@@ -59,7 +59,7 @@ public record VisibilityBudget(List<Entry> entries) {
         Cause[] causes = Cause.values();
         double before = 1.0;
         for (int i = 0; i < causes.length; i++) {
-            entries.add(new Entry(causes[i], before > 0.0 ? visibilities[i] / before : 1.0));
+            entries.add(new Entry(causes[i], before > 0.0 && visibilities[i] >= 0.0 ? visibilities[i] / before : 1.0));
             before = visibilities[i];
         }
         return new VisibilityBudget(entries);

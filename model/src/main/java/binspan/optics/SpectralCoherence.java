@@ -66,7 +66,7 @@ public final class SpectralCoherence {
 
     private static double averaged(PairSpectrum spectrum, Mismatch m) {
         double phase = largestPhase(spectrum, m);
-        int refinement = (int) Math.max(1, Math.min(MOST_PANELS, Math.ceil(phase / PHASE_PER_PANEL)));
+        int refinement = phase < MOST_PANELS * PHASE_PER_PANEL ? 1 + (int) (phase / PHASE_PER_PANEL) : MOST_PANELS;
         SpectralGrid grid = SpectralGrid.of(spectrum.alice(), spectrum.bob(), spectrum.pumpRms(), refinement);
         double cosines = 0.0;
         double sines = 0.0;

@@ -1,5 +1,6 @@
 package binspan.prediction;
 
+import binspan.optics.Imbalances;
 import binspan.scenario.Arm;
 import binspan.scenario.Detector;
 import binspan.scenario.FibreSpan;
@@ -23,6 +24,9 @@ final class DriftingQuantities {
     record Quantity(String path, double firstStep, double widestStep, boolean bothWays) {}
 
     private static final double SHARE_OF_WINDOW = 0.3;
+
+    /** Below this share of the imbalance a pump interferometer cancels any drift of the pump that occurs. */
+    private static final double NOTICEABLE_SHARE = 0.01;
 
     private final Scenario scenario;
     private final List<Quantity> quantities = new ArrayList<>();
@@ -66,7 +70,10 @@ final class DriftingQuantities {
 
     private void pump() {
         boolean interferometer = scenario.source().pump().madeByInterferometer();
-        add("source.pump.frequencyDriftRmsMHz", 1.0);
+        Imbalances imbalances = Imbalances.of(scenario);
+        if (Math.abs(imbalances.effective(scenario.source().pump())) > NOTICEABLE_SHARE * imbalances.common()) {
+            add("source.pump.frequencyDriftRmsMHz", 1.0);
+        }
         if (scenario.source().pump().mode() == PumpMode.PULSE_PAIR) {
             add("source.pump.mismatchPs", 0.1);
         }

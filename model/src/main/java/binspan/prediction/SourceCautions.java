@@ -25,8 +25,8 @@ final class SourceCautions {
         cautions.when(
                 load > WEAK_HERALD,
                 "herald-not-weak",
-                "The mean pairs per cycle before the partner's filter are %.2f: the heralded g2 assumes far fewer than one.",
-                load);
+                "The mean pairs per cycle before the partner's filter are %s: the heralded g2 assumes far fewer than one.",
+                Figures.short3(load));
     }
 
     private static void filters(LinkPrediction p, Cautions cautions) {

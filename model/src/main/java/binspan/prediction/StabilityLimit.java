@@ -9,7 +9,7 @@ import java.util.List;
  *
  * @param quantity what must be held
  * @param unit K, MHz, ps or rad
- * @param limit value at which the first requirement fails
+ * @param limit modulus of the value at which the first requirement fails
  */
 public record StabilityLimit(String quantity, String unit, double limit) {
     /** The limits that the headroom contains. */
@@ -23,11 +23,11 @@ public record StabilityLimit(String quantity, String unit, double limit) {
             } else if (path.endsWith("analyzer.phaseNoiseRmsRad")) {
                 limits.add(new StabilityLimit(site(path) + " analyzer phase noise rms", "rad", each.limit()));
             } else if (path.endsWith("analyzer.mismatchPs")) {
-                limits.add(new StabilityLimit(site(path) + " analyzer mismatch", "ps", each.limit()));
+                limits.add(new StabilityLimit(site(path) + " analyzer mismatch", "ps", Math.abs(each.limit())));
             } else if (path.startsWith("source.pump")) {
-                limits.add(new StabilityLimit(pump(path), each.unit(), each.limit()));
+                limits.add(new StabilityLimit(pump(path), each.unit(), Math.abs(each.limit())));
             } else if (path.equals("timing.cableTemperatureStepK")) {
-                limits.add(new StabilityLimit("cable temperature step", "K", each.limit()));
+                limits.add(new StabilityLimit("cable temperature step", "K", Math.abs(each.limit())));
             }
         }
         return limits;

@@ -17,7 +17,9 @@ import java.util.Optional;
  */
 @SuppressWarnings("ImmutableEnumChecker") // the fields are records of numbers, which never change
 public enum FibreClass implements Choice {
+    G652A("G.652.A", "conventional single-mode, edition of 2009", deployed(), standard()),
     G652B("G.652.B", "conventional single-mode, no low water peak", deployed(), standard()),
+    G652C("G.652.C", "low water peak, edition of 2009", deployed(), standard()),
     G652D("G.652.D", "standard single-mode with low water peak", deployed(), standard()),
     G653A("G.653.A", "dispersion-shifted", shifted(), new Line(1550, 0, 0.075)),
     G653B(
@@ -43,6 +45,7 @@ public enum FibreClass implements Choice {
             new Middle(Bounds.G655E_LOW, Bounds.G655E_HIGH)),
     G657A1("G.657.A1", "bend-insensitive access fibre", deployed(), standard()),
     G657A2("G.657.A2", "bend-insensitive access fibre, tighter bends", deployed(), standard()),
+    G657B2("G.657.B2", "bend-insensitive fibre for buildings", new AttenuationTable(0.38, 0.25, 0.28), standard()),
     G657B3("G.657.B3", "bend-insensitive indoor fibre", new AttenuationTable(0.38, 0.25, 0.28), standard());
 
     /**

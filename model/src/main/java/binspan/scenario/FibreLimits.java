@@ -12,7 +12,7 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * Attribute limits of ITU-T G.652 (11/2016), G.653, G.654, G.655 and G.657, from memory: compare with the
+ * Attribute limits of ITU-T G.652 (11/2016; A and C: 2009), G.653, G.654, G.655 and G.657, from memory: compare with the
  * Recommendations before quoting them. Confirmed in summaries and articles are the zero near 1310 nm of G.652, 1.0 to
  * 10.0 ps/(nm km) of G.655.C and the PMD of 0.20 of G.654.
  */
@@ -21,7 +21,9 @@ final class FibreLimits {
 
     static List<FibreLimit> of(FibreClass fibre) {
         return switch (fibre) {
+            case G652A -> join(loss(1310, 0.50), loss(1550, 0.40), zero(1300, 1324, Range.of(0.0, 0.093)), pmd(0.50));
             case G652B -> join(g652b(), standardZero(0.0), pmd(0.20));
+            case G652C -> join(g652d().subList(0, 2), zero(1300, 1324, Range.of(0.0, 0.093)), pmd(0.50));
             case G652D -> join(g652d(), standardZero(0.073), pmd(0.20));
             case G653A -> join(loss(1550, 0.35), g653a(), pmd(0.50));
             case G653B -> join(loss(1550, 0.35), pmd(0.20));
@@ -33,7 +35,7 @@ final class FibreLimits {
             case G655C -> join(loss(1550, 0.35), loss(1625, 0.40), g655c(), pmd(0.20));
             case G655D, G655E -> join(loss(1550, 0.35), loss(1625, 0.40), pmd(0.20));
             case G657A1, G657A2 -> join(g657a(), standardZero(0.0), pmd(0.20));
-            case G657B3 -> join(g657b(), zero(1250, 1350, Range.of(0.0, 0.11)), pmd(0.50));
+            case G657B2, G657B3 -> join(g657b(), zero(1250, 1350, Range.of(0.0, 0.11)), pmd(0.50));
         };
     }
 

@@ -24,7 +24,7 @@ public final class ParameterPaths {
             return new LinkLength();
         }
         List<Address> addresses = expand(path).stream()
-                .map(each -> PathParser.parse(scenario, each))
+                .map(each -> PathParser.parse(scenario, each, path))
                 .toList();
         if (!addresses.get(0).field().kind().numeric()) {
             throw new IllegalArgumentException("path \"" + path + "\" leads to "

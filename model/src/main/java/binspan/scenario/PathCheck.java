@@ -19,7 +19,10 @@ final class PathCheck {
         try {
             boolean numeric = ParameterPaths.expand(path).stream()
                     .allMatch(each -> each.equals(LinkLength.PATH)
-                            || PathParser.parse(stated, each).field().kind().numeric());
+                            || PathParser.parse(stated, each, path)
+                                    .field()
+                                    .kind()
+                                    .numeric());
             if (section.equals("spread") && !numeric) {
                 problems.add(new Problem(
                         section + "." + path, "found a path to something without a number; allowed a number's path"));

@@ -36,7 +36,19 @@ final class PathParser {
      * @throws IllegalArgumentException with the nearest known names, if it leads nowhere
      */
     static Address parse(Object root, String path) {
-        PathParser parser = new PathParser(path);
+        return parse(root, path, path);
+    }
+
+    /**
+     * Parses a path that starts at the root and stands for a longer one.
+     *
+     * @param root scenario or what a file states
+     * @param path path to follow
+     * @param written path as the user wrote it, for messages
+     * @throws IllegalArgumentException with the nearest known names, if it leads nowhere
+     */
+    static Address parse(Object root, String path, String written) {
+        PathParser parser = new PathParser(written);
         parser.descend(ScenarioSections.SCENARIO, root, path);
         return new Address(List.copyOf(parser.steps));
     }

@@ -12,7 +12,7 @@ import java.util.List;
 final class PathSections {
     private static final Range LOSS = Range.of(0, 200);
     private static final Range WAVELENGTH = Range.of(400, 2000);
-    private static final Range BANDWIDTH = Range.above(0, 20_000);
+    private static final Range BANDWIDTH = Range.of(1e-3, 20_000);
 
     private static final Field LABEL = plain("label", TEXT, "unique name by which the element is addressed")
             .optional();
@@ -83,15 +83,15 @@ final class PathSections {
                     Compensator.class,
                     LABEL,
                     number("dispersionPsPerNm", "ps/nm", Range.of(-1e6, 1e6), "dispersion at the photon's wavelength")
-                            .optional(),
+                            .optional("one of dispersionPsPerNm, share is needed"),
                     number("share", "", Range.of(-2, 2), "share of the arm's fibre dispersion that it takes away")
-                            .optional(),
+                            .optional("one of dispersionPsPerNm, share is needed"),
                     number("lossDb", "dB", LOSS, "insertion loss that does not depend on the dispersion")
                             .orElse(0.0),
                     number(
                                     "figureOfMeritPsPerNmDb",
                                     "ps/(nm dB)",
-                                    Range.above(0, 1e5),
+                                    Range.of(1e-3, 1e5),
                                     "dispersion per loss: adds loss with the dispersion")
                             .optional())
             .exactlyOneOf("dispersionPsPerNm", "share");

@@ -23,8 +23,8 @@ public final class ScenarioSections {
 
     private static final Range PHOTONS_PER_SECOND = Range.of(0, 1e13);
     private static final Range QBER = Range.of(0, 0.5);
-    private static final Range HOURS = Range.above(0, 1e6);
-    private static final Range EPSILON = Range.above(0, 0.1);
+    private static final Range HOURS = Range.of(1e-6, 1e6);
+    private static final Range EPSILON = Range.of(1e-30, 0.1);
 
     private static final Section PUMP = new Section(
                     "pump",
@@ -36,21 +36,21 @@ public final class ScenarioSections {
                                     Range.of(200, 2000),
                                     "vacuum wavelength of the light that pumps the pairs")
                             .optional("not checked"),
-                    number("repetitionRateMHz", "MHz", Range.above(0, 1e6), "pulse-pair: pump cycles per second")
-                            .optional(),
+                    number("repetitionRateMHz", "MHz", Range.of(1e-6, 1e6), "pulse-pair: pump cycles per second")
+                            .optional("needed with a pulse-pair pump"),
                     number(
                                     "pairEmissionFwhmPs",
                                     "ps",
-                                    Range.above(0, 1e6),
+                                    Range.of(1e-3, 1e6),
                                     "pulsed: intensity FWHM of the pulse in which pairs are born")
-                            .optional(),
+                            .optional("needed with a pulsed pump"),
                     choice("preparation", Preparation.class, "how the pulse pair is made")
                             .orElse(Preparation.INTERFEROMETER),
                     number("mismatchPs", "ps", Range.of(-10_000, 10_000), "bin separation minus the common imbalance")
                             .orElse(0.0),
                     number("earlyPairFraction", "", Range.of(0, 1), "pulse-pair: share of the pairs born early")
                             .orElse(0.5),
-                    number("coherenceTimeNs", "ns", Range.above(0, 1e12), "1/e time of the pump's |g1|")
+                    number("coherenceTimeNs", "ns", Range.of(1e-6, 1e12), "1/e time of the pump's |g1|")
                             .optional("perfectly coherent"),
                     number(
                                     "linewidthMHz",
@@ -74,9 +74,9 @@ public final class ScenarioSections {
                     "band",
                     Band.class,
                     number("wavelengthNm", "nm", Range.of(400, 2000), "centre as vacuum wavelength")
-                            .optional(),
+                            .optional("one of wavelengthNm, frequencyTHz, channel is needed"),
                     number("frequencyTHz", "THz", Range.of(150, 750), "centre as frequency, instead")
-                            .optional(),
+                            .optional("one of wavelengthNm, frequencyTHz, channel is needed"),
                     new Field(
                                     "channel",
                                     CHANNEL,
@@ -88,11 +88,11 @@ public final class ScenarioSections {
                                     List.of(),
                                     Content.NONE,
                                     "centre as customary channel number, 190 THz + number/10 THz, instead")
-                            .optional(),
+                            .optional("one of wavelengthNm, frequencyTHz, channel is needed"),
                     number(
                             "bandwidthFwhmGHz",
                             "GHz",
-                            Range.above(0, 20_000),
+                            Range.of(1e-3, 20_000),
                             "full width at half maximum of the filter at the source"),
                     choice("passband", PassbandShape.class, "shape of the passband")
                             .orElse(PassbandShape.GAUSSIAN),
@@ -113,11 +113,11 @@ public final class ScenarioSections {
                     number(
                                     "meanPairsPerCycle",
                                     "",
-                                    Range.above(0, 100),
+                                    Range.of(1e-12, 100),
                                     "pulsed: mean pairs per cycle with both photons inside all filters, before any loss")
-                            .optional(),
-                    number("pairRatePerSecond", "1/s", Range.above(0, 1e13), "continuous: the same as a rate")
-                            .optional(),
+                            .optional("needed with a pulsed pump"),
+                    number("pairRatePerSecond", "1/s", Range.of(1e-3, 1e13), "continuous: the same as a rate")
+                            .optional("needed with a continuous pump"),
                     number("schmidtNumber", "", Range.of(1, 1e9), "Schmidt number of the filtered pair in one bin")
                             .optional("computed"),
                     number(
@@ -129,7 +129,7 @@ public final class ScenarioSections {
                     number(
                                     "partnerPassProbability",
                                     "",
-                                    Range.above(0, 1),
+                                    Range.of(1e-6, 1),
                                     "measured probability that a photon's partner passes its filters")
                             .optional("computed"),
                     section("signal", BAND, "filter band of the signal photon"),
@@ -139,7 +139,7 @@ public final class ScenarioSections {
     private static final Section TIMING = new Section(
             "timing",
             Timing.class,
-            number("windowWidthPs", "ps", Range.above(0, 1e7), "full width of the window"),
+            number("windowWidthPs", "ps", Range.of(1e-3, 1e7), "full width of the window"),
             number(
                             "cableTemperatureStepK",
                             "K",
@@ -164,13 +164,13 @@ public final class ScenarioSections {
     private static final Section ACQUISITION = new Section(
             "acquisition",
             Acquisition.class,
-            number("durationS", "s", Range.above(0, 1e10), "wall-clock time of a key or Bell run")
+            number("durationS", "s", Range.of(1e-3, 1e10), "wall-clock time of a key or Bell run")
                     .orElse(3600.0),
-            number("uptimeShare", "", Range.above(0, 1), "share of it in which the link works")
+            number("uptimeShare", "", Range.of(1e-6, 1), "share of it in which the link works")
                     .orElse(1.0),
             count("fringePoints", Range.of(3, 100_000), "phase settings of a fringe scan")
                     .orElse(16),
-            number("secondsPerPoint", "s", Range.above(0, 1e8), "measuring time at each")
+            number("secondsPerPoint", "s", Range.of(1e-6, 1e8), "measuring time at each")
                     .orElse(30.0));
 
     private static final Section REQUIRE = new Section(
@@ -196,9 +196,11 @@ public final class ScenarioSections {
     private static final Section SPREAD = new Section(
                     "spread",
                     Spread.class,
-                    number("normal", "", WIDTH, "standard deviation").optional(),
-                    number("uniform", "", WIDTH, "half width").optional(),
-                    number("triangular", "", WIDTH, "half width of the base").optional(),
+                    number("normal", "", WIDTH, "standard deviation")
+                            .optional("one of normal, uniform, triangular is needed"),
+                    number("uniform", "", WIDTH, "half width").optional("one of normal, uniform, triangular is needed"),
+                    number("triangular", "", WIDTH, "half width of the base")
+                            .optional("one of normal, uniform, triangular is needed"),
                     plain("relative", FLAG, "whether the width is a share of the planned value")
                             .orElse(false))
             .exactlyOneOf("normal", "uniform", "triangular");
@@ -212,7 +214,7 @@ public final class ScenarioSections {
             number(
                     "imbalanceNs",
                     "ns",
-                    Range.above(0, 1e4),
+                    Range.of(1e-6, 1e4),
                     "nominal imbalance of all interferometers and bin separation (train: pulse period)"),
             section("source", SOURCE, "photon-pair source"),
             section("alice", SiteSections.arm("alice", Photon.SIGNAL), "arm and site of alice"),

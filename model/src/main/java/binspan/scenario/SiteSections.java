@@ -12,7 +12,7 @@ import java.util.function.ToDoubleFunction;
 
 /** The arms of the link in the scenario file: analyzer, detectors and clock of a site. */
 final class SiteSections {
-    private static final Range SHARE = Range.between(0, 1);
+    private static final Range SHARE = Range.of(1e-6, 1 - 1e-6);
     private static final String CLASS_VALUE = "of the detector class";
 
     private static final Section ANALYZER = new Section(
@@ -68,8 +68,8 @@ final class SiteSections {
     private static final Section GATE = new Section(
             "gate",
             Gate.class,
-            number("rateMHz", "MHz", Range.above(0, 1e6), "gates per second").optional("one for every slot"),
-            number("widthNs", "ns", Range.above(0, 1e6), "sensitive width of a gate")
+            number("rateMHz", "MHz", Range.of(1e-6, 1e6), "gates per second").optional("one for every slot"),
+            number("widthNs", "ns", Range.of(1e-6, 1e6), "sensitive width of a gate")
                     .orElse(1.0),
             number("darkProbability", "", Range.of(0, 1), "dark click probability per gate"));
 
@@ -78,7 +78,7 @@ final class SiteSections {
                     Detector.class,
                     choice("class", DetectorClass.class, "catalogue class whose values stand where none is given")
                             .optional(),
-                    fromClass(number("efficiency", "", Range.above(0, 1), "detection efficiency"), Typical::efficiency),
+                    fromClass(number("efficiency", "", Range.of(1e-6, 1), "detection efficiency"), Typical::efficiency),
                     number(
                                     "darkCountsPerSecond",
                                     "1/s",
@@ -112,7 +112,7 @@ final class SiteSections {
                 name,
                 Arm.class,
                 choice("photon", Photon.class, "which photon of the pair travels here")
-                        .orElse(photon),
+                        .orElse(siblings -> photon, photon.text() + ", or the one that the other arm leaves"),
                 number(
                                 "sourceCouplingLossDb",
                                 "dB",

@@ -16,7 +16,7 @@ final class WorksheetBell {
     }
 
     static void write(WorksheetPage page) {
-        page.section("8 Bell test");
+        page.section("9 Bell test");
         WorksheetBell bell = new WorksheetBell(page);
         bell.value();
         bell.error();
@@ -28,7 +28,7 @@ final class WorksheetBell {
         if (!p.counts().bothPorts()) {
             page.line(
                     "S",
-                    "CHSH value, sixteen settings",
+                    "CHSH value, settings half a turn apart",
                     "2 sqrt(2) {V} cos({delta})",
                     p.bell().chsh(),
                     "");

@@ -10,7 +10,7 @@ final class WorksheetCounts {
     static void write(WorksheetPage page) {
         boolean pulsed = page.scenario().pulsed();
         if (pulsed) {
-            page.section("6 Clicks");
+            page.section("7 Clicks");
             WorksheetPhotons.write(page);
             WorksheetPulsedPairs.write(page);
         } else {

@@ -25,7 +25,7 @@ final class WorksheetFiniteKey {
         if (Double.isNaN(page.prediction().key().asymptoticPerSecond())) {
             return;
         }
-        page.section("8 Finite key");
+        page.section("11 Finite key");
         WorksheetFiniteKey sheet = new WorksheetFiniteKey(page);
         sheet.protocol(page.scenario().protocol());
         sheet.block();

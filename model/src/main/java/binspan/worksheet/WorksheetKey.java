@@ -7,6 +7,7 @@ import binspan.prediction.LinkPrediction;
 /** Section 8: error rates, sifted and asymptotic key. */
 final class WorksheetKey {
     private static final String D = "delta";
+    private static final String OPPOSITE = "anti";
 
     private final WorksheetPage page;
     private final LinkPrediction p;
@@ -19,7 +20,7 @@ final class WorksheetKey {
     }
 
     static void write(WorksheetPage page) {
-        page.section("8 Errors and key");
+        page.section("10 Errors and key");
         WorksheetKey key = new WorksheetKey(page);
         key.phaseErrors();
         if (page.has("C_00")) {
@@ -31,10 +32,26 @@ final class WorksheetKey {
 
     private void phaseErrors() {
         WorksheetRates.cosine(page, D, "cos({delta})", p.coherence().phaseOffset());
-        String central = WorksheetRates.sum(page, D);
-        page.line("Q_X", "coincidences of the phase basis, all ports", central, total(), "1/s");
+        page.line("Q_X", "coincidences of the phase basis, all ports", central(), total(), "1/s");
         String formula = p.counts().bothPorts() ? "({R_12(delta)} + {R_21(delta)})/{Q_X}" : "(1 - {V} {cos_delta})/2";
         page.line("e_X", "error rate of the phase basis", formula, errors.phase(), "");
+    }
+
+    /** With one port on a side right and wrong outcomes need settings half a turn apart: the mean over both. */
+    private String central() {
+        String central = WorksheetRates.sum(page, D);
+        if (p.counts().bothPorts()) {
+            return central;
+        }
+        oppositePhase();
+        return "(" + central + " + " + WorksheetRates.sum(page, OPPOSITE) + ")/2";
+    }
+
+    private void oppositePhase() {
+        if (!page.has("cos_" + OPPOSITE)) {
+            WorksheetRates.cosine(
+                    page, OPPOSITE, "cos({delta} + pi)", p.coherence().phaseOffset() + Math.PI);
+        }
     }
 
     private double total() {
@@ -70,12 +87,12 @@ final class WorksheetKey {
 
     /** I = sum over port pairs of (-1)^(o + q) [P(delta) - P(delta + pi)]/2. */
     private void interference() {
-        WorksheetRates.cosine(page, "anti", "cos({delta} + pi)", p.coherence().phaseOffset() + Math.PI);
+        oppositePhase();
         StringBuilder sum = new StringBuilder();
         for (int a = 0; a < p.counts().central().portsA(); a++) {
             for (int b = 0; b < p.counts().central().portsB(); b++) {
                 String sign = a == b ? " + " : " - ";
-                String term = WorksheetRates.rate(page, a, b, D) + " - " + WorksheetRates.rate(page, a, b, "anti");
+                String term = WorksheetRates.rate(page, a, b, D) + " - " + WorksheetRates.rate(page, a, b, OPPOSITE);
                 sum.append(sum.length() == 0 ? "" : sign)
                         .append('(')
                         .append(term)

@@ -23,7 +23,7 @@ final class WorksheetSource {
     }
 
     static void write(WorksheetPage page) {
-        page.section("8 Source and benchmark");
+        page.section("12 Source and benchmark");
         WorksheetSource sheet = new WorksheetSource(page);
         if (page.scenario().pulsed()) {
             sheet.g2();

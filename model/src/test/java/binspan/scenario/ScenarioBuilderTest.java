@@ -122,7 +122,7 @@ final class ScenarioBuilderTest {
 
         assertThat(ScenarioBuilder.build(values).problems())
                 .containsExactly(
-                        new Problem("bob.detectors[0].efficiency", "missing; needs above 0 to 1: detection efficiency"),
+                        new Problem("bob.detectors[0].efficiency", "missing; needs 1e-6 to 1: detection efficiency"),
                         new Problem(
                                 "bob.detectors[0].darkCountsPerSecond",
                                 "missing; needs 0 to 1e10 1/s: recorded dark counts of a free-running detector"),
@@ -184,7 +184,7 @@ final class ScenarioBuilderTest {
                         new Problem("name", "missing; needs a text: name of the link"),
                         new Problem(
                                 "imbalanceNs",
-                                "missing; needs above 0 to 10000 ns: nominal imbalance of all interferometers and bin separation (train: pulse period)"),
+                                "missing; needs 1e-6 to 10000 ns: nominal imbalance of all interferometers and bin separation (train: pulse period)"),
                         new Problem("source", "missing; needs an object: photon-pair source"),
                         new Problem("alice", "missing; needs an object: arm and site of alice"),
                         new Problem("bob", "missing; needs an object: arm and site of bob"),

@@ -228,7 +228,7 @@ final class ScenarioRulesTest {
                         () -> spread("alice.detectors.eficiency")),
                 broken(
                         "spread.both.path.duct.lengthKm",
-                        "unknown path \"alice.path.duct.lengthKm\"; name one element of path by its label or as [0]; labels: cable",
+                        "unknown path \"both.path.duct.lengthKm\"; name one element of path by its label or as [0]; labels: cable",
                         () -> spread("both.path.duct.lengthKm")),
                 broken(
                         "provenance.timing.window",

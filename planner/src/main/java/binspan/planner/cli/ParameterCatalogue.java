@@ -98,11 +98,17 @@ final class ParameterCatalogue {
         return allowed + ", " + presence(field) + ": " + field.meaning();
     }
 
+    private static String optional(String otherwise) {
+        if (otherwise.isEmpty()) {
+            return "optional";
+        }
+        return otherwise.contains("needed") ? otherwise : "optional (otherwise " + otherwise + ")";
+    }
+
     private static String presence(Field field) {
         return switch (field.presence()) {
             case REQUIRED -> "required";
-            case OPTIONAL ->
-                "optional" + (field.defaultText().isEmpty() ? "" : " (otherwise " + field.defaultText() + ")");
+            case OPTIONAL -> optional(field.defaultText());
             case DEFAULTED -> field.kind() == Field.Kind.ENTRIES ? "optional" : "default " + field.defaultText();
         };
     }

@@ -105,9 +105,15 @@ final class Figure {
         if (!(error > 0.0) || !Double.isFinite(error)) {
             return bare(value);
         }
+        if (error >= USELESS) {
+            return bare(value) + " (too few counts to measure it)";
+        }
         int places = Math.max(1, Math.min(FINEST, errorPlaces(error)));
         return Digits.decimals(value, places) + " " + style.plusMinus() + " " + Digits.decimals(error, places);
     }
+
+    /** An error beyond any value that V or S can take. */
+    private static final double USELESS = 3.0;
 
     private static int errorPlaces(double error) {
         int exponent = Digits.exponent(error, 1);

@@ -14,27 +14,30 @@ final class LargestCost {
     private static final double HARDLY_ANY_KEY = 0.2;
 
     private final LinkPrediction p;
-    private final boolean windowsMissed;
+    private final String rootCause;
 
     LargestCost(LinkCheck check) {
         this.p = check.prediction();
-        this.windowsMissed = has(check, "windows-missed");
+        this.rootCause = rootCause(check);
     }
 
-    private static boolean has(LinkCheck check, String code) {
+    /** What a caution has found that spoils everything else, or an empty text. */
+    private static String rootCause(LinkCheck check) {
         for (Caution caution : check.cautions()) {
-            if (caution.code().equals(code)) {
-                return true;
+            if (caution.code().equals("windows-missed")) {
+                return "Most photons miss their windows: they arrive too far off the centre (see the caution below).";
+            }
+            if (caution.code().equals("energy-not-conserved")) {
+                return "Hardly any pair passes both filters: their centres miss the pump's energy (see the caution"
+                        + " below).";
             }
         }
-        return false;
+        return "";
     }
 
     /** A sentence on what costs the requirement most. */
     String of(Requirement requirement) {
-        return windowsMissed
-                ? "Most photons miss their windows: they arrive too far off the centre (see the caution below)."
-                : ofAligned(requirement);
+        return rootCause.isEmpty() ? ofAligned(requirement) : rootCause;
     }
 
     private String ofAligned(Requirement requirement) {
@@ -139,13 +142,14 @@ final class LargestCost {
                         * p.scenario().bob().detectors().get(0).efficiency());
         double parts = p.pathA().lossDb() - alice + p.pathB().lossDb() - bob;
         double most = Math.max(Math.max(alice, bob), Math.max(detectors, parts));
-        String what = most == alice
-                ? "alice's fibre"
-                : most == bob
-                        ? "bob's fibre"
-                        : most == parts ? "coupling, components and analyzers" : "the detectors' efficiencies";
         double all = p.pathA().lossDb() + p.pathB().lossDb() + detectors;
-        return "On the way to the clicks " + what + (most == parts || most == detectors ? " cost" : " costs")
-                + " most: " + Figure.decibels(most) + " of " + Figure.decibels(all) + ".";
+        String what = "the detectors' efficiencies cost";
+        if (most == alice || most == bob) {
+            what = (most == alice ? "alice" : "bob") + "'s fibre costs";
+        } else if (most == parts) {
+            what = "coupling, components and analyzers cost";
+        }
+        return "On the way to the clicks " + what + " most: " + Figure.decibels(most) + " of " + Figure.decibels(all)
+                + ".";
     }
 }

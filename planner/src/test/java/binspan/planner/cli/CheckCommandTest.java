@@ -55,7 +55,7 @@ final class CheckCommandTest {
         assertThat(run.status()).isEqualTo(ExitStatus.REFUSED);
         assertThat(run.out()).isEmpty();
         assertThat(run.errLines())
-                .containsExactly(file + ":10:18: imbalanceNs: found -2.0; allowed above 0 to 10000 ns");
+                .containsExactly(file + ":10:18: imbalanceNs: found -2.0; allowed 1e-6 to 10000 ns");
     }
 
     @Test
