@@ -54,8 +54,7 @@ final class CheckCommandTest {
         Run run = Run.of("check", file);
         assertThat(run.status()).isEqualTo(ExitStatus.REFUSED);
         assertThat(run.out()).isEmpty();
-        assertThat(run.errLines())
-                .containsExactly(file + ":10:18: imbalanceNs: found -2.0; allowed 1e-6 to 10000 ns");
+        assertThat(run.errLines()).containsExactly(file + ":10:18: imbalanceNs: found -2.0; allowed 1e-6 to 10000 ns");
     }
 
     @Test
