@@ -15,7 +15,7 @@ public enum DetectorClass implements Choice {
     SNSPD(
             "snspd",
             "superconducting nanowire, cooled below 3 K",
-            new Typical(0.80, 100.0, 60.0, 0.0, 0.0, 40.0, 0.0),
+            new Typical(0.80, 100.0, 60.0, 40.0, 0.0),
             600.0,
             1700.0,
             "efficiency 80-98 % and no afterpulses: Reddy et al., Optica 7, 1649 (2020), arXiv:1710.06740; reset 40 ns: Marsili et al.,"
@@ -23,14 +23,14 @@ public enum DetectorClass implements Choice {
     SNSPD_COLD_FILTER(
             "snspd-cold-filter",
             "superconducting nanowire behind a cooled band-pass filter",
-            new Typical(0.70, 10.0, 50.0, 0.0, 0.0, 40.0, 0.0),
+            new Typical(0.70, 10.0, 50.0, 40.0, 0.0),
             1500.0,
             1620.0,
             "dark counts down to 0.01 /s: Shibata et al., arXiv:1408.0562; 10 /s in the field, 70 % with the filter's loss, 50 ps: common practice"),
     INGAAS_GATED(
             "ingaas-gated",
             "InGaAs/InP avalanche diode, gated",
-            new Typical(0.20, 0.0, 150.0, 0.0, 0.0, 10_000.0, 0.03),
+            new Typical(0.20, 0.0, 150.0, 10_000.0, 0.03),
             900.0,
             1650.0,
             "21.4 %, 2.1e-5 per gate, 7 % afterpulses at 1 GHz (Chin. Phys. B, bias-dependent jitter); 24.3 %, 9.4e-5 per gate at 238 K;"
@@ -38,7 +38,7 @@ public enum DetectorClass implements Choice {
     INGAAS_FREE_RUNNING(
             "ingaas-free-running",
             "InGaAs/InP avalanche diode, free-running",
-            new Typical(0.15, 2000.0, 150.0, 0.0, 0.0, 20_000.0, 0.022),
+            new Typical(0.15, 2000.0, 150.0, 20_000.0, 0.022),
             900.0,
             1650.0,
             "10 %, 600 /s: Lunghi et al., arXiv:1204.4594; 20 us, 2.2 % afterpulses: Korzh et al., arXiv:1312.2636; 15 %, 2 kHz, 150 ps:"
@@ -46,21 +46,21 @@ public enum DetectorClass implements Choice {
     SILICON_APD(
             "silicon-apd",
             "silicon avalanche diode, thick junction",
-            new Typical(0.60, 100.0, 400.0, 0.0, 0.0, 45.0, 0.01),
+            new Typical(0.60, 100.0, 400.0, 45.0, 0.01),
             400.0,
             1000.0,
             "65 % at 650 nm, 400 ps, 25 /s: Hadfield, Nat. Photonics 3, 696 (2009), table 1 (memory); 60 %, 100 /s, 45 ns, 1 %: common practice"),
     PHOTOMULTIPLIER(
             "photomultiplier",
             "photomultiplier with infrared photocathode",
-            new Typical(0.02, 200_000.0, 300.0, 0.0, 0.0, 10.0, 0.0),
+            new Typical(0.02, 200_000.0, 300.0, 10.0, 0.0),
             950.0,
             1700.0,
             "2 % at 1550 nm, 300 ps, 2e5 /s: Hadfield, Nat. Photonics 3, 696 (2009), table 1 (memory); 10 ns: common practice"),
     UP_CONVERSION(
             "up-conversion",
             "conversion to the visible in a nonlinear waveguide, then a silicon avalanche diode",
-            new Typical(0.30, 1000.0, 300.0, 0.0, 0.0, 45.0, 0.01),
+            new Typical(0.30, 1000.0, 300.0, 45.0, 0.01),
             1520.0,
             1580.0,
             "about 30 %: Shentu et al., Opt. Express 21, 13986 (2013); 37 %, 1e3 /s: Pelc et al., Opt. Express 19, 21445 (2011);"
@@ -72,8 +72,6 @@ public enum DetectorClass implements Choice {
      * @param efficiency detection efficiency
      * @param darkCountsPerSecond dark counts of a free-running detector, 1/s
      * @param jitterFwhmPs jitter, ps FWHM
-     * @param jitterTailFraction share of clicks in an exponential tail
-     * @param jitterTailPs its time constant, ps
      * @param deadTimeNs dead time, ns
      * @param afterpulseProbability afterpulses per click
      */
@@ -81,8 +79,6 @@ public enum DetectorClass implements Choice {
             double efficiency,
             double darkCountsPerSecond,
             double jitterFwhmPs,
-            double jitterTailFraction,
-            double jitterTailPs,
             double deadTimeNs,
             double afterpulseProbability) {}
 
