@@ -8,7 +8,7 @@ public final class SlotCapturing {
     private static final int MOST_SLOTS = 40;
     private static final int NEIGHBOURS = 2;
     private static final double FAR = 9.0;
-    private static final double TAIL_TIMES = 45.0;
+    private static final double TAIL_TIMES = 30.0;
 
     private final CaptureInputs in;
     private final JointCapture pairs;
@@ -36,18 +36,30 @@ public final class SlotCapturing {
         double widest = 0.0;
         for (int port = 0; port < in.portsA().size(); port++) {
             widest = Math.max(
-                    widest, extent(in.portsA().get(port), pairs.arrival().singlesA()) + Math.abs(in.lateA()));
+                    widest, extent(true, in.portsA().get(port), pairs.arrival().singlesA()) + Math.abs(in.lateA()));
         }
         for (int port = 0; port < in.portsB().size(); port++) {
             widest = Math.max(
-                    widest, extent(in.portsB().get(port), pairs.arrival().singlesB()) + Math.abs(in.lateB()));
+                    widest, extent(false, in.portsB().get(port), pairs.arrival().singlesB()) + Math.abs(in.lateB()));
         }
         double slots = (widest + in.windowWidth() / 2.0) / in.separation();
         return (int) Math.max(1.0, Math.min(MOST_SLOTS, Math.ceil(slots)));
     }
 
-    private static double extent(PortTiming port, double lightVariance) {
-        return FAR * Math.sqrt(lightVariance + port.variance()) + (port.tailed() ? TAIL_TIMES * port.tailTime() : 0.0);
+    /**
+     * How far from the slot centre clicks can come: nine rms of Gaussian light, or the box that dispersion makes of a flat top and nine rms of its blur;
+     * and thirty time constants of a tail.
+     */
+    private double extent(boolean alice, PortTiming port, double lightVariance) {
+        Passband filters = alice ? in.spectrum().alice() : in.spectrum().bob();
+        double tail = port.tailed() ? TAIL_TIMES * port.tailTime() : 0.0;
+        double gaussian = FAR * Math.sqrt(lightVariance + port.variance());
+        if (filters.gaussian()) {
+            return gaussian + tail;
+        }
+        double nearField = (1.0 / filters.variance() + in.spectrum().inversePump()) / 4.0;
+        double box = Math.abs(alice ? in.betaA() : in.betaB()) * filters.halfWidth();
+        return Math.min(gaussian, box + FAR * Math.sqrt(nearField + port.variance())) + tail;
     }
 
     private double[][] singles(boolean alice) {
@@ -63,7 +75,7 @@ public final class SlotCapturing {
     private double[] singles(boolean alice, PortTiming port) {
         ArrivalTime arrival = pairs.arrival();
         double variance = alice ? arrival.singlesA() : arrival.singlesB();
-        double extent = extent(port, variance);
+        double extent = extent(alice, port, variance);
         double[] captures = new double[2 * reach + 1];
         for (int offset = -reach; offset <= reach; offset++) {
             Window window = window(alice, offset);
@@ -98,8 +110,8 @@ public final class SlotCapturing {
     }
 
     private PairCaptures joint(PortTiming a, PortTiming b) {
-        double extentA = extent(a, pairs.arrival().pairA());
-        double extentB = extent(b, pairs.arrival().pairB());
+        double extentA = extent(true, a, pairs.arrival().pairA());
+        double extentB = extent(false, b, pairs.arrival().pairB());
         int side = 2 * reach + 1;
         double[] captures = new double[side * side];
         for (int i = -reach; i <= reach; i++) {
