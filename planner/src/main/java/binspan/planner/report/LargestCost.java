@@ -113,7 +113,9 @@ final class LargestCost {
         double sifted = sifted();
         double fraction = p.key().asymptoticPerSecond() / sifted;
         if (sifted < required) {
-            return "Only " + Figure.bits(sifted) + " are sifted. " + rate();
+            String ports =
+                    p.counts().bothPorts() ? "" : " With one detected port on a side, half or more of them are lost.";
+            return "Only " + Figure.bits(sifted) + " are sifted." + ports + " " + rate();
         }
         return fraction < HARDLY_ANY_KEY
                 ? "The errors leave " + Figure.bare(fraction) + " secret bits of each sifted one. " + errors()

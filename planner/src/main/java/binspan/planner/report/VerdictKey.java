@@ -41,9 +41,9 @@ final class VerdictKey {
     }
 
     private void sifted() {
-        boolean unused = p.counts().hasTimeBasis() && !p.counts().bothPorts();
+        boolean testOnly = p.counts().hasTimeBasis() && !p.counts().bothPorts();
         String phase = Figure.bits(p.key().siftedPhasePerSecond());
-        page.row("sifted, phase basis", unused ? phase + "; unused, as a port is not detected" : phase);
+        page.row("sifted, phase basis", testOnly ? phase + "; test bits only, no key" : phase);
         if (results.has("key.siftedTimeBps")) {
             page.row("sifted, time basis", Figure.bits(p.key().siftedTimePerSecond()));
         }

@@ -206,10 +206,10 @@ final class VerdictTest {
     }
 
     @Test
-    void phaseBitsAreSaidToBeUnusedWithoutBothPorts() {
+    void phaseBitsAreSaidToBeTestBitsWithoutBothPorts() {
         Values stated = ReportScenarios.good();
         stated.section("alice").put("detectors", List.of(new Values().put("class", DetectorClass.SNSPD)));
-        assertThat(plain(stated)).contains("unused, as a port is not detected", "not detected");
+        assertThat(plain(stated)).contains("test bits only, no key");
     }
 
     @Test
