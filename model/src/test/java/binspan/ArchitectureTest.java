@@ -18,7 +18,7 @@ final class ArchitectureTest {
 
     /** In the order of the data flow: each package may use those named before it, never those after. */
     private static final List<String> PACKAGES =
-            List.of("units", "scenario", "optics", "counting", "merit", "prediction", "worksheet");
+            List.of("units", "scenario", "optics", "counting", "merit", "prediction", "worksheet", "study");
 
     @ArchTest
     static final ArchRule PACKAGES_FOLLOW_THE_DATA_FLOW = dataFlow();

@@ -9,7 +9,11 @@ package binspan.counting;
  * mu/K). Method: Takeoka, Jin, Sasaki, New J. Phys. 17, 043030 (2015).
  */
 public final class ClickStatistics {
-    private static final double SMALL = 1e-4;
+    /** Below it the series of {@link #seriesLog1p} and {@link #seriesExpm1} are exact to rounding, and several times quicker. */
+    private static final double SMALL = 0.02;
+
+    /** Below it four terms are enough. */
+    private static final double TINY = 1e-4;
 
     private ClickStatistics() {}
 
@@ -33,12 +37,8 @@ public final class ClickStatistics {
      */
     public static double click(double photons, double noise, double modes) {
         double x = photons / modes;
-        double exponent = x < SMALL && x > 0.0
-                ? noise + modes * x * (1.0 - x * (0.5 - x * (1.0 / 3.0 - x * 0.25)))
-                : -logNoClick(photons, noise, modes);
-        return exponent < SMALL
-                ? exponent * (1.0 - exponent / 2.0 * (1.0 - exponent / 3.0 * (1.0 - exponent / 4.0)))
-                : -Math.expm1(-exponent);
+        double exponent = x < SMALL && x > 0.0 ? noise + modes * seriesLog1p(x) : -logNoClick(photons, noise, modes);
+        return exponent < SMALL ? -seriesExpm1(-exponent) : -Math.expm1(-exponent);
     }
 
     /**
@@ -50,14 +50,26 @@ public final class ClickStatistics {
      */
     public static double correlation(double pairs, double spread, double modes) {
         double exponent = Double.isInfinite(modes) ? pairs : exponent(pairs / (modes * spread), modes);
-        return exponent < SMALL
-                ? exponent * (1.0 + exponent / 2.0 * (1.0 + exponent / 3.0 * (1.0 + exponent / 4.0)))
-                : Math.expm1(exponent);
+        return exponent < SMALL ? seriesExpm1(exponent) : Math.expm1(exponent);
     }
 
-    /** -K log1p(-x), by its series where x is small. */
+    /** -K log1p(-x). */
     private static double exponent(double x, double modes) {
-        return x < SMALL ? modes * x * (1.0 + x * (0.5 + x * (1.0 / 3.0 + x * 0.25))) : -modes * Math.log1p(-x);
+        return -modes * (x < SMALL ? seriesLog1p(-x) : Math.log1p(-x));
+    }
+
+    /** ln(1 + x) for |x| below {@value #SMALL}; what is left out is below 1e-17 of it. */
+    private static double seriesLog1p(double x) {
+        double tail = Math.abs(x) < TINY
+                ? 1.0 / 4
+                : 1.0 / 4 - x * (1.0 / 5 - x * (1.0 / 6 - x * (1.0 / 7 - x * (1.0 / 8 - x * (1.0 / 9)))));
+        return x * (1.0 - x * (1.0 / 2 - x * (1.0 / 3 - x * tail)));
+    }
+
+    /** e^x - 1 for |x| below {@value #SMALL}; what is left out is below 1e-17 of it. */
+    private static double seriesExpm1(double x) {
+        double tail = Math.abs(x) < TINY ? 1.0 / 24 : 1.0 / 24 + x * (1.0 / 120 + x * (1.0 / 720 + x * (1.0 / 5040)));
+        return x * (1.0 + x * (1.0 / 2 + x * (1.0 / 6 + x * tail)));
     }
 
     /**

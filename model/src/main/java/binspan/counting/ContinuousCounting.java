@@ -13,14 +13,13 @@ public final class ContinuousCounting {
     private final ContinuousInputs in;
     private final List<DetectorLoad> loadsA;
     private final List<DetectorLoad> loadsB;
-
-    private final Peaks[][] known;
+    private final Peaks[] known;
 
     private ContinuousCounting(ContinuousInputs in) {
         this.in = in;
         this.loadsA = in.alice().loads(1.0, Double.POSITIVE_INFINITY);
         this.loadsB = in.bob().loads(1.0, Double.POSITIVE_INFINITY);
-        this.known = new Peaks[loadsA.size()][loadsB.size()];
+        this.known = new Peaks[loadsA.size() * loadsB.size()];
     }
 
     /** The counts of a continuous-pump source. */
@@ -29,12 +28,12 @@ public final class ContinuousCounting {
     }
 
     private LinkCounts counts() {
-        PortPair[][] central = new PortPair[loadsA.size()][loadsB.size()];
+        PortPair[] central = new PortPair[loadsA.size() * loadsB.size()];
         double side = 0.0;
         for (int a = 0; a < loadsA.size(); a++) {
             for (int b = 0; b < loadsB.size(); b++) {
                 Peaks peaks = peaks(a, b);
-                central[a][b] = pair(a, b, loadsA.get(a), loadsB.get(b), peaks.central());
+                central[a * loadsB.size() + b] = pair(a, b, loadsA.get(a), loadsB.get(b), peaks.central());
                 side += pair(a, b, loadsA.get(a), loadsB.get(b), peaks.aliceLong())
                                 .atCosine(0.0)
                         + pair(a, b, loadsA.get(a), loadsB.get(b), peaks.bobLong())
@@ -44,7 +43,7 @@ public final class ContinuousCounting {
         DetectorLoad quietA =
                 DetectorLoad.noiseless(in.alice().arm().detectors().get(0), loadsA.get(0));
         DetectorLoad quietB = DetectorLoad.noiseless(in.bob().arm().detectors().get(0), loadsB.get(0));
-        PortPairs pairs = new PortPairs(central);
+        PortPairs pairs = new PortPairs(central, loadsB.size());
         return new LinkCounts(
                 in.alice(),
                 in.bob(),
@@ -53,7 +52,7 @@ public final class ContinuousCounting {
                 pairs,
                 List.of(),
                 side,
-                pairs.sum(0.0) + side,
+                pairs.mean() + side,
                 balanceContrast(),
                 pair(0, 0, quietA, quietB, peaks(0, 0).central()));
     }
@@ -67,10 +66,11 @@ public final class ContinuousCounting {
     private Peaks peaks(int a, int b) {
         int likeA = in.portsA().get(a).same(in.portsA().get(0)) ? 0 : a;
         int likeB = in.portsB().get(b).same(in.portsB().get(0)) ? 0 : b;
-        if (known[likeA][likeB] == null) {
-            known[likeA][likeB] = capturePeaks(likeA, likeB);
+        int index = likeA * loadsB.size() + likeB;
+        if (known[index] == null) {
+            known[index] = capturePeaks(likeA, likeB);
         }
-        return known[likeA][likeB];
+        return known[index];
     }
 
     private Peaks capturePeaks(int a, int b) {

@@ -27,6 +27,13 @@ public record PulsedPortPair(
         return cyclesPerSecond * (accidental + noClick * ClickStatistics.correlation(pairs, spread, modes));
     }
 
+    /** The same with best and worst phase exchanged. */
+    PulsedPortPair opposite() {
+        return amplitude == 0.0
+                ? this
+                : new PulsedPortPair(cyclesPerSecond, accidental, noClick, spread, modes, base, -amplitude);
+    }
+
     @Override
     public double accidentalPerSecond() {
         return cyclesPerSecond * accidental;

@@ -43,7 +43,12 @@ public record FiniteKey(FiniteKeyBlock perSecond) {
      */
     public double bits(double uptime) {
         FiniteKeyBlock block = block(uptime);
-        return block.keyBits() < FEWEST_BITS || block.testBits() < 1.0 ? -FEWEST_BITS : FiniteKeyBound.longest(block);
+        return tooFew(block) ? -FEWEST_BITS : FiniteKeyBound.longest(block);
+    }
+
+    /** Whether a block is too small for any key. */
+    public static boolean tooFew(FiniteKeyBlock block) {
+        return block.keyBits() < FEWEST_BITS || block.testBits() < 1.0;
     }
 
     /** Uptime after which the key has its first bit, s; infinite if it never has. */

@@ -48,7 +48,12 @@ public record SecretKey(
      * @param efficiency error-correction efficiency f, 1 or more
      */
     public static double secretFraction(double bitError, double phaseError, double efficiency) {
-        return Math.max(0.0, 1.0 - efficiency * binaryEntropy(bitError) - binaryEntropy(phaseError));
+        return Math.max(0.0, fraction(bitError, phaseError, efficiency));
+    }
+
+    /** The same before it is cut off at 0: negative where the errors cost more than the bits hold. */
+    public static double fraction(double bitError, double phaseError, double efficiency) {
+        return 1.0 - efficiency * binaryEntropy(bitError) - binaryEntropy(phaseError);
     }
 
     /** Binary entropy h(x) = -x log2 x - (1-x) log2(1-x), bits, for x in [0, 1]. */

@@ -45,6 +45,7 @@ public final class BivariateNormal {
 
     private static double panel(double start, double stop, double fromX, double toX, double fromY, double toY) {
         GaussLegendre rule = GaussLegendre.twelve();
+        boolean centred = fromX == -toX && fromY == -toY;
         double half = (stop - start) / 2.0;
         double middle = (stop + start) / 2.0;
         double sum = 0.0;
@@ -54,11 +55,9 @@ public final class BivariateNormal {
             double cos = Math.cos(theta);
             double scale = -0.5 / (cos * cos);
             double tilt = -1.0 / (1.0 + sin);
-            sum += rule.weights[i]
-                    * (corner(fromX, fromY, scale, tilt)
-                            - corner(fromX, toY, scale, tilt)
-                            - corner(toX, fromY, scale, tilt)
-                            + corner(toX, toY, scale, tilt));
+            double corners = corner(toX, toY, scale, tilt) - corner(fromX, toY, scale, tilt);
+            double opposite = centred ? corners : corner(fromX, fromY, scale, tilt) - corner(toX, fromY, scale, tilt);
+            sum += rule.weights[i] * (corners + opposite);
         }
         return sum * half;
     }

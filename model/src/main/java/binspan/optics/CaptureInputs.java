@@ -29,17 +29,24 @@ public record CaptureInputs(
         boolean endless) {
 
     /** Whether the other inputs are surely equal: the same spectrum object and the same numbers. */
-    @SuppressWarnings("ReferenceEquality") // identity is enough here and quicker than comparing the spectra
     public boolean same(CaptureInputs other) {
-        return spectrum == other.spectrum
-                && betaA == other.betaA
-                && betaB == other.betaB
+        return separation == other.separation && sameWindow(other);
+    }
+
+    /** Whether the central window surely captures the same: everything but the distance of the slots is equal. */
+    boolean sameWindow(CaptureInputs other) {
+        return sameLight(other)
                 && windowWidth == other.windowWidth
-                && separation == other.separation
                 && lateA == other.lateA
                 && lateB == other.lateB
                 && endless == other.endless
                 && PortTiming.same(portsA, other.portsA)
                 && PortTiming.same(portsB, other.portsB);
+    }
+
+    /** Whether the light surely spreads alike. */
+    @SuppressWarnings("ReferenceEquality") // identity is enough here and quicker than comparing the spectra
+    boolean sameLight(CaptureInputs other) {
+        return spectrum == other.spectrum && betaA == other.betaA && betaB == other.betaB;
     }
 }

@@ -6,18 +6,36 @@ package binspan.optics;
  * <p>A photon of slot j seen by the window of slot a has the offset j - a; slots whose tails do not reach the window are left at 0.
  */
 public final class SlotCaptures {
+    private final CaptureInputs inputs;
+    private final JointCapture light;
     private final int reach;
     private final double[][] singlesA;
     private final double[][] singlesB;
-    private final PairCaptures[][] joint;
-    private final ArrivalTime arrival;
+    private final PairCaptures[] joint;
 
-    SlotCaptures(int reach, double[][] singlesA, double[][] singlesB, PairCaptures[][] joint, ArrivalTime arrival) {
+    SlotCaptures(
+            CaptureInputs inputs,
+            JointCapture light,
+            int reach,
+            double[][] singlesA,
+            double[][] singlesB,
+            PairCaptures[] joint) {
+        this.inputs = inputs;
+        this.light = light;
         this.reach = reach;
         this.singlesA = singlesA;
         this.singlesB = singlesB;
         this.joint = joint;
-        this.arrival = arrival;
+    }
+
+    /** What they were computed from. */
+    public CaptureInputs inputs() {
+        return inputs;
+    }
+
+    /** How the light spreads, whatever windows look at it. */
+    JointCapture light() {
+        return light;
     }
 
     /** Largest offset kept, in slots. */
@@ -27,7 +45,7 @@ public final class SlotCaptures {
 
     /** Spread of the light. */
     public ArrivalTime arrival() {
-        return arrival;
+        return light.arrival();
     }
 
     /** Captured share of alice's photons. */
@@ -42,6 +60,6 @@ public final class SlotCaptures {
 
     /** Captured shares of the pairs of two ports. */
     public PairCaptures pairs(int portA, int portB) {
-        return joint[portA][portB];
+        return joint[portA * singlesB.length + portB];
     }
 }

@@ -12,23 +12,38 @@ public final class SlotCapturing {
 
     private final CaptureInputs in;
     private final JointCapture pairs;
+    private final SlotCaptures before;
     private final int reach;
 
-    private SlotCapturing(CaptureInputs in) {
+    private SlotCapturing(CaptureInputs in, SlotCaptures before) {
         this.in = in;
-        this.pairs = new JointCapture(in.spectrum(), in.betaA(), in.betaB());
+        this.pairs = before != null && in.sameLight(before.inputs())
+                ? before.light()
+                : new JointCapture(in.spectrum(), in.betaA(), in.betaB());
+        this.before = before != null && in.sameWindow(before.inputs()) ? before : null;
         this.reach = in.endless() ? endlessReach() : THREE_SLOTS;
     }
 
     /** Captured shares of all slots. */
     public static SlotCaptures of(CaptureInputs in) {
-        SlotCapturing capturing = new SlotCapturing(in);
+        return of(in, null);
+    }
+
+    /**
+     * Captured shares of all slots, with what stays the same taken from others.
+     *
+     * @param in what they depend on
+     * @param before captured shares of similar inputs, or null
+     */
+    public static SlotCaptures of(CaptureInputs in, SlotCaptures before) {
+        SlotCapturing capturing = new SlotCapturing(in, before);
         return new SlotCaptures(
+                in,
+                capturing.pairs,
                 capturing.reach,
                 capturing.singles(true),
                 capturing.singles(false),
-                capturing.joint(),
-                capturing.pairs.arrival());
+                capturing.joint());
     }
 
     /** Slots within nine rms of the window, never more than {@value #MOST_SLOTS}: farther spread is cautioned about elsewhere. */
@@ -66,18 +81,23 @@ public final class SlotCapturing {
         List<PortTiming> ports = alice ? in.portsA() : in.portsB();
         double[][] captures = new double[ports.size()][];
         for (int port = 0; port < captures.length; port++) {
-            captures[port] =
-                    port > 0 && ports.get(port).same(ports.get(0)) ? captures[0] : singles(alice, ports.get(port));
+            captures[port] = port > 0 && ports.get(port).same(ports.get(0))
+                    ? captures[0]
+                    : singles(alice, port, ports.get(port));
         }
         return captures;
     }
 
-    private double[] singles(boolean alice, PortTiming port) {
+    private double[] singles(boolean alice, int index, PortTiming port) {
         ArrivalTime arrival = pairs.arrival();
         double variance = alice ? arrival.singlesA() : arrival.singlesB();
         double extent = extent(alice, port, variance);
         double[] captures = new double[2 * reach + 1];
         for (int offset = -reach; offset <= reach; offset++) {
+            if (offset == 0 && before != null) {
+                captures[reach] = alice ? before.alice(index, 0) : before.bob(index, 0);
+                continue;
+            }
             Window window = window(alice, offset);
             if (reaches(window, extent)) {
                 captures[offset + reach] = single(alice, port, window, Math.sqrt(variance + port.variance()));
@@ -94,22 +114,22 @@ public final class SlotCapturing {
                 : BoxedCapture.singles(filters, spectrum.inversePump(), alice ? in.betaA() : in.betaB(), port, window);
     }
 
-    private PairCaptures[][] joint() {
-        PairCaptures[][] joint =
-                new PairCaptures[in.portsA().size()][in.portsB().size()];
-        for (int a = 0; a < joint.length; a++) {
-            for (int b = 0; b < joint[a].length; b++) {
-                int likeA = in.portsA().get(a).same(in.portsA().get(0)) ? 0 : a;
-                int likeB = in.portsB().get(b).same(in.portsB().get(0)) ? 0 : b;
-                joint[a][b] = likeA < a || likeB < b
-                        ? joint[likeA][likeB]
-                        : joint(in.portsA().get(a), in.portsB().get(b));
-            }
+    private PairCaptures[] joint() {
+        int portsB = in.portsB().size();
+        PairCaptures[] joint = new PairCaptures[in.portsA().size() * portsB];
+        for (int i = 0; i < joint.length; i++) {
+            int a = i / portsB;
+            int b = i % portsB;
+            int likeA = in.portsA().get(a).same(in.portsA().get(0)) ? 0 : a;
+            int likeB = in.portsB().get(b).same(in.portsB().get(0)) ? 0 : b;
+            joint[i] = likeA < a || likeB < b ? joint[likeA * portsB + likeB] : joint(a, b);
         }
         return joint;
     }
 
-    private PairCaptures joint(PortTiming a, PortTiming b) {
+    private PairCaptures joint(int portA, int portB) {
+        PortTiming a = in.portsA().get(portA);
+        PortTiming b = in.portsB().get(portB);
         double extentA = extent(true, a, pairs.arrival().pairA());
         double extentB = extent(false, b, pairs.arrival().pairB());
         int side = 2 * reach + 1;
@@ -122,7 +142,9 @@ public final class SlotCapturing {
             for (int k = lowest(i); k <= highest(i); k++) {
                 Window windowB = window(false, k);
                 if (reaches(windowB, extentB)) {
-                    captures[(i + reach) * side + k + reach] = pairs.of(a, b, windowA, windowB);
+                    captures[(i + reach) * side + k + reach] = i == 0 && k == 0 && before != null
+                            ? before.pairs(portA, portB).at(0, 0)
+                            : pairs.of(a, b, windowA, windowB);
                 }
             }
         }

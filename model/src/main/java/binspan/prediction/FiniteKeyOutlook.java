@@ -13,7 +13,7 @@ public record FiniteKeyOutlook(double bits, double bitsPerSecond, double seconds
     private static final FiniteKeyOutlook NONE = new FiniteKeyOutlook(Double.NaN, Double.NaN, Double.NaN);
 
     /** The outlook of a predicted link. */
-    static FiniteKeyOutlook of(LinkPrediction prediction) {
+    public static FiniteKeyOutlook of(LinkPrediction prediction) {
         if (Double.isNaN(prediction.key().asymptoticPerSecond())) {
             return NONE;
         }

@@ -1,17 +1,11 @@
 package binspan.prediction;
 
-import binspan.merit.FiniteKey;
-import binspan.merit.FiniteKeyBlock;
-import binspan.merit.FiniteKeyBound;
 import binspan.scenario.Parameter;
 import binspan.scenario.ParameterPaths;
 import binspan.scenario.Range;
 import binspan.scenario.Scenario;
-import binspan.units.Scale;
 import java.util.ArrayList;
-import java.util.EnumMap;
 import java.util.List;
-import java.util.Map;
 import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
 import org.apache.commons.numbers.rootfinder.BrentSolver;
@@ -30,22 +24,18 @@ final class HeadroomSearch {
 
     private final Scenario scenario;
     private final LinkPredictor predictor = new LinkPredictor();
-    private final Map<Requirement, Double> held = new EnumMap<>(Requirement.class);
+    private final RequirementMargins held;
 
     private HeadroomSearch(Scenario scenario, List<RequirementOutcome> outcomes) {
         this.scenario = scenario;
-        for (RequirementOutcome outcome : outcomes) {
-            if (outcome.met()) {
-                held.put(outcome.requirement(), outcome.required());
-            }
-        }
+        this.held = RequirementMargins.ofMet(outcomes);
     }
 
     /** The headroom of every drifting quantity that has a limit, for the requirements that are met. */
     static List<Headroom> of(Scenario scenario, List<RequirementOutcome> outcomes) {
         HeadroomSearch search = new HeadroomSearch(scenario, outcomes);
         List<Headroom> headroom = new ArrayList<>();
-        if (!search.held.isEmpty()) {
+        if (!search.held.requirements().isEmpty()) {
             DriftingQuantities.of(scenario).forEach(quantity -> search.add(quantity, headroom));
         }
         return headroom;
@@ -112,53 +102,11 @@ final class HeadroomSearch {
     }
 
     private double leastMargin(Axis axis, double value) {
-        LinkPrediction prediction = predictor.of(axis.scenarios().apply(value));
-        double least = Double.POSITIVE_INFINITY;
-        for (Map.Entry<Requirement, Double> each : held.entrySet()) {
-            double margin = margin(each.getKey(), each.getValue(), prediction);
-            least = margin <= least ? margin : Double.isNaN(margin) ? Double.NEGATIVE_INFINITY : least;
-        }
-        return least;
+        return held.least(predictor.of(axis.scenarios().apply(value)));
     }
 
     private Requirement worst(Axis axis, double value) {
-        LinkPrediction prediction = predictor.of(axis.scenarios().apply(value));
-        Requirement worst = held.keySet().iterator().next();
-        double least = Double.POSITIVE_INFINITY;
-        for (Map.Entry<Requirement, Double> each : held.entrySet()) {
-            double margin = margin(each.getKey(), each.getValue(), prediction);
-            if (!(margin >= least)) {
-                least = margin;
-                worst = each.getKey();
-            }
-        }
-        return worst;
-    }
-
-    /**
-     * Margin as the logarithm of the ratio of prediction and requirement, so that different units compare and the search sees
-     * a smooth slope; for the first key the key length at the deadline per key bit.
-     */
-    private static double margin(Requirement requirement, double required, LinkPrediction prediction) {
-        if (requirement == Requirement.FIRST_KEY) {
-            return keyAtDeadline(prediction, required * Scale.HOUR);
-        }
-        double predicted = requirement.predicted(prediction, null);
-        if (!(required > 0.0)) {
-            return requirement.margin(predicted, required);
-        }
-        return requirement.atLeast() ? Math.log(predicted / required) : Math.log(required / predicted);
-    }
-
-    /** Key length per key bit when the deadline comes; the quicker bound decides where it already finds a key. */
-    private static double keyAtDeadline(LinkPrediction prediction, double deadline) {
-        if (Double.isNaN(prediction.key().asymptoticPerSecond())) {
-            return Double.NaN;
-        }
-        FiniteKey key = prediction.finiteKey();
-        FiniteKeyBlock block = key.block(deadline * prediction.uptimeShare());
-        double quick = FiniteKeyBound.TOMAMICHEL_2012.bits(block);
-        double bits = quick >= 1.0 ? quick : key.bits(deadline * prediction.uptimeShare());
-        return (bits - 1.0) / Math.max(1.0, block.keyBits());
+        int tightest = held.tightest(predictor.of(axis.scenarios().apply(value)));
+        return held.requirements().get(tightest);
     }
 }

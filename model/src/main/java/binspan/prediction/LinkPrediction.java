@@ -22,35 +22,64 @@ import java.util.List;
  * Everything predicted of a link with every intermediate, finite-key statistics apart.
  *
  * @param scenario the link
- * @param spectrum joint spectrum of the pairs
- * @param pathA alice's path
- * @param pathB bob's path
- * @param portsA timing of alice's ports
- * @param portsB timing of bob's ports
- * @param arrival spread of the arrival times by the light; continuous: of no meaning for singles
- * @param imbalances delays of the interferometers
- * @param coherence two-photon coherence by cause
+ * @param optics all that happens to the light before it is counted
  * @param counts counts
  * @param fringe fringe of ports (1,1)
- * @param budget visibility budget
  * @param bell CHSH test
  * @param key error rates, sifted and asymptotic key
  */
 public record LinkPrediction(
         Scenario scenario,
-        PairSpectrum spectrum,
-        OpticalPath pathA,
-        OpticalPath pathB,
-        List<PortTiming> portsA,
-        List<PortTiming> portsB,
-        ArrivalTime arrival,
-        Imbalances imbalances,
-        TwoPhotonCoherence coherence,
+        LinkOptics optics,
         LinkCounts counts,
         FringeVisibility fringe,
-        VisibilityBudget budget,
         BellTest bell,
         SecretKey key) {
+
+    /** Joint spectrum of the pairs. */
+    public PairSpectrum spectrum() {
+        return optics.spectrum();
+    }
+
+    /** Alice's path. */
+    public OpticalPath pathA() {
+        return optics.alice().path();
+    }
+
+    /** Bob's path. */
+    public OpticalPath pathB() {
+        return optics.bob().path();
+    }
+
+    /** Timing of alice's ports. */
+    public List<PortTiming> portsA() {
+        return optics.alice().ports();
+    }
+
+    /** Timing of bob's ports. */
+    public List<PortTiming> portsB() {
+        return optics.bob().ports();
+    }
+
+    /** Spread of the arrival times by the light; continuous: of no meaning for singles. */
+    public ArrivalTime arrival() {
+        return optics.arrival();
+    }
+
+    /** Delays of the interferometers. */
+    public Imbalances imbalances() {
+        return optics.imbalances();
+    }
+
+    /** Two-photon coherence by cause. */
+    public TwoPhotonCoherence coherence() {
+        return optics.coherence();
+    }
+
+    /** Visibility budget. */
+    public VisibilityBudget budget() {
+        return VisibilityBudget.of(coherence(), counts, fringe.raw());
+    }
 
     /** Pump cycles per second: stated for a pulse pair, one each period for a train; NaN for a continuous pump. */
     public double cyclesPerSecond() {
@@ -104,10 +133,10 @@ public record LinkPrediction(
 
     /** Rms of t_A - t_B of ports (1,1) with a continuous pump, s. */
     public double correlationRms() {
-        double beta = pathA.groupDelayDispersion() + pathB.groupDelayDispersion();
-        return Math.sqrt(ArrivalTime.differenceVariance(spectrum, beta)
-                + portsA.get(0).variance()
-                + portsB.get(0).variance());
+        double beta = pathA().groupDelayDispersion() + pathB().groupDelayDispersion();
+        return Math.sqrt(ArrivalTime.differenceVariance(spectrum(), beta)
+                + portsA().get(0).variance()
+                + portsB().get(0).variance());
     }
 
     /** Rms arrival of an arm's singles at its worst port, detector tails not counted, s; with a continuous pump that of the time difference. */
@@ -116,19 +145,34 @@ public record LinkPrediction(
             return correlationRms();
         }
         double worst = 0.0;
-        for (PortTiming port : alice ? portsA : portsB) {
+        for (PortTiming port : alice ? portsA() : portsB()) {
             worst = Math.max(worst, port.variance());
         }
-        return Math.sqrt((alice ? arrival.singlesA() : arrival.singlesB()) + worst);
+        return Math.sqrt((alice ? arrival().singlesA() : arrival().singlesB()) + worst);
     }
 
     /** Modes that the source can fill per second: f 2K, f K for a train, those of the mirrored passband with a continuous pump. */
     public double modesPerSecond() {
         if (!scenario.pulsed()) {
-            return spectrum.mirrored().modesPerSecond();
+            return spectrum().mirrored().modesPerSecond();
         }
         double bins = scenario.source().pump().mode() == PumpMode.PULSE_PAIR ? 2.0 : 1.0;
-        return cyclesPerSecond() * bins * spectrum.schmidtNumber();
+        return cyclesPerSecond() * bins * spectrum().schmidtNumber();
+    }
+
+    /**
+     * How much had to be computed anew since another prediction of the same predictor: 0 counts only, 1 coherence and captures as well, 2 the spread of
+     * the light as well, 3 the joint spectrum as well.
+     */
+    @SuppressWarnings("ReferenceEquality") // stages that are reused are the same objects
+    public int renewedSince(LinkPrediction before) {
+        if (spectrum() != before.spectrum()) {
+            return 3;
+        }
+        if (arrival() != before.arrival()) {
+            return 2;
+        }
+        return optics == before.optics ? 0 : 1;
     }
 
     /** Finite key that the link collects with time. */

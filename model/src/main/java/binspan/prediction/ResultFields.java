@@ -6,6 +6,7 @@ import binspan.merit.PhotonStatistics;
 import binspan.merit.RepeaterlessBound;
 import binspan.optics.OpticalPath;
 import binspan.optics.PairSpectrum;
+import binspan.prediction.ResultField.Stage;
 import binspan.units.Decibels;
 import binspan.units.Scale;
 import java.util.ArrayList;
@@ -33,62 +34,70 @@ public final class ResultFields {
     }
 
     private static void source(List<ResultField> fields) {
-        add(fields, "source.cyclesPerSecond", "1/s", LinkPrediction::cyclesPerSecond);
-        add(
+        optical(fields, "source.cyclesPerSecond", "1/s", LinkPrediction::cyclesPerSecond);
+        optical(
                 fields,
                 "source.schmidtNumber",
                 "",
                 p -> p.scenario().pulsed() ? p.spectrum().schmidtNumber() : NOT_APPLICABLE);
-        add(fields, "source.apparentMeanPairs", "", ResultFields::apparentMeanPairs);
+        counted(fields, "source.apparentMeanPairs", "", ResultFields::apparentMeanPairs);
     }
 
     private static void arm(List<ResultField> fields, String name, boolean alice) {
-        add(fields, name + ".lossDb", "dB", p -> path(p, alice).lossDb());
-        add(fields, name + ".fibreLossDb", "dB", p -> path(p, alice).fibreLossDb());
-        add(fields, name + ".dispersionPsPerNm", "ps/nm", p -> path(p, alice).dispersionPsPerNm());
-        add(
+        optical(fields, name + ".lossDb", "dB", p -> path(p, alice).lossDb());
+        optical(fields, name + ".fibreLossDb", "dB", p -> path(p, alice).fibreLossDb());
+        optical(
+                fields,
+                name + ".dispersionPsPerNm",
+                "ps/nm",
+                p -> path(p, alice).dispersionPsPerNm());
+        optical(
                 fields,
                 name + ".arrivalRmsPs",
                 "ps",
                 p -> p.scenario().pulsed() ? p.arrivalRms(alice) / Scale.PICO : NOT_APPLICABLE);
-        add(fields, name + ".delayErrorPs", "ps", p -> late(p, alice) / Scale.PICO);
+        optical(fields, name + ".delayErrorPs", "ps", p -> late(p, alice) / Scale.PICO);
         perPort(
                 fields,
                 name + ".singlesPerSecond",
                 "1/s",
-                (c, port) -> loads(c.prediction(), alice).get(port).recordedPerSecond());
+                (p, finite, port) -> loads(p, alice).get(port).recordedPerSecond());
         perPort(
                 fields,
                 name + ".liveFraction",
                 "",
-                (c, port) -> loads(c.prediction(), alice).get(port).liveFraction());
-        add(fields, name + ".backgroundPerSecond", "1/s", p -> background(loads(p, alice)));
-        add(
+                (p, finite, port) -> loads(p, alice).get(port).liveFraction());
+        counted(fields, name + ".backgroundPerSecond", "1/s", p -> background(loads(p, alice)));
+        counted(
                 fields,
                 name + ".coincidencesPerSingle",
                 "",
-                p -> p.counts().central().sum(0.0) / LinkCounts.recorded(loads(p, alice)));
-        add(fields, name + ".partnerPassProbability", "", p -> partnerPass(p.spectrum(), alice));
-        add(
+                p -> p.counts().central().mean() / LinkCounts.recorded(loads(p, alice)));
+        optical(fields, name + ".partnerPassProbability", "", p -> partnerPass(p.spectrum(), alice));
+        optical(
                 fields,
                 name + ".unheraldedG2",
                 "",
                 p -> p.scenario().pulsed() ? PairSpectrum.unheraldedG2(modes(p, alice)) : NOT_APPLICABLE);
-        add(fields, name + ".heraldedG2", "", p -> p.scenario().pulsed() ? heraldedG2(p, alice) : NOT_APPLICABLE);
+        counted(fields, name + ".heraldedG2", "", p -> p.scenario().pulsed() ? heraldedG2(p, alice) : NOT_APPLICABLE);
     }
 
     private static void coincidence(List<ResultField> fields) {
-        add(fields, "coincidence.fringeMaxPerSecond", "1/s", p -> p.fringe().maxPerSecond());
-        add(fields, "coincidence.fringeMinPerSecond", "1/s", p -> p.fringe().minPerSecond());
-        add(fields, "coincidence.accidentalPerSecond", "1/s", p -> p.fringe().accidentalPerSecond());
-        add(
+        counted(fields, "coincidence.fringeMaxPerSecond", "1/s", p -> p.fringe().maxPerSecond());
+        counted(fields, "coincidence.fringeMinPerSecond", "1/s", p -> p.fringe().minPerSecond());
+        counted(
+                fields,
+                "coincidence.accidentalPerSecond",
+                "1/s",
+                p -> p.fringe().accidentalPerSecond());
+        counted(
                 fields,
                 "coincidence.allPortsPerSecond",
                 "1/s",
-                p -> p.counts().central().sum(0.0));
-        add(fields, "coincidence.sidePerSecond", "1/s", p -> p.counts().sidePerSecond());
-        add(fields, "coincidence.car", "", p -> p.fringe().car());
-        add(
+                p -> p.counts().central().mean());
+        counted(fields, "coincidence.sidePerSecond", "1/s", p -> p.counts().sidePerSecond());
+        counted(fields, "coincidence.car", "", p -> p.fringe().car());
+        optical(
                 fields,
                 "coincidence.correlationRmsPs",
                 "ps",
@@ -96,38 +105,52 @@ public final class ResultFields {
     }
 
     private static void merit(List<ResultField> fields) {
-        add(fields, "visibility.raw", "", p -> p.fringe().raw());
-        add(fields, "visibility.net", "", p -> p.fringe().net());
-        add(fields, "visibility.sigma", "", LinkPrediction::visibilitySigma);
-        add(fields, "visibility.countsPerPoint", "", LinkPrediction::countsPerPoint);
-        add(fields, "bell.chsh", "", p -> p.bell().chsh());
-        add(fields, "bell.sigma", "", p -> p.bell().sigma(p.uptime()));
-        add(fields, "bell.secondsToThreeSigma", "s", p -> p.bell().secondsTo(3.0) / p.uptimeShare());
-        add(fields, "bell.secondsToFiveSigma", "s", p -> p.bell().secondsTo(Requirement.FIVE) / p.uptimeShare());
-        add(fields, "qber.phase", "", p -> p.key().errors().phase());
-        add(fields, "qber.time", "", p -> p.key().errors().time());
+        counted(fields, "visibility.raw", "", p -> p.fringe().raw());
+        counted(fields, "visibility.net", "", p -> p.fringe().net());
+        counted(fields, "visibility.sigma", "", LinkPrediction::visibilitySigma);
+        counted(fields, "visibility.countsPerPoint", "", LinkPrediction::countsPerPoint);
+        counted(fields, "bell.chsh", "", p -> p.bell().chsh());
+        counted(fields, "bell.sigma", "", p -> p.bell().sigma(p.uptime()));
+        counted(fields, "bell.secondsToThreeSigma", "s", p -> p.bell().secondsTo(3.0) / p.uptimeShare());
+        counted(fields, "bell.secondsToFiveSigma", "s", p -> p.bell().secondsTo(Requirement.FIVE) / p.uptimeShare());
+        counted(fields, "qber.phase", "", p -> p.key().errors().phase());
+        counted(fields, "qber.time", "", p -> p.key().errors().time());
     }
 
     private static void key(List<ResultField> fields) {
-        add(fields, "key.siftedPhaseBps", "bit/s", p -> p.key().siftedPhasePerSecond());
-        add(fields, "key.siftedTimeBps", "bit/s", p -> p.key().siftedTimePerSecond());
-        add(fields, "key.asymptoticBps", "bit/s", p -> p.key().asymptoticPerSecond());
+        counted(fields, "key.siftedPhaseBps", "bit/s", p -> p.key().siftedPhasePerSecond());
+        counted(fields, "key.siftedTimeBps", "bit/s", p -> p.key().siftedTimePerSecond());
+        counted(fields, "key.asymptoticBps", "bit/s", p -> p.key().asymptoticPerSecond());
+        fields.add(
+                new ResultField("key.finiteBits", "bit", false, Stage.FINITE_KEY, (p, finite, port) -> finite.bits()));
         fields.add(new ResultField(
-                "key.finiteBits", "bit", false, (c, port) -> c.finite().bits()));
+                "key.finiteBps", "bit/s", false, Stage.FINITE_KEY, (p, finite, port) -> finite.bitsPerSecond()));
         fields.add(new ResultField(
-                "key.finiteBps", "bit/s", false, (c, port) -> c.finite().bitsPerSecond()));
-        fields.add(new ResultField(
-                "key.secondsToFirstKey", "s", false, (c, port) -> c.finite().secondsToFirstKey()));
-        add(fields, "key.repeaterlessBoundBps", "bit/s", ResultFields::repeaterlessBound);
+                "key.secondsToFirstKey",
+                "s",
+                false,
+                Stage.FINITE_KEY,
+                (p, finite, port) -> finite.secondsToFirstKey()));
+        optical(fields, "key.repeaterlessBoundBps", "bit/s", ResultFields::repeaterlessBound);
+    }
+
+    private static void optical(
+            List<ResultField> fields, String name, String unit, ToDoubleFunction<LinkPrediction> reading) {
+        add(fields, name, unit, Stage.OPTICS, reading);
+    }
+
+    private static void counted(
+            List<ResultField> fields, String name, String unit, ToDoubleFunction<LinkPrediction> reading) {
+        add(fields, name, unit, Stage.COUNTS, reading);
     }
 
     private static void add(
-            List<ResultField> fields, String name, String unit, ToDoubleFunction<LinkPrediction> reading) {
-        fields.add(new ResultField(name, unit, false, (check, port) -> reading.applyAsDouble(check.prediction())));
+            List<ResultField> fields, String name, String unit, Stage stage, ToDoubleFunction<LinkPrediction> reading) {
+        fields.add(new ResultField(name, unit, false, stage, (p, finite, port) -> reading.applyAsDouble(p)));
     }
 
     private static void perPort(List<ResultField> fields, String name, String unit, ResultField.Reading reading) {
-        fields.add(new ResultField(name, unit, true, reading));
+        fields.add(new ResultField(name, unit, true, Stage.COUNTS, reading));
     }
 
     private static OpticalPath path(LinkPrediction p, boolean alice) {

@@ -1,7 +1,5 @@
 package binspan.scenario;
 
-import java.util.Collections;
-import java.util.LinkedHashMap;
 import java.util.Map;
 
 /**
@@ -36,13 +34,8 @@ public record Scenario(
         Map<String, String> provenance) {
 
     public Scenario {
-        spread = ordered(spread);
-        provenance = ordered(provenance);
-    }
-
-    /** A copy that keeps the order of the file, so that studies draw and reports list in the same order every time. */
-    private static <V> Map<String, V> ordered(Map<String, V> entries) {
-        return Collections.unmodifiableMap(new LinkedHashMap<>(entries));
+        spread = Entries.copyOf(spread);
+        provenance = Entries.copyOf(provenance);
     }
 
     /** The filter band of the photon that an arm carries. */

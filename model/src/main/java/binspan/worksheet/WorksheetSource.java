@@ -121,7 +121,7 @@ final class WorksheetSource {
     private double result(String name) {
         for (ResultField field : ResultFields.ALL) {
             if (field.name().equals(name)) {
-                return field.reading().at(page.check(), 0);
+                return field.of(page.check(), 0);
             }
         }
         throw new IllegalStateException("no result " + name);

@@ -34,11 +34,11 @@ public final class FringeCounts {
         Scenario link = IdealLink.build(IdealLink.continuous());
         ArmLight alice = light(link, link.alice());
         ArmLight bob = light(link, link.bob());
-        PortPair[][] pairs = new PortPair[2][2];
+        PortPair[] pairs = new PortPair[4];
         for (int a = 0; a < 2; a++) {
             for (int b = 0; b < 2; b++) {
                 double amplitude = (a == b ? contrast : -contrast) * perSecond / 4.0;
-                pairs[a][b] = new ContinuousPortPair(perSecond / 4.0, amplitude, accidentalPerSecond / 4.0);
+                pairs[2 * a + b] = new ContinuousPortPair(perSecond / 4.0, amplitude, accidentalPerSecond / 4.0);
             }
         }
         return new LinkCounts(
@@ -46,12 +46,12 @@ public final class FringeCounts {
                 bob,
                 alice.loads(1.0, Double.POSITIVE_INFINITY),
                 bob.loads(1.0, Double.POSITIVE_INFINITY),
-                new PortPairs(pairs),
+                new PortPairs(pairs, 2),
                 List.of(),
                 0.0,
                 perSecond + accidentalPerSecond,
                 contrast,
-                pairs[0][0]);
+                pairs[0]);
     }
 
     /**

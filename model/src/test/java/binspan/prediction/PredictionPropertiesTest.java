@@ -49,8 +49,8 @@ final class PredictionPropertiesTest {
             for (ResultField field : ResultFields.ALL) {
                 boolean applies =
                         APPLIES.getOrDefault(field.name(), any -> true).test(check);
-                for (int port = 0; port < field.count(check); port++) {
-                    double value = field.reading().at(check, port);
+                for (int port = 0; port < field.count(check.prediction()); port++) {
+                    double value = field.of(check, port);
                     if (Double.isFinite(value) != applies) {
                         wrong.append(field.name()).append(" is ").append(value).append("; ");
                     }
@@ -76,8 +76,8 @@ final class PredictionPropertiesTest {
                         || field.name().equals("bell.chsh");
                 double[] range = RANGES.getOrDefault(
                         field.name(), new double[] {signed ? Double.NEGATIVE_INFINITY : 0.0, Double.POSITIVE_INFINITY});
-                for (int port = 0; port < field.count(check); port++) {
-                    double value = field.reading().at(check, port);
+                for (int port = 0; port < field.count(check.prediction()); port++) {
+                    double value = field.of(check, port);
                     if (value < range[0] * (1.0 - ROUNDING) || value > range[1] * (1.0 + ROUNDING)) {
                         wrong.append(field.name()).append(" is ").append(value).append("; ");
                     }

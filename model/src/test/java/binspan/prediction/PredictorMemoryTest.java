@@ -95,8 +95,8 @@ final class PredictorMemoryTest {
         LinkCheck check = new LinkCheck(
                 prediction, new FiniteKeyOutlook(0.0, 0.0, 0.0), List.of(), List.of(), List.of(), List.of());
         DoubleStream figures = ResultFields.ALL.stream()
-                .flatMapToDouble(field -> IntStream.range(0, field.count(check))
-                        .mapToDouble(port -> field.reading().at(check, port)));
+                .flatMapToDouble(field ->
+                        IntStream.range(0, field.count(check.prediction())).mapToDouble(port -> field.of(check, port)));
         DoubleStream budget = prediction.budget().entries().stream().mapToDouble(VisibilityBudget.Entry::factor);
         return DoubleStream.concat(figures, budget)
                 .mapToObj(Double::doubleToLongBits)

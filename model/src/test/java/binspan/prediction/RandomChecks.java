@@ -69,7 +69,7 @@ final class RandomChecks {
 
     /** The value of a figure that every link has once. */
     static double figure(LinkCheck check, String name) {
-        return field(name).reading().at(check, 0);
+        return field(name).of(check, 0);
     }
 
     static ResultField field(String name) {

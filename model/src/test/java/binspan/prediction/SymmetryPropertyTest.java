@@ -57,9 +57,9 @@ final class SymmetryPropertyTest {
                 // Runs to infinity where S comes down to 2, and any error of S with it.
                 continue;
             }
-            for (int port = 0; port < field.count(check); port++) {
-                double before = field.reading().at(check, port);
-                double after = other.reading().at(exchanged, port);
+            for (int port = 0; port < field.count(check.prediction()); port++) {
+                double before = field.of(check, port);
+                double after = other.of(exchanged, port);
                 double largest = Math.max(Math.abs(before), Math.abs(after));
                 if (Double.compare(before, after) != 0
                         && !(Math.abs(before - after) <= tolerance * largest + rounding)) {

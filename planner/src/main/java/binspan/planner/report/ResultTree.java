@@ -45,8 +45,8 @@ final class ResultTree {
 
     private void figure(ResultField field) {
         List<Object> values = new ArrayList<>();
-        for (int port = 0; port < field.count(check); port++) {
-            double value = field.reading().at(check, port);
+        for (int port = 0; port < field.count(check.prediction()); port++) {
+            double value = field.of(check, port);
             if (!Double.isFinite(value)) {
                 return;
             }

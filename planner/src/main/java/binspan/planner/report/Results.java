@@ -21,7 +21,7 @@ final class Results {
     double at(String name, int port) {
         for (ResultField field : ResultFields.ALL) {
             if (field.name().equals(name)) {
-                return field.reading().at(check, port);
+                return field.of(check, port);
             }
         }
         throw new IllegalArgumentException("no result " + name);

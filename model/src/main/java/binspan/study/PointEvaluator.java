@@ -1,0 +1,44 @@
+package binspan.study;
+
+import binspan.prediction.LinkPrediction;
+import binspan.prediction.LinkPredictor;
+import binspan.prediction.RequirementMargins;
+import binspan.scenario.Parameter;
+import binspan.scenario.Scenario;
+import java.util.List;
+
+/** Evaluates a scenario at values of its free parameters, for one thread; what does not change between two points is kept. */
+final class PointEvaluator {
+    private final Variation variation;
+    private final LinkPredictor predictor = new LinkPredictor();
+    private final RequirementMargins margins;
+
+    PointEvaluator(Scenario base, List<Parameter> parameters) {
+        this(base, parameters, RequirementMargins.of(base.require()));
+    }
+
+    PointEvaluator(Scenario base, List<Parameter> parameters, RequirementMargins margins) {
+        this.variation = new Variation(base, parameters);
+        this.margins = margins;
+    }
+
+    /** The prediction at values of the parameters. */
+    LinkPrediction at(double... values) {
+        return predictor.of(variation.at(values));
+    }
+
+    /** The scenario at values of the parameters. */
+    Scenario scenario(double... values) {
+        return variation.at(values);
+    }
+
+    /** The requirements and their margins. */
+    RequirementMargins margins() {
+        return margins;
+    }
+
+    /** The least margin of all requirements at values of the parameters. */
+    double leastMargin(double... values) {
+        return margins.least(at(values));
+    }
+}
