@@ -1,5 +1,6 @@
 package binspan.scenario;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
@@ -132,6 +133,11 @@ public enum DetectorClass implements Choice {
     /** Whether the class needs liquid helium or a cryocooler. */
     public boolean cryogenic() {
         return this == SNSPD || this == SNSPD_COLD_FILTER;
+    }
+
+    /** Settings between which a detector of the class can be operated; one where it has no trade to offer. */
+    public List<OperatingPoint> operatingPoints() {
+        return OperatingPoints.of(this);
     }
 
     /** Gating of the class: one gate of 1 ns for every slot, 2e-5 dark clicks each; absent when it is free-running. */

@@ -1,5 +1,6 @@
 package binspan.scenario;
 
+import java.util.List;
 import java.util.function.UnaryOperator;
 
 /** Copies of a scenario with a part exchanged. */
@@ -8,27 +9,20 @@ public final class Edits {
 
     /** The same scenario with both arms changed. */
     public static Scenario arms(Scenario s, UnaryOperator<Arm> change) {
-        return new Scenario(
-                s.formatVersion(),
-                s.name(),
-                s.imbalanceNs(),
-                s.source(),
-                change.apply(s.alice()),
-                change.apply(s.bob()),
-                s.timing(),
-                s.protocol(),
-                s.acquisition(),
-                s.require(),
-                s.spread(),
-                s.provenance());
+        return withArms(s, change.apply(s.alice()), change.apply(s.bob()));
     }
 
     /** The same arm with every path element changed. */
     public static Arm path(Arm arm, UnaryOperator<PathElement> change) {
+        return withPath(arm, arm.path().stream().map(change).toList());
+    }
+
+    /** The same arm with other path elements. */
+    public static Arm withPath(Arm arm, List<PathElement> path) {
         return new Arm(
                 arm.photon(),
                 arm.sourceCouplingLossDb(),
-                arm.path().stream().map(change).toList(),
+                path,
                 arm.repairMarginDb(),
                 arm.analyzer(),
                 arm.detectors(),
@@ -49,5 +43,22 @@ public final class Edits {
                 arm.clockJitterRmsPs(),
                 arm.tagBinPs(),
                 arm.delayErrorPs());
+    }
+
+    /** The same scenario with other arms. */
+    public static Scenario withArms(Scenario s, Arm alice, Arm bob) {
+        return new Scenario(
+                s.formatVersion(),
+                s.name(),
+                s.imbalanceNs(),
+                s.source(),
+                alice,
+                bob,
+                s.timing(),
+                s.protocol(),
+                s.acquisition(),
+                s.require(),
+                s.spread(),
+                s.provenance());
     }
 }

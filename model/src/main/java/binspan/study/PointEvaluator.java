@@ -22,9 +22,19 @@ final class PointEvaluator {
         this.margins = margins;
     }
 
+    /** The scenario as written. */
+    Scenario base() {
+        return variation.base();
+    }
+
     /** The prediction at values of the parameters. */
     LinkPrediction at(double... values) {
         return predictor.of(variation.at(values));
+    }
+
+    /** The prediction of another scenario, with what it shares kept as well. */
+    LinkPrediction predicted(Scenario scenario) {
+        return predictor.of(scenario);
     }
 
     /** The scenario at values of the parameters. */
