@@ -67,10 +67,10 @@ final class ReachLimits {
     OptionalDouble retuned(List<Axis> free, OptionalDouble known, Execution execution) {
         DoubleUnaryOperator margin = km -> tunedMargin(km, free, execution);
         double good = known.orElse(0.0);
-        if (known.isEmpty() && margin.applyAsDouble(0.0) < 0.0) {
-            return OptionalDouble.empty();
+        if (good == longest || (known.isEmpty() && margin.applyAsDouble(0.0) < 0.0)) {
+            return known;
         }
-        double bad = Math.max(good * STEP, planned / 8.0);
+        double bad = Math.min(longest, Math.max(good * STEP, planned / 8.0));
         while (margin.applyAsDouble(bad) >= 0.0) {
             good = bad;
             if (bad == longest) {

@@ -4,7 +4,12 @@ package binspan.planner.io;
 public final class OutputFileException extends Exception {
     private static final long serialVersionUID = 1L;
 
-    OutputFileException(String message) {
+    /**
+     * Makes one.
+     *
+     * @param message the file's name and what is wrong with it; made printable
+     */
+    public OutputFileException(String message) {
         super(Printable.line(message));
     }
 }

@@ -24,8 +24,29 @@ public final class WholeFile {
      * @throws OutputFileException if the file exists and may not be replaced, or cannot be written
      */
     public static void write(String file, String text, boolean replace) throws OutputFileException {
+        write(file, part -> Files.writeString(part, text, StandardCharsets.UTF_8), replace);
+    }
+
+    /**
+     * Writes a file of any kind.
+     *
+     * @param file its name
+     * @param bytes all that it holds
+     * @param replace whether an existing file may be replaced
+     * @throws OutputFileException if the file exists and may not be replaced, or cannot be written
+     */
+    public static void write(String file, byte[] bytes, boolean replace) throws OutputFileException {
+        write(file, part -> Files.write(part, bytes), replace);
+    }
+
+    /** What fills the temporary file. */
+    private interface Content {
+        void writeTo(Path part) throws IOException;
+    }
+
+    private static void write(String file, Content content, boolean replace) throws OutputFileException {
         try {
-            write(Path.of(file), text, replace);
+            write(Path.of(file), content, replace);
         } catch (FileAlreadyExistsException e) {
             throw new OutputFileException(file + ": exists already; --force replaces it");
         } catch (InvalidPathException e) {
@@ -39,7 +60,7 @@ public final class WholeFile {
         }
     }
 
-    private static void write(Path path, String text, boolean replace) throws IOException, OutputFileException {
+    private static void write(Path path, Content content, boolean replace) throws IOException, OutputFileException {
         if (Files.isDirectory(path)) {
             throw new OutputFileException(path + ": found a directory; allowed a file name");
         }
@@ -49,7 +70,7 @@ public final class WholeFile {
         Path part = path.resolveSibling(
                 path.getFileName() + "." + ProcessHandle.current().pid() + ".part");
         try {
-            Files.writeString(part, text, StandardCharsets.UTF_8);
+            content.writeTo(part);
             CopyOption[] options = replace ? new CopyOption[] {StandardCopyOption.REPLACE_EXISTING} : new CopyOption[0];
             Files.move(part, path, options);
         } finally {

@@ -22,6 +22,18 @@ final class WholeFileTest {
     }
 
     @Test
+    void bytesAreWrittenAsTheyAre() throws Exception {
+        byte[] bytes = {0, -1, 10, 13, -128};
+        Path file = directory.resolve("map.png");
+        WholeFile.write(file.toString(), bytes, false);
+        assertThat(file).hasBinaryContent(bytes);
+        assertThatThrownBy(() -> WholeFile.write(file.toString(), new byte[0], false))
+                .isInstanceOf(OutputFileException.class)
+                .hasMessage(file + ": exists already; --force replaces it");
+        assertThat(file).hasBinaryContent(bytes);
+    }
+
+    @Test
     void existingFileIsKept() throws Exception {
         Path file = Files.writeString(directory.resolve("link.json"), "old");
         assertThatThrownBy(() -> WholeFile.write(file.toString(), "new", false))

@@ -1,0 +1,95 @@
+package binspan.planner.plot;
+
+import java.awt.BasicStroke;
+import java.awt.Color;
+import java.awt.Paint;
+import java.awt.Shape;
+import java.awt.Stroke;
+import java.awt.geom.Line2D;
+import java.awt.geom.Path2D;
+import java.awt.geom.Rectangle2D;
+import org.jfree.chart.LegendItem;
+
+/** Entries of a legend: the same fills, hatchings and lines as in the plot. */
+final class LegendEntries {
+    private static final double SWATCH_WIDTH = 26.0;
+    private static final double SWATCH_HEIGHT = 13.0;
+    private static final double LINE_LENGTH = 44.0;
+    private static final Color CLEAR = new Color(0, 0, 0, 0);
+
+    private LegendEntries() {}
+
+    /** A series with its marker. */
+    static LegendItem series(String label, SeriesStyle style) {
+        return new LegendItem(
+                label,
+                null,
+                null,
+                null,
+                true,
+                style.marker(),
+                true,
+                style.colour(),
+                false,
+                style.colour(),
+                PlotStyle.HAIRLINE,
+                true,
+                line(),
+                style.stroke(),
+                style.colour());
+    }
+
+    /** A line. */
+    static LegendItem line(String label, Stroke stroke, Paint paint) {
+        return new LegendItem(label, null, null, null, line(), stroke, paint);
+    }
+
+    /** A white marker with an outline. */
+    static LegendItem marker(String label, Shape marker) {
+        return new LegendItem(label, null, null, null, marker, Color.WHITE, PlotStyle.LIMIT, PlotStyle.INK);
+    }
+
+    /** A filled box. */
+    static LegendItem filled(String label, Paint fill) {
+        Shape box = new Rectangle2D.Double(0.0, 0.0, SWATCH_WIDTH, SWATCH_HEIGHT);
+        return swatch(label, fill, box, PlotStyle.SOFT_INK);
+    }
+
+    /** A hatched box. */
+    static LegendItem hatched(String label, boolean rising, Paint lines) {
+        return swatch(label, CLEAR, Hatching.swatch(SWATCH_WIDTH, SWATCH_HEIGHT, rising), lines);
+    }
+
+    /** The stretch where all requirements are met: a tinted box with toothed sides. */
+    static LegendItem met(String label) {
+        Path2D edges = new Path2D.Double();
+        MetStretch.edge(edges, new Line2D.Double(0.0, 0.0, 0.0, SWATCH_HEIGHT), 1.0);
+        MetStretch.edge(edges, new Line2D.Double(SWATCH_WIDTH, 0.0, SWATCH_WIDTH, SWATCH_HEIGHT), -1.0);
+        return swatch(label, PlotStyle.MET_FILL, edges, PlotStyle.MET_EDGE);
+    }
+
+    /** The library fills the shape over its line: a line as wide as the box is the fill, the shape only an outline. */
+    private static LegendItem swatch(String label, Paint fill, Shape outline, Paint outlinePaint) {
+        Stroke wide = new BasicStroke((float) SWATCH_HEIGHT, BasicStroke.CAP_BUTT, BasicStroke.JOIN_MITER);
+        return new LegendItem(
+                label,
+                null,
+                null,
+                null,
+                true,
+                outline,
+                false,
+                CLEAR,
+                true,
+                outlinePaint,
+                PlotStyle.HAIRLINE,
+                true,
+                new Line2D.Double(0.0, 0.0, SWATCH_WIDTH, 0.0),
+                wide,
+                fill);
+    }
+
+    private static Shape line() {
+        return new Line2D.Double(-LINE_LENGTH / 2.0, 0.0, LINE_LENGTH / 2.0, 0.0);
+    }
+}

@@ -1,0 +1,7 @@
+package binspan.planner.plot;
+
+/** A part of a picture: one chart, or a group of them. */
+public sealed interface Panel permits Curves, HeatMap, RankedBars, Histogram, RangeBars, PanelGroup {
+    /** The chart that shows it. */
+    PanelChart chart();
+}

@@ -1,0 +1,121 @@
+package binspan.planner.plot;
+
+import java.awt.Color;
+import java.awt.Paint;
+import java.util.List;
+import org.jfree.chart.LegendItem;
+import org.jfree.chart.annotations.XYTextAnnotation;
+import org.jfree.chart.plot.DatasetRenderingOrder;
+import org.jfree.chart.plot.PlotOrientation;
+import org.jfree.chart.plot.XYPlot;
+import org.jfree.chart.renderer.xy.XYLineAndShapeRenderer;
+import org.jfree.chart.ui.TextAnchor;
+import org.jfree.data.Range;
+import org.jfree.data.xy.DefaultXYDataset;
+import org.jfree.data.xy.XYIntervalSeries;
+
+/** Draws ranges of different quantities in one length, with their ends, the allowed part and the planned value. */
+final class RangeBarsChart {
+    private static final int WIDTH = 1172;
+    private static final int ROW_HEIGHT = 92;
+    private static final int FRAME_HEIGHT = 24;
+    private static final Range SHARES = new Range(-0.13, 1.13);
+    private static final double HALF_BAR = 0.14;
+    private static final double GAP = 0.008;
+    private static final double TEXT_DISTANCE = 0.2;
+    private static final double MARKER_SIZE = 15.0;
+    private static final int DIAMOND = 3;
+    private static final Paint WHOLE = new Color(0xf1f2f4);
+
+    private final RangeBars ranges;
+    private final XYPlot plot;
+
+    RangeBarsChart(RangeBars ranges) {
+        this.ranges = ranges;
+        List<String> names =
+                ranges.bars().stream().map(bar -> bar.quantity().name()).toList();
+        this.plot = PlotStyle.plot(BarRows.labels(names), new ScaledAxis(Axis.linear("", ""), SHARES));
+    }
+
+    PanelChart build() {
+        plot.setOrientation(PlotOrientation.HORIZONTAL);
+        plot.setOutlineVisible(false);
+        plot.setDomainGridlinesVisible(false);
+        plot.setRangeGridlinesVisible(false);
+        plot.getRangeAxis().setVisible(false);
+        plot.getDomainAxis().setAxisLineVisible(false);
+        plot.setDatasetRenderingOrder(DatasetRenderingOrder.FORWARD);
+        XYIntervalSeries wholes = BarRows.series();
+        XYIntervalSeries boxes = BarRows.series();
+        DefaultXYDataset planned = new DefaultXYDataset();
+        for (int row = 0; row < ranges.bars().size(); row++) {
+            RangeBar bar = ranges.bars().get(row);
+            BarRows.add(wholes, row, HALF_BAR, new Interval(0.0, 1.0));
+            Interval box = new Interval(
+                    share(bar, bar.box().lower()), share(bar, bar.box().upper()));
+            BarRows.add(boxes, row, HALF_BAR, box);
+            planned.addSeries(row, new double[][] {{row}, {share(bar, bar.planned())}});
+            texts(bar, row, box);
+        }
+        draw(wholes, boxes, planned);
+        int height = FRAME_HEIGHT + ROW_HEIGHT * Math.max(2, ranges.bars().size());
+        return new PanelChart(PlotStyle.chart(ranges.title(), plot), legend(), WIDTH, height);
+    }
+
+    /** Where a value lies between the ends of its range, 0 to 1; zero on a logarithmic axis is its beginning. */
+    private static double share(RangeBar bar, double value) {
+        Axis axis = bar.quantity();
+        double from = axis.position(axis.lowest());
+        double share = (axis.position(value) - from) / (axis.position(axis.highest()) - from);
+        boolean beforeAll = Double.isNaN(share) && !Double.isNaN(value);
+        return beforeAll ? 0.0 : Math.max(0.0, Math.min(1.0, share));
+    }
+
+    private void draw(XYIntervalSeries wholes, XYIntervalSeries boxes, DefaultXYDataset planned) {
+        plot.setDataset(0, BarRows.dataset(wholes));
+        plot.setRenderer(0, PatternPainter.renderer(new PatternPainter(WHOLE, i -> true)));
+        plot.setDataset(1, BarRows.dataset(boxes));
+        plot.setRenderer(1, PatternPainter.renderer(new PatternPainter(PlotStyle.FILL, i -> true)));
+        XYLineAndShapeRenderer markers = new XYLineAndShapeRenderer(false, true);
+        markers.setUseFillPaint(true);
+        markers.setDefaultFillPaint(Color.WHITE);
+        markers.setUseOutlinePaint(true);
+        markers.setDefaultOutlinePaint(PlotStyle.INK);
+        markers.setDefaultOutlineStroke(PlotStyle.LIMIT);
+        markers.setAutoPopulateSeriesShape(false);
+        markers.setDefaultShape(SeriesStyle.marker(DIAMOND, MARKER_SIZE));
+        plot.setDataset(2, planned);
+        plot.setRenderer(2, markers);
+    }
+
+    /** Ends of the range beside the bar, those of the box below and away from each other, the planned value above. */
+    private void texts(RangeBar bar, int row, Interval box) {
+        Axis axis = bar.quantity();
+        text(axis.text(axis.lowest()), row, -GAP, TextAnchor.CENTER_RIGHT);
+        text(axis.text(axis.highest()), row, 1.0 + GAP, TextAnchor.CENTER_LEFT);
+        if (box.lower() > 0.0) {
+            text(axis.text(bar.box().lower()), row + TEXT_DISTANCE, box.lower(), TextAnchor.TOP_RIGHT);
+        }
+        if (box.upper() < 1.0) {
+            text(axis.text(bar.box().upper()), row + TEXT_DISTANCE, box.upper(), TextAnchor.TOP_LEFT);
+        }
+        if (!Double.isNaN(bar.planned())) {
+            text(axis.text(bar.planned()), row - TEXT_DISTANCE, share(bar, bar.planned()), TextAnchor.BOTTOM_CENTER);
+        }
+    }
+
+    private void text(String text, double row, double share, TextAnchor anchor) {
+        XYTextAnnotation annotation = new XYTextAnnotation(text, row, share);
+        annotation.setFont(PlotStyle.TICK);
+        annotation.setPaint(PlotStyle.INK);
+        annotation.setTextAnchor(anchor);
+        plot.addAnnotation(annotation);
+    }
+
+    private static List<LegendItem> legend() {
+        return List.of(
+                LegendEntries.filled("whole range", WHOLE),
+                LegendEntries.filled("allowed", PlotStyle.FILL),
+                LegendEntries.marker("planned", SeriesStyle.marker(DIAMOND, MARKER_SIZE)));
+    }
+}

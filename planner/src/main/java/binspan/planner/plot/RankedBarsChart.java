@@ -1,0 +1,166 @@
+package binspan.planner.plot;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.function.IntPredicate;
+import java.util.stream.DoubleStream;
+import org.jfree.chart.LegendItem;
+import org.jfree.chart.annotations.XYTextAnnotation;
+import org.jfree.chart.axis.AxisLocation;
+import org.jfree.chart.plot.CombinedDomainXYPlot;
+import org.jfree.chart.plot.PlotOrientation;
+import org.jfree.chart.plot.XYPlot;
+import org.jfree.chart.ui.Layer;
+import org.jfree.chart.ui.RectangleInsets;
+import org.jfree.chart.ui.TextAnchor;
+import org.jfree.data.Range;
+import org.jfree.data.xy.XYIntervalSeries;
+
+/** Puts ranked bars into panels that share their labels. */
+final class RankedBarsChart {
+    private static final int LABEL_MARGIN = 40;
+    private static final int MOST_LABEL_WIDTH = 460;
+    private static final int LETTER_WIDTH = 8;
+    private static final int PANEL_WIDTH = 420;
+    private static final int FRAME_HEIGHT = 100;
+    private static final int ROW_HEIGHT = 24;
+    private static final int LEAST_HEIGHT = 320;
+    private static final double HALF_BAR = 0.36;
+    private static final double MARGIN = 0.04;
+    private static final double TEXT_MARGIN = 0.06;
+    private static final double LETTER_MARGIN = 0.03;
+    private static final double TEXT_GAP = 0.008;
+
+    private final RankedBars bars;
+
+    RankedBarsChart(RankedBars bars) {
+        this.bars = bars;
+    }
+
+    PanelChart build() {
+        CombinedDomainXYPlot combined = new CombinedDomainXYPlot(BarRows.labels(bars.labels()));
+        combined.setOrientation(PlotOrientation.HORIZONTAL);
+        combined.setInsets(RectangleInsets.ZERO_INSETS);
+        combined.setGap(20.0);
+        bars.panels().forEach(panel -> combined.add(subplot(panel), 1));
+        int height =
+                Math.max(LEAST_HEIGHT, FRAME_HEIGHT + ROW_HEIGHT * bars.labels().size());
+        return new PanelChart(PlotStyle.chart(bars.title(), combined), legend(), width(), height);
+    }
+
+    private int width() {
+        int letters = bars.labels().stream().mapToInt(String::length).max().orElse(0);
+        int labels = Math.min(MOST_LABEL_WIDTH, LABEL_MARGIN + LETTER_WIDTH * letters);
+        return labels + PANEL_WIDTH * bars.panels().size();
+    }
+
+    private static XYPlot subplot(BarPanel panel) {
+        Range range = range(panel);
+        XYPlot plot = PlotStyle.plot(null, new ScaledAxis(panel.value(), range));
+        plot.setOrientation(PlotOrientation.HORIZONTAL);
+        plot.setDomainGridlinesVisible(false);
+        plot.setRangeZeroBaselineVisible(!panel.value().logarithmic());
+        plot.setRangeZeroBaselinePaint(PlotStyle.SOFT_INK);
+        plot.setRangeZeroBaselineStroke(PlotStyle.HAIRLINE);
+        plot.setRangeAxisLocation(AxisLocation.BOTTOM_OR_LEFT);
+        plot.setRenderer(PatternPainter.renderer(new PatternPainter(PlotStyle.FILL, met(panel))));
+        XYIntervalSeries series = series(panel, range);
+        plot.setDataset(BarRows.dataset(series));
+        texts(plot, panel, range);
+        if (series.isEmpty() && panel.bars().stream().allMatch(bar -> bar.text().isEmpty())) {
+            PlotStyle.sayEmpty(plot);
+        }
+        panel.requirement().ifPresent(requirement -> limit(plot, panel.value(), requirement, range));
+        return plot;
+    }
+
+    /** Which of the bars that are drawn is filled. */
+    private static IntPredicate met(BarPanel panel) {
+        List<Bar> drawn = panel.bars().stream()
+                .filter(bar -> !Double.isNaN(panel.value().position(bar.value())))
+                .toList();
+        return i -> drawn.get(i).met();
+    }
+
+    private static Range range(BarPanel panel) {
+        DoubleStream limit = panel.requirement().stream().mapToDouble(RequirementLine::value);
+        DoubleStream values = DoubleStream.concat(panel.bars().stream().mapToDouble(Bar::value), limit);
+        boolean zero = !panel.value().logarithmic();
+        Range all =
+                Positions.of(panel.value(), zero ? DoubleStream.concat(values, DoubleStream.of(0.0)) : values, MARGIN);
+        int letters =
+                panel.bars().stream().mapToInt(bar -> bar.text().length()).max().orElse(0);
+        if (letters == 0 || !Double.isNaN(panel.value().highest())) {
+            return all;
+        }
+        boolean negative = zero && panel.bars().stream().anyMatch(bar -> bar.value() < 0.0);
+        boolean positive = !zero || panel.bars().stream().anyMatch(bar -> !(bar.value() < 0.0));
+        double more = (TEXT_MARGIN + LETTER_MARGIN * letters) * all.getLength();
+        return new Range(all.getLowerBound() - (negative ? more : 0.0), all.getUpperBound() + (positive ? more : 0.0));
+    }
+
+    private static double foot(BarPanel panel, Range range) {
+        return panel.value().logarithmic()
+                ? range.getLowerBound()
+                : Math.max(range.getLowerBound(), Math.min(range.getUpperBound(), 0.0));
+    }
+
+    private static XYIntervalSeries series(BarPanel panel, Range range) {
+        XYIntervalSeries series = BarRows.series();
+        double foot = foot(panel, range);
+        for (int row = 0; row < panel.bars().size(); row++) {
+            double end = panel.value().position(panel.bars().get(row).value());
+            if (!Double.isNaN(end)) {
+                BarRows.add(series, row, HALF_BAR, new Interval(Math.min(foot, end), Math.max(foot, end)));
+            }
+        }
+        return series;
+    }
+
+    private static void texts(XYPlot plot, BarPanel panel, Range range) {
+        double foot = foot(panel, range);
+        double gap = TEXT_GAP * range.getLength();
+        for (int row = 0; row < panel.bars().size(); row++) {
+            Bar bar = panel.bars().get(row);
+            double end = panel.value().position(bar.value());
+            boolean left = end < foot;
+            if (!bar.text().isEmpty()) {
+                double from = Double.isNaN(end) ? foot : end;
+                XYTextAnnotation text = new XYTextAnnotation(bar.text(), row, left ? from - gap : from + gap);
+                text.setFont(PlotStyle.TICK);
+                text.setPaint(PlotStyle.INK);
+                text.setBackgroundPaint(PlotStyle.HALO);
+                text.setTextAnchor(left ? TextAnchor.CENTER_RIGHT : TextAnchor.CENTER_LEFT);
+                plot.addAnnotation(text);
+            }
+        }
+    }
+
+    private static void limit(XYPlot plot, Axis axis, RequirementLine requirement, Range range) {
+        double position = axis.position(requirement.value());
+        if (Double.isNaN(position)) {
+            return;
+        }
+        plot.getRenderer().addAnnotation(FailingSide.ofRange(position, requirement.atLeast()), Layer.BACKGROUND);
+        Limits.line(plot, position);
+        plot.setRangeAxis(1, new LabelAxis("", List.of(new Mark(requirement.label(), position)), range));
+        plot.setRangeAxisLocation(1, AxisLocation.TOP_OR_RIGHT);
+    }
+
+    private List<LegendItem> legend() {
+        List<LegendItem> items = new ArrayList<>();
+        boolean fails = bars.panels().stream()
+                .flatMap(panel -> panel.bars().stream())
+                .anyMatch(bar -> !bar.met() && !Double.isNaN(bar.value()));
+        boolean limits =
+                bars.panels().stream().anyMatch(panel -> panel.requirement().isPresent());
+        if (fails || limits) {
+            items.add(LegendEntries.filled("meets the requirements", PlotStyle.FILL));
+            items.add(LegendEntries.hatched("does not meet them", false, PlotStyle.INK));
+        }
+        if (limits) {
+            items.add(Limits.failingEntry());
+        }
+        return items;
+    }
+}

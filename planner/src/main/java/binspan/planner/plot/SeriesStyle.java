@@ -1,0 +1,93 @@
+package binspan.planner.plot;
+
+import java.awt.BasicStroke;
+import java.awt.Color;
+import java.awt.Shape;
+import java.awt.Stroke;
+import java.awt.geom.AffineTransform;
+import java.awt.geom.Ellipse2D;
+import java.awt.geom.Path2D;
+import java.awt.geom.Rectangle2D;
+import java.util.List;
+
+/**
+ * How a series looks: a colour, a dash pattern and a marker, any one of which tells it from the others.
+ *
+ * @param colour apart from the others also without red or green cones
+ * @param stroke with its dash pattern
+ * @param marker about eight pixels wide, centred on zero
+ */
+record SeriesStyle(Color colour, Stroke stroke, Shape marker) {
+    private static final float WIDTH = 2.2f;
+    private static final double SIZE = 8.0;
+
+    /** Of three colour normal, red-blind and green-blind views the least distance of two in OKLab is above 0.1. */
+    private static final List<OkLab> COLOURS = List.of(
+            OkLab.ofHue(0.33, 0.170, 265.0),
+            OkLab.ofHue(0.68, 0.160, 47.0),
+            OkLab.ofHue(0.50, 0.080, 186.0),
+            OkLab.ofHue(0.66, 0.170, 297.0),
+            OkLab.ofHue(0.27, 0.085, 22.0),
+            OkLab.ofHue(0.65, 0.100, 195.0),
+            OkLab.ofHue(0.51, 0.150, 273.0),
+            OkLab.ofHue(0.38, 0.065, 228.0));
+
+    private static final float[][] DASHES = {
+        {},
+        {11.0f, 4.0f},
+        {3.0f, 3.0f},
+        {12.0f, 3.0f, 2.5f, 3.0f},
+        {18.0f, 5.0f},
+        {6.0f, 3.0f},
+        {14.0f, 3.0f, 2.5f, 3.0f, 2.5f, 3.0f},
+        {1.5f, 4.0f}
+    };
+
+    private static final Path2D TRIANGLE = polygon(0.0, -0.55, 0.55, 0.45, -0.55, 0.45);
+    private static final Path2D DIAMOND = polygon(0.0, -0.6, 0.6, 0.0, 0.0, 0.6, -0.6, 0.0);
+    private static final Path2D HOURGLASS = polygon(-0.5, -0.5, 0.5, -0.5, -0.5, 0.5, 0.5, 0.5);
+    private static final Path2D POINTER = polygon(-0.45, -0.55, 0.55, 0.0, -0.45, 0.55);
+    private static final Path2D PLUS = polygon(
+            -0.17, -0.55, 0.17, -0.55, 0.17, -0.17, 0.55, -0.17, 0.55, 0.17, 0.17, 0.17, 0.17, 0.55, -0.17, 0.55, -0.17,
+            0.17, -0.55, 0.17, -0.55, -0.17, -0.17, -0.17);
+
+    private static final List<Shape> MARKERS = List.of(
+            new Ellipse2D.Double(-0.45, -0.45, 0.9, 0.9),
+            new Rectangle2D.Double(-0.42, -0.42, 0.84, 0.84),
+            TRIANGLE,
+            DIAMOND,
+            AffineTransform.getScaleInstance(1.0, -1.0).createTransformedShape(TRIANGLE),
+            PLUS,
+            POINTER,
+            HOURGLASS);
+
+    /** The style of the series with an index from 0. */
+    static SeriesStyle of(int index) {
+        int i = Math.floorMod(index, COLOURS.size());
+        return new SeriesStyle(new Color(COLOURS.get(i).rgb()), dashed(i, WIDTH), marker(i, SIZE));
+    }
+
+    /** A stroke of a width with the dash pattern of an index. */
+    static Stroke dashed(int index, float width) {
+        float[] dashes = DASHES[Math.floorMod(index, DASHES.length)];
+        return dashes.length == 0
+                ? new BasicStroke(width, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND)
+                : new BasicStroke(width, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 10.0f, dashes, 0.0f);
+    }
+
+    /** The marker of an index in a size. */
+    static Shape marker(int index, double size) {
+        return AffineTransform.getScaleInstance(size, size)
+                .createTransformedShape(MARKERS.get(Math.floorMod(index, MARKERS.size())));
+    }
+
+    private static Path2D polygon(double... corners) {
+        Path2D path = new Path2D.Double();
+        path.moveTo(corners[0], corners[1]);
+        for (int i = 2; i < corners.length; i += 2) {
+            path.lineTo(corners[i], corners[i + 1]);
+        }
+        path.closePath();
+        return path;
+    }
+}
