@@ -31,6 +31,13 @@ public record LinkCheck(
                 prediction, finite, outcomes, headroom, StabilityLimit.of(headroom), Cautions.of(prediction, finite));
     }
 
+    /** The verdict on a predicted link without its headroom, which takes longer than everything else. */
+    public static LinkCheck brief(LinkPrediction prediction) {
+        FiniteKeyOutlook finite = FiniteKeyOutlook.of(prediction);
+        List<RequirementOutcome> outcomes = RequirementOutcome.all(prediction, finite);
+        return new LinkCheck(prediction, finite, outcomes, List.of(), List.of(), Cautions.of(prediction, finite));
+    }
+
     /** Whether all requirements are met; true where none is stated. */
     public boolean met() {
         return outcomes.stream().allMatch(RequirementOutcome::met);

@@ -52,7 +52,7 @@ public enum Requirement {
     }
 
     /** The predicted figure; NaN or infinite where the link has none. */
-    double predicted(LinkPrediction p, FiniteKeyOutlook finite) {
+    public double predicted(LinkPrediction p, FiniteKeyOutlook finite) {
         return switch (this) {
             case RAW_VISIBILITY -> p.fringe().raw();
             case CHSH -> p.bell().chsh();

@@ -1,0 +1,50 @@
+package binspan.planner.picture;
+
+import binspan.planner.plot.Axis;
+import binspan.planner.report.FigureWords;
+import binspan.planner.report.ParameterWords;
+import binspan.study.FigureColumn;
+import binspan.study.StudyTable;
+
+/** Axes of pictures, named and with units. */
+final class FigureAxes {
+    private static final double DECADE = 10.0;
+    private static final double DEEPEST = 1e-6;
+
+    private FigureAxes() {}
+
+    /** The axis of a varied parameter over its whole range. */
+    static Axis of(binspan.study.Axis varied) {
+        return new Axis(
+                ParameterWords.title(varied.parameter().path()),
+                varied.parameter().unit(),
+                varied.logarithmic(),
+                varied.from(),
+                varied.to());
+    }
+
+    /** The axis of a figure: logarithmic where it spans more than a decade of positive values and usually does, then at most six decades deep. */
+    static Axis of(FigureColumn column, double... values) {
+        double least = Double.POSITIVE_INFINITY;
+        double largest = Double.NEGATIVE_INFINITY;
+        for (double value : values) {
+            if (Double.isFinite(value) && value > 0.0) {
+                least = Math.min(least, value);
+                largest = Math.max(largest, value);
+            }
+        }
+        String title = FigureWords.title(column);
+        if (!FigureWords.spansDecades(column) || !(largest > DECADE * least)) {
+            return Axis.linear(title, column.unit());
+        }
+        boolean deep = least < DEEPEST * largest;
+        return deep
+                ? Axis.logarithmic(title, column.unit()).within(DEEPEST * largest, 2.0 * largest)
+                : Axis.logarithmic(title, column.unit());
+    }
+
+    /** The axis of a column of a table. */
+    static Axis of(StudyTable table, int column) {
+        return of(table.columns().get(column), table.figuresOf(column));
+    }
+}

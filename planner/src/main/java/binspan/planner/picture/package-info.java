@@ -1,0 +1,2 @@
+/** Pictures of studies: what each study draws, described for the plot package. */
+package binspan.planner.picture;
