@@ -112,7 +112,7 @@ public final class FieldParameter implements Parameter {
 
     private DoubleFunction<Object> part(Object component, int item, List<Step> rest) {
         if (component instanceof Optional<?> optional) {
-            DoubleFunction<Record> inside = edit((Record) optional.orElseThrow(), rest);
+            DoubleFunction<Record> inside = edit((Record) optional.orElseThrow(this::incomplete), rest);
             return value -> Optional.of(inside.apply(value));
         }
         if (!(component instanceof List<?> list)) {
@@ -125,6 +125,10 @@ public final class FieldParameter implements Parameter {
             items.add(item == PathParser.ALL || item == i ? edit(present, rest) : value -> present);
         }
         return value -> items.stream().map(each -> each.apply(value)).toList();
+    }
+
+    private IllegalArgumentException incomplete() {
+        return new IllegalArgumentException(path + ": not every element of the list has it; name one as [0]");
     }
 
     private void refuseBeside(Field standing) {

@@ -14,6 +14,7 @@ import java.util.List;
 /** Ranges in which a parameter is searched when nobody says otherwise (common practice), and the parameters that are tuned by default. */
 public final class DefaultAxes {
     private static final double FACTOR = 20.0;
+    private static final double ALMOST = 0.999;
     private static final double PICO_PER_NANO = 1000.0;
     private static final String WINDOW = "timing.windowWidthPs";
 
@@ -36,14 +37,19 @@ public final class DefaultAxes {
         }
         Range range = parameter.range();
         if (planned < 0.0) {
-            return new Axis(
-                    parameter, Math.max(range.lowest(), 2.0 * planned), Math.min(range.highest(), 0.0), 2, false);
+            return new Axis(parameter, inside(range, planned, 2.0 * planned), inside(range, planned, 0.0), 2, false);
         }
-        double highest = Math.min(range.highest(), planned * FACTOR);
+        double highest = inside(range, planned, planned * FACTOR);
         if (parameter.path().equals(WINDOW)) {
             highest = Math.max(planned, Math.min(highest, scenario.imbalanceNs() * PICO_PER_NANO));
         }
-        return new Axis(parameter, Math.max(range.lowest(), planned / FACTOR), highest, 2, planned / FACTOR > 0.0);
+        return new Axis(parameter, inside(range, planned, planned / FACTOR), highest, 2, true);
+    }
+
+    /** A wanted end pulled into the range; just short of an end that is itself excluded. */
+    private static double inside(Range range, double planned, double wanted) {
+        double end = Math.max(range.lowest(), Math.min(range.highest(), wanted));
+        return range.contains(end) ? end : planned + ALMOST * (end - planned);
     }
 
     /** What an engineer tunes first: the pairs, the window and compensators of a stated dispersion. */

@@ -62,11 +62,28 @@ public final class FigureColumns {
         if (known) {
             return "figure of merit " + name + " does not apply to this link";
         }
-        List<String> names = all.stream().map(FigureColumn::name).toList();
-        List<String> near = Nearest.to(name, names);
+        List<String> near = near(name, all);
         return "unknown figure of merit " + name
                 + (near.isEmpty()
-                        ? "; allowed " + String.join(", ", names)
+                        ? "; allowed groups " + String.join(", ", groups(all)) + " and single figures such as "
+                                + all.get(0).name()
                         : "; did you mean " + String.join(" or ", near) + "?");
+    }
+
+    /** Names that are nearly the same, or whose last part is. */
+    private static List<String> near(String name, List<FigureColumn> all) {
+        List<String> names =
+                all.stream().map(column -> column.field().name()).distinct().toList();
+        List<String> near = Nearest.to(name, names);
+        return near.isEmpty()
+                ? names.stream().filter(each -> each.endsWith("." + name)).toList()
+                : near;
+    }
+
+    private static List<String> groups(List<FigureColumn> all) {
+        return all.stream()
+                .map(column -> column.name().substring(0, column.name().indexOf('.')))
+                .distinct()
+                .toList();
     }
 }

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatIllegalArgumentException;
 
 import binspan.scenario.Field.Kind;
+import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
@@ -84,6 +85,21 @@ final class FieldParameterTest {
                 .isThrownBy(() -> parameter.with(SCENARIO, value))
                 .withMessageStartingWith(path + ": found " + Range.plain(value) + "; allowed ")
                 .withMessageEndingWith(parameter.range().text(parameter.unit()));
+    }
+
+    /** A gate that one of two ports has is no parameter of both. */
+    @Test
+    void fieldThatSomeElementsLackIsRefused() {
+        Values stated = SampleScenarios.pulsePair();
+        Values gated = new Values().put("class", DetectorClass.INGAAS_GATED);
+        gated.put("gate", new Values().put("widthNs", 1.0).put("darkProbability", 3e-5));
+        List<?> free = stated.section("alice").list("detectors");
+        stated.section("alice").put("detectors", new ArrayList<>(List.of(gated, free.get(0))));
+        Scenario scenario = SampleScenarios.build(stated);
+        Parameter width = ParameterPaths.find(scenario, "alice.detectors.gate.widthNs");
+        assertThatIllegalArgumentException()
+                .isThrownBy(() -> width.over(scenario))
+                .withMessage("alice.detectors.gate.widthNs: not every element of the list has it; name one as [0]");
     }
 
     @Test

@@ -1,20 +1,16 @@
 package binspan.planner.cli;
 
 import binspan.planner.io.InvalidScenarioException;
-import binspan.planner.io.ScenarioReader;
 import binspan.planner.report.ResultJson;
 import binspan.planner.report.TextStyle;
 import binspan.planner.report.Verdict;
 import binspan.planner.report.WorksheetText;
 import binspan.prediction.LinkCheck;
-import binspan.scenario.Scenario;
 import java.io.PrintStream;
 import java.util.List;
 
 /** Checks scenarios one after the other. */
 final class Check {
-    static final String STANDARD_INPUT = "-";
-
     private final Console console;
     private final Form form;
     private final boolean several;
@@ -56,18 +52,12 @@ final class Check {
 
     private int statusOf(String file) {
         try {
-            LinkCheck outcome = LinkCheck.of(read(file));
+            LinkCheck outcome = LinkCheck.of(ScenarioInput.read(file, console));
             print(file, outcome);
             return outcome.met() ? ExitStatus.MET : ExitStatus.UNMET;
         } catch (InvalidScenarioException | RuntimeException e) {
             return ExitStatus.of(e, console);
         }
-    }
-
-    private Scenario read(String file) throws InvalidScenarioException {
-        return file.equals(STANDARD_INPUT)
-                ? ScenarioReader.read(console.in(), "(standard input)")
-                : ScenarioReader.read(file);
     }
 
     private void print(String file, LinkCheck outcome) {

@@ -36,6 +36,10 @@ final class Commands {
     static CommandLine tree(Console console) {
         CommandLine line = new CommandLine(new Root())
                 .addSubcommand(new CheckCommand(console))
+                .addSubcommand(new SweepCommand(console))
+                .addSubcommand(new TuneCommand(console))
+                .addSubcommand(new ReachCommand(console))
+                .addSubcommand(new CompareCommand(console))
                 .addSubcommand(new NewCommand(console))
                 .addSubcommand(new ListCommand(console))
                 .addSubcommand(new SchemaCommand(console))
@@ -59,6 +63,7 @@ final class Commands {
                 "Examples:",
                 "  binspan new pulse-pair --output dam-to-town.json",
                 "  binspan check dam-to-town.json",
+                "  binspan sweep dam-to-town.json --vary timing.windowWidthPs=100:1500",
                 "  binspan list parameters",
                 "",
                 "binspan COMMAND --help explains a command."

@@ -3,9 +3,12 @@ package binspan.planner.cli;
 import java.io.BufferedOutputStream;
 import java.io.FileDescriptor;
 import java.io.FileOutputStream;
+import java.io.IOException;
 import java.io.InputStream;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.Map;
 
 /** Where a command reads and writes. Text is UTF-8. */
@@ -16,27 +19,27 @@ public final class Console {
     private final OutputSink sink;
     private final PrintStream out;
     private final PrintStream err;
-    private final boolean colour;
-    private final boolean debug;
+    private final boolean terminal;
+    private final Map<String, String> environment;
 
-    private Console(InputStream in, OutputSink sink, PrintStream err, boolean colour, boolean debug) {
+    private Console(
+            InputStream in, OutputSink sink, PrintStream err, boolean terminal, Map<String, String> environment) {
         this.in = in;
         this.sink = sink;
         this.out = new PrintStream(new BufferedOutputStream(sink), false, StandardCharsets.UTF_8);
         this.err = err;
-        this.colour = colour;
-        this.debug = debug;
+        this.terminal = terminal;
+        this.environment = environment;
     }
 
     /** The streams of the process. */
     public static Console ofSystem() {
-        Map<String, String> environment = System.getenv();
         return new Console(
                 System.in,
                 new OutputSink(new FileOutputStream(FileDescriptor.out)),
                 new PrintStream(new FileOutputStream(FileDescriptor.err), true, StandardCharsets.UTF_8),
-                isTerminal() && wantsColour(environment),
-                wantsDebug(environment));
+                isTerminal(),
+                System.getenv());
     }
 
     /** Java 22 to 24 have a console even where there is no terminal, unless told otherwise. */
@@ -55,18 +58,26 @@ public final class Console {
      * @param environment environment variables
      */
     static Console of(InputStream in, OutputSink out, PrintStream err, Map<String, String> environment) {
-        return new Console(in, out, err, false, wantsDebug(environment));
+        return new Console(in, out, err, false, environment);
     }
 
     /** Whether a terminal shows colours: it has a name other than "dumb", and nobody asked for none. */
     static boolean wantsColour(Map<String, String> environment) {
-        String terminal = environment.getOrDefault("TERM", "dumb");
-        return !terminal.equals("dumb")
-                && environment.getOrDefault("NO_COLOR", "").isEmpty();
+        return capable(environment) && environment.getOrDefault("NO_COLOR", "").isEmpty();
     }
 
-    private static boolean wantsDebug(Map<String, String> environment) {
-        return !environment.getOrDefault(DEBUG, "").isEmpty();
+    private static boolean capable(Map<String, String> environment) {
+        return !environment.getOrDefault("TERM", "dumb").equals("dumb");
+    }
+
+    /** Whether standard error is the terminal too, where the system tells. */
+    private static boolean errorsOnTerminal() {
+        try {
+            String device = Files.readSymbolicLink(Path.of("/proc/self/fd/2")).toString();
+            return device.startsWith("/dev/pts/") || device.startsWith("/dev/tty") || device.equals("/dev/console");
+        } catch (IOException | UnsupportedOperationException e) {
+            return true;
+        }
     }
 
     InputStream in() {
@@ -82,12 +93,17 @@ public final class Console {
     }
 
     boolean colour() {
-        return colour;
+        return terminal && wantsColour(environment);
+    }
+
+    /** Whether a line on standard error may be drawn over and over: a person looks on, nothing goes to a pipe or file. */
+    boolean showsProgress() {
+        return terminal && capable(environment) && errorsOnTerminal();
     }
 
     /** Whether an own failure prints where it happened. */
     boolean debug() {
-        return debug;
+        return !environment.getOrDefault(DEBUG, "").isEmpty();
     }
 
     /** Whether the reader of the output has gone. */

@@ -19,7 +19,7 @@ record PlainCheck(List<String> files, Check.Form form) {
         List<String> files = new ArrayList<>();
         Check.Form form = Check.Form.VERDICT;
         for (int i = 1; i < args.length; i++) {
-            if (!args[i].startsWith("-") || args[i].equals(Check.STANDARD_INPUT)) {
+            if (!args[i].startsWith("-") || args[i].equals(ScenarioInput.STANDARD_INPUT)) {
                 files.add(args[i]);
             } else if (form == Check.Form.VERDICT && option(args[i]) != null) {
                 form = option(args[i]);

@@ -5,6 +5,8 @@ import java.util.ArrayList;
 import java.util.List;
 import picocli.CommandLine;
 import picocli.CommandLine.MissingParameterException;
+import picocli.CommandLine.Model.ArgSpec;
+import picocli.CommandLine.Model.OptionSpec;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.UnmatchedArgumentException;
 
@@ -56,7 +58,9 @@ final class UsageErrors {
                 return unknown(word, command);
             }
         }
-        return "missing " + error.getMissing().get(0).paramLabel();
+        ArgSpec argument = error.getMissing().get(0);
+        String option = argument instanceof OptionSpec named ? named.longestName() + " " : "";
+        return "missing " + option + argument.paramLabel();
     }
 
     /** A word without the value that an option may carry. */

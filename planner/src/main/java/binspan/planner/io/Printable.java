@@ -1,7 +1,7 @@
 package binspan.planner.io;
 
-/** Text of a file made fit for a message: no control characters, no endless lines. */
-final class Printable {
+/** Text of a file or a command line made fit for a message: no control characters, no endless lines. */
+public final class Printable {
     private static final int LONGEST_VALUE = 60;
     private static final int LONGEST_LINE = 1000;
     private static final String CUT = "...";
@@ -19,7 +19,7 @@ final class Printable {
     }
 
     /** A whole line of output: characters that would move the cursor or hide text are written as escapes. */
-    static String line(String text) {
+    public static String line(String text) {
         String kept = cut(text, LONGEST_LINE);
         StringBuilder line = new StringBuilder(kept.length() + 16);
         for (int i = 0; i < kept.length(); i += Character.charCount(kept.codePointAt(i))) {

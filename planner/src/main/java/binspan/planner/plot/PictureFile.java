@@ -40,7 +40,8 @@ public final class PictureFile {
      *     installed
      */
     public void write(Picture picture, boolean replace) throws OutputFileException {
-        WholeFile.write(file, bytes(picture), replace);
+        byte[] bytes = bytes(picture);
+        WholeFile.write(file, out -> out.write(bytes), replace);
     }
 
     private byte[] bytes(Picture picture) throws OutputFileException {

@@ -16,6 +16,8 @@ import java.util.List;
 public final class ComparisonSummary {
     private static final int NAME = 30;
     private static final int NUMBER = 12;
+    private static final int FOUR = 4;
+    private static final double NO_ROOM = 1e-4;
 
     private final List<Comparison.Entry> entries;
     private final TextPage page;
@@ -93,8 +95,6 @@ public final class ComparisonSummary {
         page.row("limited by", page.style().clean(limit(entry)));
     }
 
-    private static final int FOUR = 4;
-
     private static String singles(List<DetectorLoad> loads) {
         List<String> words = new ArrayList<>();
         loads.forEach(load -> words.add(Figure.counts(load.recordedPerSecond())));
@@ -132,9 +132,11 @@ public final class ComparisonSummary {
         if (entry.tightest() == null) {
             return cost.of(Requirement.RAW_VISIBILITY);
         }
-        String room = entry.meets()
-                ? ", " + Figure.percent(Math.expm1(entry.leastMargin())) + " of room. "
-                : ", which it fails. ";
+        String room = !entry.meets()
+                ? ", which it fails. "
+                : entry.leastMargin() < NO_ROOM
+                        ? ", no room left. "
+                        : ", " + Figure.percent(Math.expm1(entry.leastMargin())) + " of room. ";
         return RequirementWords.name(entry.tightest()) + room + cost.of(entry.tightest());
     }
 }

@@ -72,6 +72,11 @@ final class RequirementWords {
         };
     }
 
+    /** A predicted figure to three digits, for settings that may lie right at the required one. */
+    static String rounded(Requirement requirement, double value) {
+        return predicted(requirement, value, value);
+    }
+
     /** How much room is left, with its sign, in the requirement's own unit. */
     static String margin(Requirement requirement, double margin) {
         return switch (requirement) {

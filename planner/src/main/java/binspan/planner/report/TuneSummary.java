@@ -127,15 +127,21 @@ public final class TuneSummary {
                             (requirement.atLeast() ? style.atLeast() : style.atMost()) + " "
                                     + RequirementWords.required(requirement, required),
                             13)
-                    + right(predicted(requirement, outcome.prediction(), required), NUMBER)
-                    + right(predicted(requirement, outcome.asWritten(), required), NUMBER)
+                    + right(predicted(requirement, outcome.prediction(), required, true), NUMBER)
+                    + right(predicted(requirement, outcome.asWritten(), required, met), NUMBER)
                     + (met ? "" : "  " + style.notMet() + " fails as written"));
         }
     }
 
-    private static String predicted(Requirement requirement, LinkPrediction prediction, double required) {
+    /** A requirement that is met exactly, as the best settings often meet one, is not told to its last digit. */
+    private String predicted(Requirement requirement, LinkPrediction prediction, double required, boolean met) {
         double value = requirement.predicted(prediction, FiniteKeyOutlook.of(prediction));
-        return Double.isFinite(value) ? RequirementWords.predicted(requirement, value, required) : "none";
+        if (!Double.isFinite(value)) {
+            return "none";
+        }
+        return met
+                ? RequirementWords.rounded(requirement, value)
+                : RequirementWords.predicted(requirement, value, required);
     }
 
     private void figures() {

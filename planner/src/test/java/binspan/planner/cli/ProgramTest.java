@@ -25,12 +25,12 @@ final class ProgramTest {
         Run run = Run.of("--help");
         assertThat(run.status()).isEqualTo(ExitStatus.MET);
         assertThat(run.err()).isEmpty();
-        assertThat(run.out()).contains("check", "new", "list", "schema", "completion", "Examples:");
+        assertThat(run.out()).contains("check", "sweep", "new", "list", "schema", "completion", "Examples:");
         assertThat(Run.of("help")).isEqualTo(run);
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"check", "new", "list", "schema", "completion"})
+    @ValueSource(strings = {"check", "sweep", "new", "list", "schema", "completion"})
     void helpOfACommandHasExamplesAndFitsEightyColumns(String command) {
         Run run = Run.of(command, "--help");
         assertThat(run.status()).isEqualTo(ExitStatus.MET);

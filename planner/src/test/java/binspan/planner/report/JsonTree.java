@@ -11,7 +11,7 @@ import tools.jackson.core.StreamReadFeature;
 import tools.jackson.core.json.JsonFactory;
 
 /** JSON read back by a strict parser, duplicate names refused. */
-final class JsonTree {
+public final class JsonTree {
     private static final JsonFactory FACTORY = JsonFactory.builder()
             .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
             .build();
@@ -23,9 +23,9 @@ final class JsonTree {
      *
      * @param value text, number, flag, or the children of an object or list
      */
-    record Node(Object value) {
+    public record Node(Object value) {
         /** Names of an object as dotted paths, objects inside it opened out. */
-        List<String> names() {
+        public List<String> names() {
             List<String> names = new ArrayList<>();
             members().forEach((name, node) -> {
                 if (node.value() instanceof Map<?, ?>) {
@@ -38,7 +38,7 @@ final class JsonTree {
         }
 
         /** The value under names that lead inwards. */
-        Node at(String... path) {
+        public Node at(String... path) {
             Node node = this;
             for (String name : path) {
                 node = node.members().get(name);
@@ -46,7 +46,7 @@ final class JsonTree {
             return node;
         }
 
-        List<Node> items() {
+        public List<Node> items() {
             return ((List<?>) value).stream().map(Node.class::cast).toList();
         }
 
@@ -57,7 +57,7 @@ final class JsonTree {
         }
     }
 
-    static Node of(String text) {
+    public static Node of(String text) {
         try (JsonParser parser = FACTORY.createParser(ObjectReadContext.empty(), text)) {
             parser.nextToken();
             Node node = read(parser);

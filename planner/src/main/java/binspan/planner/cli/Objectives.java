@@ -1,0 +1,37 @@
+package binspan.planner.cli;
+
+import binspan.prediction.LinkPredictor;
+import binspan.scenario.Scenario;
+import binspan.study.Axis;
+import binspan.study.DefaultAxes;
+import binspan.study.Objective;
+import binspan.study.Tuning;
+import java.util.Arrays;
+import java.util.List;
+
+/** What a study tunes for, and what it tunes, where the command line says so or does not. */
+final class Objectives {
+    private Objectives() {}
+
+    /** The objective of an option {@code --for}, or the natural one. */
+    static Objective of(String word, Scenario scenario) throws UsageException {
+        if (word == null) {
+            return Objective.natural(LinkPredictor.predict(scenario));
+        }
+        return Arrays.stream(Objective.values())
+                .filter(each -> each.text().equals(word))
+                .findFirst()
+                .orElseThrow(() -> UsageException.unknown("objective", word, words()));
+    }
+
+    private static List<String> words() {
+        return Arrays.stream(Objective.values()).map(Objective::text).toList();
+    }
+
+    /** The free parameters that were named, or the usual ones. */
+    static List<Axis> free(FreeOptions free, Scenario scenario) throws UsageException {
+        return free.given()
+                ? free.axes(scenario, Tuning.MOST_FREE)
+                : UsageException.unless("--free", () -> DefaultAxes.tuned(scenario));
+    }
+}

@@ -1,0 +1,158 @@
+package binspan.planner.cli;
+
+import binspan.planner.io.InvalidScenarioException;
+import binspan.planner.io.OutputFileException;
+import binspan.planner.picture.ReachPicture;
+import binspan.planner.report.ReachSummary;
+import binspan.planner.table.TableJson;
+import binspan.scenario.Scenario;
+import binspan.study.Axis;
+import binspan.study.FigureColumn;
+import binspan.study.FigureColumns;
+import binspan.study.Objective;
+import binspan.study.Reach;
+import binspan.study.SourcePosition;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+
+/** The command {@code binspan reach}. */
+@Command(
+        name = "reach",
+        mixinStandardHelpOptions = true,
+        versionProvider = VersionLine.class,
+        header = "Tells how far a link reaches.",
+        customSynopsis = {
+            "binspan reach FILE [--source middle|alice|bob|SHARE] [--free PATH[=FROM:TO]] ...",
+            "                     [--for OBJECTIVE] [--as-written] [--csv FILE] [--json FILE]",
+            "                     [--plot FILE] [--force]"
+        },
+        description = {
+            "Scales all fibre in proportion and finds the greatest length at which each",
+            "requirement still holds, with the settings as written and re-tuned at every",
+            "length. Without --free the mean pairs, the window and compensators of a stated",
+            "dispersion are re-tuned."
+        },
+        footer = {
+            "",
+            "Examples:",
+            "  binspan reach dam-to-town.json",
+            "  binspan reach dam-to-town.json --source alice --plot reach.png",
+            "  binspan reach dam-to-town.json --as-written --csv reach.csv",
+            "",
+            "Exit status: 0 done, 2 bad input or usage, 3 the program's own failure."
+        })
+final class ReachCommand implements Callable<Integer> {
+    private final Console console;
+
+    @Mixin
+    private ScenarioInput input;
+
+    @Option(
+            names = "--source",
+            paramLabel = "PLACE",
+            description =
+                    "Where the source stands: middle, alice, bob, or alice's share of the fibre from 0 to 1; as in"
+                            + " the scenario if not given.")
+    private String source;
+
+    @Mixin
+    private FreeOptions free;
+
+    @Option(
+            names = "--for",
+            paramLabel = "OBJECTIVE",
+            description = "What is tuned for while the requirements hold: key, visibility, chsh or margin.")
+    private String objective;
+
+    @Option(names = "--as-written", description = "Keep the settings as written; tune nothing.")
+    private boolean asWritten;
+
+    @Mixin
+    private StudyOutput output;
+
+    ReachCommand(Console console) {
+        this.console = console;
+    }
+
+    @Override
+    public Integer call() throws InvalidScenarioException, UsageException, OutputFileException {
+        output.check(input.file());
+        Scenario scenario = placed(input.read(console));
+        if (asWritten && free.given()) {
+            throw UsageException.of("--as-written: tunes nothing, and --free names what to tune; give one of them");
+        }
+        Objective wanted = Objectives.of(objective, scenario);
+        List<Axis> axes = asWritten ? List.of() : Objectives.free(free, scenario);
+        List<FigureColumn> columns = FigureColumns.all(scenario);
+        Reach reach = UsageException.unless(input.file(), () -> new Reach(scenario, axes, wanted, columns));
+        Reach.Outcome outcome = ProgressBar.during(console, reach::run);
+        output.deliver(report(reach, outcome), console);
+        return ExitStatus.MET;
+    }
+
+    private Scenario placed(Scenario scenario) throws UsageException {
+        if (source == null) {
+            return scenario;
+        }
+        return UsageException.unless("--source " + source, () -> SourcePosition.moved(scenario, share(source)));
+    }
+
+    private static double share(String place) {
+        return switch (place) {
+            case "middle" -> 0.5;
+            case "alice" -> 0.0;
+            case "bob" -> 1.0;
+            default -> WrittenNumber.of(place);
+        };
+    }
+
+    private static StudyReport report(Reach reach, Reach.Outcome outcome) {
+        return new StudyReport(
+                description(reach, outcome),
+                ReachRows.of(reach, outcome),
+                style -> ReachSummary.text(reach, outcome, style),
+                Optional.of(() -> ReachPicture.of(reach, outcome)));
+    }
+
+    private static Map<String, Object> description(Reach reach, Reach.Outcome outcome) {
+        Map<String, Object> description = TableJson.head(reach.scenario().name(), "reach");
+        description.put("sourceShareOfAlice", SourcePosition.of(reach.scenario()));
+        description.put("free", StudyDescription.ranges(reach.free()));
+        description.put("objective", reach.objective().text());
+        List<Map<String, Object>> limits = new ArrayList<>();
+        for (Reach.Limit limit : outcome.limits()) {
+            Map<String, Object> entry = new LinkedHashMap<>();
+            entry.put("name", limit.goal().requirement().fieldName());
+            entry.put("required", limit.goal().required());
+            entry.put("stated", limit.goal().stated());
+            lengths(limit, entry);
+            limits.add(entry);
+        }
+        description.put("limits", limits);
+        if (outcome.all() != null) {
+            Map<String, Object> all = new LinkedHashMap<>();
+            lengths(outcome.all(), all);
+            description.put("all", all);
+        }
+        return StudyDescription.finite(description);
+    }
+
+    private static void lengths(Reach.Limit limit, Map<String, Object> entry) {
+        put(entry, "asWrittenKm", limit.asWrittenKm());
+        put(entry, "retunedKm", limit.retunedKm());
+    }
+
+    private static void put(Map<String, Object> entry, String name, OptionalDouble km) {
+        if (km.isPresent()) {
+            entry.put(name, km.getAsDouble());
+        }
+    }
+}

@@ -1,0 +1,110 @@
+package binspan.planner.cli;
+
+import binspan.planner.io.InvalidScenarioException;
+import binspan.planner.io.OutputFileException;
+import binspan.planner.picture.TunePicture;
+import binspan.planner.report.TuneSummary;
+import binspan.planner.table.StudyRows;
+import binspan.planner.table.TableJson;
+import binspan.scenario.Scenario;
+import binspan.study.Axis;
+import binspan.study.FigureColumns;
+import binspan.study.Objective;
+import binspan.study.StudyTable;
+import binspan.study.Tuning;
+import binspan.study.TuningTable;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+
+/** The command {@code binspan tune}. */
+@Command(
+        name = "tune",
+        mixinStandardHelpOptions = true,
+        versionProvider = VersionLine.class,
+        header = "Finds the best settings of a link under its requirements.",
+        customSynopsis = {
+            "binspan tune FILE [--free PATH[=FROM:TO]] ... [--for OBJECTIVE]",
+            "                    [--csv FILE] [--json FILE] [--plot FILE] [--force]"
+        },
+        description = {
+            "Sets the free parameters so that the objective is as large as it can be while all",
+            "requirements of the scenario hold. Without --free these are the mean pairs, the",
+            "window and compensators of a stated dispersion."
+        },
+        footer = {
+            "",
+            "Examples:",
+            "  binspan tune dam-to-town.json",
+            "  binspan tune dam-to-town.json --free source.meanPairsPerCycle \\",
+            "      --free timing.windowWidthPs=100:1000 --free imbalanceNs --for visibility",
+            "  binspan tune dam-to-town.json --for margin --plot best.png",
+            "",
+            "The table has two rows: the settings as written and the best ones.",
+            "Exit status: 0 done, 2 bad input or no settings meet the requirements,",
+            "3 the program's own failure."
+        })
+final class TuneCommand implements Callable<Integer> {
+    private final Console console;
+
+    @Mixin
+    private ScenarioInput input;
+
+    @Mixin
+    private FreeOptions free;
+
+    @Option(
+            names = "--for",
+            paramLabel = "OBJECTIVE",
+            description = "What is made as large as possible: key, visibility, chsh or margin (the least margin of all"
+                    + " requirements); the key if not given, S where the detectors allow no key.")
+    private String objective;
+
+    @Mixin
+    private StudyOutput output;
+
+    TuneCommand(Console console) {
+        this.console = console;
+    }
+
+    @Override
+    public Integer call() throws InvalidScenarioException, UsageException, OutputFileException {
+        output.check(input.file());
+        Scenario scenario = input.read(console);
+        Objective wanted = Objectives.of(objective, scenario);
+        List<Axis> axes = Objectives.free(free, scenario);
+        Tuning tuning = UsageException.unless("--free", () -> Tuning.of(scenario, axes, wanted));
+        Tuning.Outcome outcome = ProgressBar.during(console, tuning::run);
+        if (!outcome.feasible()) {
+            throw NoFeasiblePoint.of(
+                    "no settings of the free parameters meet all requirements", tuning.margins(), outcome.prediction());
+        }
+        output.deliver(report(tuning, outcome), console);
+        return ExitStatus.MET;
+    }
+
+    private static StudyReport report(Tuning tuning, Tuning.Outcome outcome) {
+        StudyTable table = TuningTable.of(tuning, outcome, FigureColumns.all(tuning.scenario()));
+        return new StudyReport(
+                description(tuning, outcome),
+                StudyRows.of(table, table.columns(), List.of(StudyRows.own("settings", TuningTable.SETTINGS::get))),
+                style -> TuneSummary.text(tuning, outcome, style),
+                Optional.of(() -> TunePicture.of(tuning, outcome)));
+    }
+
+    private static Map<String, Object> description(Tuning tuning, Tuning.Outcome outcome) {
+        Map<String, Object> description = TableJson.head(tuning.scenario().name(), "tune");
+        description.put("free", StudyDescription.ranges(tuning.free()));
+        description.put("objective", tuning.objective().text());
+        description.put("asWritten", tuning.objective().value(outcome.asWritten(), tuning.margins()));
+        description.put("best", tuning.objective().value(outcome.prediction(), tuning.margins()));
+        description.put("settings", StudyDescription.values(tuning.free(), outcome.values()));
+        description.put("seed", tuning.seed());
+        description.put("evaluations", outcome.evaluations());
+        return StudyDescription.finite(description);
+    }
+}

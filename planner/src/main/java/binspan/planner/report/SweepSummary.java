@@ -1,0 +1,185 @@
+package binspan.planner.report;
+
+import static binspan.planner.report.TextPage.left;
+import static binspan.planner.report.TextPage.right;
+
+import binspan.prediction.Requirement;
+import binspan.scenario.Scenario;
+import binspan.study.Axis;
+import binspan.study.StudyTable;
+import java.util.List;
+import java.util.OptionalInt;
+
+/** What a sweep tells a person: what was varied, where all requirements are met, and where each figure is best. */
+public final class SweepSummary {
+    private static final int LABEL = 9;
+    private static final int NAME = 26;
+    private static final int NUMBER = 13;
+    private static final int MOST_INTERVALS = 6;
+    private static final String BLANK = " ".repeat(LABEL);
+
+    private final Scenario scenario;
+    private final List<Axis> axes;
+    private final StudyTable table;
+    private final List<RequiredFigure> required;
+    private final SweepFindings findings;
+    private final TextPage page;
+
+    private SweepSummary(Scenario scenario, List<Axis> axes, StudyTable table, TextStyle style) {
+        this.scenario = scenario;
+        this.axes = axes;
+        this.table = table;
+        this.required = RequiredFigure.of(scenario.require());
+        this.findings = new SweepFindings(table, required);
+        this.page = new TextPage(style);
+    }
+
+    /**
+     * The summary as a text that ends with a line break.
+     *
+     * @param scenario the link as written
+     * @param axes varied parameters
+     * @param table the points, with the figures of all stated requirements
+     * @param style colour and characters
+     */
+    public static String text(Scenario scenario, List<Axis> axes, StudyTable table, TextStyle style) {
+        SweepSummary summary = new SweepSummary(scenario, axes, table, style);
+        summary.page.wrapped(style.clean(scenario.name()));
+        summary.answer();
+        summary.page.gap();
+        summary.varied();
+        if (!summary.required.isEmpty()) {
+            summary.intervals();
+            summary.room();
+        }
+        summary.best();
+        return summary.page.toString();
+    }
+
+    /** Names of the figures that the summary of a sweep speaks of. */
+    public static List<String> figures(Scenario scenario) {
+        return spoken(scenario).stream().map(RequiredFigure::figure).toList();
+    }
+
+    /** The stated requirements; without any, visibility and key. */
+    private static List<RequiredFigure> spoken(Scenario scenario) {
+        List<RequiredFigure> required = RequiredFigure.of(scenario.require());
+        return required.isEmpty()
+                ? List.of(
+                        new RequiredFigure(Requirement.RAW_VISIBILITY, Double.NaN),
+                        new RequiredFigure(Requirement.KEY_RATE, Double.NaN))
+                : required;
+    }
+
+    private void answer() {
+        TextStyle style = page.style();
+        String all = required.size() == 1 ? "the requirement" : "all " + required.size() + " requirements";
+        int met = table.met();
+        if (required.isEmpty()) {
+            page.line("No requirement is stated: these are predictions without a verdict.");
+        } else if (met == 0) {
+            page.line(style.bad(style.notMet() + " NONE of " + table.rows() + " points MEETS " + all));
+        } else {
+            String share = met == table.rows()
+                    ? "ALL " + met + " points MEET " + all
+                    : met + " of " + table.rows() + " points MEET " + all + ", "
+                            + Figure.percent((double) met / table.rows());
+            page.line(style.good(style.met() + " " + share));
+        }
+    }
+
+    private void varied() {
+        String label = "varied";
+        for (Axis axis : axes) {
+            labelled(label, AxisWords.described(axis, scenario));
+            label = "";
+        }
+    }
+
+    private void labelled(String label, String words) {
+        page.wrapped(left(label, LABEL), BLANK, page.style().clean(words));
+    }
+
+    private void intervals() {
+        List<SweepFindings.Run> runs = findings.met();
+        if (axes.size() > 1 || runs.isEmpty()) {
+            return;
+        }
+        StringBuilder words = new StringBuilder();
+        for (SweepFindings.Run run : runs.subList(0, Math.min(MOST_INTERVALS, runs.size()))) {
+            words.append(words.isEmpty() ? "" : "; ").append(interval(run));
+        }
+        if (runs.size() > MOST_INTERVALS) {
+            words.append("; and ").append(runs.size() - MOST_INTERVALS).append(" more");
+        }
+        labelled("met", words + ". Read off the points; binspan window solves the ends exactly.");
+    }
+
+    private String interval(SweepFindings.Run run) {
+        Axis axis = axes.get(0);
+        return run.first() == run.last()
+                ? "at " + AxisWords.value(axis, table.varied(0, run.first()))
+                : "from " + AxisWords.range(axis, table.varied(0, run.first()), table.varied(0, run.last()));
+    }
+
+    private void room() {
+        int row = findings.roomiest();
+        boolean met = table.met() > 0;
+        RequiredFigure tightest = findings.tightest(row);
+        labelled(
+                met ? "best" : "nearest",
+                AxisWords.named(axes, point(row)) + (met ? " leaves most room; " : " comes nearest; ")
+                        + "the tightest there is the " + RequirementWords.name(tightest.requirement()) + ", "
+                        + predicted(tightest, row) + " where " + demand(tightest) + " is required.");
+    }
+
+    private double[] point(int row) {
+        double[] point = new double[axes.size()];
+        for (int i = 0; i < point.length; i++) {
+            point[i] = table.varied(i, row);
+        }
+        return point;
+    }
+
+    private String demand(RequiredFigure figure) {
+        String bound = figure.requirement().atLeast()
+                ? page.style().atLeast()
+                : page.style().atMost();
+        return bound + " " + RequirementWords.required(figure.requirement(), figure.required());
+    }
+
+    private String predicted(RequiredFigure figure, int row) {
+        double value = findings.value(figure, row);
+        return Double.isFinite(value)
+                ? RequirementWords.predicted(figure.requirement(), value, figure.required())
+                : "none";
+    }
+
+    private void best() {
+        boolean stated = !required.isEmpty();
+        page.gap();
+        title(stated ? "Requirement" : "Figure", stated ? "required" : "", stated ? "best" : "largest");
+        for (RequiredFigure figure : spoken(scenario)) {
+            line(figure, stated ? demand(figure) : "");
+        }
+    }
+
+    private void title(String name, String demand, String best) {
+        page.line(page.style().strong(left(name, NAME) + right(demand, NUMBER) + right(best, NUMBER) + "  where"));
+    }
+
+    private void line(RequiredFigure figure, String demand) {
+        OptionalInt best = findings.best(figure);
+        String value = best.isPresent() ? predicted(figure, best.getAsInt()) : "none";
+        String first = left(RequirementWords.name(figure.requirement()), NAME) + right(demand, NUMBER)
+                + right(value, NUMBER) + "  ";
+        page.wrapped(first, " ".repeat(NAME + 2), where(figure, best));
+    }
+
+    private String where(RequiredFigure figure, OptionalInt best) {
+        if (best.isEmpty()) {
+            return "nowhere";
+        }
+        return findings.steady(figure) ? "everywhere" : AxisWords.values(axes, point(best.getAsInt()));
+    }
+}

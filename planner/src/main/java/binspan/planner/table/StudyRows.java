@@ -1,0 +1,69 @@
+package binspan.planner.table;
+
+import binspan.study.FigureColumn;
+import binspan.study.StudyTable;
+import java.io.IOException;
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
+import java.util.function.IntFunction;
+
+/** The points of a study as a table: varied parameters, figures of merit, columns of the study's own, {@code meets}. */
+public final class StudyRows {
+    /** Name of the last column: whether all requirements are met. */
+    public static final String MEETS = "meets";
+
+    /** Stands before the name of a figure that is also the path of a varied parameter. */
+    public static final String PREDICTED = "predicted.";
+
+    private final StudyTable points;
+    private final int[] shown;
+    private final List<Column> own;
+
+    private StudyRows(StudyTable points, int[] shown, List<Column> own) {
+        this.points = points;
+        this.shown = shown;
+        this.own = own;
+    }
+
+    /**
+     * The table of some points.
+     *
+     * @param points the points
+     * @param figures which of their figures to show, in this order
+     * @param own further columns, which stand before {@code meets}
+     */
+    public static Table of(StudyTable points, List<FigureColumn> figures, List<Column> own) {
+        List<String> header = new ArrayList<>(points.paths());
+        Set<String> paths = new HashSet<>(points.paths());
+        for (FigureColumn figure : figures) {
+            header.add(paths.contains(figure.name()) ? PREDICTED + figure.name() : figure.name());
+        }
+        own.forEach(column -> header.add(column.name()));
+        header.add(MEETS);
+        int[] shown = figures.stream().mapToInt(points.columns()::indexOf).toArray();
+        return new Table(header, new StudyRows(points, shown, List.copyOf(own))::write);
+    }
+
+    /** A column of a study's own. */
+    public static Column own(String name, IntFunction<Object> cells) {
+        return new Column(name, cells);
+    }
+
+    private void write(RowWriter writer) throws IOException {
+        for (int row = 0; row < points.rows(); row++) {
+            for (int i = 0; i < points.paths().size(); i++) {
+                writer.number(points.varied(i, row));
+            }
+            for (int column : shown) {
+                writer.number(points.figure(column, row));
+            }
+            for (Column column : own) {
+                writer.cell(column.cells().apply(row));
+            }
+            writer.flag(points.meets(row));
+            writer.endRow();
+        }
+    }
+}
