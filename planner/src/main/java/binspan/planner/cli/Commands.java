@@ -40,6 +40,7 @@ final class Commands {
                 .addSubcommand(new TuneCommand(console))
                 .addSubcommand(new ReachCommand(console))
                 .addSubcommand(new CompareCommand(console))
+                .addSubcommand(new RoutesCommand(console))
                 .addSubcommand(new NewCommand(console))
                 .addSubcommand(new ListCommand(console))
                 .addSubcommand(new SchemaCommand(console))

@@ -2,6 +2,7 @@ package binspan.planner.cli;
 
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
+import binspan.planner.table.TableException;
 import java.io.PrintStream;
 
 /** Exit statuses, and the one place where an exception becomes one. */
@@ -36,7 +37,9 @@ final class ExitStatus {
             }
             return REFUSED;
         }
-        if (failure instanceof OutputFileException || failure instanceof UsageException) {
+        if (failure instanceof OutputFileException
+                || failure instanceof UsageException
+                || failure instanceof TableException) {
             err.println("binspan: " + failure.getMessage());
             return REFUSED;
         }

@@ -1,6 +1,7 @@
 package binspan.planner.report;
 
 import binspan.prediction.FiniteKeyOutlook;
+import binspan.prediction.LinkCheck;
 import binspan.prediction.LinkPrediction;
 import binspan.prediction.Requirement;
 import binspan.prediction.RequirementMargins;
@@ -20,5 +21,13 @@ public final class MissWords {
                 : "cannot be had at all";
         return "the " + RequirementWords.name(requirement) + " " + value + ", required "
                 + (requirement.atLeast() ? "at least " : "at most ") + RequirementWords.required(requirement, required);
+    }
+
+    /** The same with what costs that requirement most, as whole sentences. */
+    public static String reason(RequirementMargins margins, LinkPrediction prediction) {
+        Requirement requirement = margins.requirements().get(margins.tightest(prediction));
+        String miss = of(margins, prediction);
+        return Character.toUpperCase(miss.charAt(0)) + miss.substring(1) + ". "
+                + new LargestCost(LinkCheck.brief(prediction)).of(requirement);
     }
 }

@@ -6,6 +6,7 @@ import static binspan.planner.report.TextPage.right;
 import binspan.prediction.Requirement;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
+import binspan.study.FigureColumns;
 import binspan.study.StudyTable;
 import java.util.List;
 import java.util.OptionalInt;
@@ -22,6 +23,7 @@ public final class SweepSummary {
     private final List<Axis> axes;
     private final StudyTable table;
     private final List<RequiredFigure> required;
+    private final List<RequiredFigure> told;
     private final SweepFindings findings;
     private final TextPage page;
 
@@ -30,7 +32,8 @@ public final class SweepSummary {
         this.axes = axes;
         this.table = table;
         this.required = RequiredFigure.of(scenario.require());
-        this.findings = new SweepFindings(table, required);
+        this.told = spoken(scenario).stream().filter(each -> !leftOut(each)).toList();
+        this.findings = new SweepFindings(table, told);
         this.page = new TextPage(style);
     }
 
@@ -39,7 +42,7 @@ public final class SweepSummary {
      *
      * @param scenario the link as written
      * @param axes varied parameters
-     * @param table the points, with the figures of all stated requirements
+     * @param table the points, with at least the figures of {@link #figures}
      * @param style colour and characters
      */
     public static String text(Scenario scenario, List<Axis> axes, StudyTable table, TextStyle style) {
@@ -56,9 +59,20 @@ public final class SweepSummary {
         return summary.page.toString();
     }
 
-    /** Names of the figures that the summary of a sweep speaks of. */
+    /** Names of the figures that the summary of a sweep speaks of; of the finite key, which takes long, only where the table has it. */
     public static List<String> figures(Scenario scenario) {
-        return spoken(scenario).stream().map(RequiredFigure::figure).toList();
+        return spoken(scenario).stream()
+                .filter(each -> each.requirement() != Requirement.FIRST_KEY)
+                .map(RequiredFigure::figure)
+                .toList();
+    }
+
+    /** Whether a figure was left out of the table. */
+    private boolean leftOut(RequiredFigure figure) {
+        return figure.requirement() == Requirement.FIRST_KEY
+                && table.indexOf(figure.figure()) < 0
+                && FigureColumns.all(scenario).stream()
+                        .anyMatch(column -> column.name().equals(figure.figure()));
     }
 
     /** The stated requirements; without any, visibility and key. */
@@ -123,6 +137,9 @@ public final class SweepSummary {
     }
 
     private void room() {
+        if (told.isEmpty()) {
+            return;
+        }
         int row = findings.roomiest();
         boolean met = table.met() > 0;
         RequiredFigure tightest = findings.tightest(row);
@@ -169,11 +186,18 @@ public final class SweepSummary {
     }
 
     private void line(RequiredFigure figure, String demand) {
+        if (!told.contains(figure)) {
+            line(figure, demand, "not shown", "--show " + figure.figure() + " does");
+            return;
+        }
         OptionalInt best = findings.best(figure);
         String value = best.isPresent() ? predicted(figure, best.getAsInt()) : "none";
-        String first = left(RequirementWords.name(figure.requirement()), NAME) + right(demand, NUMBER)
-                + right(value, NUMBER) + "  ";
-        page.wrapped(first, " ".repeat(NAME + 2), where(figure, best));
+        line(figure, demand, value, where(figure, best));
+    }
+
+    private void line(RequiredFigure figure, String demand, String value, String where) {
+        String name = left(RequirementWords.name(figure.requirement()), NAME);
+        page.wrapped(name + right(demand, NUMBER) + right(value, NUMBER) + "  ", " ".repeat(NAME + 2), where);
     }
 
     private String where(RequiredFigure figure, OptionalInt best) {

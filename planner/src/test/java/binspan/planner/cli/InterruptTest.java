@@ -78,12 +78,12 @@ final class InterruptTest {
                 "sweep",
                 scenario.toString(),
                 "--vary",
-                "link.lengthKm=10:300:900",
+                "link.lengthKm=10:300:600",
                 "--vary",
-                "timing.windowWidthPs=50:1500:900",
+                "timing.windowWidthPs=50:1500:600",
                 "--csv",
                 directory.resolve("table.csv").toString());
-        assertThat(process.waitFor(3, TimeUnit.SECONDS)).isFalse();
+        assertThat(process.waitFor(2, TimeUnit.SECONDS)).isFalse();
         assertThat(secondsToEnd()).isLessThan(WITHIN_SECONDS);
         assertThat(process.exitValue()).isEqualTo(INTERRUPTED);
         assertThat(text(process.getErrorStream())).isEmpty();

@@ -368,6 +368,32 @@ final class SweepCommandTest {
                 .doesNotContain("MEET", "required");
     }
 
+    /** The finite key takes several times as long as all other figures together: it is computed where it is asked for. */
+    @Test
+    void timeToTheFirstKeyIsToldWhereItIsShown() throws IOException {
+        String hurry = SCENARIO.replace("\"require\": {", "\"require\": { \"firstKeyWithinHours\": 1,");
+        file = Files.writeString(directory.resolve("hurry.json"), hurry).toString();
+        assertThat(sweep("--vary", WINDOW, "--show", "bell").out())
+                .containsPattern("time to the first key +\\S+ 1 h +not shown  --show\\s+key.secondsToFirstKey does");
+        assertThat(sweep("--vary", WINDOW, "--show", "key").out())
+                .containsPattern("time to the first key +\\S+ 1 h +[\\d.]+ m?s  \\d00 ps");
+        assertThat(sweep("--vary", WINDOW).out()).doesNotContain("not shown");
+        String meets = csv("--vary", WINDOW, "--show", "bell").out().replaceAll("(?m)^.*,", "");
+        assertThat(csv("--vary", WINDOW).out().replaceAll("(?m)^.*,", "")).isEqualTo(meets);
+    }
+
+    @Test
+    void singleRequirementThatIsNotShownStillCounts() throws IOException {
+        String only =
+                SCENARIO.replaceFirst("(?s)\"require\": \\{.*?}", "\"require\": { \"firstKeyWithinHours\": 0.001 }");
+        file = Files.writeString(directory.resolve("only.json"), only).toString();
+        Run run = sweep("--vary", "link.lengthKm=10:400:5", "--show", "bell");
+        assertThat(run.out())
+                .containsPattern("[1-4] of 5 points MEET the requirement")
+                .contains("not shown")
+                .doesNotContain("leaves most room");
+    }
+
     @Test
     void everyPresetCanBeSwept() throws IOException {
         for (Preset preset : Preset.values()) {

@@ -1,0 +1,178 @@
+package binspan.planner.table;
+
+import binspan.prediction.FiniteKeyOutlook;
+import binspan.study.FigureColumn;
+import binspan.study.RouteSurvey;
+import java.io.BufferedOutputStream;
+import java.io.ByteArrayInputStream;
+import java.io.ByteArrayOutputStream;
+import java.io.Closeable;
+import java.io.DataInputStream;
+import java.io.DataOutputStream;
+import java.io.IOException;
+import java.io.OutputStream;
+import java.io.RandomAccessFile;
+import java.nio.ByteBuffer;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+
+/**
+ * The verdicts on many routes, kept in a temporary file so that their number does not matter; in memory stand two numbers for each. They come out ranked:
+ * routes that meet all requirements first, by the least margin.
+ */
+public final class RouteLedger implements Closeable {
+    private static final int FIRST_CAPACITY = 1024;
+
+    private final List<FigureColumn> columns;
+    private final Path file;
+    private final OutputStream out;
+    private double[] margins = new double[FIRST_CAPACITY];
+    private long[] places = new long[FIRST_CAPACITY];
+    private int count;
+    private int met;
+    private long end;
+
+    /**
+     * A route as it was judged.
+     *
+     * @param name name of the route
+     * @param line its line in the table of routes
+     * @param meets whether all requirements hold
+     * @param leastMargin least margin; NaN where it cannot be judged
+     * @param tightest the requirement with the least margin, empty where none is stated
+     * @param reason why it fails, empty if it does not
+     * @param figures figures of merit; empty where it cannot be judged
+     */
+    public record Entry(
+            String name,
+            long line,
+            boolean meets,
+            double leastMargin,
+            String tightest,
+            String reason,
+            List<Double> figures) {}
+
+    /**
+     * An empty ledger.
+     *
+     * @param columns figures of merit to keep
+     */
+    public RouteLedger(List<FigureColumn> columns) throws IOException {
+        this.columns = List.copyOf(columns);
+        this.file = Files.createTempFile("binspan-routes", ".tmp");
+        file.toFile().deleteOnExit();
+        this.out = new BufferedOutputStream(Files.newOutputStream(file));
+    }
+
+    /** Figures of merit that are kept. */
+    public List<FigureColumn> columns() {
+        return columns;
+    }
+
+    /** Number of routes. */
+    public int count() {
+        return count;
+    }
+
+    /** Number of routes that meet all requirements. */
+    public int met() {
+        return met;
+    }
+
+    /**
+     * Adds a verdict.
+     *
+     * @param verdict the verdict
+     * @param line line of the route in its table
+     * @param reason why it fails, empty if it does not
+     */
+    public void add(RouteSurvey.Verdict verdict, long line, String reason) throws IOException {
+        if (count == margins.length) {
+            margins = Arrays.copyOf(margins, 2 * count);
+            places = Arrays.copyOf(places, 2 * count);
+        }
+        margins[count] = verdict.refusal() == null ? verdict.leastMargin() : Double.NEGATIVE_INFINITY;
+        places[count] = end;
+        count++;
+        met += verdict.meets() ? 1 : 0;
+        byte[] bytes = bytes(verdict, line, reason);
+        out.write(ByteBuffer.allocate(Integer.BYTES).putInt(bytes.length).array());
+        out.write(bytes);
+        end += Integer.BYTES + bytes.length;
+    }
+
+    private byte[] bytes(RouteSurvey.Verdict verdict, long line, String reason) throws IOException {
+        ByteArrayOutputStream bytes = new ByteArrayOutputStream();
+        DataOutputStream data = new DataOutputStream(bytes);
+        data.writeUTF(verdict.route().name());
+        data.writeLong(line);
+        data.writeBoolean(verdict.meets());
+        data.writeDouble(verdict.leastMargin());
+        data.writeUTF(verdict.tightest() == null ? "" : verdict.tightest().fieldName());
+        data.writeUTF(reason);
+        data.writeBoolean(verdict.refusal() == null);
+        if (verdict.refusal() == null) {
+            FiniteKeyOutlook finite = FiniteKeyOutlook.of(verdict.prediction());
+            for (FigureColumn column : columns) {
+                data.writeDouble(column.of(verdict.prediction(), finite));
+            }
+        }
+        return bytes.toByteArray();
+    }
+
+    /** Takes a ranked route. */
+    @FunctionalInterface
+    public interface Taker {
+        /** Takes the route of a rank, 1 for the best; false ends the reading. */
+        boolean take(int rank, Entry entry) throws IOException;
+    }
+
+    /** Hands out all routes, the best first. */
+    public void ranked(Taker taker) throws IOException {
+        out.flush();
+        Integer[] order = new Integer[count];
+        Arrays.setAll(order, i -> i);
+        Arrays.sort(order, (a, b) -> Double.compare(margins[b], margins[a]));
+        try (RandomAccessFile in = new RandomAccessFile(file.toFile(), "r")) {
+            for (int i = 0; i < count; i++) {
+                in.seek(places[order[i]]);
+                if (!taker.take(i + 1, read(in))) {
+                    return;
+                }
+            }
+        }
+    }
+
+    private Entry read(RandomAccessFile file) throws IOException {
+        byte[] bytes = new byte[file.readInt()];
+        file.readFully(bytes);
+        DataInputStream in = new DataInputStream(new ByteArrayInputStream(bytes));
+        String name = in.readUTF();
+        long line = in.readLong();
+        boolean meets = in.readBoolean();
+        double margin = in.readDouble();
+        String tightest = in.readUTF();
+        String reason = in.readUTF();
+        List<Double> figures = new ArrayList<>();
+        if (in.readBoolean()) {
+            for (int i = 0; i < columns.size(); i++) {
+                figures.add(in.readDouble());
+            }
+        }
+        return new Entry(name, line, meets, margin, tightest, reason, figures);
+    }
+
+    /** The least margins of all routes that can be judged, in the order of the table. */
+    public double[] margins() {
+        return Arrays.stream(margins, 0, count).filter(Double::isFinite).toArray();
+    }
+
+    @Override
+    public void close() throws IOException {
+        out.close();
+        Files.deleteIfExists(file);
+    }
+}
