@@ -2,7 +2,6 @@ package binspan.merit;
 
 import binspan.counting.LinkCounts;
 import binspan.scenario.Protocol;
-import org.apache.commons.numbers.rootfinder.BrentSolver;
 
 /**
  * Finite secret key of a link that runs for a while. Pulse pair: all time-basis bits make the key, all phase-basis bits are disclosed. Continuous pump
@@ -11,10 +10,7 @@ import org.apache.commons.numbers.rootfinder.BrentSolver;
  * @param perSecond what one second of uptime collects
  */
 public record FiniteKey(FiniteKeyBlock perSecond) {
-    private static final double FEWEST_BITS = 50.0;
-    private static final double FOUR = 4.0;
-    private static final int MOST_DOUBLINGS = 60;
-    private static final BrentSolver ROOT = new BrentSolver(1e-6, 1e-6, 1e-12);
+    private static final double TOO_FEW = -50.0;
 
     /** The block that a link collects in a second of uptime. */
     public static FiniteKey of(LinkCounts counts, SecretKey key, Protocol protocol) {
@@ -42,35 +38,26 @@ public record FiniteKey(FiniteKeyBlock perSecond) {
      * @param uptime seconds of uptime
      */
     public double bits(double uptime) {
-        FiniteKeyBlock block = block(uptime);
-        return tooFew(block) ? -FEWEST_BITS : FiniteKeyBound.longest(block);
+        BlockTerms block = BlockTerms.of(block(uptime));
+        return block.enough() ? FiniteKeyBound.longest(block) : TOO_FEW;
     }
 
-    /** Whether a block is too small for any key. */
-    public static boolean tooFew(FiniteKeyBlock block) {
-        return block.keyBits() < FEWEST_BITS || block.testBits() < 1.0;
+    /**
+     * Key length beyond the first bit, per bit kept for the key: at least 0 where there is a key. It is continuous in rates, error rates and uptime, as
+     * searches like it; of blocks that are too small for any key the quicker bound tells how far they are from one.
+     *
+     * @param uptime seconds of uptime
+     */
+    public double marginPerKeyBit(double uptime) {
+        BlockTerms block = BlockTerms.of(block(uptime));
+        double bits = block.enough()
+                ? FiniteKeyBound.longest(block)
+                : Math.min(0.0, FiniteKeyBound.TOMAMICHEL_2012.key(block).bits());
+        return (bits - 1.0) / Math.max(1.0, uptime * perSecond.keyBits());
     }
 
     /** Uptime after which the key has its first bit, s; infinite if it never has. */
     public double secondsToFirstBit() {
-        double fraction =
-                SecretKey.secretFraction(perSecond.bitError(), perSecond.phaseError(), perSecond.efficiency());
-        double slowest = Math.min(perSecond.keyBits(), perSecond.testBits());
-        if (!(fraction > 0.0 && slowest > 0.0)) {
-            return Double.POSITIVE_INFINITY;
-        }
-        double shortest = FEWEST_BITS / slowest;
-        double longest = shortest;
-        for (int i = 0; i < MOST_DOUBLINGS && bits(longest) < 1.0; i++) {
-            longest *= FOUR;
-        }
-        if (bits(longest) < 1.0) {
-            return Double.POSITIVE_INFINITY;
-        }
-        double logTime = ROOT.findRoot(
-                log -> (bits(Math.exp(log)) - 1.0) / (perSecond.keyBits() * Math.exp(log)),
-                Math.log(longest / FOUR),
-                Math.log(longest));
-        return Math.exp(logTime);
+        return new FirstBit(BlockTerms.of(perSecond)).uptime();
     }
 }

@@ -28,6 +28,11 @@ public record FiniteKeyBlock(
 
     /** Bits disclosed by error correction, f h(e) n. */
     double leaked() {
-        return efficiency * SecretKey.binaryEntropy(bitError) * keyBits;
+        return leakedPerBit() * keyBits;
+    }
+
+    /** The same per key bit. */
+    double leakedPerBit() {
+        return efficiency * SecretKey.binaryEntropy(bitError);
     }
 }

@@ -1,7 +1,5 @@
 package binspan.merit;
 
-import org.apache.commons.numbers.rootfinder.BrentSolver;
-
 /** Published lower bounds of the secret key length of a finite block; both hold at the stated failure probabilities, so the longer counts. */
 public enum FiniteKeyBound {
     /**
@@ -10,12 +8,8 @@ public enum FiniteKeyBound {
      */
     TOMAMICHEL_2012 {
         @Override
-        public double bits(FiniteKeyBlock block) {
-            double n = block.keyBits();
-            double k = block.testBits();
-            double deviation = Math.sqrt((n + k) / (n * k) * (k + 1.0) / k * Math.log(4.0 / block.secrecy()));
-            double security = log2(2.0) - 2.0 * log2(block.secrecy()) - log2(block.correctness());
-            return n * (1.0 - entropyUpToHalf(block.phaseError() + deviation)) - block.leaked() - security;
+        GrowingKey key(BlockTerms terms) {
+            return TomamichelKey.of(terms);
         }
     },
 
@@ -26,69 +20,20 @@ public enum FiniteKeyBound {
      */
     LIM_2021 {
         @Override
-        public double bits(FiniteKeyBlock block) {
-            double widest = 0.5 - block.phaseError();
-            double target = Math.log(block.secrecy() / 2.0);
-            if (!(widest > 0.0) || logTail(block, widest) >= target) {
-                return Double.NEGATIVE_INFINITY;
-            }
-            double least = ROOT.findRoot(nu -> logTail(block, nu) - target, NARROWEST * widest, widest);
-            double from = least * (1.0 + CLEAR_OF_LEAST);
-            return limBits(block, best(block, from, Math.max(from, CLEAR_OF_WIDEST * widest)));
+        GrowingKey key(BlockTerms terms) {
+            return LimKey.of(terms);
         }
     };
 
-    private static final BrentSolver ROOT = new BrentSolver(1e-8, 1e-15, 0.0);
-    private static final double NARROWEST = 1e-9;
-    private static final double CLEAR_OF_LEAST = 1e-6;
-
-    /** At the widest deviation itself the entropy is flat and the slope no longer tells. */
-    private static final double CLEAR_OF_WIDEST = 0.999;
-
     /** Length of the secret key in bits, not rounded; 0 or less means no key. */
-    public abstract double bits(FiniteKeyBlock block);
+    public double bits(FiniteKeyBlock block) {
+        return key(BlockTerms.of(block)).bits();
+    }
 
     /** The longer of all bounds, bits. */
-    public static double longest(FiniteKeyBlock block) {
-        return Math.max(TOMAMICHEL_2012.bits(block), LIM_2021.bits(block));
+    static double longest(BlockTerms terms) {
+        return Math.max(TOMAMICHEL_2012.key(terms).bits(), LIM_2021.key(terms).bits());
     }
 
-    static double log2(double x) {
-        return Math.log(x) / Math.log(2.0);
-    }
-
-    static double entropyUpToHalf(double x) {
-        return x < 0.5 ? SecretKey.binaryEntropy(x) : 1.0;
-    }
-
-    /** The deviation nu at which the key is longest: where its slope changes sign. */
-    private static double best(FiniteKeyBlock block, double from, double to) {
-        if (limSlope(block, from) <= 0.0) {
-            return from;
-        }
-        return limSlope(block, to) >= 0.0 ? to : ROOT.findRoot(nu -> limSlope(block, nu), from, to);
-    }
-
-    private static double logTail(FiniteKeyBlock block, double nu) {
-        LimTail tail = new LimTail(block, nu);
-        return tail.log(tail.bestSplit());
-    }
-
-    private static double limBits(FiniteKeyBlock block, double nu) {
-        double left = block.secrecy() - 2.0 * Math.exp(logTail(block, nu));
-        return block.keyBits() * (1.0 - entropyUpToHalf(block.phaseError() + nu))
-                - block.leaked()
-                + log2(block.correctness())
-                + 2.0 * log2(2.0 * left);
-    }
-
-    /** Derivative of the key length with respect to nu, bits. */
-    private static double limSlope(FiniteKeyBlock block, double nu) {
-        LimTail tail = new LimTail(block, nu);
-        double xi = tail.bestSplit();
-        double failure = Math.exp(tail.log(xi));
-        double error = block.phaseError() + nu;
-        double entropySlope = block.keyBits() * log2((1.0 - error) / error);
-        return -entropySlope - 4.0 / Math.log(2.0) * failure * tail.logSlope(xi) / (block.secrecy() - 2.0 * failure);
-    }
+    abstract GrowingKey key(BlockTerms terms);
 }

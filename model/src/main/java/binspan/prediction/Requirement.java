@@ -51,6 +51,12 @@ public enum Requirement {
         return stated.apply(require);
     }
 
+    /** The predicted figure under the requirement's name and in its unit, as a column beside the figures of a check. */
+    public ResultField figure() {
+        ResultField.Stage stage = this == FIRST_KEY ? ResultField.Stage.FINITE_KEY : ResultField.Stage.COUNTS;
+        return new ResultField(fieldName, unit, false, stage, (p, finite, port) -> predicted(p, finite));
+    }
+
     /** The predicted figure; NaN or infinite where the link has none. */
     public double predicted(LinkPrediction p, FiniteKeyOutlook finite) {
         return switch (this) {

@@ -1,9 +1,6 @@
 package binspan.prediction;
 
 import binspan.merit.ErrorRates;
-import binspan.merit.FiniteKey;
-import binspan.merit.FiniteKeyBlock;
-import binspan.merit.FiniteKeyBound;
 import binspan.merit.SecretKey;
 import binspan.scenario.Requirements;
 import binspan.units.Scale;
@@ -165,18 +162,10 @@ public final class RequirementMargins {
         return prediction.counts().bothPorts() ? Math.max(time, phase) : time;
     }
 
-    /** Key length per key bit when the deadline comes; the quicker bound decides where it already finds a key. */
+    /** Key length beyond the first bit when the deadline comes, per key bit. */
     private static double keyAtDeadline(LinkPrediction prediction, double deadline) {
-        if (Double.isNaN(prediction.key().asymptoticPerSecond())) {
-            return HOPELESS;
-        }
-        FiniteKey key = prediction.finiteKey();
-        double uptime = deadline * prediction.uptimeShare();
-        FiniteKeyBlock block = key.block(uptime);
-        double quick = FiniteKeyBound.TOMAMICHEL_2012.bits(block);
-        double bits = FiniteKey.tooFew(block)
-                ? Math.min(0.0, quick)
-                : quick >= 1.0 ? quick : Math.max(quick, key.bits(uptime));
-        return (bits - 1.0) / Math.max(1.0, block.keyBits());
+        return Double.isNaN(prediction.key().asymptoticPerSecond())
+                ? HOPELESS
+                : prediction.finiteKey().marginPerKeyBit(deadline * prediction.uptimeShare());
     }
 }

@@ -8,6 +8,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
 
 /** A numeric field of the scenario, or several of the same meaning moved together. */
 public final class FieldParameter implements Parameter {
@@ -65,6 +66,40 @@ public final class FieldParameter implements Parameter {
         }
         List<Step> second = addresses.get(1).steps();
         return value -> (Scenario) edit(first.apply(allowed(value)), second).apply(value);
+    }
+
+    /**
+     * The single values that it moves, each as a parameter of its own, in the order in which they stand in the scenario.
+     *
+     * @param scenario a scenario in which its path leads somewhere
+     */
+    public List<Parameter> places(Scenario scenario) {
+        List<Parameter> places = new ArrayList<>();
+        addresses.forEach(address -> place(scenario, address.steps(), List.of(), places));
+        return List.copyOf(places);
+    }
+
+    private static void place(Record node, List<Step> steps, List<Step> before, List<Parameter> places) {
+        Step step = steps.get(0);
+        if (steps.size() == 1) {
+            Address address = new Address(after(before, step));
+            places.add(new FieldParameter(address.path(), List.of(address)));
+            return;
+        }
+        Object component = step.section()
+                .component(node, step.section().indexOf(step.field().name()));
+        List<Step> rest = steps.subList(1, steps.size());
+        if (component instanceof List<?> list && step.item() == PathParser.ALL) {
+            for (int i = 0; i < list.size(); i++) {
+                place((Record) list.get(i), rest, after(before, new Step(step.section(), step.field(), i)), places);
+            }
+        } else {
+            place(child(component, step.item()), rest, after(before, step), places);
+        }
+    }
+
+    private static List<Step> after(List<Step> before, Step step) {
+        return Stream.concat(before.stream(), Stream.of(step)).toList();
     }
 
     private double allowed(double value) {

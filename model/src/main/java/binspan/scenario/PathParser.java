@@ -3,6 +3,7 @@ package binspan.scenario;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 
 /** Finds the field that a scenario path names, in a scenario or in what a file states. */
@@ -17,6 +18,13 @@ final class PathParser {
     record Address(List<Step> steps) {
         Field field() {
             return steps.get(steps.size() - 1).field();
+        }
+
+        /** The way as a path, elements of lists by their index. */
+        String path() {
+            return steps.stream()
+                    .map(step -> step.field().name() + (step.item() < 0 ? "" : "[" + step.item() + "]"))
+                    .collect(Collectors.joining("."));
         }
     }
 

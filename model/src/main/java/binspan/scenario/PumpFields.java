@@ -2,12 +2,15 @@ package binspan.scenario;
 
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 
 /** Fields that count per pump cycle and their counterparts for a continuous pump, which has no cycles. */
 final class PumpFields {
     private static final Map<String, String> PER_SECOND_BY_PER_CYCLE = Map.of(
             "meanPairsPerCycle", "pairRatePerSecond",
             "uncorrelatedPhotonsPerCycle", "uncorrelatedPhotonsPerSecond");
+    private static final Map<String, String> PER_CYCLE_BY_PER_SECOND = PER_SECOND_BY_PER_CYCLE.entrySet().stream()
+            .collect(Collectors.toUnmodifiableMap(Map.Entry::getValue, Map.Entry::getKey));
 
     private PumpFields() {}
 
@@ -17,12 +20,7 @@ final class PumpFields {
      * @return name of its counterpart, empty if the field goes with the mode
      */
     static Optional<String> insteadOf(String field, PumpMode mode) {
-        if (mode == PumpMode.CONTINUOUS) {
-            return Optional.ofNullable(PER_SECOND_BY_PER_CYCLE.get(field));
-        }
-        return PER_SECOND_BY_PER_CYCLE.entrySet().stream()
-                .filter(entry -> entry.getValue().equals(field))
-                .map(Map.Entry::getKey)
-                .findFirst();
+        return Optional.ofNullable(
+                (mode == PumpMode.CONTINUOUS ? PER_SECOND_BY_PER_CYCLE : PER_CYCLE_BY_PER_SECOND).get(field));
     }
 }

@@ -2,10 +2,12 @@ package binspan.scenario;
 
 import java.lang.reflect.Constructor;
 import java.lang.reflect.InvocationTargetException;
+import java.lang.reflect.Method;
 import java.lang.reflect.RecordComponent;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 
 /**
  * One kind of object in the scenario file and the record it becomes; its fields stand in the order of the record's
@@ -17,7 +19,7 @@ public final class Section {
     private final List<Field> fields;
     private final Constructor<?> constructor;
     private final List<Alternatives> alternatives = new ArrayList<>();
-    private RecordComponent[] components;
+    private volatile Method[] accessors;
 
     /**
      * Fields of which at most one may be given.
@@ -107,7 +109,7 @@ public final class Section {
     /** Reads one component of a record. */
     Object component(Record element, int index) {
         try {
-            return components()[index].getAccessor().invoke(element);
+            return accessors()[index].invoke(element);
         } catch (ReflectiveOperationException e) {
             throw new IllegalStateException("section " + name, e);
         }
@@ -134,13 +136,17 @@ public final class Section {
      * counts.
      */
     Optional<Field> excluding(Record element, Field field) {
-        return alternatives.stream()
-                .filter(group -> group.fields().contains(field.name()))
-                .flatMap(group -> group.fields().stream())
-                .map(name -> fields.get(indexOf(name)))
-                .filter(other ->
-                        component(element, indexOf(other.name())) instanceof Optional<?> found && found.isPresent())
-                .findFirst();
+        for (Alternatives group : alternatives) {
+            if (group.fields().contains(field.name())) {
+                for (String other : group.fields()) {
+                    int index = indexOf(other);
+                    if (component(element, index) instanceof Optional<?> found && found.isPresent()) {
+                        return Optional.of(fields.get(index));
+                    }
+                }
+            }
+        }
+        return Optional.empty();
     }
 
     /** The components of a record without the numbers that a field excludes, ready for that field to be stated. */
@@ -164,10 +170,15 @@ public final class Section {
         }
     }
 
-    private synchronized RecordComponent[] components() {
-        if (components == null) {
-            components = type.getRecordComponents();
+    /** Found when first needed; two threads that find them at once find the same. */
+    private Method[] accessors() {
+        Method[] found = accessors;
+        if (found == null) {
+            found = Stream.of(type.getRecordComponents())
+                    .map(RecordComponent::getAccessor)
+                    .toArray(Method[]::new);
+            accessors = found;
         }
-        return components;
+        return found;
     }
 }

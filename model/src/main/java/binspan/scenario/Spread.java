@@ -11,6 +11,19 @@ import java.util.OptionalDouble;
  * @param relative whether the width is a share of the planned value instead of the parameter's unit
  */
 public record Spread(OptionalDouble normal, OptionalDouble uniform, OptionalDouble triangular, boolean relative) {
+    /** A spread of one shape. */
+    public static Spread of(SpreadShape shape, double width, boolean relative) {
+        return new Spread(
+                onlyIf(shape == SpreadShape.NORMAL, width),
+                onlyIf(shape == SpreadShape.UNIFORM, width),
+                onlyIf(shape == SpreadShape.TRIANGULAR, width),
+                relative);
+    }
+
+    private static OptionalDouble onlyIf(boolean present, double width) {
+        return present ? OptionalDouble.of(width) : OptionalDouble.empty();
+    }
+
     /** Which distribution it is. */
     public SpreadShape shape() {
         if (normal.isPresent()) {

@@ -1,11 +1,14 @@
 package binspan.study;
 
+import binspan.scenario.LinkLength;
 import binspan.scenario.Parameter;
 import binspan.scenario.Scenario;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
 import java.util.function.DoubleFunction;
+import java.util.stream.Collectors;
+import java.util.stream.IntStream;
 
 /**
  * A scenario with some of its parameters free; values are applied in the order of the parameters.
@@ -89,19 +92,28 @@ public final class Variation {
         }
         Scenario varied = new Variation(scenario, parameters).at(values);
         for (int i = 0; i < values.length; i++) {
-            double found = parameters.get(i).value(varied).orElse(Double.NaN);
-            if (!(Math.abs(found - values[i]) <= 1e-9 * Math.abs(values[i]))) {
-                throw new IllegalArgumentException(parameters.get(i).path() + ": moved by " + movers(parameters, i)
-                        + " as well; vary one of them");
+            if (!stands(parameters.get(i), values[i], varied)) {
+                throw new IllegalArgumentException(parameters.get(i).path() + ": moved by "
+                        + movers(scenario, parameters, values, i) + " as well; vary one of them");
             }
         }
     }
 
-    private static String movers(List<Parameter> parameters, int moved) {
-        return String.join(
-                " or ",
-                parameters.subList(moved + 1, parameters.size()).stream()
-                        .map(Parameter::path)
-                        .toList());
+    /** Whether a parameter is at a value, everywhere in a scenario that it moves. */
+    private static boolean stands(Parameter parameter, double value, Scenario varied) {
+        double found = parameter.value(varied).orElse(Double.NaN);
+        boolean first = Math.abs(found - value) <= 1e-9 * Math.abs(value);
+        return first
+                && (parameter instanceof LinkLength
+                        || parameter.with(varied, value).equals(varied));
+    }
+
+    private static String movers(Scenario scenario, List<Parameter> parameters, double[] values, int moved) {
+        Parameter parameter = parameters.get(moved);
+        Scenario alone = parameter.with(scenario, values[moved]);
+        return IntStream.range(moved + 1, values.length)
+                .filter(i -> !stands(parameter, values[moved], parameters.get(i).with(alone, values[i])))
+                .mapToObj(i -> parameters.get(i).path())
+                .collect(Collectors.joining(" or "));
     }
 }

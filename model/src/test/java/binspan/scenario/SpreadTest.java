@@ -18,5 +18,6 @@ final class SpreadTest {
         assertThat(spread.shape()).isEqualTo(shape);
         assertThat(spread.width()).isEqualTo(0.25);
         assertThat(spread.relative()).isTrue();
+        assertThat(spread).isEqualTo(Spread.of(shape, 0.25, true)).isNotEqualTo(Spread.of(shape, 0.25, false));
     }
 }
