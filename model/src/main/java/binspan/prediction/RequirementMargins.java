@@ -75,6 +75,13 @@ public final class RequirementMargins {
         return required[index];
     }
 
+    /** The predicted figure of one of them, in the requirement's unit; NaN or infinite where the link has none. */
+    public double predicted(int index, LinkPrediction prediction) {
+        Requirement requirement = requirements.get(index);
+        FiniteKeyOutlook finite = requirement == Requirement.FIRST_KEY ? FiniteKeyOutlook.of(prediction) : null;
+        return requirement.predicted(prediction, finite);
+    }
+
     /** The margins of all requirements in their order. */
     public double[] of(LinkPrediction prediction) {
         double[] margins = new double[required.length];

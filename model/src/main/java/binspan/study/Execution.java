@@ -25,6 +25,11 @@ public record Execution(int threads, Progress progress, double from, double to) 
         return new Execution(threads, progress, from + first * width, from + last * width);
     }
 
+    /** The same without reports, for a piece of work whose length nobody knows; it still stops when asked. */
+    Execution silent() {
+        return new Execution(threads, progress, Double.NaN, Double.NaN);
+    }
+
     /** The same on one thread and without reports, for a piece of work inside a parallel one; it still stops when asked. */
     Execution inside() {
         return new Execution(1, progress, Double.NaN, Double.NaN);

@@ -3,6 +3,9 @@ package binspan.planner.cli;
 import binspan.planner.report.MissWords;
 import binspan.prediction.LinkPrediction;
 import binspan.prediction.RequirementMargins;
+import binspan.study.Axis;
+import binspan.study.PointVerdict;
+import java.util.List;
 
 /** Says that nothing meets the requirements, and how near it comes. */
 final class NoFeasiblePoint {
@@ -21,5 +24,16 @@ final class NoFeasiblePoint {
                     + " or the slots longer than the pump cycle");
         }
         return UsageException.of(what + "; at the nearest point " + MissWords.of(margins, prediction));
+    }
+
+    /**
+     * At a point of some axes that fails by the least.
+     *
+     * @param what what was searched
+     * @param axes varied parameters
+     * @param nearest that point
+     */
+    static UsageException of(String what, List<Axis> axes, PointVerdict nearest) {
+        return UsageException.of(what + "; nearest at " + MissWords.at(axes, nearest));
     }
 }

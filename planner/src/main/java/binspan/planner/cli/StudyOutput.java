@@ -65,10 +65,10 @@ final class StudyOutput {
         }
     }
 
-    /** Refuses a picture, for a study that has none. */
-    void refusePicture() throws UsageException {
+    /** Refuses a picture of a study that cannot be drawn, with the reason. */
+    void refusePicture(String reason) throws UsageException {
         if (plot != null) {
-            throw UsageException.of(PLOT + " " + plot + ": this study cannot be drawn");
+            throw UsageException.of(PLOT + " " + plot + ": " + reason);
         }
     }
 

@@ -2,6 +2,7 @@ package binspan.planner.cli;
 
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
+import binspan.planner.picture.SweepPicture;
 import binspan.planner.report.RequiredFigure;
 import binspan.planner.report.SweepSummary;
 import binspan.planner.table.StudyRows;
@@ -79,10 +80,12 @@ final class SweepCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws InvalidScenarioException, UsageException, OutputFileException {
-        output.refusePicture();
         output.check(input.file());
         Scenario scenario = input.read(console);
         List<Axis> axes = vary.grid(scenario, STEPS);
+        if (axes.size() > SweepPicture.MOST_AXES) {
+            output.refusePicture("a picture shows one or two varied parameters");
+        }
         List<FigureColumn> shown = shown(scenario);
         Sweep sweep = UsageException.unless("--vary", () -> new Sweep(scenario, axes, computed(scenario, shown)));
         StudyTable table = ProgressBar.during(console, sweep::run);
@@ -110,12 +113,15 @@ final class SweepCommand implements Callable<Integer> {
         return List.copyOf(computed);
     }
 
-    private static StudyReport report(Sweep sweep, StudyTable table, List<FigureColumn> shown) {
+    private StudyReport report(Sweep sweep, StudyTable table, List<FigureColumn> shown) {
+        List<FigureColumn> drawn = show.isEmpty() ? List.of() : shown;
         return new StudyReport(
                 description(sweep, table),
                 StudyRows.of(table, shown, List.of()),
                 style -> SweepSummary.text(sweep.scenario(), sweep.axes(), table, style),
-                Optional.empty());
+                sweep.axes().size() > SweepPicture.MOST_AXES
+                        ? Optional.empty()
+                        : Optional.of(() -> SweepPicture.of(sweep.scenario(), sweep.axes(), table, drawn)));
     }
 
     private static Map<String, Object> description(Sweep sweep, StudyTable table) {

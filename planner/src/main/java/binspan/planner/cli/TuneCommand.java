@@ -4,6 +4,7 @@ import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
 import binspan.planner.picture.TunePicture;
 import binspan.planner.report.TuneSummary;
+import binspan.planner.table.Column;
 import binspan.planner.table.StudyRows;
 import binspan.planner.table.TableJson;
 import binspan.scenario.Scenario;
@@ -91,7 +92,7 @@ final class TuneCommand implements Callable<Integer> {
         StudyTable table = TuningTable.of(tuning, outcome, FigureColumns.all(tuning.scenario()));
         return new StudyReport(
                 description(tuning, outcome),
-                StudyRows.of(table, table.columns(), List.of(StudyRows.own("settings", TuningTable.SETTINGS::get))),
+                StudyRows.of(table, table.columns(), List.of(new Column("settings", TuningTable.SETTINGS::get))),
                 style -> TuneSummary.text(tuning, outcome, style),
                 Optional.of(() -> TunePicture.of(tuning, outcome)));
     }

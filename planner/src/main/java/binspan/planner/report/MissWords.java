@@ -5,6 +5,10 @@ import binspan.prediction.LinkCheck;
 import binspan.prediction.LinkPrediction;
 import binspan.prediction.Requirement;
 import binspan.prediction.RequirementMargins;
+import binspan.study.Axis;
+import binspan.study.PointVerdict;
+import binspan.study.RequirementMargin;
+import java.util.List;
 
 /** How far a link is from the requirement that it violates most. */
 public final class MissWords {
@@ -15,7 +19,19 @@ public final class MissWords {
         int tightest = margins.tightest(prediction);
         Requirement requirement = margins.requirements().get(tightest);
         double required = margins.required(tightest);
-        double predicted = requirement.predicted(prediction, FiniteKeyOutlook.of(prediction));
+        return of(requirement, required, requirement.predicted(prediction, FiniteKeyOutlook.of(prediction)));
+    }
+
+    /** The same at a point of some axes: {@code timing.windowWidthPs 210 ps: the raw visibility is ...}. */
+    public static String at(List<Axis> axes, PointVerdict nearest) {
+        RequirementMargin tightest = nearest.tightest();
+        double[] point =
+                nearest.values().stream().mapToDouble(Double::doubleValue).toArray();
+        String where = AxisWords.named(axes, point).replace(TextPage.GLUE, ' ');
+        return where + ": " + of(tightest.requirement(), tightest.required(), tightest.predicted());
+    }
+
+    private static String of(Requirement requirement, double required, double predicted) {
         String value = Double.isFinite(predicted)
                 ? "is " + RequirementWords.predicted(requirement, predicted, required)
                 : "cannot be had at all";

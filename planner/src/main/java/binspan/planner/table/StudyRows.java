@@ -1,5 +1,6 @@
 package binspan.planner.table;
 
+import binspan.study.Axis;
 import binspan.study.FigureColumn;
 import binspan.study.StudyTable;
 import java.io.IOException;
@@ -7,7 +8,7 @@ import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
-import java.util.function.IntFunction;
+import java.util.function.Supplier;
 
 /** The points of a study as a table: varied parameters, figures of merit, columns of the study's own, {@code meets}. */
 public final class StudyRows {
@@ -35,20 +36,36 @@ public final class StudyRows {
      * @param own further columns, which stand before {@code meets}
      */
     public static Table of(StudyTable points, List<FigureColumn> figures, List<Column> own) {
-        List<String> header = new ArrayList<>(points.paths());
-        Set<String> paths = new HashSet<>(points.paths());
+        List<String> header = header(points.paths(), figures, own);
+        int[] shown = figures.stream().mapToInt(points.columns()::indexOf).toArray();
+        return new Table(header, new StudyRows(points, shown, List.copyOf(own))::write);
+    }
+
+    private static List<String> header(List<String> varied, List<FigureColumn> figures, List<Column> own) {
+        List<String> header = new ArrayList<>(varied);
+        Set<String> paths = new HashSet<>(varied);
         for (FigureColumn figure : figures) {
             header.add(paths.contains(figure.name()) ? PREDICTED + figure.name() : figure.name());
         }
         own.forEach(column -> header.add(column.name()));
         header.add(MEETS);
-        int[] shown = figures.stream().mapToInt(points.columns()::indexOf).toArray();
-        return new Table(header, new StudyRows(points, shown, List.copyOf(own))::write);
+        return header;
     }
 
-    /** A column of a study's own. */
-    public static Column own(String name, IntFunction<Object> cells) {
-        return new Column(name, cells);
+    /**
+     * The table of some points that are computed only when it is written.
+     *
+     * @param axes varied parameters
+     * @param figures all figures of the points
+     * @param own further columns
+     * @param points computes the points
+     */
+    public static Table later(
+            List<Axis> axes, List<FigureColumn> figures, List<Column> own, Supplier<StudyTable> points) {
+        List<String> paths = axes.stream().map(axis -> axis.parameter().path()).toList();
+        return new Table(
+                header(paths, figures, own),
+                writer -> of(points.get(), figures, own).rows().to(writer));
     }
 
     private void write(RowWriter writer) throws IOException {

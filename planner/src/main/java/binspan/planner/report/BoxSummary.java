@@ -1,0 +1,98 @@
+package binspan.planner.report;
+
+import static binspan.planner.report.TextPage.left;
+import static binspan.planner.report.TextPage.right;
+
+import binspan.scenario.Scenario;
+import binspan.study.Axis;
+import binspan.study.BindingPoint;
+import binspan.study.BoxSide;
+import binspan.study.OperatingBox;
+import binspan.study.ToleranceBox;
+import binspan.study.WindowEnd;
+import java.util.List;
+
+/** The largest tolerance box for a person: what goes into a specification. */
+public final class BoxSummary {
+    private static final int NAME = 36;
+    private static final int NUMBER = 13;
+    private static final int DIGITS = 5;
+    private static final int FEW_DIGITS = 4;
+
+    private final OperatingBox box;
+    private final TextPage page;
+
+    private BoxSummary(OperatingBox box, TextStyle style) {
+        this.box = box;
+        this.page = new TextPage(style);
+    }
+
+    /** The summary as a text that ends with a line break. */
+    public static String text(Scenario scenario, OperatingBox box, TextStyle style) {
+        BoxSummary summary = new BoxSummary(box, style);
+        summary.page.wrapped(style.clean(scenario.name()));
+        summary.answer();
+        summary.sides();
+        summary.binding();
+        return summary.page.toString();
+    }
+
+    private void answer() {
+        TextStyle style = page.style();
+        String size = box.question().sense() == ToleranceBox.Sense.TOLERANCE
+                ? style.plusMinus() + " " + Figure.percent(box.tolerance()) + " of every value"
+                : Figure.percent(box.volumeShare()) + " of the searched volume";
+        page.line(style.good(style.met() + " All requirements hold everywhere in this box: " + size));
+    }
+
+    private void sides() {
+        page.gap();
+        page.line(page.style()
+                .strong(left("Parameter", NAME)
+                        + right("from", NUMBER)
+                        + right("to", NUMBER)
+                        + right("middle", NUMBER)));
+        for (BoxSide side : box.sides()) {
+            Axis axis = side.axis();
+            String name = page.style().clean(axis.parameter().path());
+            if (name.length() > NAME) {
+                page.line(name);
+                name = "";
+            }
+            double middle = box.question().sense() == ToleranceBox.Sense.TOLERANCE
+                    ? (side.from().value() + side.to().value()) / 2.0
+                    : side.centre();
+            page.line(left(name, NAME)
+                    + right(WindowSummary.value(axis, side.from().value(), FEW_DIGITS), NUMBER)
+                    + right(WindowSummary.value(axis, side.to().value(), FEW_DIGITS), NUMBER)
+                    + right(WindowSummary.value(axis, middle, FEW_DIGITS), NUMBER));
+            page.wrapped("    below: ", "           ", end(side.from()));
+            page.wrapped("    above: ", "           ", end(side.to()));
+        }
+    }
+
+    private static String end(WindowEnd end) {
+        return end.requirement().isEmpty()
+                ? "the range ends, or the other sides' sizes hold it"
+                : "the " + RequirementWords.name(end.requirement().get()) + " fails at some point beyond";
+    }
+
+    private void binding() {
+        BindingPoint binding = box.binding().orElseThrow();
+        List<BoxSide> sides = box.sides();
+        StringBuilder where = new StringBuilder();
+        for (int i = 0; i < sides.size(); i++) {
+            Axis axis = sides.get(i).axis();
+            where.append(i == 0 ? "" : ", ")
+                    .append(page.style().clean(axis.parameter().path()))
+                    .append(' ')
+                    .append(WindowSummary.value(axis, binding.verdict().values().get(i), DIGITS));
+        }
+        page.gap();
+        page.wrapped((binding.corner() ? "The binding corner: " : "The binding point: ") + where + "; the "
+                + RequirementWords.name(binding.verdict().tightest().requirement()) + " is met there with nothing to"
+                + " spare.");
+        page.wrapped("Checked at " + box.pointsChecked() + " points: all corners, the middles of all faces and "
+                + ToleranceBox.CHECKED_POINTS + " points inside. Between them nothing is proven.");
+    }
+}
