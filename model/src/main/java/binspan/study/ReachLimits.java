@@ -1,6 +1,5 @@
 package binspan.study;
 
-import binspan.prediction.LinkPrediction;
 import binspan.prediction.RequirementMargins;
 import binspan.scenario.LinkLength;
 import binspan.scenario.Scenario;
@@ -15,6 +14,8 @@ final class ReachLimits {
     private static final double STEP = 1.25;
     private static final int SCAN = 600;
     private static final int MOST_DOUBLINGS = 12;
+    private static final int MOST_ATTEMPTS = 4;
+    private static final double BEYOND = 1e-3;
 
     private final Scenario scenario;
     private final RequirementMargins margins;
@@ -65,28 +66,28 @@ final class ReachLimits {
      * @param execution stops the search when asked
      */
     OptionalDouble retuned(List<Axis> free, OptionalDouble known, Execution execution) {
-        DoubleUnaryOperator margin = km -> tunedMargin(km, free, execution);
+        TunedLengths tuned = new TunedLengths(scenario, free, Objective.MARGIN, margins, execution);
+        DoubleUnaryOperator margin = km -> margins.least(tuned.at(km).prediction());
         double good = known.orElse(0.0);
         if (good == longest || (known.isEmpty() && margin.applyAsDouble(0.0) < 0.0)) {
             return known;
         }
-        double bad = Math.min(longest, Math.max(good * STEP, planned / 8.0));
-        while (margin.applyAsDouble(bad) >= 0.0) {
-            good = bad;
-            if (bad == longest) {
-                return OptionalDouble.of(longest);
+        for (int i = 0; i < MOST_ATTEMPTS; i++) {
+            double bad = Math.min(longest, Math.max(good * STEP, planned / 8.0));
+            while (margin.applyAsDouble(bad) >= 0.0) {
+                good = bad;
+                if (bad == longest) {
+                    return OptionalDouble.of(longest);
+                }
+                bad = Math.min(longest, bad * STEP);
             }
-            bad = Math.min(longest, bad * STEP);
+            good = Crossing.lastGood(margin, good, bad, TUNED_PRECISION);
+            double beyond = good * (1.0 + BEYOND);
+            if (beyond > longest || margins.least(tuned.afresh(beyond).prediction()) < 0.0) {
+                break;
+            }
+            good = beyond;
         }
-        return OptionalDouble.of(Crossing.lastGood(margin, good, bad, TUNED_PRECISION));
-    }
-
-    private double tunedMargin(double km, List<Axis> free, Execution execution) {
-        execution.stopIfCancelled();
-        Scenario there = length.with(scenario, km);
-        Tuning tuning = new Tuning(there, free, Objective.MARGIN, margins, 1L);
-        Tuning.Outcome outcome = tuning.quickly(execution.inside());
-        LinkPrediction prediction = outcome.prediction();
-        return margins.least(prediction);
+        return OptionalDouble.of(good);
     }
 }

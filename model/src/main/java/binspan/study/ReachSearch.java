@@ -1,5 +1,6 @@
 package binspan.study;
 
+import binspan.prediction.LinkPrediction;
 import binspan.prediction.RequirementMargins;
 import binspan.scenario.LinkLength;
 import binspan.scenario.Scenario;
@@ -10,6 +11,10 @@ import java.util.OptionalDouble;
 /** Carries out a study of the reach: the limit of each requirement, then the figures against the length to beyond the last limit. */
 final class ReachSearch {
     private static final int LENGTHS = 61;
+
+    /** Lengths that are tuned one after the other, each from the settings of the one before. */
+    private static final int NEIGHBOURS = 8;
+
     private static final double BEYOND = 1.12;
     private static final double LIMITS_SHARE = 0.6;
 
@@ -39,8 +44,14 @@ final class ReachSearch {
         return new Reach.Outcome(
                 List.copyOf(each),
                 all ? limits[goals.size()] : null,
-                table(List.of(), farthest, execution.part(LIMITS_SHARE, LIMITS_SHARE)),
-                reach.free().isEmpty() ? null : table(reach.free(), farthest, execution.part(LIMITS_SHARE, 1.0)));
+                table(List.of(), farthest, farthest, execution.part(LIMITS_SHARE, LIMITS_SHARE)),
+                reach.free().isEmpty()
+                        ? null
+                        : table(
+                                reach.free(),
+                                farthest,
+                                all ? limits[goals.size()].retunedKm().orElse(-1.0) : farthest,
+                                execution.part(LIMITS_SHARE, 1.0)));
     }
 
     private Reach.Limit limit(Reach.Goal goal, RequirementMargins margins, Execution execution) {
@@ -61,43 +72,48 @@ final class ReachSearch {
         return Math.min(length.range().highest(), farthest * BEYOND);
     }
 
-    private StudyTable table(List<Axis> free, double farthest, Execution execution) {
+    /** Figures against the length; beyond the reach of all requirements the settings are those that violate them least. */
+    private StudyTable table(List<Axis> free, double farthest, double reached, Execution execution) {
         List<String> paths = new ArrayList<>();
         paths.add(LinkLength.PATH);
         free.forEach(axis -> paths.add(axis.parameter().path()));
         StudyTable table = new StudyTable(paths, reach.columns(), LENGTHS);
-        Workers.run(LENGTHS, 1, execution, () -> {
+        Workers.run(LENGTHS, NEIGHBOURS, execution, () -> (first, end) -> {
             PointEvaluator evaluator = new PointEvaluator(reach.scenario(), List.of(length));
             FigureReader reader = new FigureReader(reach.columns());
-            return (first, end) -> {
-                for (int row = first; row < end; row++) {
-                    fill(table, row, farthest * row / (LENGTHS - 1), free, evaluator, reader, execution);
-                }
-            };
+            TunedLengths inside = tuned(free, reach.objective(), evaluator, execution);
+            TunedLengths beyond = tuned(free, Objective.MARGIN, evaluator, execution);
+            for (int row = first; row < end; row++) {
+                double km = farthest * row / (LENGTHS - 1);
+                Settings settings = free.isEmpty()
+                        ? new Settings(km, List.of(), length.with(reach.scenario(), km))
+                        : Settings.of(km, (km <= reached ? inside : beyond).at(km));
+                fill(table, row, settings, evaluator, reader);
+            }
         });
         return table;
     }
 
-    private void fill(
-            StudyTable table,
-            int row,
-            double km,
-            List<Axis> free,
-            PointEvaluator evaluator,
-            FigureReader reader,
-            Execution execution) {
-        Scenario there = length.with(reach.scenario(), km);
-        int start = table.start(row);
-        table.numbers()[start] = km;
-        if (!free.isEmpty()) {
-            Tuning.Outcome outcome = Tuning.of(there, free, reach.objective()).quickly(execution.inside());
-            for (int i = 0; i < free.size(); i++) {
-                table.numbers()[start + 1 + i] = outcome.values().get(i);
-            }
-            there = outcome.scenario();
+    private TunedLengths tuned(List<Axis> free, Objective objective, PointEvaluator evaluator, Execution execution) {
+        return new TunedLengths(reach.scenario(), free, objective, evaluator.margins(), execution);
+    }
+
+    /** A link at one length with the tuned values. */
+    private record Settings(double km, List<Double> values, Scenario scenario) {
+        static Settings of(double km, Tuning.Outcome outcome) {
+            return new Settings(km, outcome.values(), outcome.scenario());
         }
-        var prediction = evaluator.predicted(there);
-        reader.read(prediction, table.numbers(), start + 1 + free.size());
+    }
+
+    private static void fill(
+            StudyTable table, int row, Settings settings, PointEvaluator evaluator, FigureReader reader) {
+        int start = table.start(row);
+        table.numbers()[start] = settings.km();
+        for (int i = 0; i < settings.values().size(); i++) {
+            table.numbers()[start + 1 + i] = settings.values().get(i);
+        }
+        LinkPrediction prediction = evaluator.predicted(settings.scenario());
+        reader.read(prediction, table.numbers(), start + 1 + settings.values().size());
         table.meets(row, evaluator.margins().met(prediction));
     }
 }

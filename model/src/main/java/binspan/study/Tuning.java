@@ -73,11 +73,16 @@ public record Tuning(Scenario scenario, List<Axis> free, Objective objective, Re
      * @throws java.util.concurrent.CancellationException if it shall stop
      */
     public Outcome run(Execution execution) {
-        return new TuningSearch(this, TuningSearch.THOROUGH).run(execution);
+        return new TuningSearch(this, TuningSearch.THOROUGH, List.of()).run(execution);
     }
 
     /** Searches with less effort, for a study that tunes often. */
     Outcome quickly(Execution execution) {
-        return new TuningSearch(this, TuningSearch.QUICK).run(execution);
+        return new TuningSearch(this, TuningSearch.QUICK, List.of()).run(execution);
+    }
+
+    /** Searches near the best settings of a similar link, for a study that walks from link to link. */
+    Outcome nearby(List<Double> settings, Execution execution) {
+        return new TuningSearch(this, TuningSearch.NEARBY, settings).run(execution);
     }
 }

@@ -28,8 +28,12 @@ final class TuningSearch {
     /** Effort for one of many. */
     static final Effort QUICK = new Effort(256, 2, 80, 2);
 
+    /** Effort for one that begins at the best settings of a similar link. */
+    static final Effort NEARBY = new Effort(64, 1, 40, 1);
+
     private static final double WEIGHT = 200.0;
     private static final double FIRST_SIGMA = 0.12;
+    private static final double NEARBY_SIGMA = 0.04;
     private static final double FINER = 0.1;
     private static final double STRICTER = 10.0;
     private static final double APART = 0.15;
@@ -50,10 +54,17 @@ final class TuningSearch {
 
     private final Tuning tuning;
     private final Effort effort;
+    private final List<Double> start;
 
-    TuningSearch(Tuning tuning, Effort effort) {
+    /**
+     * A search.
+     *
+     * @param start settings to begin at as well; empty for those as written
+     */
+    TuningSearch(Tuning tuning, Effort effort, List<Double> start) {
         this.tuning = tuning;
         this.effort = effort;
+        this.start = start;
     }
 
     Tuning.Outcome run(Execution execution) {
@@ -130,14 +141,14 @@ final class TuningSearch {
             PointEvaluator evaluator = evaluator();
             return (first, end) -> {
                 for (int i = first; i < end; i++) {
-                    climbed[i] = climb(
-                            landscape(evaluator, objective, WEIGHT), starts.get(i), FIRST_SIGMA, tuning.seed() + i);
+                    climbed[i] =
+                            climb(landscape(evaluator, objective, WEIGHT), starts.get(i), sigma(), tuning.seed() + i);
                 }
             };
         });
         Arrays.stream(climbed).forEach(search::take);
         PointEvaluator evaluator = evaluator();
-        double sigma = FIRST_SIGMA;
+        double sigma = sigma();
         double weight = WEIGHT;
         for (int i = 0; i < effort.refinements(); i++) {
             execution.stopIfCancelled();
@@ -147,6 +158,10 @@ final class TuningSearch {
                     climb(landscape(evaluator, objective, weight), search.best.point(), sigma, tuning.seed() - 1 - i));
         }
         return search;
+    }
+
+    private double sigma() {
+        return start.isEmpty() ? FIRST_SIGMA : NEARBY_SIGMA;
     }
 
     /** Scans the cube and returns the best points that lie apart, the scenario as written among the candidates. */
@@ -175,7 +190,7 @@ final class TuningSearch {
         SplittableRandom random = new SplittableRandom(tuning.seed());
         double[] shift = random.doubles(dimension).toArray();
         double[][] points = new double[effort.scan() + 1][];
-        points[0] = planned();
+        points[0] = first();
         for (int i = 1; i < points.length; i++) {
             points[i] = sobol.nextVector();
             for (int k = 0; k < dimension; k++) {
@@ -183,6 +198,17 @@ final class TuningSearch {
             }
         }
         return points;
+    }
+
+    private double[] first() {
+        if (start.isEmpty()) {
+            return planned();
+        }
+        double[] shares = new double[start.size()];
+        for (int i = 0; i < shares.length; i++) {
+            shares[i] = Math.max(0.0, Math.min(1.0, tuning.free().get(i).share(start.get(i))));
+        }
+        return shares;
     }
 
     /** The scenario as written, moved into the cube where it lies outside. */

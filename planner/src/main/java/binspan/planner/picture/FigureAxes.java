@@ -23,7 +23,7 @@ final class FigureAxes {
                 varied.to());
     }
 
-    /** The axis of a figure: logarithmic where it spans more than a decade of positive values and usually does, then at most six decades deep. */
+    /** The axis of a figure: logarithmic where it spans more than a decade of positive values and usually does, then at most six decades: of times the shortest. */
     static Axis of(FigureColumn column, double... values) {
         double least = Double.POSITIVE_INFINITY;
         double largest = Double.NEGATIVE_INFINITY;
@@ -37,10 +37,13 @@ final class FigureAxes {
         if (!FigureWords.spansDecades(column) || !(largest > DECADE * least)) {
             return Axis.linear(title, column.unit());
         }
-        boolean deep = least < DEEPEST * largest;
-        return deep
-                ? Axis.logarithmic(title, column.unit()).within(DEEPEST * largest, 2.0 * largest)
-                : Axis.logarithmic(title, column.unit());
+        Axis axis = Axis.logarithmic(title, column.unit());
+        if (least >= DEEPEST * largest) {
+            return axis;
+        }
+        return column.field().name().contains("secondsTo")
+                ? axis.within(least / 2.0, least / DEEPEST)
+                : axis.within(DEEPEST * largest, 2.0 * largest);
     }
 
     /** The axis of a column of a table. */

@@ -51,7 +51,8 @@ public final class ReachPicture {
         Axis y = FigureAxes.of(table, column);
         if (table.columns().get(column).name().equals(KEY) && table.indexOf(BOUND) >= 0) {
             series.add(new Series("repeaterless bound", points(table, table.indexOf(BOUND))));
-            y = deep(y, table.figuresOf(column), table.figuresOf(table.indexOf(BOUND)));
+            StudyTable lowest = outcome.retuned() == null ? table : outcome.retuned();
+            y = deep(y, lowest.figuresOf(column), table.figuresOf(table.indexOf(BOUND)));
         }
         return new CurvePanel(
                 y,

@@ -10,6 +10,7 @@ import binspan.planner.plot.Panel;
 import binspan.planner.plot.PanelGroup;
 import binspan.planner.plot.Picture;
 import binspan.planner.plot.RankedBars;
+import binspan.planner.plot.RequirementLine;
 import binspan.planner.report.FigureWords;
 import binspan.planner.report.ParameterWords;
 import binspan.study.FailureDriver;
@@ -32,6 +33,7 @@ public final class TolerancePicture {
     private static final int MOST_DRIVERS = 20;
     private static final int COLUMNS = 2;
     private static final double PERCENT = 100.0;
+    private static final double FAR = 4.0;
 
     private TolerancePicture() {}
 
@@ -78,12 +80,23 @@ public final class TolerancePicture {
         quantiles.add(new Mark("median", figure.quantiles().get(3)));
         quantiles.add(new Mark("95 %", figure.quantiles().get(5)));
         quantiles.removeIf(mark -> !Double.isFinite(mark.value()));
+        Optional<RequirementLine> line =
+                RequirementLines.of(column, result.study().scenario().require());
+        boolean far = line.isPresent() && far(line.get().value(), values);
         return new Histogram(
-                "",
+                far ? line.get().label() + ", far outside" : "",
                 Axis.linear(FigureWords.title(column), column.unit()),
                 bins(values),
-                RequirementLines.of(column, result.study().scenario().require()),
+                far ? Optional.empty() : line,
                 quantiles);
+    }
+
+    /** Whether a requirement lies so far from all values that the picture would show nothing else. */
+    private static boolean far(double required, double... values) {
+        double least = Arrays.stream(values).min().orElse(required);
+        double largest = Arrays.stream(values).max().orElse(required);
+        double outside = Math.max(least - required, required - largest);
+        return outside > FAR * (largest - least);
     }
 
     /** Equal bins between the outermost values. */
