@@ -18,6 +18,7 @@ public final class BoxSummary {
     private static final int NUMBER = 13;
     private static final int DIGITS = 5;
     private static final int FEW_DIGITS = 4;
+    private static final double NOTHING = 1e-4;
 
     private final OperatingBox box;
     private final TextPage page;
@@ -89,9 +90,12 @@ public final class BoxSummary {
                     .append(WindowSummary.value(axis, binding.verdict().values().get(i), DIGITS));
         }
         page.gap();
+        double margin = binding.verdict().leastMargin();
         page.wrapped((binding.corner() ? "The binding corner: " : "The binding point: ") + where + "; the "
-                + RequirementWords.name(binding.verdict().tightest().requirement()) + " is met there with nothing to"
-                + " spare.");
+                + RequirementWords.name(binding.verdict().tightest().requirement()) + " is met there with "
+                + (margin < NOTHING
+                        ? "nothing to spare."
+                        : Figure.percent(Math.expm1(margin)) + " to spare: the ranges end before anything fails."));
         page.wrapped("Checked at " + box.pointsChecked() + " points: all corners, the middles of all faces and "
                 + ToleranceBox.CHECKED_POINTS + " points inside. Between them nothing is proven.");
     }

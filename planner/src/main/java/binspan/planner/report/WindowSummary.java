@@ -5,6 +5,7 @@ import static binspan.planner.report.TextPage.left;
 import binspan.prediction.Requirement;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
+import binspan.study.ModelLimits;
 import binspan.study.OperatingInterval;
 import binspan.study.OperatingIntervals;
 import binspan.study.PointVerdict;
@@ -14,6 +15,7 @@ import binspan.study.RequirementMargin;
 import binspan.study.WindowEnd;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /** Operating windows for a person: the intervals with what ends them, or the region of two parameters. */
 public final class WindowSummary {
@@ -22,6 +24,9 @@ public final class WindowSummary {
     private static final int DIGITS = 7;
     private static final int FEW_DIGITS = 4;
     private static final double PERCENT = 100.0;
+    private static final String OVERLAP =
+            "windows are wider than the separation, or three slots do not fit into a pump cycle, which the model leaves"
+                    + " out.";
 
     private final Scenario scenario;
     private final TextPage page;
@@ -74,6 +79,22 @@ public final class WindowSummary {
         }
     }
 
+    /** Says where slots that the model needs apart begin to overlap inside a window. */
+    private void slots(Axis axis, OperatingInterval window) {
+        double from = window.from().value();
+        double to = window.to().value();
+        double best = window.best().values().get(0);
+        Optional<ModelLimits.Interval> held = ModelLimits.within(scenario, axis, from, best, to);
+        if (held.isEmpty()) {
+            labelled("", "caution: " + OVERLAP);
+        } else if (held.get().from() > from || held.get().to() < to) {
+            labelled(
+                    "",
+                    "caution: keep to " + value(axis, held.get().from(), FEW_DIGITS) + " to "
+                            + value(axis, held.get().to(), FEW_DIGITS) + "; outside, " + OVERLAP);
+        }
+    }
+
     private static String held(Axis axis, RequirementIntervals each) {
         List<String> words = new ArrayList<>();
         each.intervals()
@@ -104,6 +125,9 @@ public final class WindowSummary {
         }
         labelled("area", Figure.digits(map.area(), FEW_DIGITS, areaUnit(axes)));
         labelled("best", AxisWords.named(axes, point(map.best())) + "; " + room(map.best()));
+        if (overlapping(map)) {
+            labelled("caution", "on a part of this map " + OVERLAP);
+        }
         page.heading("Contours");
         for (RegionMap.RequirementContour contour : map.contours()) {
             String words = contour.lines().isEmpty()
@@ -111,6 +135,20 @@ public final class WindowSummary {
                     : contour.lines().size() + (contour.lines().size() == 1 ? " line" : " lines");
             page.row(RequirementWords.name(contour.requirement()), words);
         }
+    }
+
+    /** Whether slots overlap at a corner of the map. */
+    private boolean overlapping(RegionMap map) {
+        boolean overlapping = false;
+        for (double x : new double[] {map.horizontal().from(), map.horizontal().to()}) {
+            for (double y : new double[] {map.vertical().from(), map.vertical().to()}) {
+                Scenario corner = map.vertical()
+                        .parameter()
+                        .with(map.horizontal().parameter().with(scenario, x), y);
+                overlapping |= ModelLimits.room(corner) < 0.0;
+            }
+        }
+        return overlapping;
     }
 
     private static boolean holds(RegionMap map, Requirement requirement) {
