@@ -65,6 +65,7 @@ public final class WindowSummary {
                     + value(axis, window.to().value(), DIGITS)));
             labelled("", "below: " + end(window.from()));
             labelled("", "above: " + end(window.to()));
+            slots(axis, window);
             labelled(
                     "",
                     "most room at " + value(axis, window.best().values().get(0), FEW_DIGITS) + ", "
