@@ -1,18 +1,14 @@
 package binspan.study;
 
+import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.stream.IntStream;
 
-/**
- * Checks a box at many points inside: the points of a Sobol sequence, then a descent along the axes from the least of them, which finds what hides between
- * the points and on the faces.
- */
+/** Checks a box at many points inside, those of a Sobol sequence, and where the margins lead to from the least of them and from hollows. */
 final class BoxCheck {
     private static final int PORTION = 128;
     private static final int DESCENTS = 3;
-    private static final int ROUNDS = 3;
-    private static final double TENTH = 0.1;
     private static final double NEGLIGIBLE = 1e-9;
 
     private final ToleranceBox question;
@@ -48,11 +44,24 @@ final class BoxCheck {
                 .limit(DESCENTS)
                 .toList();
         Worst worst = new Worst(points[order.get(0)], margins[order.get(0)]);
+        if (worst.violates()) {
+            return worst;
+        }
+        BoxDescent descent = new BoxDescent(box, function);
+        List<double[]> followed = new ArrayList<>(descent.fromHollows());
         for (int start : order) {
             execution.stopIfCancelled();
-            Worst lower = descent(box, function, points[start]);
-            boolean counts = worst.violates() || lower.margin() >= 0.0 || lower.margin() < -NEGLIGIBLE;
-            worst = counts && lower.margin() < worst.margin() ? lower : worst;
+            followed.add(descent.from(points[start]));
+        }
+        return lowest(followed, worst, box, function);
+    }
+
+    /** The lowest of the points that were followed, unless what it violates is less than rounding. */
+    private static Worst lowest(List<double[]> followed, Worst otherwise, Box box, MarginFunction function) {
+        Worst worst = otherwise;
+        for (double[] point : followed) {
+            double margin = function.least(box.at(point));
+            worst = margin < Math.min(worst.margin(), -NEGLIGIBLE) ? new Worst(point, margin) : worst;
         }
         return worst;
     }
@@ -68,34 +77,5 @@ final class BoxCheck {
             };
         });
         return margins;
-    }
-
-    /** Goes down along one axis after the other, to the faces where they are lowest. */
-    private static Worst descent(Box box, MarginFunction function, double[] start) {
-        double[] place = start.clone();
-        double margin = function.least(box.at(place));
-        for (int round = 0; round < ROUNDS; round++) {
-            for (int j = 0; j < place.length; j++) {
-                double step = round == 0 ? TENTH : TENTH * TENTH;
-                double present = place[j];
-                for (double trial : new double[] {
-                    0.0, 1.0, present - step, present + step, present - step / 2.0, present + step / 2.0
-                }) {
-                    double[] moved = place.clone();
-                    moved[j] = Math.max(0.0, Math.min(1.0, trial));
-                    double found = function.least(box.at(moved));
-                    if (found < margin) {
-                        margin = found;
-                        place = moved;
-                    }
-                }
-            }
-        }
-        return new Worst(place, margin);
-    }
-
-    /** Number of points of one check, the descents not counted. */
-    int size() {
-        return points.length;
     }
 }

@@ -38,6 +38,7 @@ final class BoxHunt {
 
     OperatingBox result() {
         List<double[]> starts = new BoxStarts(question, execution.part(0.0, STARTS_END)).points();
+        execution.reached(STARTS_END);
         MarginFunction function = question.function();
         double[] first = starts.get(0);
         if (function.least(first) < 0.0) {

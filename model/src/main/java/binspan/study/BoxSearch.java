@@ -1,6 +1,7 @@
 package binspan.study;
 
 import binspan.study.BoxVariables.Retreat;
+import java.util.Arrays;
 import java.util.List;
 import java.util.function.DoubleFunction;
 import java.util.function.DoubleUnaryOperator;
@@ -18,7 +19,7 @@ final class BoxSearch {
     private static final double SHORTER = 0.3;
     private static final int CORRECTIONS = 6;
     private static final int MOST_STEPS = 60;
-    private static final double SMALLEST = 1e-9;
+    private static final double SMALLEST = 1e-14;
     private static final double FIRST_SHRINK = 1e-7;
     private static final double LAST_SHRINK = 0.5;
     private static final double SHRINK_GROWTH = 8.0;
@@ -140,18 +141,25 @@ final class BoxSearch {
     }
 
     private double[] pushed(double[] numbers, double[] way) {
+        List<double[]> moving = moving(numbers, along(numbers, way, 1.0));
+        DoubleUnaryOperator least = share -> constraints.least(along(numbers, way, share), moving);
         double good = 0.0;
         for (double share = FIRST_PUSH; good < 1.0; share = Math.min(1.0, share * PUSH_GROWTH)) {
-            if (constraints.allowAtOnce(along(numbers, way, share))) {
-                good = share;
-            } else {
-                double bad = share;
-                DoubleUnaryOperator least =
-                        each -> constraints.least(along(numbers, way, each), constraints.relative());
-                return along(numbers, way, InnerRoot.between(least, good, bad));
+            if (least.applyAsDouble(share) < 0.0) {
+                return along(numbers, way, InnerRoot.between(least, good, share));
             }
+            good = share;
         }
         return along(numbers, way, 1.0);
+    }
+
+    /** The relative places that are not the same in two boxes. */
+    private List<double[]> moving(double[] first, double[] second) {
+        Box before = variables.box(first);
+        Box after = variables.box(second);
+        return constraints.relative().stream()
+                .filter(place -> !Arrays.equals(before.at(place), after.at(place)))
+                .toList();
     }
 
     private static double[] along(double[] numbers, double[] way, double share) {

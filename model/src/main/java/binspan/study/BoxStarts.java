@@ -75,7 +75,7 @@ final class BoxStarts {
             MarginFunction function = question.function();
             return (first, end) -> {
                 for (int i = first; i < end; i++) {
-                    tops[i] = new BoundedClimb(function::least, new double[axes], ones)
+                    tops[i] = new BoundedClimb(place -> least(function, place), new double[axes], ones)
                             .from(from.get(i), GENERATIONS, 0.0);
                 }
             };
@@ -84,6 +84,11 @@ final class BoxStarts {
         return Arrays.stream(tops)
                 .sorted(Comparator.comparingDouble(top -> -function.least(top)))
                 .toList();
+    }
+
+    private double least(MarginFunction function, double[] place) {
+        execution.stopIfCancelled();
+        return function.least(place);
     }
 
     /** Points far from one another, in their order. */

@@ -61,10 +61,10 @@ final class GridCell {
     /** Where the margin passes zero, counter-clockwise from the lower corner. */
     private List<Spot> around(int requirement) {
         List<Spot> around = new ArrayList<>();
-        double[] bottom = crossings.alongU(requirement, i, j);
-        double[] right = crossings.alongV(requirement, i + 1, j);
-        double[] top = crossings.alongU(requirement, i, j + 1);
-        double[] left = crossings.alongV(requirement, i, j);
+        double[] bottom = crossings.on(requirement, GridEdge.bottom(i, j));
+        double[] right = crossings.on(requirement, GridEdge.right(i, j));
+        double[] top = crossings.on(requirement, GridEdge.top(i, j));
+        double[] left = crossings.on(requirement, GridEdge.left(i, j));
         for (double u : bottom) {
             around.add(new Spot(u, grid.v()[j]));
         }

@@ -21,42 +21,82 @@ final class GridCrossings {
         this.columns = new double[grid.requirements()][grid.u().length * (grid.v().length - 1)][];
     }
 
+    /** Solves the crossings on all lines, then looks more closely where a margin enters a cell and seems not to leave it. */
     static GridCrossings of(OperatingRegion region, RegionGrid grid, Execution execution) {
         GridCrossings crossings = new GridCrossings(grid);
         int rows = grid.v().length;
         Workers.run(rows + grid.u().length, 1, execution, () -> {
             MarginFunction function = region.function();
             return (first, end) -> {
-                for (int line = first; line < end; line++) {
-                    crossings.solve(function, line < rows, line < rows ? line : line - rows, execution);
+                for (int number = first; number < end; number++) {
+                    boolean row = number < rows;
+                    crossings.solveLine(new GridEdge(row, row ? number : number - rows, 0), function, execution);
                 }
             };
         });
+        new LooseEnds(grid, crossings, region.function(), execution).follow();
         return crossings;
     }
 
-    private void solve(MarginFunction function, boolean row, int line, Execution execution) {
-        for (int k = 0; k < grid.requirements(); k++) {
-            execution.stopIfCancelled();
-            int requirement = k;
-            double across = row ? grid.v()[line] : grid.u()[line];
-            IntervalSearch search = new IntervalSearch(
-                    place -> row ? function.one(requirement, place, across) : function.one(requirement, across, place),
-                    FARTHEST);
-            double[] places = row ? grid.u() : grid.v();
-            double[] values = row ? grid.row(k, line) : grid.column(k, line);
-            file(search.intervals(places, values), places, row ? rows[k] : columns[k], line * (places.length - 1));
+    /** Solves the line on which an edge lies. */
+    private void solveLine(GridEdge edge, MarginFunction function, Execution execution) {
+        double[] places = edge.row() ? grid.u() : grid.v();
+        double[][] margins = edge.row() ? grid.row(edge.line()) : grid.column(edge.line());
+        IntervalSearch search = new IntervalSearch(line(edge, function), FARTHEST, execution);
+        List<List<Interval>> intervals = search.intervals(places, margins);
+        for (int k = 0; k < intervals.size(); k++) {
+            file(intervals.get(k), places, edges(k, edge.row()), edge.line() * (places.length - 1));
         }
+    }
+
+    /** The margins along the line on which an edge lies. */
+    private MarginLine line(GridEdge edge, MarginFunction function) {
+        double across = edge.row() ? grid.v()[edge.line()] : grid.u()[edge.line()];
+        return new MarginLine(function, new double[] {across, across}, edge.row() ? 0 : 1);
+    }
+
+    /**
+     * Solves one edge anew, with more samples.
+     *
+     * @return whether it has more crossings than were known
+     */
+    boolean solveEdge(GridEdge edge, int samples, MarginFunction function, Execution execution) {
+        MarginLine line = line(edge, function);
+        double[] lines = edge.row() ? grid.u() : grid.v();
+        double first = lines[edge.step()];
+        double last = lines[edge.step() + 1];
+        double[] places = new double[samples + 1];
+        double[][] margins = new double[samples + 1][];
+        for (int i = 0; i <= samples; i++) {
+            places[i] = i == samples ? last : first + (last - first) * i / samples;
+            margins[i] = line.at(places[i]);
+        }
+        List<List<Interval>> found = new IntervalSearch(line, FARTHEST, execution).intervals(places, margins);
+        boolean more = false;
+        for (int k = 0; k < found.size(); k++) {
+            double[][] solved = new double[samples][];
+            file(found.get(k), places, solved, 0);
+            double[] all = Arrays.stream(solved)
+                    .filter(each -> each != null)
+                    .flatMapToDouble(Arrays::stream)
+                    .toArray();
+            int index = edge.line() * (lines.length - 1) + edge.step();
+            if (all.length > on(k, edge).length) {
+                edges(k, edge.row())[index] = all;
+                more = true;
+            }
+        }
+        return more;
     }
 
     /** Puts the ends of the intervals to the edges on which they lie: an end at a crossing of lines to the edge that leaves the interval there. */
     private static void file(List<Interval> intervals, double[] places, double[][] edges, int start) {
         for (Interval interval : intervals) {
-            if (interval.from() > 0.0) {
+            if (interval.from() > places[0]) {
                 int found = Arrays.binarySearch(places, interval.from());
                 add(edges, start + (found >= 0 ? found - 1 : -found - 2), interval.from());
             }
-            if (interval.to() < 1.0) {
+            if (interval.to() < places[places.length - 1]) {
                 int found = Arrays.binarySearch(places, interval.to());
                 add(edges, start + (found >= 0 ? found : -found - 2), interval.to());
             }
@@ -69,15 +109,14 @@ final class GridCrossings {
         edges[edge][present.length] = place;
     }
 
-    /** The crossings on the edge from a crossing of lines along the first axis, in rising order. */
-    double[] alongU(int requirement, int i, int j) {
-        double[] found = rows[requirement][j * (grid.u().length - 1) + i];
-        return found == null ? NONE : found;
+    private double[][] edges(int requirement, boolean row) {
+        return row ? rows[requirement] : columns[requirement];
     }
 
-    /** The crossings on the edge from a crossing of lines along the second axis. */
-    double[] alongV(int requirement, int i, int j) {
-        double[] found = columns[requirement][i * (grid.v().length - 1) + j];
+    /** The crossings of a requirement on an edge, in rising order. */
+    double[] on(int requirement, GridEdge edge) {
+        int steps = (edge.row() ? grid.u().length : grid.v().length) - 1;
+        double[] found = edges(requirement, edge.row())[edge.line() * steps + edge.step()];
         return found == null ? NONE : found;
     }
 }

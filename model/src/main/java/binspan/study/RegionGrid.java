@@ -1,6 +1,7 @@
 package binspan.study;
 
 import java.util.Arrays;
+import java.util.stream.IntStream;
 
 /** The margins of all requirements at the crossings of some lines across a map. */
 final class RegionGrid {
@@ -79,18 +80,20 @@ final class RegionGrid {
         return new Spot(u[i], v[j]);
     }
 
-    /** The margins of a requirement along a line across the second axis. */
-    double[] row(int requirement, int j) {
-        return Arrays.copyOfRange(margins[requirement], j * u.length, (j + 1) * u.length);
+    /** The margins of all requirements along a line across the second axis. */
+    double[][] row(int j) {
+        return IntStream.range(0, u.length).mapToObj(i -> at(i, j)).toArray(double[][]::new);
     }
 
-    /** The margins of a requirement along a line across the first axis. */
-    double[] column(int requirement, int i) {
-        double[] column = new double[v.length];
-        for (int j = 0; j < column.length; j++) {
-            column[j] = margin(requirement, i, j);
-        }
-        return column;
+    /** The margins of all requirements along a line across the first axis. */
+    double[][] column(int i) {
+        return IntStream.range(0, v.length).mapToObj(j -> at(i, j)).toArray(double[][]::new);
+    }
+
+    private double[] at(int i, int j) {
+        return IntStream.range(0, requirements())
+                .mapToDouble(k -> margin(k, i, j))
+                .toArray();
     }
 
     /** The lines between which a place lies: the index of the lower one. */

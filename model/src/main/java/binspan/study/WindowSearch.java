@@ -6,10 +6,12 @@ import binspan.study.RequirementIntervals.HeldInterval;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.DoubleUnaryOperator;
 
 /** One search for the operating windows of a parameter: scan, intervals of each requirement, what they have in common, the best point of each. */
 final class WindowSearch {
-    private static final double SCAN_SHARE = 0.7;
+    private static final double SCAN_SHARE = 0.6;
+    private static final double INTERVALS_END = 0.8;
     private static final int PORTION = 64;
     private static final int STEPS_INSIDE = 512;
 
@@ -32,12 +34,10 @@ final class WindowSearch {
 
     OperatingIntervals result() {
         scan();
-        List<List<Interval>> each = new ArrayList<>();
-        for (int i = 0; i < function.requirements(); i++) {
-            each.add(intervals(i));
-            double done = (i + 1.0) / function.requirements();
-            execution.reached(SCAN_SHARE + (1.0 - SCAN_SHARE) * done);
-        }
+        MarginLine line = new MarginLine(function, new double[1], 0);
+        List<List<Interval>> each =
+                new IntervalSearch(line, Double.POSITIVE_INFINITY, execution).intervals(places, margins);
+        execution.reached(INTERVALS_END);
         List<OperatingInterval> windows = new ArrayList<>();
         for (CommonInterval common : CommonInterval.of(each)) {
             windows.add(window(common));
@@ -60,20 +60,6 @@ final class WindowSearch {
         });
     }
 
-    private List<Interval> intervals(int requirement) {
-        double[] values = new double[places.length];
-        for (int i = 0; i < values.length; i++) {
-            values[i] = margins[i][requirement];
-        }
-        IntervalSearch search = new IntervalSearch(
-                place -> {
-                    execution.stopIfCancelled();
-                    return function.one(requirement, place);
-                },
-                Double.POSITIVE_INFINITY);
-        return search.intervals(places, values);
-    }
-
     private OperatingInterval window(CommonInterval common) {
         return new OperatingInterval(
                 end(common.from(), common.fromBy()),
@@ -92,8 +78,11 @@ final class WindowSearch {
     }
 
     private PointVerdict best(double from, double to, int samples) {
-        execution.stopIfCancelled();
-        return function.verdict(LeastMarginLine.best(function::least, from, to, samples));
+        DoubleUnaryOperator least = place -> {
+            execution.stopIfCancelled();
+            return function.least(place);
+        };
+        return function.verdict(LeastMarginLine.best(least, from, to, samples));
     }
 
     private List<RequirementIntervals> requirements(List<List<Interval>> each) {

@@ -19,7 +19,7 @@ import java.util.SplittableRandom;
  * Random valid scenarios, each fixed by its number: all pump modes, filter shapes, detectors and path elements, everyday links as well as links whose
  * numbers lie anywhere in the ranges that the registry allows.
  */
-final class RandomScenarios {
+public final class RandomScenarios {
     private static final long SEED = 20_260_131L;
     private static final double[] WILDNESS = {0.0, 0.03, 0.1, 0.4};
     private static final double OTHER_FILTERS = 0.5;
@@ -55,7 +55,7 @@ final class RandomScenarios {
     }
 
     /** Any valid scenario. */
-    static Scenario any(long number) {
+    public static Scenario any(long number) {
         return build(stated(number));
     }
 
@@ -66,12 +66,12 @@ final class RandomScenarios {
     }
 
     /** A scenario with everyday numbers only. */
-    static Scenario everyday(long number) {
+    public static Scenario everyday(long number) {
         return build(new RandomScenarios(number, 0.0, false).drawn());
     }
 
     /** A scenario with everyday numbers and Gaussian filters only. */
-    static Scenario everydayGaussian(long number) {
+    public static Scenario everydayGaussian(long number) {
         return build(new RandomScenarios(number, 0.0, true).drawn());
     }
 
