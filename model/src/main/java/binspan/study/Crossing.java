@@ -3,7 +3,7 @@ package binspan.study;
 import java.util.function.DoubleUnaryOperator;
 
 /** Where a margin falls below zero. */
-final class Crossing {
+public final class Crossing {
     private static final int MOST_STEPS = 200;
 
     private Crossing() {}
@@ -16,7 +16,7 @@ final class Crossing {
      * @param bad where it does not, on either side
      * @param precision greatest distance to the true crossing, as a share of the larger end
      */
-    static double lastGood(DoubleUnaryOperator margin, double good, double bad, double precision) {
+    public static double lastGood(DoubleUnaryOperator margin, double good, double bad, double precision) {
         double holds = good;
         double fails = bad;
         double above = margin.applyAsDouble(good);

@@ -26,12 +26,12 @@ public record Execution(int threads, Progress progress, double from, double to) 
     }
 
     /** The same without reports, for a piece of work whose length nobody knows; it still stops when asked. */
-    Execution silent() {
+    public Execution silent() {
         return new Execution(threads, progress, Double.NaN, Double.NaN);
     }
 
     /** The same on one thread and without reports, for a piece of work inside a parallel one; it still stops when asked. */
-    Execution inside() {
+    public Execution inside() {
         return new Execution(1, progress, Double.NaN, Double.NaN);
     }
 
@@ -41,7 +41,7 @@ public record Execution(int threads, Progress progress, double from, double to) 
      * @param share of this part, 0 to 1
      * @throws CancellationException if the study shall stop
      */
-    void reached(double share) {
+    public void reached(double share) {
         stopIfCancelled();
         if (from <= to) {
             progress.reached(from + share * (to - from));
@@ -53,7 +53,7 @@ public record Execution(int threads, Progress progress, double from, double to) 
      *
      * @throws CancellationException if the study shall stop
      */
-    void stopIfCancelled() {
+    public void stopIfCancelled() {
         if (progress.cancelled()) {
             throw new CancellationException("study cancelled");
         }

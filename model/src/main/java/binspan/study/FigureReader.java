@@ -7,14 +7,14 @@ import binspan.prediction.ResultField;
 import java.util.List;
 
 /** Reads figures of merit out of predictions, for one thread; those that depend on the light alone only when the light has changed. */
-final class FigureReader {
+public final class FigureReader {
     private final FigureColumn[] columns;
     private final boolean[] optical;
     private final double[] known;
     private final boolean finiteKey;
     private LinkOptics optics;
 
-    FigureReader(List<FigureColumn> columns) {
+    public FigureReader(List<FigureColumn> columns) {
         this.columns = columns.toArray(FigureColumn[]::new);
         this.optical = new boolean[this.columns.length];
         this.known = new double[this.columns.length];
@@ -33,7 +33,7 @@ final class FigureReader {
      * @param into where they go, one after the other
      * @param at position of the first
      */
-    void read(LinkPrediction prediction, double[] into, int at) {
+    public void read(LinkPrediction prediction, double[] into, int at) {
         renew(prediction);
         FiniteKeyOutlook finite = finiteKey ? FiniteKeyOutlook.of(prediction) : null;
         for (int i = 0; i < columns.length; i++) {

@@ -8,47 +8,49 @@ import binspan.scenario.Scenario;
 import java.util.List;
 
 /** Evaluates a scenario at values of its free parameters, for one thread; what does not change between two points is kept. */
-final class PointEvaluator {
+public final class PointEvaluator {
     private final Variation variation;
     private final LinkPredictor predictor = new LinkPredictor();
     private final RequirementMargins margins;
 
-    PointEvaluator(Scenario base, List<Parameter> parameters) {
+    /** Frees parameters of a scenario. */
+    public PointEvaluator(Scenario base, List<Parameter> parameters) {
         this(base, parameters, RequirementMargins.of(base.require()));
     }
 
-    PointEvaluator(Scenario base, List<Parameter> parameters, RequirementMargins margins) {
+    /** Frees parameters of a scenario. */
+    public PointEvaluator(Scenario base, List<Parameter> parameters, RequirementMargins margins) {
         this.variation = new Variation(base, parameters);
         this.margins = margins;
     }
 
     /** The scenario as written. */
-    Scenario base() {
+    public Scenario base() {
         return variation.base();
     }
 
     /** The prediction at values of the parameters. */
-    LinkPrediction at(double... values) {
+    public LinkPrediction at(double... values) {
         return predictor.of(variation.at(values));
     }
 
     /** The prediction of another scenario, with what it shares kept as well. */
-    LinkPrediction predicted(Scenario scenario) {
+    public LinkPrediction predicted(Scenario scenario) {
         return predictor.of(scenario);
     }
 
     /** The scenario at values of the parameters. */
-    Scenario scenario(double... values) {
+    public Scenario scenario(double... values) {
         return variation.at(values);
     }
 
     /** The requirements and their margins. */
-    RequirementMargins margins() {
+    public RequirementMargins margins() {
         return margins;
     }
 
     /** The least margin of all requirements at values of the parameters. */
-    double leastMargin(double... values) {
+    public double leastMargin(double... values) {
         return margins.least(at(values));
     }
 }

@@ -12,7 +12,7 @@ public final class StudyTable {
     private final boolean[] meets;
 
     /** An empty table, to be filled row by row. */
-    StudyTable(List<String> paths, List<FigureColumn> columns, int rows) {
+    public StudyTable(List<String> paths, List<FigureColumn> columns, int rows) {
         this(paths, columns, rows, null);
     }
 
@@ -21,7 +21,7 @@ public final class StudyTable {
      *
      * @param places place at which each row is kept; null where that is its number
      */
-    StudyTable(List<String> paths, List<FigureColumn> columns, int rows, int[] places) {
+    public StudyTable(List<String> paths, List<FigureColumn> columns, int rows, int[] places) {
         this.paths = List.copyOf(paths);
         this.columns = List.copyOf(columns);
         this.width = paths.size() + columns.size();
@@ -102,16 +102,17 @@ public final class StudyTable {
     }
 
     /** The numbers of all rows, each row's parameters before its figures, in the order of their places. */
-    double[] numbers() {
+    public double[] numbers() {
         return numbers;
     }
 
     /** Where the numbers of a place begin. */
-    int start(int place) {
+    public int start(int place) {
         return place * width;
     }
 
-    void meets(int place, boolean value) {
+    /** Says whether a place meets all requirements. */
+    public void meets(int place, boolean value) {
         meets[place] = value;
     }
 }

@@ -11,10 +11,10 @@ import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.Supplier;
 
 /** Shares the items of a study among threads; results must be stored by item, so that they are the same on any number of threads. */
-final class Workers {
+public final class Workers {
     /** Work on items; each thread has its own. */
     @FunctionalInterface
-    interface Work {
+    public interface Work {
         /** Works on the items from the first to before the end. */
         void on(int first, int end);
     }
@@ -41,7 +41,7 @@ final class Workers {
      * @param work makes the work of one thread
      * @throws java.util.concurrent.CancellationException if the study shall stop
      */
-    static void run(int items, int portion, Execution execution, Supplier<? extends Work> work) {
+    public static void run(int items, int portion, Execution execution, Supplier<? extends Work> work) {
         Workers workers = new Workers(items, portion, execution);
         int threads = Math.min(execution.threads(), (items + portion - 1) / portion);
         if (threads <= 1) {

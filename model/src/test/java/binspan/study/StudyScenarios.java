@@ -8,11 +8,11 @@ import java.util.Arrays;
 import java.util.List;
 
 /** Links with requirements for the tests of studies. */
-final class StudyScenarios {
+public final class StudyScenarios {
     private StudyScenarios() {}
 
     /** The sample pulse-pair link with requirements that it misses by a little as written and can meet. */
-    static Scenario demanding() {
+    public static Scenario demanding() {
         return SampleScenarios.build(SampleScenarios.pulsePair()
                 .put(
                         "require",
@@ -26,7 +26,7 @@ final class StudyScenarios {
     }
 
     /** The sample pulse-pair link with modest requirements. */
-    static Scenario modest() {
+    public static Scenario modest() {
         return SampleScenarios.build(SampleScenarios.pulsePair()
                 .put(
                         "require",
@@ -37,24 +37,24 @@ final class StudyScenarios {
     }
 
     /** The same link with one requirement. */
-    static Scenario requiring(String name, double value) {
+    public static Scenario requiring(String name, double value) {
         return SampleScenarios.build(SampleScenarios.pulsePair().put("require", new Values().put(name, value)));
     }
 
     /** An axis with two steps. */
-    static Axis axis(Scenario scenario, String path, double from, double to, boolean logarithmic) {
+    public static Axis axis(Scenario scenario, String path, double from, double to, boolean logarithmic) {
         return new Axis(ParameterPaths.find(scenario, path), from, to, 2, logarithmic);
     }
 
     /** Axes with the usual ranges. */
-    static List<Axis> usual(Scenario scenario, String... paths) {
+    public static List<Axis> usual(Scenario scenario, String... paths) {
         return Arrays.stream(paths)
                 .map(path -> DefaultAxes.of(scenario, ParameterPaths.find(scenario, path)))
                 .toList();
     }
 
     /** A point of a square grid over two axes, their ends included. */
-    static double[] gridPoint(List<Axis> axes, int index, int side) {
+    public static double[] gridPoint(List<Axis> axes, int index, int side) {
         int column = index / side;
         int row = index % side;
         return new double[] {axes.get(0).at(column / (side - 1.0)), axes.get(1).at(row / (side - 1.0))};

@@ -2,9 +2,9 @@ package binspan.planner.cli;
 
 import binspan.planner.table.StudyRows;
 import binspan.planner.table.Table;
-import binspan.study.Comparison;
 import binspan.study.FigureColumn;
 import binspan.study.FigureColumns;
+import binspan.study.comparison.Comparison;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;

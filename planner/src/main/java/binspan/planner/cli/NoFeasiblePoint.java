@@ -4,7 +4,7 @@ import binspan.planner.report.MissWords;
 import binspan.prediction.LinkPrediction;
 import binspan.prediction.RequirementMargins;
 import binspan.study.Axis;
-import binspan.study.PointVerdict;
+import binspan.study.window.PointVerdict;
 import java.util.List;
 
 /** Says that nothing meets the requirements, and how near it comes. */

@@ -4,8 +4,8 @@ import binspan.prediction.LinkPredictor;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.DefaultAxes;
-import binspan.study.Objective;
-import binspan.study.Tuning;
+import binspan.study.tuning.Objective;
+import binspan.study.tuning.Tuning;
 import java.util.Arrays;
 import java.util.List;
 

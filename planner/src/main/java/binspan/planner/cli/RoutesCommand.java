@@ -12,7 +12,7 @@ import binspan.planner.table.TableJson;
 import binspan.scenario.Scenario;
 import binspan.study.FigureColumn;
 import binspan.study.FigureColumns;
-import binspan.study.RouteSurvey;
+import binspan.study.comparison.RouteSurvey;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.util.ArrayList;

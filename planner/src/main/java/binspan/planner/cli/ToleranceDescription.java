@@ -1,13 +1,13 @@
 package binspan.planner.cli;
 
 import binspan.planner.table.TableJson;
-import binspan.study.BuildShare;
-import binspan.study.FailureDriver;
-import binspan.study.FigureStatistics;
-import binspan.study.ParameterSpread;
-import binspan.study.RequirementShare;
-import binspan.study.SpreadDistribution;
-import binspan.study.ToleranceResult;
+import binspan.study.tolerance.BuildShare;
+import binspan.study.tolerance.FailureDriver;
+import binspan.study.tolerance.FigureStatistics;
+import binspan.study.tolerance.ParameterSpread;
+import binspan.study.tolerance.RequirementShare;
+import binspan.study.tolerance.SpreadDistribution;
+import binspan.study.tolerance.ToleranceResult;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;

@@ -7,8 +7,8 @@ import binspan.planner.plot.RangeBar;
 import binspan.planner.plot.RangeBars;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
-import binspan.study.BoxSide;
-import binspan.study.OperatingBox;
+import binspan.study.box.BoxSide;
+import binspan.study.box.OperatingBox;
 import java.util.ArrayList;
 import java.util.List;
 

@@ -8,7 +8,7 @@ import binspan.planner.plot.RankedBars;
 import binspan.planner.plot.RequirementLine;
 import binspan.planner.report.FigureText;
 import binspan.prediction.Requirement;
-import binspan.study.Comparison;
+import binspan.study.comparison.Comparison;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;

@@ -9,8 +9,8 @@ import binspan.planner.plot.Picture;
 import binspan.planner.plot.Point;
 import binspan.planner.plot.Series;
 import binspan.scenario.LinkLength;
-import binspan.study.Reach;
 import binspan.study.StudyTable;
+import binspan.study.tuning.Reach;
 import java.util.ArrayList;
 import java.util.List;
 

@@ -14,11 +14,11 @@ import binspan.scenario.Scenario;
 import binspan.study.Execution;
 import binspan.study.FigureColumn;
 import binspan.study.FigureColumns;
-import binspan.study.MapLine;
-import binspan.study.OperatingRegion;
-import binspan.study.RegionMap;
 import binspan.study.StudyTable;
 import binspan.study.Sweep;
+import binspan.study.region.MapLine;
+import binspan.study.region.OperatingRegion;
+import binspan.study.region.RegionMap;
 import java.util.ArrayList;
 import java.util.List;
 

@@ -15,7 +15,7 @@ import binspan.study.FigureColumn;
 import binspan.study.FigureColumns;
 import binspan.study.StudyTable;
 import binspan.study.Sweep;
-import binspan.study.Tuning;
+import binspan.study.tuning.Tuning;
 import java.util.ArrayList;
 import java.util.List;
 

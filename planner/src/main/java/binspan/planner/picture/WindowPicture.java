@@ -13,9 +13,9 @@ import binspan.scenario.Scenario;
 import binspan.study.Execution;
 import binspan.study.FigureColumn;
 import binspan.study.FigureColumns;
-import binspan.study.OperatingIntervals;
 import binspan.study.StudyTable;
 import binspan.study.Sweep;
+import binspan.study.window.OperatingIntervals;
 import java.util.ArrayList;
 import java.util.List;
 

@@ -5,11 +5,11 @@ import static binspan.planner.report.TextPage.right;
 
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
-import binspan.study.BindingPoint;
-import binspan.study.BoxSide;
-import binspan.study.OperatingBox;
-import binspan.study.ToleranceBox;
-import binspan.study.WindowEnd;
+import binspan.study.box.BindingPoint;
+import binspan.study.box.BoxSide;
+import binspan.study.box.OperatingBox;
+import binspan.study.box.ToleranceBox;
+import binspan.study.window.WindowEnd;
 import java.util.List;
 
 /** The largest tolerance box for a person: what goes into a specification. */

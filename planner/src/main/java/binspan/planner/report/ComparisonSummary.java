@@ -8,7 +8,7 @@ import binspan.prediction.LinkCheck;
 import binspan.prediction.LinkPrediction;
 import binspan.prediction.Requirement;
 import binspan.prediction.RequirementMargins;
-import binspan.study.Comparison;
+import binspan.study.comparison.Comparison;
 import java.util.ArrayList;
 import java.util.List;
 

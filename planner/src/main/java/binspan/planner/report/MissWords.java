@@ -6,8 +6,8 @@ import binspan.prediction.LinkPrediction;
 import binspan.prediction.Requirement;
 import binspan.prediction.RequirementMargins;
 import binspan.study.Axis;
-import binspan.study.PointVerdict;
-import binspan.study.RequirementMargin;
+import binspan.study.window.PointVerdict;
+import binspan.study.window.RequirementMargin;
 import java.util.List;
 
 /** How far a link is from the requirement that it violates most. */

@@ -5,9 +5,9 @@ import static binspan.planner.report.TextPage.right;
 
 import binspan.scenario.LinkLength;
 import binspan.study.Axis;
-import binspan.study.Reach;
-import binspan.study.SourcePosition;
 import binspan.study.StudyTable;
+import binspan.study.tuning.Reach;
+import binspan.study.tuning.SourcePosition;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;

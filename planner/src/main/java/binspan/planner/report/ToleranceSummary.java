@@ -3,14 +3,14 @@ package binspan.planner.report;
 import static binspan.planner.report.TextPage.left;
 import static binspan.planner.report.TextPage.right;
 
-import binspan.study.BuildShare;
-import binspan.study.FailureDriver;
-import binspan.study.FigureStatistics;
-import binspan.study.FirstOrderIndex;
-import binspan.study.ParameterSpread;
-import binspan.study.RequirementShare;
-import binspan.study.SpreadDistribution;
-import binspan.study.ToleranceResult;
+import binspan.study.tolerance.BuildShare;
+import binspan.study.tolerance.FailureDriver;
+import binspan.study.tolerance.FigureStatistics;
+import binspan.study.tolerance.FirstOrderIndex;
+import binspan.study.tolerance.ParameterSpread;
+import binspan.study.tolerance.RequirementShare;
+import binspan.study.tolerance.SpreadDistribution;
+import binspan.study.tolerance.ToleranceResult;
 import binspan.units.Digits;
 import java.util.List;
 

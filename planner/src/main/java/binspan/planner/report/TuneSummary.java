@@ -8,8 +8,8 @@ import binspan.prediction.LinkPrediction;
 import binspan.prediction.Requirement;
 import binspan.scenario.Range;
 import binspan.study.Axis;
-import binspan.study.Objective;
-import binspan.study.Tuning;
+import binspan.study.tuning.Objective;
+import binspan.study.tuning.Tuning;
 import java.util.List;
 
 /** What tuning tells a person: the best settings, what they gain, and how each requirement fares. */

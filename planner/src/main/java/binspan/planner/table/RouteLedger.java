@@ -2,7 +2,7 @@ package binspan.planner.table;
 
 import binspan.prediction.FiniteKeyOutlook;
 import binspan.study.FigureColumn;
-import binspan.study.RouteSurvey;
+import binspan.study.comparison.RouteSurvey;
 import java.io.BufferedOutputStream;
 import java.io.ByteArrayInputStream;
 import java.io.ByteArrayOutputStream;

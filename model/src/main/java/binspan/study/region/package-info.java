@@ -1,0 +1,2 @@
+/** Operating regions of two parameters: contours, border, area. */
+package binspan.study.region;
