@@ -2,6 +2,8 @@ package binspan.prediction;
 
 import binspan.scenario.Requirements;
 import binspan.units.Scale;
+import java.util.Arrays;
+import java.util.List;
 import java.util.OptionalDouble;
 import java.util.function.Function;
 
@@ -14,10 +16,16 @@ public enum Requirement {
     KEY_RATE("keyRateAtLeastBps", "bit/s", true, Requirements::keyRateAtLeastBps),
     CAR("carAtLeast", "", true, Requirements::carAtLeast),
     FIRST_KEY("firstKeyWithinHours", "h", false, Requirements::firstKeyWithinHours),
-    FIVE_SIGMA("fiveSigmaWithinHours", "h", false, Requirements::fiveSigmaWithinHours);
+    FIVE_SIGMA("fiveSigmaWithinHours", "h", false, Requirements::fiveSigmaWithinHours),
+
+    /** What no scenario states and every search keeps to: that the slots fit, see {@link SlotFit}. */
+    SLOTS("slots", "", true, require -> OptionalDouble.empty());
 
     /** Standard errors of a convincing violation. */
     public static final double FIVE = 5.0;
+
+    private static final List<Requirement> STATEABLE =
+            Arrays.stream(values()).filter(each -> each != SLOTS).toList();
 
     private final String fieldName;
     private final String unit;
@@ -29,6 +37,11 @@ public enum Requirement {
         this.unit = unit;
         this.atLeast = atLeast;
         this.stated = stated;
+    }
+
+    /** Those that a scenario can state, in their order. */
+    public static List<Requirement> stateable() {
+        return STATEABLE;
     }
 
     /** Name of the requirement in the scenario file. */
@@ -67,6 +80,7 @@ public enum Requirement {
             case KEY_RATE -> p.key().asymptoticPerSecond();
             case CAR -> p.fringe().car();
             case FIRST_KEY -> finite.secondsToFirstKey() / Scale.HOUR;
+            case SLOTS -> Math.exp(SlotFit.room(p.scenario()));
             case FIVE_SIGMA -> p.bell().secondsTo(FIVE) / p.uptimeShare() / Scale.HOUR;
         };
     }

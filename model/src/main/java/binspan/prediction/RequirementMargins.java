@@ -5,6 +5,7 @@ import binspan.merit.SecretKey;
 import binspan.scenario.Requirements;
 import binspan.units.Scale;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -34,7 +35,7 @@ public final class RequirementMargins {
     /** The margins of all stated requirements. */
     public static RequirementMargins of(Requirements require) {
         List<Requirement> stated = new ArrayList<>();
-        for (Requirement requirement : Requirement.values()) {
+        for (Requirement requirement : Requirement.stateable()) {
             if (requirement.required(require).isPresent()) {
                 stated.add(requirement);
             }
@@ -44,6 +45,15 @@ public final class RequirementMargins {
                 stated.stream()
                         .mapToDouble(each -> each.required(require).orElseThrow())
                         .toArray());
+    }
+
+    /** The same with the fit of the slots as one more, last. */
+    public RequirementMargins withSlots() {
+        List<Requirement> more = new ArrayList<>(requirements);
+        more.add(Requirement.SLOTS);
+        double[] figures = Arrays.copyOf(required, more.size());
+        figures[required.length] = 1.0;
+        return new RequirementMargins(more, figures);
     }
 
     /** The margins of those requirements that an outcome meets. */

@@ -19,7 +19,7 @@ public record RequirementOutcome(
     /** All stated requirements in their fixed order. */
     static List<RequirementOutcome> all(LinkPrediction prediction, FiniteKeyOutlook finite) {
         List<RequirementOutcome> outcomes = new ArrayList<>();
-        for (Requirement requirement : Requirement.values()) {
+        for (Requirement requirement : Requirement.stateable()) {
             OptionalDouble required = requirement.required(prediction.scenario().require());
             if (required.isPresent()) {
                 outcomes.add(of(requirement, required.getAsDouble(), requirement.predicted(prediction, finite)));

@@ -127,7 +127,7 @@ final class HeadroomPropertiesTest {
                 number % 20 == 0 ? RandomScenarios.everyday(number) : RandomScenarios.everydayGaussian(number);
         LinkCheck check = RandomChecks.check(scenario);
         SplittableRandom random = new SplittableRandom(number);
-        for (Requirement requirement : Requirement.values()) {
+        for (Requirement requirement : Requirement.stateable()) {
             double predicted = requirement.predicted(check.prediction(), check.finite());
             double eased = random.nextDouble(0.02, 0.6);
             double required = requirement.atLeast() ? predicted / (1.0 + eased) : predicted * (1.0 + eased);

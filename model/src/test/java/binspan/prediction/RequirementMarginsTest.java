@@ -47,7 +47,7 @@ final class RequirementMarginsTest {
 
     /** Along a growing length no margin jumps, not even where the key or the violation ends. */
     @ParameterizedTest
-    @EnumSource(Requirement.class)
+    @EnumSource(value = Requirement.class, mode = EnumSource.Mode.EXCLUDE, names = "SLOTS")
     void fallsWithoutSteps(Requirement requirement) {
         Scenario scenario = SampleScenarios.build(SampleScenarios.pulsePair());
         double required =

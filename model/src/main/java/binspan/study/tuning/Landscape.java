@@ -1,8 +1,8 @@
 package binspan.study.tuning;
 
 import binspan.prediction.LinkPrediction;
+import binspan.prediction.SlotFit;
 import binspan.study.Axis;
-import binspan.study.ModelLimits;
 import binspan.study.PointEvaluator;
 import java.util.List;
 
@@ -61,7 +61,7 @@ final class Landscape {
         this.axes = axes;
         this.objective = objective;
         this.weight = weight;
-        this.allowedRoom = Math.min(0.0, ModelLimits.room(evaluator.base()));
+        this.allowedRoom = Math.min(0.0, SlotFit.room(evaluator.base()));
         this.values = new double[axes.size()];
     }
 
@@ -72,7 +72,7 @@ final class Landscape {
             values[i] = axes.get(i).at(Math.max(0.0, Math.min(1.0, point[i])));
         }
         LinkPrediction prediction = evaluator.at(values);
-        double room = ModelLimits.room(prediction.scenario()) - allowedRoom;
+        double room = SlotFit.room(prediction.scenario()) - allowedRoom;
         double least = Math.min(room, evaluator.margins().least(prediction));
         double merit = objective.merit(prediction, evaluator.margins());
         Candidate candidate = new Candidate(point, merit, least);

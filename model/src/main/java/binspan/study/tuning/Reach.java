@@ -79,7 +79,7 @@ public record Reach(Scenario scenario, List<Axis> free, Objective objective, Lis
         List<Goal> goals = new ArrayList<>();
         goals.add(timed(Requirement.FIRST_KEY));
         goals.add(timed(Requirement.FIVE_SIGMA));
-        for (Requirement requirement : Requirement.values()) {
+        for (Requirement requirement : Requirement.stateable()) {
             OptionalDouble required = requirement.required(scenario.require());
             if (required.isPresent() && requirement != Requirement.FIRST_KEY && requirement != Requirement.FIVE_SIGMA) {
                 goals.add(new Goal(requirement, required.getAsDouble(), true));

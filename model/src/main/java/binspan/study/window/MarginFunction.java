@@ -3,6 +3,7 @@ package binspan.study.window;
 import binspan.prediction.LinkPrediction;
 import binspan.prediction.LinkPredictor;
 import binspan.prediction.RequirementMargins;
+import binspan.prediction.SlotFit;
 import binspan.scenario.Field;
 import binspan.scenario.FieldParameter;
 import binspan.scenario.Parameter;
@@ -17,7 +18,7 @@ import java.util.List;
 import java.util.stream.IntStream;
 
 /**
- * The margins of all stated requirements over some axes, for one thread. Places are shares of the way along each axis, in its own linear or logarithmic
+ * The margins of all stated requirements, and of the fit of the slots if they fit as written, over some axes, for one thread. Places are shares of the way along each axis, in its own linear or logarithmic
  * scale: 0 is its first value, 1 its last.
  */
 public final class MarginFunction {
@@ -36,9 +37,12 @@ public final class MarginFunction {
                 .sorted(Comparator.comparingInt(i -> -effort(scenario, axes.get(i))))
                 .mapToInt(Integer::intValue)
                 .toArray();
+        RequirementMargins stated = RequirementMargins.of(scenario.require());
+        boolean fits = SlotFit.room(scenario) >= 0.0;
         this.evaluator = new PointEvaluator(
                 scenario,
-                Arrays.stream(order).mapToObj(i -> axes.get(i).parameter()).toList());
+                Arrays.stream(order).mapToObj(i -> axes.get(i).parameter()).toList(),
+                fits ? stated.withSlots() : stated);
         this.margins = evaluator.margins();
         this.values = new double[axes.size()];
     }

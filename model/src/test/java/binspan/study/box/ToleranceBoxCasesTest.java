@@ -88,7 +88,8 @@ final class ToleranceBoxCasesTest {
     private static double cornerTolerance(double pairs, double width) {
         double good = 0.0;
         double bad = 1.0;
-        PointEvaluator evaluator = new PointEvaluator(PAIR, List.of(PAIRS.parameter(), WIDTH.parameter()));
+        PointEvaluator evaluator =
+                new PointEvaluator(PAIR, List.of(PAIRS.parameter(), WIDTH.parameter()), WindowLinks.margins(PAIR));
         for (int i = 0; i < 12; i++) {
             double t = (good + bad) / 2.0;
             boolean inside = pairs * (1.0 - t) >= PAIRS.from()

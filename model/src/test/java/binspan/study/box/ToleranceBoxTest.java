@@ -148,7 +148,8 @@ final class ToleranceBoxTest {
         int side = 500;
         boolean[][] holds = new boolean[side + 1][];
         IntStream.rangeClosed(0, side).parallel().forEach(i -> {
-            PointEvaluator evaluator = new PointEvaluator(PAIR, List.of(first.parameter(), second.parameter()));
+            PointEvaluator evaluator =
+                    new PointEvaluator(PAIR, List.of(first.parameter(), second.parameter()), WindowLinks.margins(PAIR));
             holds[i] = new boolean[side + 1];
             for (int j = 0; j <= side; j++) {
                 holds[i][j] = evaluator.leastMargin(first.at((double) i / side), second.at((double) j / side)) >= 0.0;

@@ -5,6 +5,7 @@ import binspan.study.Axis;
 import binspan.study.Execution;
 import binspan.study.PointEvaluator;
 import binspan.study.Progress;
+import binspan.study.window.WindowLinks;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.apache.commons.math3.random.SobolSequenceGenerator;
@@ -41,8 +42,10 @@ record RegionCase(String name, Scenario scenario, Axis horizontal, Axis vertical
                 .mapToObj(part -> {
                     SobolSequenceGenerator sequence = new SobolSequenceGenerator(2);
                     sequence.skipTo(part * portion);
-                    PointEvaluator evaluator =
-                            new PointEvaluator(scenario, List.of(horizontal.parameter(), vertical.parameter()));
+                    PointEvaluator evaluator = new PointEvaluator(
+                            scenario,
+                            List.of(horizontal.parameter(), vertical.parameter()),
+                            WindowLinks.margins(scenario));
                     double[] sum = new double[2];
                     for (int i = 0; i < portion; i++) {
                         double[] place = sequence.nextVector();

@@ -85,9 +85,9 @@ final class RegionShapesTest {
     /** The key rate has one highest point over mean pairs and window: required a hair less, an island smaller than a cell remains. */
     @Test
     void islandSmallerThanACellIsFoundAndMeasured() {
-        Scenario open = WindowLinks.requiring(SampleScenarios.pulsePair(), "keyRateAtLeastBps", 1.0);
+        Scenario open = WindowLinks.requiring(SampleScenarios.pulsePair(), "keyRateAtLeastBps", 1e6);
         RegionCase whole = island(open);
-        double largest = Math.exp(whole.run().best().leastMargin());
+        double largest = 1e6 * Math.exp(whole.run().best().leastMargin());
         Scenario scenario =
                 WindowLinks.requiring(SampleScenarios.pulsePair(), "keyRateAtLeastBps", largest * (1.0 - 1e-6));
         RegionCase each = island(scenario);

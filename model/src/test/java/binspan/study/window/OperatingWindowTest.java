@@ -162,7 +162,7 @@ final class OperatingWindowTest {
         Scenario scenario = WindowLinks.pulsePair();
         Axis axis = WindowLinks.axis(scenario, "source.meanPairsPerCycle", 1e-4, 1.0, true);
         OperatingIntervals found = run(scenario, axis);
-        assertThat(found.requirements()).hasSize(5);
+        assertThat(found.requirements()).hasSize(6);
         for (RequirementIntervals each : found.requirements()) {
             for (RequirementIntervals.HeldInterval interval : each.intervals()) {
                 for (double end : new double[] {interval.from(), interval.to()}) {
@@ -265,6 +265,8 @@ final class OperatingWindowTest {
 
     private static Values warm(double temperatureRmsMilliK) {
         Values stated = SampleScenarios.pulsePair();
+        SampleScenarios.part(stated, "source.pump").put("repetitionRateMHz", 20.0);
+        SampleScenarios.part(stated, "timing").put("windowWidthPs", 100.0);
         for (String side : List.of("alice", "bob")) {
             SampleScenarios.part(stated, side + ".analyzer").put("temperatureRmsMilliK", temperatureRmsMilliK);
         }
@@ -320,7 +322,8 @@ final class OperatingWindowTest {
         assertThat(curves.value(curves.size() - 1)).isEqualTo(1000.0);
         for (int i = 0; i < curves.size(); i += 512) {
             assertThat(curves.least(i)).isEqualTo(WindowLinks.least(scenario, new Axis[] {axis}, curves.value(i)));
-            assertThat(curves.least(i)).isEqualTo(Math.min(curves.margin(0, i), curves.margin(1, i)));
+            assertThat(curves.least(i))
+                    .isEqualTo(Math.min(curves.margin(0, i), Math.min(curves.margin(1, i), curves.margin(2, i))));
         }
     }
 

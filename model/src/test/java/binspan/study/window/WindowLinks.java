@@ -5,6 +5,7 @@ import binspan.prediction.LinkPredictor;
 import binspan.prediction.RandomScenarios;
 import binspan.prediction.Requirement;
 import binspan.prediction.RequirementMargins;
+import binspan.prediction.SlotFit;
 import binspan.scenario.Parameter;
 import binspan.scenario.ParameterPaths;
 import binspan.scenario.SampleScenarios;
@@ -54,7 +55,7 @@ public final class WindowLinks {
         Scenario scenario = RandomScenarios.everydayGaussian(number);
         LinkPrediction prediction = LinkPredictor.predict(scenario);
         SplittableRandom random = new SplittableRandom(number);
-        for (Requirement requirement : Requirement.values()) {
+        for (Requirement requirement : Requirement.stateable()) {
             double eased = 1.0 + random.nextDouble(0.02, 0.6);
             double predicted = RequirementMargins.of(List.of(requirement), 1.0).predicted(0, prediction);
             double required = requirement.atLeast() ? predicted / eased : predicted * eased;
@@ -82,12 +83,18 @@ public final class WindowLinks {
 
     /** The least margin at values of some axes. */
     public static double least(Scenario scenario, Axis[] axes, double... values) {
-        return RequirementMargins.of(scenario.require()).least(prediction(scenario, axes, values));
+        return margins(scenario).least(prediction(scenario, axes, values));
+    }
+
+    /** The stated requirements and, where the slots fit as written, that they go on to. */
+    public static RequirementMargins margins(Scenario scenario) {
+        RequirementMargins stated = RequirementMargins.of(scenario.require());
+        return SlotFit.room(scenario) >= 0.0 ? stated.withSlots() : stated;
     }
 
     /** The margin of one requirement at values of some axes. */
     public static double margin(Scenario scenario, Requirement requirement, Axis[] axes, double... values) {
-        RequirementMargins margins = RequirementMargins.of(scenario.require());
+        RequirementMargins margins = margins(scenario);
         return margins.margin(margins.requirements().indexOf(requirement), prediction(scenario, axes, values));
     }
 

@@ -9,7 +9,6 @@ import binspan.planner.table.TableJson;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.FigureColumns;
-import binspan.study.ModelLimits;
 import binspan.study.PointTable;
 import binspan.study.StudyTable;
 import binspan.study.window.OperatingInterval;
@@ -72,16 +71,6 @@ final class WindowReports {
             entry.put("toEndedBy", name(window.to()));
             entry.put("best", window.best().values().get(0));
             entry.put("leastMargin", window.best().leastMargin());
-            ModelLimits.within(
-                            scenario,
-                            found.axis(),
-                            window.from().value(),
-                            window.best().values().get(0),
-                            window.to().value())
-                    .ifPresent(slots -> {
-                        entry.put("slotsHoldFrom", slots.from());
-                        entry.put("slotsHoldTo", slots.to());
-                    });
             windows.add(entry);
         }
         description.put("windows", windows);

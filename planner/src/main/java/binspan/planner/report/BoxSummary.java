@@ -3,6 +3,7 @@ package binspan.planner.report;
 import static binspan.planner.report.TextPage.left;
 import static binspan.planner.report.TextPage.right;
 
+import binspan.prediction.Requirement;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.box.BindingPoint;
@@ -75,7 +76,9 @@ public final class BoxSummary {
     private static String end(WindowEnd end) {
         return end.requirement().isEmpty()
                 ? "the range ends, or the other sides' sizes hold it"
-                : "the " + RequirementWords.name(end.requirement().get()) + " fails at some point beyond";
+                : end.requirement().get() == Requirement.SLOTS
+                        ? SlotWords.END
+                        : "the " + RequirementWords.name(end.requirement().get()) + " fails at some point beyond";
     }
 
     private void binding() {

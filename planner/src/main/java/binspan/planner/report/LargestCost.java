@@ -46,6 +46,7 @@ final class LargestCost {
             case CHSH, PHASE_QBER -> visibility(p.coherence().phaseOffset());
             case TIME_QBER -> p.counts().hasTimeBasis() ? outerSlots() : "Only a pulse pair has a time basis.";
             case CAR -> accidentals();
+            case SLOTS -> SlotWords.UNFIT;
             case KEY_RATE -> key(p.scenario().require().keyRateAtLeastBps().orElse(0.0));
             case FIRST_KEY -> key(0.0);
             case FIVE_SIGMA ->

@@ -32,6 +32,9 @@ public final class MissWords {
     }
 
     private static String of(Requirement requirement, double required, double predicted) {
+        if (requirement == Requirement.SLOTS) {
+            return SlotWords.END;
+        }
         String value = Double.isFinite(predicted)
                 ? "is " + RequirementWords.predicted(requirement, predicted, required)
                 : "cannot be had at all";

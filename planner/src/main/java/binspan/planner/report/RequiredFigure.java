@@ -16,7 +16,7 @@ public record RequiredFigure(Requirement requirement, double required) {
     /** The stated requirements in their fixed order. */
     public static List<RequiredFigure> of(Requirements require) {
         List<RequiredFigure> stated = new ArrayList<>();
-        for (Requirement requirement : Requirement.values()) {
+        for (Requirement requirement : Requirement.stateable()) {
             requirement.required(require).ifPresent(value -> stated.add(new RequiredFigure(requirement, value)));
         }
         return stated;
@@ -51,6 +51,7 @@ public record RequiredFigure(Requirement requirement, double required) {
             case CAR -> "coincidence.car";
             case FIRST_KEY -> "key.secondsToFirstKey";
             case FIVE_SIGMA -> "bell.secondsToFiveSigma";
+            case SLOTS -> throw new IllegalArgumentException("the fit of the slots is no figure of a check");
         };
     }
 }

@@ -23,6 +23,7 @@ final class RequirementWords {
             case CAR -> "coincidences/accidentals";
             case FIRST_KEY -> "time to the first key";
             case FIVE_SIGMA -> "time to S > 2 by 5 sigma";
+            case SLOTS -> "fit of the slots";
         };
     }
 

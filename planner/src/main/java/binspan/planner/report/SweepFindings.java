@@ -26,7 +26,7 @@ final class SweepFindings {
     SweepFindings(StudyTable table, List<RequiredFigure> required) {
         this.table = table;
         this.required = required;
-        for (Requirement requirement : Requirement.values()) {
+        for (Requirement requirement : Requirement.stateable()) {
             columns.put(requirement, table.indexOf(RequiredFigure.figure(requirement)));
         }
     }

@@ -5,7 +5,6 @@ import static binspan.planner.report.TextPage.left;
 import binspan.prediction.Requirement;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
-import binspan.study.ModelLimits;
 import binspan.study.region.RegionMap;
 import binspan.study.window.OperatingInterval;
 import binspan.study.window.OperatingIntervals;
@@ -15,7 +14,6 @@ import binspan.study.window.RequirementMargin;
 import binspan.study.window.WindowEnd;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 
 /** Operating windows for a person: the intervals with what ends them, or the region of two parameters. */
 public final class WindowSummary {
@@ -24,9 +22,6 @@ public final class WindowSummary {
     private static final int DIGITS = 7;
     private static final int FEW_DIGITS = 4;
     private static final double PERCENT = 100.0;
-    private static final String OVERLAP =
-            "windows are wider than the separation, or three slots do not fit into a pump cycle, which the model leaves"
-                    + " out.";
 
     private final Scenario scenario;
     private final TextPage page;
@@ -65,7 +60,6 @@ public final class WindowSummary {
                     + value(axis, window.to().value(), DIGITS)));
             labelled("", "below: " + end(window.from()));
             labelled("", "above: " + end(window.to()));
-            slots(axis, window);
             labelled(
                     "",
                     "most room at " + value(axis, window.best().values().get(0), FEW_DIGITS) + ", "
@@ -77,22 +71,6 @@ public final class WindowSummary {
                     "  " + left(RequirementWords.name(each.requirement()), NAME),
                     " ".repeat(NAME + 2),
                     held(axis, each));
-        }
-    }
-
-    /** Says where slots that the model needs apart begin to overlap inside a window. */
-    private void slots(Axis axis, OperatingInterval window) {
-        double from = window.from().value();
-        double to = window.to().value();
-        double best = window.best().values().get(0);
-        Optional<ModelLimits.Interval> held = ModelLimits.within(scenario, axis, from, best, to);
-        if (held.isEmpty()) {
-            labelled("", "caution: " + OVERLAP);
-        } else if (held.get().from() > from || held.get().to() < to) {
-            labelled(
-                    "",
-                    "caution: keep to " + value(axis, held.get().from(), FEW_DIGITS) + " to "
-                            + value(axis, held.get().to(), FEW_DIGITS) + "; outside, " + OVERLAP);
         }
     }
 
@@ -126,9 +104,6 @@ public final class WindowSummary {
         }
         labelled("area", Figure.digits(map.area(), FEW_DIGITS, areaUnit(axes)));
         labelled("best", AxisWords.named(axes, point(map.best())) + "; " + room(map.best()));
-        if (overlapping(map)) {
-            labelled("caution", "on a part of this map " + OVERLAP);
-        }
         page.heading("Contours");
         for (RegionMap.RequirementContour contour : map.contours()) {
             String words = contour.lines().isEmpty()
@@ -136,20 +111,6 @@ public final class WindowSummary {
                     : contour.lines().size() + (contour.lines().size() == 1 ? " line" : " lines");
             page.row(RequirementWords.name(contour.requirement()), words);
         }
-    }
-
-    /** Whether slots overlap at a corner of the map. */
-    private boolean overlapping(RegionMap map) {
-        boolean overlapping = false;
-        for (double x : new double[] {map.horizontal().from(), map.horizontal().to()}) {
-            for (double y : new double[] {map.vertical().from(), map.vertical().to()}) {
-                Scenario corner = map.vertical()
-                        .parameter()
-                        .with(map.horizontal().parameter().with(scenario, x), y);
-                overlapping |= ModelLimits.room(corner) < 0.0;
-            }
-        }
-        return overlapping;
     }
 
     private static boolean holds(RegionMap map, Requirement requirement) {
@@ -176,7 +137,9 @@ public final class WindowSummary {
     static String end(WindowEnd end) {
         return end.requirement().isEmpty()
                 ? "the range ends; nothing fails yet"
-                : "the " + RequirementWords.name(end.requirement().get()) + " fails";
+                : end.requirement().get() == Requirement.SLOTS
+                        ? SlotWords.END
+                        : "the " + RequirementWords.name(end.requirement().get()) + " fails";
     }
 
     /** The room that the tightest requirement leaves. */
