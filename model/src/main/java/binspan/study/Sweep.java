@@ -36,8 +36,6 @@ public record Sweep(Scenario scenario, List<Axis> axes, List<FigureColumn> colum
                 scenario,
                 parameters(axes),
                 axes.stream().mapToDouble(Axis::from).toArray());
-        Variation.check(
-                scenario, parameters(axes), axes.stream().mapToDouble(Axis::to).toArray());
         double numbers =
                 axes.stream().mapToDouble(Axis::steps).reduce(1.0, (a, b) -> a * b) * (axes.size() + columns.size());
         if (numbers > MOST_NUMBERS) {

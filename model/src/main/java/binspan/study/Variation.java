@@ -1,5 +1,7 @@
 package binspan.study;
 
+import binspan.scenario.Field;
+import binspan.scenario.FieldParameter;
 import binspan.scenario.LinkLength;
 import binspan.scenario.Parameter;
 import binspan.scenario.Scenario;
@@ -97,6 +99,28 @@ public final class Variation {
                         + movers(scenario, parameters, values, i) + " as well; vary one of them");
             }
         }
+    }
+
+    /**
+     * The same for axes, tried at two points in which no two of them stand at the same share of their ways.
+     *
+     * @throws IllegalArgumentException likewise
+     */
+    public static void check(Scenario scenario, List<Axis> axes) {
+        List<Parameter> parameters = axes.stream().map(Axis::parameter).toList();
+        check(scenario, parameters, places(axes, 0));
+        check(scenario, parameters, places(axes, axes.size()));
+    }
+
+    private static double[] places(List<Axis> axes, int shift) {
+        double[] places = new double[axes.size()];
+        for (int i = 0; i < places.length; i++) {
+            Axis axis = axes.get(i);
+            boolean whole = axis.parameter() instanceof FieldParameter field
+                    && field.field().kind() == Field.Kind.COUNT;
+            places[i] = whole ? axis.from() : axis.at((i + 1.0 + shift) / (2.0 * places.length + 1.0));
+        }
+        return places;
     }
 
     /** Whether a parameter is at a value, everywhere in a scenario that it moves. */

@@ -16,7 +16,7 @@ import java.util.List;
  * Many candidate routes through one scenario as template; they are judged in batches, so that a table of any length streams through.
  *
  * @param template the link
- * @param tuned whether each route is tuned, for the natural objective, with the usual parameters
+ * @param tuned whether each route is tuned, for the largest least margin, with the usual parameters
  */
 public record RouteSurvey(Scenario template, boolean tuned) {
     /**
@@ -59,7 +59,9 @@ public record RouteSurvey(Scenario template, boolean tuned) {
         try {
             Scenario along = route.through(template);
             if (tuned) {
-                Objective objective = Objective.natural(evaluator.predicted(along));
+                Objective objective = evaluator.margins().requirements().isEmpty()
+                        ? Objective.natural(evaluator.predicted(along))
+                        : Objective.MARGIN;
                 along = Tuning.of(along, DefaultAxes.tuned(along), objective)
                         .quickly(execution)
                         .scenario();

@@ -14,6 +14,8 @@ import java.util.List;
  * same multiple of its width (where a range cuts off a part: to the same quantile).
  */
 public final class SpreadDistribution {
+    private static final double MOST_CUT = 0.5;
+
     private final Parameter parameter;
     private final List<PlacedSpread> places;
 
@@ -25,8 +27,8 @@ public final class SpreadDistribution {
     /**
      * The distribution of a spread in a scenario.
      *
-     * @throws IllegalArgumentException if the parameter cannot be varied there, is a whole number or a requirement, has no planned value, or has a planned
-     *     value of 0 and a relative spread
+     * @throws IllegalArgumentException if the parameter cannot be varied there, is a whole number or a requirement, has no planned value, has a planned
+     *     value of 0 and a relative spread, or if most of the spread lies outside the allowed range
      */
     static SpreadDistribution of(Scenario scenario, ParameterSpread spread) {
         Parameter parameter = spread.parameter();
@@ -61,7 +63,12 @@ public final class SpreadDistribution {
         if (spread.spread().relative() && planned == 0.0) {
             throw refused(parameter, "planned at 0, of which a relative spread is nothing; state an absolute one");
         }
-        return new PlacedSpread(parameter, spread.spread(), planned);
+        PlacedSpread placed = new PlacedSpread(parameter, spread.spread(), planned);
+        if (placed.cutShare() > MOST_CUT) {
+            throw refused(
+                    parameter, "most of its spread lies where the parameter is not allowed; state a narrower one");
+        }
+        return placed;
     }
 
     private static IllegalArgumentException refused(Parameter parameter, String reason) {

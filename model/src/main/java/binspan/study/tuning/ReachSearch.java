@@ -21,7 +21,13 @@ final class ReachSearch {
     /** Lengths that are tuned one after the other, each from the settings of the one before. */
     private static final int NEIGHBOURS = 8;
 
-    private static final double BEYOND = 1.12;
+    private static final double BEYOND = 1.05;
+
+    /** Twelve even steps between round lengths. */
+    private static final int ROWS = 12;
+
+    private static final double[] ROUND = {1.0, 1.5, 2.0, 2.5, 3.0, 4.0, 5.0, 6.0, 8.0, 10.0};
+
     private static final double LIMITS_SHARE = 0.6;
 
     private final Reach reach;
@@ -56,7 +62,7 @@ final class ReachSearch {
                         : table(
                                 reach.free(),
                                 farthest,
-                                all ? limits[goals.size()].retunedKm().orElse(-1.0) : farthest,
+                                all ? limits[goals.size()].retunedKm().orElse(-1.0) : Double.POSITIVE_INFINITY,
                                 execution.part(LIMITS_SHARE, 1.0)));
     }
 
@@ -68,14 +74,20 @@ final class ReachSearch {
         return new Reach.Limit(goal, asWritten, retuned);
     }
 
-    /** A little beyond the last limit. */
+    /** A little beyond the last limit, at a round length. */
     private double farthest(List<Reach.Limit> limits) {
         double farthest = length.value(reach.scenario()).orElseThrow();
         for (Reach.Limit limit : limits) {
             farthest = Math.max(farthest, limit.asWrittenKm().orElse(0.0));
             farthest = Math.max(farthest, limit.retunedKm().orElse(0.0));
         }
-        return Math.min(length.range().highest(), farthest * BEYOND);
+        double needed = farthest * BEYOND / ROWS;
+        double decade = Math.pow(10.0, Math.floor(Math.log10(needed)));
+        double step = 10.0 * decade;
+        for (double round : ROUND) {
+            step = round * decade >= needed ? Math.min(step, round * decade) : step;
+        }
+        return Math.min(length.range().highest(), step * ROWS);
     }
 
     /** Figures against the length; beyond the reach of all requirements the settings are those that violate them least. */

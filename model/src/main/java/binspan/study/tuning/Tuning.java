@@ -3,7 +3,6 @@ package binspan.study.tuning;
 import binspan.prediction.LinkPrediction;
 import binspan.prediction.LinkPredictor;
 import binspan.prediction.RequirementMargins;
-import binspan.scenario.Parameter;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.Execution;
@@ -34,11 +33,7 @@ public record Tuning(Scenario scenario, List<Axis> free, Objective objective, Re
         if (free.isEmpty() || free.size() > MOST_FREE) {
             throw new IllegalArgumentException("found " + free.size() + " free parameters; allowed 1 to " + MOST_FREE);
         }
-        List<Parameter> parameters = free.stream().map(Axis::parameter).toList();
-        Variation.check(
-                scenario, parameters, free.stream().mapToDouble(Axis::from).toArray());
-        Variation.check(
-                scenario, parameters, free.stream().mapToDouble(Axis::to).toArray());
+        Variation.check(scenario, free);
         if (objective == Objective.KEY && Objective.natural(LinkPredictor.predict(scenario)) != Objective.KEY) {
             throw new IllegalArgumentException("this link makes no key: both sides need both ports detected");
         }

@@ -6,7 +6,6 @@ import binspan.prediction.RequirementMargins;
 import binspan.prediction.SlotFit;
 import binspan.scenario.Field;
 import binspan.scenario.FieldParameter;
-import binspan.scenario.Parameter;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.PointEvaluator;
@@ -58,11 +57,7 @@ public final class MarginFunction {
                     "the scenario states no requirement; state at least one in its section \"require\"");
         }
         axes.forEach(MarginFunction::check);
-        List<Parameter> parameters = axes.stream().map(Axis::parameter).toList();
-        Variation.check(
-                scenario, parameters, axes.stream().mapToDouble(Axis::from).toArray());
-        Variation.check(
-                scenario, parameters, axes.stream().mapToDouble(Axis::to).toArray());
+        Variation.check(scenario, axes);
     }
 
     private static void check(Axis axis) {

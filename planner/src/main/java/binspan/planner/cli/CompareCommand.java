@@ -30,8 +30,9 @@ import picocli.CommandLine.Parameters;
         versionProvider = VersionLine.class,
         header = "Ranks links: with other detectors, fibres or elements.",
         customSynopsis = {
-            "binspan compare FILE --detectors CLASS[/CLASS],... | --fibres CLASS,... | --without LABEL",
-            "                       [--for OBJECTIVE] [--as-written] [--csv FILE] [--json FILE]",
+            "binspan compare FILE (--detectors CLASS[/CLASS],... |",
+            "                       --fibres CLASS,... | --without LABEL) [--for OBJECTIVE]",
+            "                       [--as-written] [--csv FILE] [--json FILE]",
             "                       [--plot FILE] [--force]",
             "binspan compare FILE FILE... [--for OBJECTIVE] ..."
         },

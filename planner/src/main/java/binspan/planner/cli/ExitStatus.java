@@ -2,6 +2,7 @@ package binspan.planner.cli;
 
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
+import binspan.planner.table.RouteReader;
 import binspan.planner.table.TableException;
 import java.io.PrintStream;
 
@@ -39,7 +40,8 @@ final class ExitStatus {
         }
         if (failure instanceof OutputFileException
                 || failure instanceof UsageException
-                || failure instanceof TableException) {
+                || failure instanceof TableException
+                || failure instanceof RouteReader.BrokenTableException) {
             err.println("binspan: " + failure.getMessage());
             return REFUSED;
         }

@@ -30,9 +30,9 @@ import picocli.CommandLine.Option;
         versionProvider = VersionLine.class,
         header = "Tells how far a link reaches.",
         customSynopsis = {
-            "binspan reach FILE [--source middle|alice|bob|SHARE] [--free PATH[=FROM:TO]] ...",
-            "                     [--for OBJECTIVE] [--as-written] [--csv FILE] [--json FILE]",
-            "                     [--plot FILE] [--force]"
+            "binspan reach FILE [--source middle|alice|bob|SHARE]",
+            "                     [--free PATH[=FROM:TO]] ... [--for OBJECTIVE] [--as-written]",
+            "                     [--csv FILE] [--json FILE] [--plot FILE] [--force]"
         },
         description = {
             "Scales all fibre in proportion and finds the greatest length at which each",

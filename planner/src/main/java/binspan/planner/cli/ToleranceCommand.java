@@ -27,9 +27,9 @@ import picocli.CommandLine.Option;
         versionProvider = VersionLine.class,
         header = "Tells how surely the built link meets its requirements.",
         customSynopsis = {
-            "binspan tolerance FILE [--spread PATH=SHAPE:WIDTH[%]] ... [--samples N] [--seed N]",
-            "                         [--show NAME,...] [--csv FILE] [--json FILE]",
-            "                         [--plot FILE] [--force]"
+            "binspan tolerance FILE [--spread PATH=SHAPE:WIDTH[%%]] ...",
+            "                         [--samples N] [--seed N] [--show NAME,...]",
+            "                         [--csv FILE] [--json FILE] [--plot FILE] [--force]"
         },
         description = {
             "Draws builds of the link from the spreads of its parameters: those of the",
@@ -42,7 +42,8 @@ import picocli.CommandLine.Option;
             "",
             "Examples:",
             "  binspan tolerance dam-to-town.json",
-            "  binspan tolerance dam-to-town.json --spread both.detectors.efficiency=normal:5% \\",
+            "  binspan tolerance dam-to-town.json \\",
+            "      --spread both.detectors.efficiency=normal:5%% \\",
             "      --spread timing.cableTemperatureStepK=uniform:0.5 --samples 65536",
             "  binspan tolerance dam-to-town.json --csv builds.csv --plot tolerance.png",
             "",
@@ -96,8 +97,10 @@ final class ToleranceCommand implements Callable<Integer> {
         List<FigureColumn> columns = show.isEmpty()
                 ? FigureColumns.all(scenario)
                 : UsageException.unless("--show", () -> FigureColumns.named(scenario, show));
+        boolean counted = samples >= Tolerance.FEWEST_SAMPLES && samples <= Tolerance.MOST_SAMPLES;
         Tolerance tolerance = UsageException.unless(
-                SPREAD, () -> new Tolerance(scenario, ParameterSpread.of(scenario, more), samples, seed, columns));
+                counted ? SPREAD : "--samples",
+                () -> new Tolerance(scenario, ParameterSpread.of(scenario, more), samples, seed, columns));
         ToleranceResult result = ProgressBar.during(console, tolerance::run);
         output.deliver(
                 new StudyReport(

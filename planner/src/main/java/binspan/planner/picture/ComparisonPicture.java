@@ -37,12 +37,14 @@ public final class ComparisonPicture {
                 "",
                 Requirement.RAW_VISIBILITY,
                 e -> e.prediction().fringe().raw()));
-        panels.add(panel(
-                entries,
-                "Reach of all requirements",
-                "km",
-                null,
-                e -> e.reachKm().orElse(Double.NaN)));
+        if (entries.stream().anyMatch(entry -> entry.tightest() != null)) {
+            panels.add(panel(
+                    entries,
+                    "Reach of all requirements",
+                    "km",
+                    null,
+                    e -> e.reachKm().orElse(Double.NaN)));
+        }
         return new Picture(title, "each tuned for itself; the best stands on top", new RankedBars("", labels, panels));
     }
 

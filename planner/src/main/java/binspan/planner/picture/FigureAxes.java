@@ -10,6 +10,7 @@ import binspan.study.StudyTable;
 final class FigureAxes {
     private static final double DECADE = 10.0;
     private static final double DEEPEST = 1e-6;
+    private static final double SHORTEST = 0.005;
 
     private FigureAxes() {}
 
@@ -35,7 +36,7 @@ final class FigureAxes {
         }
         String title = FigureWords.title(column);
         if (!FigureWords.spansDecades(column) || !(largest > DECADE * least)) {
-            return Axis.linear(title, column.unit());
+            return flat(Axis.linear(title, column.unit()), values);
         }
         Axis axis = Axis.logarithmic(title, column.unit());
         if (least >= DEEPEST * largest) {
@@ -44,6 +45,23 @@ final class FigureAxes {
         return column.field().name().contains("secondsTo")
                 ? axis.within(least / 2.0, least / DEEPEST)
                 : axis.within(DEEPEST * largest, 2.0 * largest);
+    }
+
+    /** An axis at least half a per cent long, so that no picture makes a mountain of rounding. */
+    private static Axis flat(Axis axis, double... values) {
+        double least = Double.POSITIVE_INFINITY;
+        double largest = Double.NEGATIVE_INFINITY;
+        for (double value : values) {
+            if (Double.isFinite(value)) {
+                least = Math.min(least, value);
+                largest = Math.max(largest, value);
+            }
+        }
+        double half = SHORTEST * Math.max(Math.abs(least), Math.abs(largest)) / 2.0;
+        double middle = (least + largest) / 2.0;
+        return half > 0.0 && Double.isFinite(half) && largest - least < 2.0 * half
+                ? axis.within(middle - half, middle + half)
+                : axis;
     }
 
     /** The axis of a column of a table. */

@@ -13,6 +13,7 @@ import binspan.planner.plot.RankedBars;
 import binspan.planner.plot.RequirementLine;
 import binspan.planner.report.FigureWords;
 import binspan.planner.report.ParameterWords;
+import binspan.planner.report.RequirementText;
 import binspan.study.FigureColumn;
 import binspan.study.StudyTable;
 import binspan.study.tolerance.FailureDriver;
@@ -47,8 +48,10 @@ public final class TolerancePicture {
         if (!result.requirements().isEmpty()) {
             parts.add(drivers(result));
         }
-        String share = Digits.significant(PERCENT * result.all().share(), 4) + " % of "
-                + result.study().samples() + " builds meet all requirements";
+        String share = result.requirements().isEmpty()
+                ? result.study().samples() + " builds"
+                : Digits.significant(PERCENT * result.all().share(), 4) + " % of "
+                        + result.study().samples() + " builds meet all requirements";
         return new Picture("Tolerance", result.study().scenario().name() + "; " + share, new PanelGroup("", 1, parts));
     }
 
@@ -120,6 +123,9 @@ public final class TolerancePicture {
         boolean failing = result.someFail();
         List<FailureDriver> drivers = result.drivers()
                 .subList(0, Math.min(MOST_DRIVERS, result.drivers().size()));
+        String judged = result.weakest()
+                .map(weakest -> "the margin of the " + RequirementText.name(weakest))
+                .orElse("the least margin");
         List<String> labels = drivers.stream()
                 .map(driver -> ParameterWords.name(driver.path()))
                 .toList();
@@ -129,8 +135,10 @@ public final class TolerancePicture {
             double index = PERCENT * Math.max(0.0, (failing ? driver.failure() : driver.margin()).share());
             indices.add(bar(index, Digits.decimals(Double.isNaN(index) ? 0.0 : index, 0) + " %"));
             correlations.add(bar(
-                    Math.abs(driver.correlation()),
-                    Double.isNaN(driver.correlation()) ? "none" : Digits.decimals(driver.correlation(), 2)));
+                    Math.abs(result.correlation(driver)),
+                    Double.isNaN(result.correlation(driver))
+                            ? "none"
+                            : Digits.decimals(result.correlation(driver), 2)));
         }
         String what =
                 failing ? "Variance of failing, explained alone" : "Variance of the least margin, explained alone";
@@ -140,7 +148,8 @@ public final class TolerancePicture {
                 List.of(
                         new BarPanel(Axis.linear(what, "%"), indices, Optional.empty()),
                         new BarPanel(
-                                Axis.linear("Rank correlation with the least margin, modulus", ""),
+                                Axis.linear("Rank correlation with " + judged + ", modulus", "")
+                                        .within(0.0, 1.0),
                                 correlations,
                                 Optional.empty())));
     }

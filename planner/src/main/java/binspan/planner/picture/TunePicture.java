@@ -8,6 +8,7 @@ import binspan.planner.plot.PanelGroup;
 import binspan.planner.plot.Picture;
 import binspan.planner.plot.Point;
 import binspan.planner.plot.Series;
+import binspan.planner.report.RequiredFigure;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.Execution;
@@ -17,7 +18,9 @@ import binspan.study.StudyTable;
 import binspan.study.Sweep;
 import binspan.study.tuning.Tuning;
 import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Set;
 
 /** Tuned settings: key and visibility along each free parameter through the best point, the others held there. */
 public final class TunePicture {
@@ -42,7 +45,7 @@ public final class TunePicture {
         Axis free = tuning.free().get(index);
         Axis axis = new Axis(free.parameter(), free.from(), free.to(), STEPS, free.logarithmic());
         Scenario best = outcome.scenario();
-        StudyTable table = new Sweep(best, List.of(axis), shown(best)).run(Execution.SINGLE);
+        StudyTable table = new Sweep(best, List.of(axis), shown(tuning, outcome)).run(Execution.SINGLE);
         List<CurvePanel> panels = new ArrayList<>();
         for (int column = 0; column < table.columns().size(); column++) {
             List<Point> points = new ArrayList<>();
@@ -57,12 +60,22 @@ public final class TunePicture {
         return new Curves("", FigureAxes.of(axis), panels, MetRows.of(table), marks(tuning, outcome, index));
     }
 
-    private static List<FigureColumn> shown(Scenario scenario) {
-        List<String> names = new ArrayList<>(List.of("visibility.raw"));
+    /** Key and visibility, and the figure of the requirement that leaves least room. */
+    private static List<FigureColumn> shown(Tuning tuning, Tuning.Outcome outcome) {
+        Scenario scenario = outcome.scenario();
+        Set<String> names = new LinkedHashSet<>();
         boolean key = FigureColumns.all(scenario).stream()
                 .anyMatch(column -> column.name().equals("key.asymptoticBps"));
-        names.add(0, key ? "key.asymptoticBps" : "bell.chsh");
-        return FigureColumns.named(scenario, names);
+        names.add(key ? "key.asymptoticBps" : "bell.chsh");
+        names.add("visibility.raw");
+        if (!tuning.margins().requirements().isEmpty()) {
+            int tightest = tuning.margins().tightest(outcome.prediction());
+            names.add(new RequiredFigure(
+                            tuning.margins().requirements().get(tightest),
+                            tuning.margins().required(tightest))
+                    .figure());
+        }
+        return FigureColumns.named(scenario, List.copyOf(names));
     }
 
     private static List<Mark> marks(Tuning tuning, Tuning.Outcome outcome, int index) {

@@ -15,26 +15,29 @@ import java.util.List;
 
 /** The largest tolerance box for a person: what goes into a specification. */
 public final class BoxSummary {
-    private static final int NAME = 36;
+    private static final int NAME = 27;
     private static final int NUMBER = 13;
     private static final int DIGITS = 5;
     private static final int FEW_DIGITS = 4;
     private static final double NOTHING = 1e-4;
 
+    private final Scenario scenario;
     private final OperatingBox box;
     private final TextPage page;
 
-    private BoxSummary(OperatingBox box, TextStyle style) {
+    private BoxSummary(Scenario scenario, OperatingBox box, TextStyle style) {
+        this.scenario = scenario;
         this.box = box;
         this.page = new TextPage(style);
     }
 
     /** The summary as a text that ends with a line break. */
     public static String text(Scenario scenario, OperatingBox box, TextStyle style) {
-        BoxSummary summary = new BoxSummary(box, style);
+        BoxSummary summary = new BoxSummary(scenario, box, style);
         summary.page.wrapped(style.clean(scenario.name()));
         summary.answer();
         summary.sides();
+        summary.outside();
         summary.binding();
         return summary.page.toString();
     }
@@ -53,7 +56,8 @@ public final class BoxSummary {
                 .strong(left("Parameter", NAME)
                         + right("from", NUMBER)
                         + right("to", NUMBER)
-                        + right("middle", NUMBER)));
+                        + right("middle", NUMBER)
+                        + right("planned", NUMBER)));
         for (BoxSide side : box.sides()) {
             Axis axis = side.axis();
             String name = page.style().clean(axis.parameter().path());
@@ -67,9 +71,34 @@ public final class BoxSummary {
             page.line(left(name, NAME)
                     + right(WindowSummary.value(axis, side.from().value(), FEW_DIGITS), NUMBER)
                     + right(WindowSummary.value(axis, side.to().value(), FEW_DIGITS), NUMBER)
-                    + right(WindowSummary.value(axis, middle, FEW_DIGITS), NUMBER));
+                    + right(WindowSummary.value(axis, middle, FEW_DIGITS), NUMBER)
+                    + right(planned(axis), NUMBER));
             page.wrapped("    below: ", "           ", end(side.from()));
             page.wrapped("    above: ", "           ", end(side.to()));
+        }
+    }
+
+    private String planned(Axis axis) {
+        double planned = axis.parameter().value(scenario).orElse(Double.NaN);
+        return Double.isNaN(planned) ? "computed" : WindowSummary.value(axis, planned, FEW_DIGITS);
+    }
+
+    /** Says where the link as written lies outside. */
+    private void outside() {
+        List<String> names = box.sides().stream()
+                .filter(side -> {
+                    double planned = side.axis()
+                            .parameter()
+                            .value(scenario)
+                            .orElse(side.from().value());
+                    return planned < side.from().value() || planned > side.to().value();
+                })
+                .map(side -> side.axis().parameter().path())
+                .toList();
+        if (!names.isEmpty()) {
+            page.wrapped(page.style()
+                    .clean("Outside the box as written: " + String.join(", ", names)
+                            + ". --centred keeps the box at the planned values."));
         }
     }
 

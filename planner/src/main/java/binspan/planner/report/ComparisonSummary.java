@@ -18,6 +18,7 @@ public final class ComparisonSummary {
     private static final int NUMBER = 12;
     private static final int FOUR = 4;
     private static final double NO_ROOM = 1e-4;
+    private static final double AT_LIMIT = 1e-6;
 
     private final List<Comparison.Entry> entries;
     private final TextPage page;
@@ -53,7 +54,9 @@ public final class ComparisonSummary {
         for (int i = 0; i < entries.size(); i++) {
             Comparison.Entry entry = entries.get(i);
             TextStyle style = page.style();
-            String sign = entry.meets() ? style.good(style.met()) : style.bad(style.notMet());
+            String sign = entry.tightest() == null
+                    ? " "
+                    : entry.meets() ? style.good(style.met()) : style.bad(style.notMet());
             page.line(left(i + 1 + ".", 3) + sign + " "
                     + left(style.clean(entry.option().name()), NAME)
                     + right(key(entry.prediction()), NUMBER)
@@ -117,7 +120,7 @@ public final class ComparisonSummary {
             double predicted = requirement.predicted(entry.prediction(), entry.finite());
             String value =
                     Double.isFinite(predicted) ? RequirementWords.predicted(requirement, predicted, required) : "none";
-            boolean met = margins.margin(i, entry.prediction()) >= 0.0;
+            boolean met = margins.margin(i, entry.prediction()) >= -AT_LIMIT;
             page.row(
                     RequirementWords.name(requirement),
                     value + ", required " + (requirement.atLeast() ? style.atLeast() : style.atMost()) + " "

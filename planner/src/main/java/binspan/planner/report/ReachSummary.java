@@ -16,7 +16,7 @@ import java.util.OptionalDouble;
 public final class ReachSummary {
     private static final int NAME = 26;
     private static final int NUMBER = 13;
-    private static final int ROWS = 12;
+    private static final int ROWS = 13;
     private static final double NOWHERE_KM = 0.0;
 
     private final Reach reach;
@@ -114,6 +114,10 @@ public final class ReachSummary {
         }
         if (outcome.all() != null) {
             line("all that are required", "", outcome.all());
+        }
+        if (tuned) {
+            page.wrapped("Re-tuned: each requirement at the settings that are best for it alone; the last line at"
+                    + " settings that meet all of them.");
         }
         if (assumed) {
             page.wrapped("The scenario does not state all of these hours; where it is silent, "

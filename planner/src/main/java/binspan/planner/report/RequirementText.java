@@ -12,4 +12,9 @@ public final class RequirementText {
                 + (requirement.atLeast() ? " \u2265 " : " \u2264 ")
                 + RequirementWords.required(requirement, required);
     }
+
+    /** Its name. */
+    public static String name(Requirement requirement) {
+        return RequirementWords.name(requirement);
+    }
 }

@@ -4,6 +4,7 @@ import static binspan.planner.report.TextPage.left;
 import static binspan.planner.report.TextPage.right;
 
 import binspan.prediction.Requirement;
+import binspan.prediction.SlotFit;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.FigureColumns;
@@ -55,6 +56,7 @@ public final class SweepSummary {
             summary.intervals();
             summary.room();
         }
+        summary.slots();
         summary.best();
         return summary.page.toString();
     }
@@ -134,6 +136,22 @@ public final class SweepSummary {
         return run.first() == run.last()
                 ? "at " + AxisWords.value(axis, table.varied(0, run.first()))
                 : "from " + AxisWords.range(axis, table.varied(0, run.first()), table.varied(0, run.last()));
+    }
+
+    /** Says where slots no longer fit at an end of the ranges. */
+    private void slots() {
+        boolean unfit = false;
+        for (int corner = 0; corner < 1 << axes.size(); corner++) {
+            Scenario at = scenario;
+            for (int i = 0; i < axes.size(); i++) {
+                Axis axis = axes.get(i);
+                at = axis.parameter().with(at, (corner >> i & 1) == 0 ? axis.from() : axis.to());
+            }
+            unfit |= SlotFit.room(at) < 0.0;
+        }
+        if (unfit) {
+            labelled("caution", "in a part of these ranges " + SlotWords.END + "; binspan window keeps clear of it.");
+        }
     }
 
     private void room() {

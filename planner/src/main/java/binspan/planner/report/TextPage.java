@@ -86,7 +86,9 @@ final class TextPage {
 
     /** A text filled with blanks to a width, its end cut off where it is longer. */
     static String left(String text, int width) {
-        return text.length() > width ? text.substring(0, width) : text + " ".repeat(width - text.length());
+        return text.length() > width
+                ? text.substring(0, Math.max(0, width - 3)) + "..."
+                : text + " ".repeat(width - text.length());
     }
 
     /** A text moved to the right of a column, at least one blank before it. */

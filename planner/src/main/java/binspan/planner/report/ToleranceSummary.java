@@ -156,17 +156,21 @@ public final class ToleranceSummary {
                 page.line(name);
                 name = "";
             }
-            page.line(left(name, PATH) + right(correlation(driver), NUMBER) + right(index(index), NUMBER));
+            page.line(left(name, PATH)
+                    + right(correlation(result.correlation(driver)), NUMBER)
+                    + right(index(index), NUMBER));
         }
-        page.wrapped("rank corr.: Spearman's, of the parameter with the least margin; "
+        String judged = result.weakest()
+                .map(weakest -> "the margin of the " + RequirementWords.name(weakest) + ", which fails most often")
+                .orElse("the least margin");
+        page.wrapped("rank corr.: Spearman's, of the parameter with " + judged + "; "
                 + (failing ? "of failure" : "of margin")
-                + ": share of the variance that the parameter explains by itself, with its error.");
+                + ": share of the variance that the parameter explains by itself, with its error; the rest comes from"
+                + " parameters acting together.");
     }
 
-    private static String correlation(FailureDriver driver) {
-        return Double.isNaN(driver.correlation())
-                ? "-"
-                : (driver.correlation() > 0.0 ? "+" : "") + Digits.decimals(driver.correlation(), 2);
+    private static String correlation(double correlation) {
+        return Double.isNaN(correlation) ? "-" : (correlation > 0.0 ? "+" : "") + Digits.decimals(correlation, 2);
     }
 
     private String index(FirstOrderIndex index) {

@@ -99,7 +99,7 @@ public final class TuneSummary {
     private String remark(Axis axis, double best) {
         double share = axis.share(best);
         if (share < AT_BOUND || share > 1.0 - AT_BOUND) {
-            return "  at the end of its range";
+            return "  at its range's end";
         }
         boolean kept = axis.parameter().value(tuning.scenario()).orElse(Double.NaN) == best;
         return kept ? "  kept: no gain" : "";

@@ -90,8 +90,8 @@ public final class WindowSummary {
     private void region(RegionMap map) {
         TextStyle style = page.style();
         String parts = map.parts() == 1 ? "one piece" : map.parts() + " separate pieces";
-        page.line(style.good(
-                style.met() + " All requirements hold on " + Figure.percent(map.share()) + " of the map, in " + parts));
+        page.line(style.good(style.met() + " All requirements hold on " + Figure.percent(map.share())
+                + " of the map as drawn, in " + parts));
         page.gap();
         List<Axis> axes = List.of(map.horizontal(), map.vertical());
         String label = "searched";

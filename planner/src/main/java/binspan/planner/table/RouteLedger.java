@@ -17,20 +17,25 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Comparator;
 import java.util.List;
 
 /**
- * The verdicts on many routes, kept in a temporary file so that their number does not matter; in memory stand two numbers for each. They come out ranked:
- * routes that meet all requirements first, by the least margin.
+ * The verdicts on many routes, kept in a temporary file so that their number does not matter; in memory stand three numbers for each. They come out
+ * ranked by the least margin, where it is the same by the key.
  */
 public final class RouteLedger implements Closeable {
     private static final int FIRST_CAPACITY = 1024;
+
+    /** Least margins that differ by less are taken as equal; then the higher key counts. */
+    private static final double SAME_MARGIN = 1e-3;
 
     private final List<FigureColumn> columns;
     private final Path file;
     private final OutputStream out;
     private double[] margins = new double[FIRST_CAPACITY];
     private long[] places = new long[FIRST_CAPACITY];
+    private double[] keys = new double[FIRST_CAPACITY];
     private int count;
     private int met;
     private long end;
@@ -93,8 +98,11 @@ public final class RouteLedger implements Closeable {
         if (count == margins.length) {
             margins = Arrays.copyOf(margins, 2 * count);
             places = Arrays.copyOf(places, 2 * count);
+            keys = Arrays.copyOf(keys, 2 * count);
         }
-        margins[count] = verdict.refusal() == null ? verdict.leastMargin() : Double.NEGATIVE_INFINITY;
+        boolean judged = verdict.refusal() == null;
+        margins[count] = judged ? verdict.leastMargin() : Double.NEGATIVE_INFINITY;
+        keys[count] = judged ? Math.max(0.0, verdict.prediction().key().asymptoticPerSecond()) : 0.0;
         places[count] = end;
         count++;
         met += verdict.meets() ? 1 : 0;
@@ -135,7 +143,10 @@ public final class RouteLedger implements Closeable {
         out.flush();
         Integer[] order = new Integer[count];
         Arrays.setAll(order, i -> i);
-        Arrays.sort(order, (a, b) -> Double.compare(margins[b], margins[a]));
+        Arrays.sort(
+                order,
+                Comparator.comparingDouble((Integer i) -> -Math.rint(margins[i] / SAME_MARGIN))
+                        .thenComparingDouble(i -> -keys[i]));
         try (RandomAccessFile in = new RandomAccessFile(file.toFile(), "r")) {
             for (int i = 0; i < count; i++) {
                 in.seek(places[order[i]]);

@@ -26,6 +26,7 @@ import org.apache.commons.csv.CSVException;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVParser;
 import org.apache.commons.csv.CSVRecord;
+import org.apache.commons.csv.DuplicateHeaderMode;
 
 /**
  * Reads a table of candidate routes row by row: CSV with a header; columns {@code name}, for each arm {@code alice.lengthKm} or {@code
@@ -63,6 +64,15 @@ public final class RouteReader implements Closeable, Iterator<RouteReader.Row> {
      */
     public record Row(long line, Route route, String problem) {}
 
+    /** The table breaks off in the middle. */
+    public static final class BrokenTableException extends RuntimeException {
+        private static final long serialVersionUID = 1L;
+
+        BrokenTableException(String message, Throwable cause) {
+            super(Printable.line(message), cause);
+        }
+    }
+
     private RouteReader(String file, CSVParser parser, Scenario template) {
         this.file = file;
         this.parser = parser;
@@ -89,6 +99,7 @@ public final class RouteReader implements Closeable, Iterator<RouteReader.Row> {
                     .builder()
                     .setHeader()
                     .setSkipHeaderRecord(true)
+                    .setDuplicateHeaderMode(DuplicateHeaderMode.DISALLOW)
                     .setIgnoreEmptyLines(true)
                     .setTrim(true)
                     .get()
@@ -139,7 +150,7 @@ public final class RouteReader implements Closeable, Iterator<RouteReader.Row> {
         try {
             return records.hasNext();
         } catch (UncheckedIOException e) {
-            throw new IllegalStateException(broken(e), e);
+            throw new BrokenTableException(broken(e), e);
         }
     }
 
