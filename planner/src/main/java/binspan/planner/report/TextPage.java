@@ -9,6 +9,8 @@ final class TextPage {
     static final char GLUE = '\u00a0';
 
     private static final int NAME = 31;
+    private static final String CUT = "...";
+    private static final int SHORT = 12;
 
     private final StringBuilder text = new StringBuilder(8192);
     private final TextStyle style;
@@ -84,11 +86,12 @@ final class TextPage {
         return wrapped("  " + left(name, NAME), " ".repeat(NAME + 2), value);
     }
 
-    /** A text filled with blanks to a width, its end cut off where it is longer. */
+    /** A text filled with blanks to a width, its end cut off where it is longer, in a wide column with a mark. */
     static String left(String text, int width) {
-        return text.length() > width
-                ? text.substring(0, Math.max(0, width - 3)) + "..."
-                : text + " ".repeat(width - text.length());
+        if (text.length() <= width) {
+            return text + " ".repeat(width - text.length());
+        }
+        return width < SHORT ? text.substring(0, width) : text.substring(0, width - CUT.length()) + CUT;
     }
 
     /** A text moved to the right of a column, at least one blank before it. */

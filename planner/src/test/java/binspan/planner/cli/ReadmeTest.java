@@ -25,11 +25,10 @@ final class ReadmeTest {
             if (line.startsWith(LAUNCHER)) {
                 String words =
                         line.substring(LAUNCHER.length()).split(" [#>] ", 2)[0].strip();
-                commands.add(List.of(words.replace(
-                                "my-link.json",
-                                directory.resolve("my-link.json").toString())
-                        .replace("scenarios/", ROOT + "/scenarios/")
-                        .split(" ")));
+                commands.add(List.of(
+                        words.replace("my-link.", directory.resolve("my-link").toString() + ".")
+                                .replace("scenarios/", ROOT + "/scenarios/")
+                                .split(" ")));
             }
         }
         return commands;

@@ -126,8 +126,8 @@ final class StudyOptionsTest {
     @CsvSource(
             delimiter = '|',
             value = {
-                "alice.delayErrorPs | is planned at 0; give its range as =FROM:TO",
-                "source.schmidtNumber | has no planned value in this scenario; give its range as =FROM:TO",
+                "alice.delayErrorPs | no planned value to search around; state the range as =FROM:TO",
+                "source.schmidtNumber | no planned value to search around; state the range as =FROM:TO",
                 "timing.windowWidthPs= | found no range; allowed PATH=FROM:TO, then :STEPS and :log if wanted",
                 "timing.windowWidthPs=1:9:5 | found 5 steps; allowed FROM:TO alone",
                 "timing.windowWidthPs=9:1 | found 9 to 1; allowed a range that rises",
@@ -141,13 +141,16 @@ final class StudyOptionsTest {
     }
 
     @Test
-    void negativePlannedValueAsksForARange() {
+    void negativePlannedValueIsSearchedFromItsDoubleToNothing() throws UsageException {
         Scenario late = scenario(Preset.PULSE_PAIR
                 .scenario()
                 .replace("\"clockJitterRmsPs\": 10", "\"delayErrorPs\": -5, \"clockJitterRmsPs\": 10"));
-        assertThatThrownBy(() -> options(new FreeOptions(), "--free", "alice.delayErrorPs")
-                        .axes(late, 1))
-                .hasMessageContaining("is planned at -5; give its range");
+        Axis axis = options(new FreeOptions(), "--free", "alice.delayErrorPs")
+                .axes(late, 1)
+                .get(0);
+        assertThat(axis.from()).isEqualTo(-10.0);
+        assertThat(axis.to()).isEqualTo(0.0);
+        assertThat(axis.logarithmic()).isFalse();
     }
 
     @Test

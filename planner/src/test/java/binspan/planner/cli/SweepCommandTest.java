@@ -309,7 +309,10 @@ final class SweepCommandTest {
     void pictureNeedsAKnownFormat(String name) {
         Run run = sweep("--vary", WINDOW, "--plot", name);
         assertThat(run.status()).isEqualTo(ExitStatus.REFUSED);
-        assertThat(run.errLines()).singleElement().asString().startsWith("binspan: --plot " + name + ": ");
+        assertThat(run.errLines())
+                .singleElement()
+                .asString()
+                .startsWith("binspan: " + name + ": not the ending of a picture");
     }
 
     /** Best values and the interval of the summary against the rows of the table. */
