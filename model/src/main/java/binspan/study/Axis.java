@@ -1,6 +1,7 @@
 package binspan.study;
 
 import binspan.scenario.Parameter;
+import binspan.scenario.Range;
 
 /**
  * A parameter that a study varies between two ends, in linear or logarithmic steps.
@@ -39,7 +40,7 @@ public record Axis(Parameter parameter, double from, double to, int steps, boole
     }
 
     private static String words(double from, double to) {
-        return binspan.scenario.Range.plain(from) + " to " + binspan.scenario.Range.plain(to);
+        return Range.plain(from) + " to " + Range.plain(to);
     }
 
     /** The value of a step, 0 for the first; the ends are met exactly. */

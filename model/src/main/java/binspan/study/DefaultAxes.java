@@ -69,7 +69,9 @@ public final class DefaultAxes {
             boolean tunable = path.get(i) instanceof Compensator compensator
                     && compensator.dispersionPsPerNm().orElse(0.0) != 0.0;
             if (tunable) {
-                paths.add(arm + ".path[" + i + "].dispersionPsPerNm");
+                String label = path.get(i).label().orElse("");
+                String element = label.isEmpty() ? "[" + i + "]" : "." + label;
+                paths.add(arm + ".path" + element + ".dispersionPsPerNm");
             }
         }
     }

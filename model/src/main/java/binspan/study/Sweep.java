@@ -3,6 +3,8 @@ package binspan.study;
 import binspan.scenario.Parameter;
 import binspan.scenario.Scenario;
 import java.util.List;
+import java.util.Locale;
+import java.util.concurrent.CancellationException;
 
 /**
  * The figures of merit of a link on a grid of one to four parameters.
@@ -40,7 +42,7 @@ public record Sweep(Scenario scenario, List<Axis> axes, List<FigureColumn> colum
                 axes.stream().mapToDouble(Axis::steps).reduce(1.0, (a, b) -> a * b) * (axes.size() + columns.size());
         if (numbers > MOST_NUMBERS) {
             throw new IllegalArgumentException(String.format(
-                    java.util.Locale.ROOT,
+                    Locale.ROOT,
                     "found %.3g numbers in the table; allowed %d: take fewer steps or fewer figures",
                     numbers,
                     MOST_NUMBERS));
@@ -59,7 +61,7 @@ public record Sweep(Scenario scenario, List<Axis> axes, List<FigureColumn> colum
     /**
      * Computes the table.
      *
-     * @throws java.util.concurrent.CancellationException if it shall stop
+     * @throws CancellationException if it shall stop
      */
     public StudyTable run(Execution execution) {
         return new SweepGrid(this).run(execution, PORTION);

@@ -2,6 +2,7 @@ package binspan.study;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.concurrent.CancellationException;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
@@ -39,7 +40,7 @@ public final class Workers {
      * @param portion how many a thread takes at once, 1 or more
      * @param execution threads, progress, cancellation
      * @param work makes the work of one thread
-     * @throws java.util.concurrent.CancellationException if the study shall stop
+     * @throws CancellationException if the study shall stop
      */
     public static void run(int items, int portion, Execution execution, Supplier<? extends Work> work) {
         Workers workers = new Workers(items, portion, execution);
@@ -66,7 +67,7 @@ public final class Workers {
             }
         } catch (InterruptedException e) {
             Thread.currentThread().interrupt();
-            failure.compareAndSet(null, new java.util.concurrent.CancellationException("study interrupted"));
+            failure.compareAndSet(null, new CancellationException("study interrupted"));
             next.set(items);
         } catch (ExecutionException e) {
             failure.compareAndSet(null, new IllegalStateException("study", e.getCause()));

@@ -6,6 +6,7 @@ import binspan.study.Axis;
 import binspan.study.Execution;
 import binspan.study.window.MarginFunction;
 import java.util.List;
+import java.util.concurrent.CancellationException;
 
 /**
  * The largest axis-parallel box of one to six parameters inside which every point meets all requirements: what an engineer writes into a specification.
@@ -123,7 +124,7 @@ public record ToleranceBox(Scenario scenario, List<Axis> axes, Sense sense, bool
      * corners and the middles of its faces; then faces are pushed to the exact border. The box is checked at many interior points; where one violates a
      * requirement, it is given up and the search goes on, until the check passes. The box is the largest one found, not proven to be the largest of all.
      *
-     * @throws java.util.concurrent.CancellationException if it shall stop
+     * @throws CancellationException if it shall stop
      */
     public OperatingBox run(Execution execution) {
         return new BoxHunt(this, execution).result();

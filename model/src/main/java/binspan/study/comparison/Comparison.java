@@ -12,6 +12,7 @@ import binspan.study.tuning.Objective;
 import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalDouble;
+import java.util.concurrent.CancellationException;
 import java.util.function.Function;
 import java.util.stream.IntStream;
 
@@ -57,7 +58,7 @@ public record Comparison(List<LinkOption> options, Function<Scenario, List<Axis>
     /**
      * Tunes and ranks: links that meet all requirements first, by the objective; then the others, by how little they fail.
      *
-     * @throws java.util.concurrent.CancellationException if it shall stop
+     * @throws CancellationException if it shall stop
      * @throws IllegalArgumentException if a parameter cannot be tuned in one of the links
      */
     public List<Entry> run(Execution execution) {

@@ -11,12 +11,14 @@ import binspan.study.Workers;
 import binspan.study.tuning.Objective;
 import binspan.study.tuning.Tuning;
 import java.util.List;
+import java.util.concurrent.CancellationException;
 
 /**
  * Many candidate routes through one scenario as template; they are judged in batches, so that a table of any length streams through.
  *
  * @param template the link
- * @param tuned whether each route is tuned, for the largest least margin, with the usual parameters
+ * @param tuned whether each route is tuned, with the usual parameters: for the least margin, by which routes are ranked, or for the natural objective
+ *     where nothing is required
  */
 public record RouteSurvey(Scenario template, boolean tuned) {
     /**
@@ -25,7 +27,7 @@ public record RouteSurvey(Scenario template, boolean tuned) {
      * @param route the route
      * @param prediction prediction, tuned where asked
      * @param meets whether all requirements hold
-     * @param leastMargin least margin of all requirements
+     * @param leastMargin least margin of all requirements; NaN where none is stated
      * @param tightest requirement with the least margin; null where none is stated
      * @param refusal why the route cannot be judged, null if it can; then there is no prediction
      */
@@ -40,7 +42,7 @@ public record RouteSurvey(Scenario template, boolean tuned) {
     /**
      * Judges a batch of routes, in their order.
      *
-     * @throws java.util.concurrent.CancellationException if it shall stop
+     * @throws CancellationException if it shall stop
      */
     public List<Verdict> judge(List<Route> routes, Execution execution) {
         Verdict[] verdicts = new Verdict[routes.size()];
@@ -71,7 +73,8 @@ public record RouteSurvey(Scenario template, boolean tuned) {
             Requirement tightest = margins.requirements().isEmpty()
                     ? null
                     : margins.requirements().get(margins.tightest(prediction));
-            return new Verdict(route, prediction, margins.met(prediction), margins.least(prediction), tightest, null);
+            double least = tightest == null ? Double.NaN : margins.least(prediction);
+            return new Verdict(route, prediction, margins.met(prediction), least, tightest, null);
         } catch (IllegalArgumentException e) {
             return new Verdict(route, null, false, Double.NaN, null, e.getMessage());
         }

@@ -5,6 +5,7 @@ import binspan.study.Axis;
 import binspan.study.Execution;
 import binspan.study.window.MarginFunction;
 import java.util.List;
+import java.util.concurrent.CancellationException;
 
 /**
  * The region of two parameters in which all requirements hold.
@@ -39,7 +40,7 @@ public record OperatingRegion(Scenario scenario, Axis horizontal, Axis vertical)
      * those that come in pairs between two crossings. Islands and holes smaller than a cell are searched for at each peak and hollow of the margins, and
      * drawn with additional lines. What leaves no trace in the samples stays unseen; more steps make the map finer.
      *
-     * @throws java.util.concurrent.CancellationException if it shall stop
+     * @throws CancellationException if it shall stop
      */
     public RegionMap run(Execution execution) {
         return new RegionSearch(this, execution).result();

@@ -8,6 +8,7 @@ import binspan.study.Sweep;
 import binspan.study.Variation;
 import java.util.List;
 import java.util.Locale;
+import java.util.concurrent.CancellationException;
 
 /**
  * How surely a link that is built with spread parameters meets its requirements, how its figures of merit scatter and which spread makes it fail.
@@ -85,7 +86,7 @@ public record Tolerance(
     /**
      * Predicts all builds and evaluates them.
      *
-     * @throws java.util.concurrent.CancellationException if it shall stop
+     * @throws CancellationException if it shall stop
      */
     public ToleranceResult run(Execution execution) {
         return new ToleranceBuilds(this).run(execution);

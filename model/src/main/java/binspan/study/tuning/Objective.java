@@ -3,6 +3,7 @@ package binspan.study.tuning;
 import binspan.prediction.LinkPrediction;
 import binspan.prediction.Requirement;
 import binspan.prediction.RequirementMargins;
+import java.util.List;
 
 /** What tuning makes as large as it can. */
 public enum Objective {
@@ -15,8 +16,7 @@ public enum Objective {
     /** The least margin of all requirements, as the logarithm of a ratio. */
     MARGIN("margin", "least margin", "");
 
-    private static final RequirementMargins ANY_KEY =
-            RequirementMargins.of(java.util.List.of(Requirement.KEY_RATE), 1.0);
+    private static final RequirementMargins ANY_KEY = RequirementMargins.of(List.of(Requirement.KEY_RATE), 1.0);
 
     private final String text;
     private final String meaning;

@@ -10,6 +10,7 @@ import binspan.study.StudyTable;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
+import java.util.concurrent.CancellationException;
 
 /**
  * How far a link reaches: the greatest length of its fibre at which each requirement still holds, at the settings as written and re-tuned at every
@@ -96,7 +97,7 @@ public record Reach(Scenario scenario, List<Axis> free, Objective objective, Lis
     /**
      * Searches.
      *
-     * @throws java.util.concurrent.CancellationException if it shall stop
+     * @throws CancellationException if it shall stop
      */
     public Outcome run(Execution execution) {
         return new ReachSearch(this).run(execution);

@@ -8,6 +8,7 @@ import binspan.study.Axis;
 import binspan.study.Execution;
 import binspan.study.Variation;
 import java.util.List;
+import java.util.concurrent.CancellationException;
 
 /**
  * The best settings of a link under its requirements.
@@ -68,7 +69,7 @@ public record Tuning(Scenario scenario, List<Axis> free, Objective objective, Re
     /**
      * Searches.
      *
-     * @throws java.util.concurrent.CancellationException if it shall stop
+     * @throws CancellationException if it shall stop
      */
     public Outcome run(Execution execution) {
         return new TuningSearch(this, TuningSearch.THOROUGH, List.of()).run(execution);

@@ -4,6 +4,7 @@ import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.Execution;
 import java.util.List;
+import java.util.concurrent.CancellationException;
 
 /**
  * Every interval of one parameter in which all requirements hold, its ends solved.
@@ -29,7 +30,7 @@ public record OperatingWindow(Scenario scenario, Axis axis) {
      * that windows and gaps narrower than the samples are found too. Each end lies within 1e-9 of the exact one, relative, and still meets all
      * requirements. A feature that leaves no turn in the samples stays unseen; more steps of the axis make the scan finer.
      *
-     * @throws java.util.concurrent.CancellationException if it shall stop
+     * @throws CancellationException if it shall stop
      */
     public OperatingIntervals run(Execution execution) {
         return new WindowSearch(this, execution).result();

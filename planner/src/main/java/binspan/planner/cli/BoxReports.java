@@ -61,7 +61,7 @@ final class BoxReports {
         found.put(
                 "bindingRequirement",
                 box.binding().orElseThrow().verdict().tightest().requirement().fieldName());
-        description.put("box", found);
+        description.put("box", StudyDescription.finite(found));
         return description;
     }
 
@@ -76,6 +76,6 @@ final class BoxReports {
         entry.put("tolerance", side.tolerance());
         entry.put("fromEndedBy", WindowReports.name(side.from()));
         entry.put("toEndedBy", WindowReports.name(side.to()));
-        return entry;
+        return StudyDescription.finite(entry);
     }
 }

@@ -30,17 +30,17 @@ import picocli.CommandLine.Parameters;
         versionProvider = VersionLine.class,
         header = "Ranks links: with other detectors, fibres or elements.",
         customSynopsis = {
-            "binspan compare FILE (--detectors CLASS[/CLASS],... |",
-            "                       --fibres CLASS,... | --without LABEL) [--for OBJECTIVE]",
-            "                       [--as-written] [--csv FILE] [--json FILE]",
-            "                       [--plot FILE] [--force]",
-            "binspan compare FILE FILE... [--for OBJECTIVE] ..."
+            "binspan compare FILE --detectors CLASS[/CLASS],...",
+            "                       | --fibres CLASS,... | --without LABEL",
+            "                       [--for OBJECTIVE] [--as-written]",
+            "                       [--csv FILE] [--json FILE] [--plot FILE] [--force]",
+            "       binspan compare FILE FILE... [--for OBJECTIVE] ..."
         },
         description = {
-            "Puts links side by side, each tuned for itself (mean pairs, window, compensators),",
-            "and ranks them: those that meet all requirements first. CLASS/CLASS gives alice",
-            "and bob different detectors. Avalanche detectors are tried at every operating",
-            "point of their class."
+            "Puts links side by side, each tuned for itself (mean pairs, window,",
+            "compensators), and ranks them: those that meet all requirements first.",
+            "CLASS/CLASS gives alice and bob different detectors. Avalanche detectors are",
+            "tried at every operating point of their class."
         },
         footer = {
             "",

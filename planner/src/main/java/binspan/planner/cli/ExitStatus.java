@@ -2,7 +2,6 @@ package binspan.planner.cli;
 
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
-import binspan.planner.table.RouteReader;
 import binspan.planner.table.TableException;
 import java.io.PrintStream;
 
@@ -40,8 +39,7 @@ final class ExitStatus {
         }
         if (failure instanceof OutputFileException
                 || failure instanceof UsageException
-                || failure instanceof TableException
-                || failure instanceof RouteReader.BrokenTableException) {
+                || failure instanceof TableException) {
             err.println("binspan: " + failure.getMessage());
             return REFUSED;
         }

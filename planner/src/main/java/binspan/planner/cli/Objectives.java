@@ -1,5 +1,6 @@
 package binspan.planner.cli;
 
+import binspan.planner.report.RequiredFigure;
 import binspan.prediction.LinkPredictor;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
@@ -18,10 +19,18 @@ final class Objectives {
         if (word == null) {
             return Objective.natural(LinkPredictor.predict(scenario));
         }
-        return Arrays.stream(Objective.values())
+        Objective objective = Arrays.stream(Objective.values())
                 .filter(each -> each.text().equals(word))
                 .findFirst()
                 .orElseThrow(() -> UsageException.unknown("objective", word, words()));
+        if (objective == Objective.MARGIN
+                && RequiredFigure.of(scenario.require()).isEmpty()) {
+            throw UsageException.of("--for margin: the scenario states no requirement to keep a margin to");
+        }
+        if (objective == Objective.KEY && Objective.natural(LinkPredictor.predict(scenario)) != Objective.KEY) {
+            throw UsageException.of("--for key: this link makes no key: both sides need both ports detected");
+        }
+        return objective;
     }
 
     private static List<String> words() {

@@ -5,6 +5,7 @@ import binspan.planner.io.OutputFileException;
 import binspan.planner.picture.ReachPicture;
 import binspan.planner.report.ReachSummary;
 import binspan.planner.table.TableJson;
+import binspan.scenario.LinkLength;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.FigureColumn;
@@ -31,7 +32,8 @@ import picocli.CommandLine.Option;
         header = "Tells how far a link reaches.",
         customSynopsis = {
             "binspan reach FILE [--source middle|alice|bob|SHARE]",
-            "                     [--free PATH[=FROM:TO]] ... [--for OBJECTIVE] [--as-written]",
+            "                     [--free PATH[=FROM:TO]] ... [--for OBJECTIVE]",
+            "                     [--as-written]",
             "                     [--csv FILE] [--json FILE] [--plot FILE] [--force]"
         },
         description = {
@@ -92,7 +94,9 @@ final class ReachCommand implements Callable<Integer> {
         Objective wanted = Objectives.of(objective, scenario);
         List<Axis> axes = asWritten ? List.of() : Objectives.free(free, scenario);
         List<FigureColumn> columns = FigureColumns.all(scenario);
-        Reach reach = UsageException.unless(input.file(), () -> new Reach(scenario, axes, wanted, columns));
+        boolean fibre = new LinkLength().value(scenario).orElse(0.0) > 0.0;
+        String blamed = fibre && free.given() ? "--free" : input.file();
+        Reach reach = UsageException.unless(blamed, () -> new Reach(scenario, axes, wanted, columns));
         Reach.Outcome outcome = ProgressBar.during(console, reach::run);
         output.deliver(report(reach, outcome), console);
         return ExitStatus.MET;

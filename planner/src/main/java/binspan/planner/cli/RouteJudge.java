@@ -52,6 +52,7 @@ final class RouteJudge {
                 rows(reader, size, execution);
                 return null;
             });
+            reader.checkWhole();
         } catch (UncheckedIOException e) {
             throw e.getCause();
         }

@@ -3,7 +3,6 @@ package binspan.planner.cli;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
 import binspan.planner.picture.RoutesPicture;
-import binspan.planner.report.RequiredFigure;
 import binspan.planner.report.RoutesSummary;
 import binspan.planner.table.RouteLedger;
 import binspan.planner.table.StudyRows;
@@ -36,12 +35,13 @@ import picocli.CommandLine.Option;
             "                      [--csv FILE] [--json FILE] [--plot FILE] [--force]"
         },
         description = {
-            "Puts each route of a table through the scenario as template, checks it and ranks",
-            "all by margin, with the reason where one fails. The table is CSV with a header:",
-            "  name              name of the route",
-            "  alice.lengthKm    length of alice's fibre; bob.lengthKm likewise",
-            "  alice.measuredLossDb   loss of it as measured, instead or as well",
-            "  fibre             fibre class of all spans; or alice.fibre, bob.fibre",
+            "Puts each route of a table through the scenario as template, checks it and",
+            "ranks all by their least margin, with the reason where one fails. The table is",
+            "CSV with a header:",
+            "  name                  name of the route",
+            "  alice.lengthKm        length of alice's fibre; bob.lengthKm likewise",
+            "  alice.measuredLossDb  loss of it as measured, instead or as well",
+            "  fibre                 fibre class of all spans; or alice.fibre, bob.fibre",
             "Each arm with fibre needs a length or a loss; an empty fibre class is the",
             "template's. Connectors and splices keep their density, and a measured loss",
             "replaces them. leastMargin is the natural logarithm of predicted over required."
@@ -52,9 +52,9 @@ import picocli.CommandLine.Option;
             "  binspan routes dam-to-town.json --table routes.csv",
             "  binspan routes dam-to-town.json --table routes.csv --tune --csv ranking.csv",
             "",
-            "Exit status: 0 all routes meet all requirements, 1 some do not, 2 bad input; a bad",
-            "row is reported with its line and the others go on. 3 the program's own",
-            "failure."
+            "A bad row is reported with its line, and the others go on. Exit status: 0 all",
+            "routes meet all requirements, 1 some do not, 2 bad input or bad rows, 3 the",
+            "program's own failure."
         })
 final class RoutesCommand implements Callable<Integer> {
     private final Console console;
@@ -67,7 +67,8 @@ final class RoutesCommand implements Callable<Integer> {
 
     @Option(
             names = "--tune",
-            description = "Tune mean pairs, window and compensators of every route before it is judged.")
+            description =
+                    "Tune mean pairs, window and compensators of every route for the least margin before it is judged.")
     private boolean tune;
 
     @Mixin
@@ -82,16 +83,10 @@ final class RoutesCommand implements Callable<Integer> {
             throws InvalidScenarioException, UsageException, OutputFileException, TableException, IOException {
         output.check(input.file(), routes);
         Scenario template = input.read(console);
-        if (RequiredFigure.of(template.require()).isEmpty()) {
-            throw UsageException.of(input.file() + ": states no requirement, by which routes are ranked");
-        }
         List<FigureColumn> columns = FigureColumns.all(template);
         try (RouteLedger ledger = new RouteLedger(columns)) {
             RouteJudge judge = new RouteJudge(new RouteSurvey(template, tune), ledger, console);
             judge.judge(routes);
-            if (ledger.count() == 0) {
-                throw UsageException.of(routes + ": holds no route that can be read");
-            }
             output.deliver(report(template, ledger, judge.bad()), console);
             return judge.bad() > 0
                     ? ExitStatus.REFUSED

@@ -21,7 +21,7 @@ final class SpreadOptions {
 
     @Option(
             names = NAME,
-            paramLabel = "PATH=SHAPE:WIDTH[%%]",
+            paramLabel = "PATH=SHAPE:WIDTH[%]",
             description = "How far a parameter may be off when the link is built: normal with its standard deviation,"
                     + " uniform or triangular with its half width, in the parameter's unit or in per cent of the"
                     + " planned value. Once for each parameter.")

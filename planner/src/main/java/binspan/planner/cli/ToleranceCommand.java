@@ -33,10 +33,10 @@ import picocli.CommandLine.Option;
         },
         description = {
             "Draws builds of the link from the spreads of its parameters: those of the",
-            "scenario's spread section, and those given here, which come first. SHAPE is",
-            "normal (WIDTH its standard deviation), uniform or triangular (half widths), in the",
-            "parameter's unit or in per cent of the planned value. Values that the parameter",
-            "does not allow are cut off. The table holds every build."
+            "scenario's spread section, and those given here, which replace them. SHAPE is",
+            "normal (WIDTH its standard deviation), uniform or triangular (half widths), in",
+            "the parameter's unit or in per cent of the planned value. Values that the",
+            "parameter does not allow are cut off. The table holds every build."
         },
         footer = {
             "",
@@ -97,10 +97,12 @@ final class ToleranceCommand implements Callable<Integer> {
         List<FigureColumn> columns = show.isEmpty()
                 ? FigureColumns.all(scenario)
                 : UsageException.unless("--show", () -> FigureColumns.named(scenario, show));
-        boolean counted = samples >= Tolerance.FEWEST_SAMPLES && samples <= Tolerance.MOST_SAMPLES;
+        if (samples < Tolerance.FEWEST_SAMPLES || samples > Tolerance.MOST_SAMPLES) {
+            throw UsageException.of(
+                    "--samples " + samples + ": allowed " + Tolerance.FEWEST_SAMPLES + " to " + Tolerance.MOST_SAMPLES);
+        }
         Tolerance tolerance = UsageException.unless(
-                counted ? SPREAD : "--samples",
-                () -> new Tolerance(scenario, ParameterSpread.of(scenario, more), samples, seed, columns));
+                SPREAD, () -> new Tolerance(scenario, ParameterSpread.of(scenario, more), samples, seed, columns));
         ToleranceResult result = ProgressBar.during(console, tolerance::run);
         output.deliver(
                 new StudyReport(

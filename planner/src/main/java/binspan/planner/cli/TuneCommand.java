@@ -33,9 +33,9 @@ import picocli.CommandLine.Option;
             "                    [--csv FILE] [--json FILE] [--plot FILE] [--force]"
         },
         description = {
-            "Sets the free parameters so that the objective is as large as it can be while all",
-            "requirements of the scenario hold. Without --free these are the mean pairs, the",
-            "window and compensators of a stated dispersion."
+            "Sets the free parameters so that the objective is as large as it can be while",
+            "all requirements of the scenario hold. Without --free these are the mean pairs,",
+            "the window and compensators of a stated dispersion."
         },
         footer = {
             "",

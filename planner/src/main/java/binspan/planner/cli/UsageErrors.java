@@ -1,5 +1,6 @@
 package binspan.planner.cli;
 
+import binspan.planner.io.Printable;
 import binspan.scenario.Nearest;
 import java.util.ArrayList;
 import java.util.List;
@@ -13,6 +14,7 @@ import picocli.CommandLine.UnmatchedArgumentException;
 /** Says in one or two lines what is wrong with a command line. */
 final class UsageErrors {
     private static final String ERROR = "Error: ";
+    private static final List<Class<?>> COUNTS = List.of(int.class, long.class);
 
     private UsageErrors() {}
 
@@ -45,6 +47,10 @@ final class UsageErrors {
         }
         if (error instanceof MissingParameterException missing) {
             return missing(missing, words, command);
+        }
+        if (error.getArgSpec() instanceof OptionSpec option && COUNTS.contains(option.type())) {
+            return option.longestName() + ": found \"" + Printable.line(error.getValue())
+                    + "\"; allowed a whole number";
         }
         String message = error.getMessage();
         String plain = message.startsWith(ERROR) ? message.substring(ERROR.length()) : message;

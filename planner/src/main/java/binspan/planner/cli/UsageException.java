@@ -37,6 +37,7 @@ final class UsageException extends Exception {
     static UsageException unknown(String kind, String word, List<String> known) {
         List<String> near = Nearest.to(word, known);
         String hint = near.isEmpty() ? "" : "; did you mean " + String.join(" or ", near) + "?";
-        return new UsageException("unknown " + kind + " " + word + "; allowed " + String.join(" | ", known) + hint);
+        return new UsageException("unknown " + kind + " " + (word.isEmpty() ? "\"\"" : word) + "; allowed "
+                + String.join(" | ", known) + hint);
     }
 }

@@ -28,10 +28,10 @@ import picocli.CommandLine.Option;
             "                      [--csv FILE] [--json FILE] [--plot FILE] [--force]"
         },
         description = {
-            "For one parameter: every interval in which all requirements hold, its ends solved,",
-            "and which requirement ends it. For two: the region, with a contour for each",
-            "requirement and its area. With --box, for up to six: the largest box inside which",
-            "every point meets all requirements, for a specification."
+            "For one parameter: every interval in which all requirements hold, its ends",
+            "solved, and which requirement ends it. For two: the region, with a contour for",
+            "each requirement and its area. With --box, for up to six: the largest box inside",
+            "which every point meets all requirements, for a specification."
         },
         footer = {
             "",

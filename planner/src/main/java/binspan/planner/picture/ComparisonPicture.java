@@ -45,7 +45,9 @@ public final class ComparisonPicture {
                     null,
                     e -> e.reachKm().orElse(Double.NaN)));
         }
-        return new Picture(title, "each tuned for itself; the best stands on top", new RankedBars("", labels, panels));
+        boolean tuned = entries.stream().anyMatch(entry -> !entry.free().isEmpty());
+        String settings = tuned ? "each tuned for itself" : "settings as written";
+        return new Picture(title, settings + "; the best stands on top", new RankedBars("", labels, panels));
     }
 
     private static String label(Comparison.Entry entry) {

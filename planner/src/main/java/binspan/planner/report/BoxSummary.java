@@ -107,7 +107,7 @@ public final class BoxSummary {
                 ? "the range ends, or the other sides' sizes hold it"
                 : end.requirement().get() == Requirement.SLOTS
                         ? SlotWords.END
-                        : "the " + RequirementWords.name(end.requirement().get()) + " fails at some point beyond";
+                        : "the " + RequirementWords.noun(end.requirement().get()) + " fails at some point beyond";
     }
 
     private void binding() {
@@ -124,7 +124,7 @@ public final class BoxSummary {
         page.gap();
         double margin = binding.verdict().leastMargin();
         page.wrapped((binding.corner() ? "The binding corner: " : "The binding point: ") + where + "; the "
-                + RequirementWords.name(binding.verdict().tightest().requirement()) + " is met there with "
+                + RequirementWords.noun(binding.verdict().tightest().requirement()) + " is met there with "
                 + (margin < NOTHING
                         ? "nothing to spare."
                         : Figure.percent(Math.expm1(margin)) + " to spare: the ranges end before anything fails."));

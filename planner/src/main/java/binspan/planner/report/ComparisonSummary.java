@@ -18,7 +18,6 @@ public final class ComparisonSummary {
     private static final int NUMBER = 12;
     private static final int FOUR = 4;
     private static final double NO_ROOM = 1e-4;
-    private static final double AT_LIMIT = 1e-6;
 
     private final List<Comparison.Entry> entries;
     private final TextPage page;
@@ -54,15 +53,30 @@ public final class ComparisonSummary {
         for (int i = 0; i < entries.size(); i++) {
             Comparison.Entry entry = entries.get(i);
             TextStyle style = page.style();
-            String sign = entry.tightest() == null
-                    ? " "
-                    : entry.meets() ? style.good(style.met()) : style.bad(style.notMet());
-            page.line(left(i + 1 + ".", 3) + sign + " "
-                    + left(style.clean(entry.option().name()), NAME)
-                    + right(key(entry.prediction()), NUMBER)
-                    + right(Figure.bare(entry.prediction().fringe().raw()), NUMBER)
-                    + right(reach(entry), NUMBER));
+            named(
+                    left(i + 1 + ".", 3) + sign(entry) + " ",
+                    style.clean(entry.option().name()),
+                    right(key(entry.prediction()), NUMBER)
+                            + right(Figure.bare(entry.prediction().fringe().raw()), NUMBER)
+                            + right(reach(entry), NUMBER));
         }
+    }
+
+    /** A name too long for its column stands on a line of its own. */
+    private void named(String start, String name, String figures) {
+        boolean fits = name.length() <= NAME;
+        if (!fits) {
+            page.wrapped(start, " ".repeat(5), name);
+        }
+        page.line((fits ? start : " ".repeat(5)) + left(fits ? name : "", NAME) + figures);
+    }
+
+    private String sign(Comparison.Entry entry) {
+        TextStyle style = page.style();
+        if (entry.tightest() == null) {
+            return " ";
+        }
+        return entry.meets() ? style.good(style.met()) : style.bad(style.notMet());
     }
 
     private static String key(LinkPrediction prediction) {
@@ -85,7 +99,9 @@ public final class ComparisonSummary {
         for (int i = 0; i < entry.free().size(); i++) {
             String unit = entry.free().get(i).parameter().unit();
             page.row(
-                    ParameterWords.name(entry.free().get(i).parameter().path()),
+                    page.style()
+                            .clean(ParameterWords.name(
+                                    entry.free().get(i).parameter().path())),
                     Figure.digits(entry.values().get(i), FOUR, unit.equals("1/s") ? "/s" : unit));
         }
         page.row(
@@ -117,10 +133,9 @@ public final class ComparisonSummary {
         for (int i = 0; i < margins.requirements().size(); i++) {
             Requirement requirement = margins.requirements().get(i);
             double required = margins.required(i);
-            double predicted = requirement.predicted(entry.prediction(), entry.finite());
-            String value =
-                    Double.isFinite(predicted) ? RequirementWords.predicted(requirement, predicted, required) : "none";
-            boolean met = margins.margin(i, entry.prediction()) >= -AT_LIMIT;
+            boolean met = margins.margin(i, entry.prediction()) >= 0.0;
+            String value = RequirementWords.tuned(
+                    requirement, requirement.predicted(entry.prediction(), entry.finite()), required, met);
             page.row(
                     RequirementWords.name(requirement),
                     value + ", required " + (requirement.atLeast() ? style.atLeast() : style.atMost()) + " "

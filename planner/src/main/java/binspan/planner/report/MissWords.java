@@ -38,7 +38,7 @@ public final class MissWords {
         String value = Double.isFinite(predicted)
                 ? "is " + RequirementWords.predicted(requirement, predicted, required)
                 : "cannot be had at all";
-        return "the " + RequirementWords.name(requirement) + " " + value + ", required "
+        return "the " + RequirementWords.noun(requirement) + " " + value + ", required "
                 + (requirement.atLeast() ? "at least " : "at most ") + RequirementWords.required(requirement, required);
     }
 

@@ -2,7 +2,7 @@ package binspan.planner.report;
 
 import java.util.List;
 
-/** Scenario paths in words: {@code both.detectors.jitterFwhmPs} is "jitter FWHM of the detectors on both sides". */
+/** Scenario paths in words: {@code both.detectors.jitterFwhmPs} is "jitter FWHM, both sides' detectors". */
 public final class ParameterWords {
     private static final List<String> UNITS = List.of(
             "PerKmNm",
@@ -29,13 +29,12 @@ public final class ParameterWords {
             "Rad",
             "K",
             "S");
-    private static final List<String> KEPT = List.of("countsPerSecond", "pairRatePerSecond");
     private static final List<String> CAPITALS = List.of("fwhm", "rms", "pmd");
 
     private ParameterWords() {}
 
     /**
-     * A short name for axes and tables.
+     * A short name for axes and tables: "jitter FWHM, both sides' detectors".
      *
      * @param path scenario path
      */
@@ -73,7 +72,7 @@ public final class ParameterWords {
         if (side.isEmpty()) {
             return pump + band;
         }
-        return ", " + (rest.isEmpty() ? side : side + " " + rest);
+        return ", " + (rest.isEmpty() ? side : side + (side.endsWith("s") ? "' " : "'s ") + rest);
     }
 
     private static String element(String rest) {
@@ -87,9 +86,6 @@ public final class ParameterWords {
     }
 
     private static String withoutUnit(String field) {
-        if (KEPT.contains(field)) {
-            return field;
-        }
         for (String unit : UNITS) {
             if (field.endsWith(unit) && field.length() > unit.length()) {
                 String bare = field.substring(0, field.length() - unit.length());

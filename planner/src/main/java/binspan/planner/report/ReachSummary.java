@@ -15,8 +15,11 @@ import java.util.OptionalDouble;
 /** What a study of the reach tells a person: how far first key and violation come, then every requirement, then key and visibility against length. */
 public final class ReachSummary {
     private static final int NAME = 26;
-    private static final int NUMBER = 13;
+    private static final int NUMBER = 14;
+    private static final int REQUIRED = 16;
+    private static final int LENGTH = 10;
     private static final int ROWS = 13;
+    private static final double FAINTEST = 0.001;
     private static final double NOWHERE_KM = 0.0;
 
     private final Reach reach;
@@ -29,11 +32,6 @@ public final class ReachSummary {
         this.outcome = outcome;
         this.page = new TextPage(style);
         this.tuned = outcome.retuned() != null;
-    }
-
-    /** Figures that the summary speaks of. */
-    public static List<String> figures() {
-        return List.of("key.asymptoticBps", "visibility.raw");
     }
 
     /** The summary as a text that ends with a line break. */
@@ -99,7 +97,7 @@ public final class ReachSummary {
         page.gap();
         page.line(page.style()
                 .strong(left("Requirement", NAME)
-                        + right("required", NUMBER)
+                        + right("required", REQUIRED)
                         + right("as written", NUMBER)
                         + (tuned ? right("re-tuned", NUMBER) : "")));
         boolean assumed = false;
@@ -127,7 +125,7 @@ public final class ReachSummary {
 
     private void line(String name, String demand, Reach.Limit limit) {
         page.line(left(name, NAME)
-                + right(demand, NUMBER)
+                + right(demand, REQUIRED)
                 + right(km(limit.asWrittenKm()), NUMBER)
                 + (tuned ? right(km(limit.retunedKm()), NUMBER) : ""));
     }
@@ -136,16 +134,19 @@ public final class ReachSummary {
         StudyTable table = outcome.asWritten();
         int key = table.indexOf("key.asymptoticBps");
         int visibility = table.indexOf("visibility.raw");
+        String pair = (key < 0 ? "" : right("key", NUMBER)) + right("visibility", NUMBER);
         page.gap();
-        page.line(page.style()
-                .strong(left("Length", 10)
-                        + (key < 0 ? "" : right("key", NUMBER))
-                        + right("visibility", NUMBER)
-                        + (tuned ? (key < 0 ? "" : right("key tuned", NUMBER)) + right("visibility", NUMBER) : "")));
+        if (tuned) {
+            page.line(page.style()
+                    .strong(" ".repeat(LENGTH)
+                            + right("as written", pair.length())
+                            + right("re-tuned", pair.length())));
+        }
+        page.line(page.style().strong(left("Length", LENGTH) + pair + (tuned ? pair : "")));
         int last = table.rows() - 1;
         for (int i = 0; i < ROWS; i++) {
             int row = (int) Math.round((double) i * last / (ROWS - 1));
-            StringBuilder line = new StringBuilder(left(Figure.bare(table.varied(0, row)) + " km", 10));
+            StringBuilder line = new StringBuilder(left(Figure.bare(table.varied(0, row)) + " km", LENGTH));
             cells(line, table, key, visibility, row);
             if (tuned) {
                 cells(line, outcome.retuned(), key, visibility, row);
@@ -159,6 +160,7 @@ public final class ReachSummary {
             double rate = table.figure(key, row);
             line.append(right(rate > 0.0 ? Figure.bits(rate) : "none", NUMBER));
         }
-        line.append(right(Figure.bare(table.figure(visibility, row)), NUMBER));
+        double seen = table.figure(visibility, row);
+        line.append(right(seen < FAINTEST ? "< " + FAINTEST : Figure.bare(seen), NUMBER));
     }
 }

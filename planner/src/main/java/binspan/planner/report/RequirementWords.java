@@ -27,6 +27,11 @@ final class RequirementWords {
         };
     }
 
+    /** The same within a sentence, behind an article. */
+    static String noun(Requirement requirement) {
+        return requirement == Requirement.CAR ? "ratio of coincidences to accidentals" : name(requirement);
+    }
+
     /** The required figure as the subject of a sentence. */
     static String subject(Requirement requirement) {
         return switch (requirement) {
@@ -73,9 +78,12 @@ final class RequirementWords {
         };
     }
 
-    /** A predicted figure to three digits, for settings that may lie right at the required one. */
-    static String rounded(Requirement requirement, double value) {
-        return predicted(requirement, value, value);
+    /**
+     * The predicted figure of tuned settings, "none" where there is none; best settings often meet a requirement exactly, and then it is not told to its
+     * last digit.
+     */
+    static String tuned(Requirement requirement, double value, double required, boolean met) {
+        return Double.isFinite(value) ? predicted(requirement, value, met ? value : required) : "none";
     }
 
     /** How much room is left, with its sign, in the requirement's own unit. */

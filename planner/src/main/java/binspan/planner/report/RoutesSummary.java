@@ -14,12 +14,15 @@ public final class RoutesSummary {
     private static final int BEST = 12;
     private static final int FAILING = 5;
     private static final double PERCENT = 100.0;
+    private static final double FINEST = 0.01;
 
+    private final boolean required;
     private final RouteLedger ledger;
     private final TextPage page;
     private int failing;
 
-    private RoutesSummary(RouteLedger ledger, TextStyle style) {
+    private RoutesSummary(Scenario template, RouteLedger ledger, TextStyle style) {
+        this.required = !RequiredFigure.of(template.require()).isEmpty();
         this.ledger = ledger;
         this.page = new TextPage(style);
     }
@@ -33,19 +36,26 @@ public final class RoutesSummary {
      * @param style colour and characters
      */
     public static String text(Scenario template, RouteLedger ledger, int bad, TextStyle style) throws IOException {
-        RoutesSummary summary = new RoutesSummary(ledger, style);
+        RoutesSummary summary = new RoutesSummary(template, ledger, style);
         summary.page.wrapped(style.clean(template.name()));
         summary.answer(bad);
-        summary.best();
+        if (ledger.count() > 0) {
+            summary.best();
+        }
         summary.failing();
         return summary.page.toString();
     }
 
     private void answer(int bad) {
         TextStyle style = page.style();
-        String words = ledger.met() + " of " + ledger.count() + (ledger.count() == 1 ? " route meets" : " routes meet")
-                + " all requirements";
-        page.line(ledger.met() > 0 ? style.good(style.met() + " " + words) : style.bad(style.notMet() + " " + words));
+        if (required && ledger.count() > 0) {
+            String words = ledger.met() + " of " + ledger.count() + (ledger.count() == 1 ? " route " : " routes ")
+                    + (ledger.met() == 1 ? "meets" : "meet") + " all requirements";
+            page.line(
+                    ledger.met() > 0 ? style.good(style.met() + " " + words) : style.bad(style.notMet() + " " + words));
+        } else if (!required) {
+            page.line("No requirement is stated: the routes stand in the order of their table.");
+        }
         if (bad > 0) {
             page.line(
                     style.bad(style.notMet() + " " + bad + (bad == 1 ? " row is" : " rows are") + " bad and left out"));
@@ -66,17 +76,31 @@ public final class RoutesSummary {
             if (rank > BEST) {
                 return false;
             }
-            TextStyle style = page.style();
-            String sign = entry.meets() ? style.good(style.met()) : style.bad(style.notMet());
-            page.line(left(rank + ".", 4) + sign + " " + left(style.clean(entry.name()), NAME)
-                    + right(figure(entry, visibility), NUMBER)
-                    + (key < 0 ? "" : right(bits(entry, key), NUMBER))
-                    + right(margin(entry), NUMBER));
+            named(
+                    left(rank + ".", 4) + sign(entry) + " ",
+                    page.style().clean(entry.name()),
+                    right(figure(entry, visibility), NUMBER)
+                            + (key < 0 ? "" : right(bits(entry, key), NUMBER))
+                            + right(margin(entry), NUMBER));
             return true;
         });
         if (ledger.count() > BEST) {
             page.line("and " + (ledger.count() - BEST) + " more");
         }
+    }
+
+    /** A name too long for its column stands on a line of its own. */
+    private void named(String start, String name, String figures) {
+        boolean fits = name.length() <= NAME;
+        if (!fits) {
+            page.wrapped(start, " ".repeat(6), name);
+        }
+        page.line((fits ? start : " ".repeat(6)) + left(fits ? name : "", NAME) + figures);
+    }
+
+    private String sign(RouteLedger.Entry entry) {
+        TextStyle style = page.style();
+        return !required ? " " : entry.meets() ? style.good(style.met()) : style.bad(style.notMet());
     }
 
     private int position(String name) {
@@ -102,7 +126,11 @@ public final class RoutesSummary {
 
     /** The least margin as a share of the requirement. */
     static String margin(RouteLedger.Entry entry) {
-        return Double.isNaN(entry.leastMargin()) ? "-" : Figure.signed(PERCENT * Math.expm1(entry.leastMargin()), "%");
+        double percent = PERCENT * Math.expm1(entry.leastMargin());
+        if (Double.isNaN(percent)) {
+            return "-";
+        }
+        return Math.abs(percent) < FINEST ? "0 %" : Figure.signed(percent, "%");
     }
 
     /** The first that fail, with the reason. */

@@ -81,9 +81,13 @@ final class TextPage {
         return line(line.toString());
     }
 
-    /** Writes a name and, in a column of its own, a value. */
+    /** Writes a name and, in a column of its own, a value; a name too long for its column stands on a line of its own. */
     TextPage row(String name, String value) {
-        return wrapped("  " + left(name, NAME), " ".repeat(NAME + 2), value);
+        boolean fits = name.length() < NAME;
+        if (!fits) {
+            wrapped("  ", "  ", name);
+        }
+        return wrapped("  " + left(fits ? name : "", NAME), " ".repeat(NAME + 2), value);
     }
 
     /** A text filled with blanks to a width, its end cut off where it is longer, in a wide column with a mark. */

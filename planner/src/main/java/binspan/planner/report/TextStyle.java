@@ -90,13 +90,16 @@ public record TextStyle(boolean coloured, boolean unicode) {
         return unicode ? '\u2592' : '-';
     }
 
-    /** A text from a scenario file as it may safely be shown: control characters and, in ASCII, all others replaced. */
+    /**
+     * A text from a scenario file as a page may safely show it: control characters and, in ASCII, all others replaced; the page's own blanks at which no
+     * line is broken stay.
+     */
     String clean(String text) {
         StringBuilder clean = new StringBuilder(text.length());
         for (int i = 0; i < text.length(); i++) {
             char c = text.charAt(i);
             boolean shown = c >= ' ' && c != '\u007f' && !(c >= '\u0080' && c <= '\u009f') && (unicode || c < '\u007f');
-            clean.append(shown ? c : '?');
+            clean.append(shown || c == TextPage.GLUE ? c : '?');
         }
         return clean.toString();
     }

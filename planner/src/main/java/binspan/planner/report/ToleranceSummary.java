@@ -16,12 +16,14 @@ import java.util.List;
 
 /** A tolerance study for a person: the odds, what each requirement's are, how the figures scatter, what drives failures. */
 public final class ToleranceSummary {
-    private static final int NAME = 28;
+    private static final int NAME = 26;
     private static final int NUMBER = 13;
+    private static final int REQUIRED = 16;
     private static final int PATH = 40;
     private static final double NOTICEABLE_CUT = 1e-3;
     private static final double PERCENT = 100.0;
     private static final int MEDIAN = 3;
+    private static final int MOST_PLACES = 5;
     private static final List<String> SHOWN = List.of(
             "visibility.raw",
             "bell.chsh",
@@ -72,8 +74,8 @@ public final class ToleranceSummary {
         if (share == 0.0 || share == 1.0) {
             return share == 0.0 ? "0 %" : "100 %";
         }
-        double rest = Math.min(share, 1.0 - share);
-        int places = rest >= 0.1 ? 1 : (int) Math.min(5.0, Math.ceil(-Math.log10(rest)));
+        double rest = Math.min(share, 1.0 - share) * PERCENT;
+        int places = Math.max(1, Math.min(MOST_PLACES, 1 + (int) Math.ceil(-Math.log10(rest))));
         return Digits.decimals(share * PERCENT, places) + " %";
     }
 
@@ -87,9 +89,13 @@ public final class ToleranceSummary {
                     ? "/s"
                     : spread.parameter().unit();
             String words = spread.spread().shape().text() + ", " + Figure.digits(distribution.planned(), 4, "") + " "
-                    + page.style().plusMinus() + " " + Figure.in(distribution.width(), unit);
+                    + page.style().plusMinus() + " " + Figure.digits(distribution.width(), 3, unit);
             String name = page.style().clean(spread.parameter().path());
-            page.wrapped("  " + (name.length() > PATH ? name : left(name, PATH)) + " ", " ".repeat(PATH + 3), words);
+            if (name.length() > PATH) {
+                page.line("  " + name);
+                name = "";
+            }
+            page.wrapped("  " + left(name, PATH) + " ", " ".repeat(PATH + 3), words);
             if (distribution.cutShare() > NOTICEABLE_CUT) {
                 page.wrapped(
                         "    ",
@@ -106,13 +112,13 @@ public final class ToleranceSummary {
         }
         page.gap();
         page.line(page.style()
-                .strong(left("Requirement", NAME) + right("required", NUMBER) + right("builds", NUMBER)
+                .strong(left("Requirement", NAME) + right("required", REQUIRED) + right("builds", NUMBER)
                         + "  95 % confidence"));
         for (RequirementShare each : result.requirements()) {
             TextStyle style = page.style();
             String sign = each.requirement().atLeast() ? style.atLeast() : style.atMost();
             page.line(left(RequirementWords.name(each.requirement()), NAME)
-                    + right(sign + " " + RequirementWords.required(each.requirement(), each.required()), NUMBER)
+                    + right(sign + " " + RequirementWords.required(each.requirement(), each.required()), REQUIRED)
                     + right(share(each.share()), NUMBER) + "  "
                     + share(each.share().lowest()) + " to "
                     + share(each.share().highest()));

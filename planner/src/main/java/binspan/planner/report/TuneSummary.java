@@ -16,6 +16,8 @@ import java.util.List;
 public final class TuneSummary {
     private static final int NAME = 34;
     private static final int NUMBER = 14;
+    private static final int REQUIREMENT = 26;
+    private static final int REQUIRED = 16;
     private static final double AT_BOUND = 1e-6;
 
     private final Tuning tuning;
@@ -99,7 +101,7 @@ public final class TuneSummary {
     private String remark(Axis axis, double best) {
         double share = axis.share(best);
         if (share < AT_BOUND || share > 1.0 - AT_BOUND) {
-            return "  at its range's end";
+            return "  end of its range";
         }
         boolean kept = axis.parameter().value(tuning.scenario()).orElse(Double.NaN) == best;
         return kept ? "  kept: no gain" : "";
@@ -113,8 +115,8 @@ public final class TuneSummary {
         }
         page.gap();
         page.line(page.style()
-                .strong(left("Requirement", 26)
-                        + right("required", 13)
+                .strong(left("Requirement", REQUIREMENT)
+                        + right("required", REQUIRED)
                         + right("tuned", NUMBER)
                         + right("as written", NUMBER)));
         for (int i = 0; i < tuning.margins().requirements().size(); i++) {
@@ -122,26 +124,20 @@ public final class TuneSummary {
             double required = tuning.margins().required(i);
             TextStyle style = page.style();
             boolean met = tuning.margins().margin(i, outcome.asWritten()) >= 0.0;
-            page.line(left(RequirementWords.name(requirement), 26)
+            page.line(left(RequirementWords.name(requirement), REQUIREMENT)
                     + right(
                             (requirement.atLeast() ? style.atLeast() : style.atMost()) + " "
                                     + RequirementWords.required(requirement, required),
-                            13)
+                            REQUIRED)
                     + right(predicted(requirement, outcome.prediction(), required, true), NUMBER)
                     + right(predicted(requirement, outcome.asWritten(), required, met), NUMBER)
-                    + (met ? "" : "  " + style.notMet() + " fails as written"));
+                    + (met ? "" : "  " + style.notMet() + " fails"));
         }
     }
 
-    /** A requirement that is met exactly, as the best settings often meet one, is not told to its last digit. */
-    private String predicted(Requirement requirement, LinkPrediction prediction, double required, boolean met) {
+    private static String predicted(Requirement requirement, LinkPrediction prediction, double required, boolean met) {
         double value = requirement.predicted(prediction, FiniteKeyOutlook.of(prediction));
-        if (!Double.isFinite(value)) {
-            return "none";
-        }
-        return met
-                ? RequirementWords.rounded(requirement, value)
-                : RequirementWords.predicted(requirement, value, required);
+        return RequirementWords.tuned(requirement, value, required, met);
     }
 
     private void figures() {

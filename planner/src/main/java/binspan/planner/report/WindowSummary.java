@@ -50,7 +50,7 @@ public final class WindowSummary {
         TextStyle style = page.style();
         Axis axis = found.axis();
         int count = found.windows().size();
-        page.line(style.good(style.met() + " " + count + (count == 1 ? " window" : " windows") + " of "
+        page.wrapped(style.good(style.met() + " " + count + (count == 1 ? " window" : " windows") + " of "
                 + style.clean(axis.parameter().path())));
         page.gap();
         labelled("searched", AxisWords.range(axis, axis.from(), axis.to()) + planned(axis));
@@ -98,8 +98,7 @@ public final class WindowSummary {
         for (Axis axis : axes) {
             labelled(
                     label,
-                    style.clean(axis.parameter().path()) + " from " + AxisWords.range(axis, axis.from(), axis.to())
-                            + planned(axis));
+                    axis.parameter().path() + " from " + AxisWords.range(axis, axis.from(), axis.to()) + planned(axis));
             label = "";
         }
         labelled("area", Figure.digits(map.area(), FEW_DIGITS, areaUnit(axes)));
@@ -139,13 +138,13 @@ public final class WindowSummary {
                 ? "the range ends; nothing fails yet"
                 : end.requirement().get() == Requirement.SLOTS
                         ? SlotWords.END
-                        : "the " + RequirementWords.name(end.requirement().get()) + " fails";
+                        : "the " + RequirementWords.noun(end.requirement().get()) + " fails";
     }
 
     /** The room that the tightest requirement leaves. */
     static String room(PointVerdict verdict) {
         RequirementMargin tightest = verdict.tightest();
-        return "where the " + RequirementWords.name(tightest.requirement()) + " has "
+        return "where the " + RequirementWords.noun(tightest.requirement()) + " has "
                 + Figure.digits(PERCENT * Math.expm1(tightest.margin()), 2, "%") + " of room";
     }
 
@@ -157,6 +156,6 @@ public final class WindowSummary {
     }
 
     private void labelled(String label, String words) {
-        page.wrapped(left(label, LABEL), " ".repeat(LABEL), words);
+        page.wrapped(left(label, LABEL), " ".repeat(LABEL), page.style().clean(words));
     }
 }

@@ -46,7 +46,7 @@ public final class RouteLedger implements Closeable {
      * @param name name of the route
      * @param line its line in the table of routes
      * @param meets whether all requirements hold
-     * @param leastMargin least margin; NaN where it cannot be judged
+     * @param leastMargin least margin; NaN where it cannot be judged or nothing is required
      * @param tightest the requirement with the least margin, empty where none is stated
      * @param reason why it fails, empty if it does not
      * @param figures figures of merit; empty where it cannot be judged
@@ -102,7 +102,9 @@ public final class RouteLedger implements Closeable {
         }
         boolean judged = verdict.refusal() == null;
         margins[count] = judged ? verdict.leastMargin() : Double.NEGATIVE_INFINITY;
-        keys[count] = judged ? Math.max(0.0, verdict.prediction().key().asymptoticPerSecond()) : 0.0;
+        keys[count] = judged && !Double.isNaN(verdict.leastMargin())
+                ? Math.max(0.0, verdict.prediction().key().asymptoticPerSecond())
+                : 0.0;
         places[count] = end;
         count++;
         met += verdict.meets() ? 1 : 0;
@@ -145,7 +147,8 @@ public final class RouteLedger implements Closeable {
         Arrays.setAll(order, i -> i);
         Arrays.sort(
                 order,
-                Comparator.comparingDouble((Integer i) -> -Math.rint(margins[i] / SAME_MARGIN))
+                Comparator.comparing((Integer i) -> margins[i] < 0.0)
+                        .thenComparingDouble(i -> -Math.rint(margins[i] / SAME_MARGIN))
                         .thenComparingDouble(i -> -keys[i]));
         try (RandomAccessFile in = new RandomAccessFile(file.toFile(), "r")) {
             for (int i = 0; i < count; i++) {
@@ -174,11 +177,6 @@ public final class RouteLedger implements Closeable {
             }
         }
         return new Entry(name, line, meets, margin, tightest, reason, figures);
-    }
-
-    /** The least margins of all routes that can be judged, in the order of the table. */
-    public double[] margins() {
-        return Arrays.stream(margins, 0, count).filter(Double::isFinite).toArray();
     }
 
     @Override

@@ -12,9 +12,11 @@ import java.io.BufferedReader;
 import java.io.Closeable;
 import java.io.IOException;
 import java.io.UncheckedIOException;
+import java.nio.charset.CharacterCodingException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
+import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Arrays;
@@ -44,6 +46,7 @@ public final class RouteReader implements Closeable, Iterator<RouteReader.Row> {
             FIBRE,
             "alice.fibre",
             "bob.fibre");
+    private static final int LONGEST_NAME = 200;
     private static final Range LENGTHS = Range.of(0.0, 10_000.0);
     private static final Range LOSSES = Range.of(0.0, 300.0);
     private static final char BYTE_ORDER_MARK = '\ufeff';
@@ -54,6 +57,8 @@ public final class RouteReader implements Closeable, Iterator<RouteReader.Row> {
     private final boolean aliceHasFibre;
     private final boolean bobHasFibre;
     private long position;
+    private long rows;
+    private String broken;
 
     /**
      * A row of the table.
@@ -63,15 +68,6 @@ public final class RouteReader implements Closeable, Iterator<RouteReader.Row> {
      * @param problem what is wrong with the row, with file and line; null if it is good
      */
     public record Row(long line, Route route, String problem) {}
-
-    /** The table breaks off in the middle. */
-    public static final class BrokenTableException extends RuntimeException {
-        private static final long serialVersionUID = 1L;
-
-        BrokenTableException(String message, Throwable cause) {
-            super(Printable.line(message), cause);
-        }
-    }
 
     private RouteReader(String file, CSVParser parser, Scenario template) {
         this.file = file;
@@ -90,54 +86,88 @@ public final class RouteReader implements Closeable, Iterator<RouteReader.Row> {
      */
     public static RouteReader of(String file, Scenario template) throws TableException {
         try {
-            BufferedReader text = Files.newBufferedReader(Path.of(file), StandardCharsets.UTF_8);
-            text.mark(1);
-            if (text.read() != BYTE_ORDER_MARK) {
-                text.reset();
+            if (Files.isDirectory(Path.of(file))) {
+                throw new TableException(file + ": found a directory; allowed a table");
             }
-            CSVParser parser = CSVFormat.RFC4180
-                    .builder()
-                    .setHeader()
-                    .setSkipHeaderRecord(true)
-                    .setDuplicateHeaderMode(DuplicateHeaderMode.DISALLOW)
-                    .setIgnoreEmptyLines(true)
-                    .setTrim(true)
-                    .get()
-                    .parse(text);
-            RouteReader reader = new RouteReader(file, parser, template);
+            return checked(new RouteReader(file, parser(file), template));
+        } catch (NoSuchFileException e) {
+            throw new TableException(file + ": no such file");
+        } catch (InvalidPathException e) {
+            throw new TableException(file + ": not a file name on this system");
+        } catch (UncheckedIOException e) {
+            throw new TableException(file + ":1: " + broken(e.getCause()));
+        } catch (IOException e) {
+            throw new TableException(file + ":1: " + broken(e));
+        }
+    }
+
+    private static CSVParser parser(String file) throws IOException {
+        BufferedReader text = Files.newBufferedReader(Path.of(file), StandardCharsets.UTF_8);
+        text.mark(1);
+        if (text.read() != BYTE_ORDER_MARK) {
+            text.reset();
+        }
+        return CSVFormat.RFC4180
+                .builder()
+                .setHeader()
+                .setSkipHeaderRecord(true)
+                .setIgnoreEmptyLines(true)
+                .setTrim(true)
+                .setAllowMissingColumnNames(true)
+                .setDuplicateHeaderMode(DuplicateHeaderMode.ALLOW_ALL)
+                .get()
+                .parse(text);
+    }
+
+    private static RouteReader checked(RouteReader reader) throws TableException, IOException {
+        try {
             reader.checkHeader();
             return reader;
-        } catch (InvalidPathException | IOException e) {
-            throw new TableException(file + ": not readable");
-        } catch (IllegalArgumentException e) {
-            throw new TableException(file + ":1: a column has no name, or two have the same");
-        } catch (UncheckedIOException e) {
-            throw new TableException(file + ": not readable as CSV in UTF-8");
+        } catch (TableException e) {
+            reader.close();
+            throw e;
         }
     }
 
     private void checkHeader() throws TableException {
         List<String> header = parser.getHeaderNames();
-        for (String column : header) {
-            if (!KNOWN.contains(column)) {
-                List<String> near = Nearest.to(column, KNOWN);
-                throw new TableException(Printable.line(file + ":1: unknown column \"" + column + "\"; "
-                        + (near.isEmpty()
-                                ? "allowed " + String.join(", ", KNOWN)
-                                : "did you mean " + String.join(" or ", near) + "?")));
-            }
+        if (header.isEmpty()) {
+            throw new TableException(file + ": found an empty table; allowed a header and a row for each route");
+        }
+        for (int i = 0; i < header.size(); i++) {
+            checkColumn(header.get(i), header.subList(0, i));
         }
         if (!header.contains(NAME)) {
-            throw new TableException(file + ":1: missing column name");
+            throw wrongHeader("missing column " + NAME);
         }
         arm(header, "alice", aliceHasFibre);
         arm(header, "bob", bobHasFibre);
     }
 
+    private void checkColumn(String column, List<String> before) throws TableException {
+        if (column.isEmpty()) {
+            throw wrongHeader("column " + (before.size() + 1) + " has no name");
+        }
+        if (!KNOWN.contains(column)) {
+            List<String> near = Nearest.to(column, KNOWN);
+            throw wrongHeader("unknown column \"" + column + "\"; "
+                    + (near.isEmpty()
+                            ? "allowed " + String.join(", ", KNOWN)
+                            : "did you mean " + String.join(" or ", near) + "?"));
+        }
+        if (before.contains(column)) {
+            throw wrongHeader("found column " + column + " twice; allowed once");
+        }
+    }
+
     private void arm(List<String> header, String arm, boolean needed) throws TableException {
         if (needed && !header.contains(arm + ".lengthKm") && !header.contains(arm + ".measuredLossDb")) {
-            throw new TableException(file + ":1: missing column " + arm + ".lengthKm or " + arm + ".measuredLossDb");
+            throw wrongHeader("missing column " + arm + ".lengthKm or " + arm + ".measuredLossDb");
         }
+    }
+
+    private TableException wrongHeader(String reason) {
+        return new TableException(file + ":" + Math.max(1, parser.getCurrentLineNumber()) + ": " + reason);
     }
 
     /** How far the reading has come, in characters. */
@@ -145,24 +175,44 @@ public final class RouteReader implements Closeable, Iterator<RouteReader.Row> {
         return position;
     }
 
+    /** Whether another row follows; not behind a place where the table is no CSV, see {@link #checkWhole}. */
     @Override
     public boolean hasNext() {
+        long start = parser.getCurrentLineNumber() + 1;
         try {
-            return records.hasNext();
+            return broken == null && records.hasNext();
         } catch (UncheckedIOException e) {
-            throw new BrokenTableException(broken(e), e);
+            broken = file + ":" + start + ": " + broken(e.getCause());
+            return false;
         }
     }
 
-    private String broken(UncheckedIOException e) {
-        String reason = e.getCause() instanceof CSVException ? "a quoted cell is not closed" : "not readable";
-        return file + ":" + parser.getCurrentLineNumber() + ": " + reason;
+    /**
+     * Says whether the rows were read to the end of the table, and whether there were any.
+     *
+     * @throws TableException if the table breaks off, or has no row below its header
+     */
+    public void checkWhole() throws TableException {
+        if (broken != null) {
+            throw new TableException(broken);
+        }
+        if (rows == 0) {
+            throw new TableException(file + ": found no routes below the header; allowed a row for each");
+        }
+    }
+
+    private static String broken(IOException reason) {
+        if (reason instanceof CharacterCodingException) {
+            return "not UTF-8 text";
+        }
+        return reason instanceof CSVException ? "a quoted cell is not closed as it should be" : "not readable";
     }
 
     @Override
     public Row next() {
         long line = parser.getCurrentLineNumber() + 1;
         CSVRecord cells = records.next();
+        rows++;
         position = cells.getCharacterPosition();
         long at = Math.max(2, Math.min(line, parser.getCurrentLineNumber()));
         try {
@@ -178,6 +228,10 @@ public final class RouteReader implements Closeable, Iterator<RouteReader.Row> {
             throw new IllegalArgumentException("found " + cells.size() + " cells; allowed " + expected);
         }
         String name = text(cells, NAME).orElseThrow(() -> new IllegalArgumentException("name: found an empty cell"));
+        if (name.length() > LONGEST_NAME) {
+            throw new IllegalArgumentException(
+                    "name: found " + name.length() + " characters; allowed at most " + LONGEST_NAME);
+        }
         return new Route(name, arm(cells, "alice", aliceHasFibre), arm(cells, "bob", bobHasFibre));
     }
 
