@@ -16,6 +16,7 @@ import binspan.study.box.OperatingBox;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 
@@ -45,7 +46,7 @@ final class BoxReports {
         description.put("vary", StudyDescription.ranges(box.question().axes()));
         description.put("requirements", StudyDescription.requirements(RequiredFigure.of(scenario.require())));
         Map<String, Object> found = new LinkedHashMap<>();
-        found.put("sense", box.question().sense().name().toLowerCase(java.util.Locale.ROOT));
+        found.put("sense", box.question().sense().name().toLowerCase(Locale.ROOT));
         found.put("centred", box.question().centred());
         found.put("volumeShare", box.volumeShare());
         found.put("tolerance", box.tolerance());

@@ -1,6 +1,7 @@
 package binspan.planner.report;
 
 import java.util.List;
+import java.util.Locale;
 
 /** Scenario paths in words: {@code both.detectors.jitterFwhmPs} is "jitter FWHM, both sides' detectors". */
 public final class ParameterWords {
@@ -107,8 +108,7 @@ public final class ParameterWords {
         }
         String text = words.toString();
         for (String word : CAPITALS) {
-            text = text.replaceAll(
-                    "\\b" + word + "\\b", word.equals("rms") ? "rms" : word.toUpperCase(java.util.Locale.ROOT));
+            text = text.replaceAll("\\b" + word + "\\b", word.equals("rms") ? "rms" : word.toUpperCase(Locale.ROOT));
         }
         return text;
     }
