@@ -74,6 +74,19 @@ public final class RegionPicture {
         return new Lattice(x, y, values);
     }
 
+    /** Where the rows of a two-parameter table meet all requirements: 1, elsewhere -1. */
+    static Lattice met(List<binspan.study.Axis> axes, StudyTable table) {
+        double[] x = axes.get(0).values();
+        double[] y = axes.get(1).values();
+        double[][] values = new double[y.length][x.length];
+        for (int i = 0; i < x.length; i++) {
+            for (int j = 0; j < y.length; j++) {
+                values[j][i] = table.meets(i * y.length + j) ? 1.0 : -1.0;
+            }
+        }
+        return new Lattice(x, y, values);
+    }
+
     /** Border, contours, the planned and the best point of a region. */
     static Overlays overlays(Scenario scenario, RegionMap map, List<BoxOutline> boxes) {
         List<Contour> contours = new ArrayList<>();

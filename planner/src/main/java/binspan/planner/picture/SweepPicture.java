@@ -97,9 +97,21 @@ public final class SweepPicture {
         }
     }
 
+    /** The solved region; over whole numbers, which have nothing between, as the rows say. */
+    private static Overlays overlays(Scenario scenario, List<Axis> axes, StudyTable table) {
+        if (RequiredFigure.of(scenario.require()).isEmpty()) {
+            return Overlays.NONE;
+        }
+        try {
+            RegionMap region = RegionPicture.region(scenario, axes);
+            return RegionPicture.overlays(scenario, region, List.of());
+        } catch (IllegalArgumentException e) {
+            return Overlays.NONE.withMargin(RegionPicture.met(axes, table));
+        }
+    }
+
     private static Picture maps(Scenario scenario, List<Axis> axes, StudyTable table, List<Integer> columns) {
-        RegionMap region = RegionPicture.region(scenario, axes);
-        Overlays overlays = region == null ? Overlays.NONE : RegionPicture.overlays(scenario, region, List.of());
+        Overlays overlays = overlays(scenario, axes, table);
         List<Panel> panels = new ArrayList<>();
         for (int column : columns) {
             FigureColumn figure = table.columns().get(column);

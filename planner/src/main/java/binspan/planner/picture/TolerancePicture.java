@@ -44,7 +44,10 @@ public final class TolerancePicture {
         for (FigureStatistics figure : shown(result)) {
             panels.add(histogram(result, figure));
         }
-        List<Panel> parts = new ArrayList<>(List.of(new PanelGroup("", COLUMNS, panels)));
+        List<Panel> parts = new ArrayList<>();
+        if (!panels.isEmpty()) {
+            parts.add(new PanelGroup("", COLUMNS, panels));
+        }
         if (!result.requirements().isEmpty()) {
             parts.add(drivers(result));
         }
@@ -68,6 +71,11 @@ public final class TolerancePicture {
                     .filter(figure -> Double.isFinite(figure.mean()))
                     .findFirst()
                     .ifPresent(shown::add);
+        }
+        if (shown.isEmpty()) {
+            result.figures().stream()
+                    .filter(figure -> Double.isFinite(figure.mean()))
+                    .forEach(shown::add);
         }
         return shown.subList(0, Math.min(MOST_HISTOGRAMS, shown.size()));
     }
@@ -103,9 +111,12 @@ public final class TolerancePicture {
     }
 
     /** Equal bins between the outermost values. */
-    static List<Bin> bins(double[] values) {
-        double least = Arrays.stream(values).min().orElse(0.0);
-        double largest = Arrays.stream(values).max().orElse(1.0);
+    static List<Bin> bins(double... values) {
+        if (values.length == 0) {
+            return List.of();
+        }
+        double least = Arrays.stream(values).min().orElseThrow();
+        double largest = Arrays.stream(values).max().orElseThrow();
         double width = largest > least ? (largest - least) / BINS : Math.max(1e-12, Math.abs(least) * 1e-3);
         double[] counts = new double[BINS];
         for (double value : values) {
