@@ -3,7 +3,9 @@ package binspan.study.comparison;
 import binspan.prediction.LinkPrediction;
 import binspan.prediction.Requirement;
 import binspan.prediction.RequirementMargins;
+import binspan.scenario.Parameter;
 import binspan.scenario.Scenario;
+import binspan.study.Axis;
 import binspan.study.DefaultAxes;
 import binspan.study.Execution;
 import binspan.study.PointEvaluator;
@@ -38,6 +40,11 @@ public record RouteSurvey(Scenario template, boolean tuned) {
             double leastMargin,
             Requirement tightest,
             String refusal) {}
+
+    /** The parameters that are tuned for every route, in the order of a table; none where nothing is tuned. */
+    public List<Parameter> parameters() {
+        return tuned ? DefaultAxes.tuned(template).stream().map(Axis::parameter).toList() : List.of();
+    }
 
     /**
      * Judges a batch of routes, in their order.

@@ -63,11 +63,8 @@ final class CompareCommand implements Callable<Integer> {
     @Mixin
     private CompareOptions options;
 
-    @Option(
-            names = "--for",
-            paramLabel = "OBJECTIVE",
-            description = "What each link is tuned and ranked for: key, visibility, chsh or margin.")
-    private String objective;
+    @Mixin
+    private ObjectiveOption objective;
 
     @Option(names = "--as-written", description = "Keep the settings as written; tune nothing.")
     private boolean asWritten;
@@ -101,13 +98,13 @@ final class CompareCommand implements Callable<Integer> {
     }
 
     private Objective wanted(List<Scenario> scenarios) throws UsageException {
-        Objective natural = Objectives.of(objective, scenarios.get(0));
+        Objective first = objective.of(scenarios.get(0));
         for (Scenario scenario : scenarios) {
-            if (objective == null && Objectives.of(null, scenario) != natural) {
+            if (objective.of(scenario) != first) {
                 throw UsageException.of("not all of these links make a key; say what to compare them for: --for chsh");
             }
         }
-        return natural;
+        return first;
     }
 
     private String title(List<Scenario> scenarios) {

@@ -3,6 +3,7 @@ package binspan.planner.cli;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.DefaultAxes;
+import binspan.study.tuning.Tuning;
 import java.util.ArrayList;
 import java.util.List;
 import picocli.CommandLine.Option;
@@ -22,6 +23,17 @@ final class FreeOptions {
     /** Whether the option was given. */
     boolean given() {
         return !texts.isEmpty();
+    }
+
+    /**
+     * The free parameters that were named, or the usual ones of a tuning.
+     *
+     * @throws UsageException if a path or a range is wrong, if there are too many, or if the usual ones have no range
+     */
+    List<Axis> axes(Scenario scenario) throws UsageException {
+        return given()
+                ? axes(scenario, Tuning.MOST_FREE)
+                : UsageException.unless(NAME, () -> DefaultAxes.tuned(scenario));
     }
 
     /**

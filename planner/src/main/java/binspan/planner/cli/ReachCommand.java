@@ -68,11 +68,8 @@ final class ReachCommand implements Callable<Integer> {
     @Mixin
     private FreeOptions free;
 
-    @Option(
-            names = "--for",
-            paramLabel = "OBJECTIVE",
-            description = "What is tuned for while the requirements hold: key, visibility, chsh or margin.")
-    private String objective;
+    @Mixin
+    private ObjectiveOption objective;
 
     @Option(names = "--as-written", description = "Keep the settings as written; tune nothing.")
     private boolean asWritten;
@@ -91,8 +88,8 @@ final class ReachCommand implements Callable<Integer> {
         if (asWritten && free.given()) {
             throw UsageException.of("--as-written: tunes nothing, and --free names what to tune; give one of them");
         }
-        Objective wanted = Objectives.of(objective, scenario);
-        List<Axis> axes = asWritten ? List.of() : Objectives.free(free, scenario);
+        Objective wanted = objective.of(scenario);
+        List<Axis> axes = asWritten ? List.of() : free.axes(scenario);
         List<FigureColumn> columns = FigureColumns.all(scenario);
         boolean fibre = new LinkLength().value(scenario).orElse(0.0) > 0.0;
         String blamed = fibre && free.given() ? "--free" : input.file();

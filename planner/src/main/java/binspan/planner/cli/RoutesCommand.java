@@ -9,6 +9,7 @@ import binspan.planner.table.StudyRows;
 import binspan.planner.table.Table;
 import binspan.planner.table.TableException;
 import binspan.planner.table.TableJson;
+import binspan.scenario.Parameter;
 import binspan.scenario.Scenario;
 import binspan.study.FigureColumn;
 import binspan.study.FigureColumns;
@@ -84,8 +85,10 @@ final class RoutesCommand implements Callable<Integer> {
         output.check(input.file(), routes);
         Scenario template = input.read(console);
         List<FigureColumn> columns = FigureColumns.all(template);
-        try (RouteLedger ledger = new RouteLedger(columns)) {
-            RouteJudge judge = new RouteJudge(new RouteSurvey(template, tune), ledger, console);
+        RouteSurvey survey = new RouteSurvey(template, tune);
+        List<Parameter> parameters = UsageException.unless("--tune", survey::parameters);
+        try (RouteLedger ledger = new RouteLedger(parameters, columns)) {
+            RouteJudge judge = new RouteJudge(survey, ledger, console);
             judge.judge(routes);
             output.deliver(report(template, ledger, judge.bad()), console);
             return judge.bad() > 0
@@ -122,21 +125,25 @@ final class RoutesCommand implements Callable<Integer> {
     }
 
     private static Table table(RouteLedger ledger) {
-        List<String> header = new ArrayList<>(List.of("rank", "name", "line"));
+        List<String> header = new ArrayList<>();
+        ledger.parameters().forEach(parameter -> header.add(parameter.path()));
         ledger.columns().forEach(column -> header.add(column.name()));
-        header.addAll(List.of("leastMargin", "tightest", "reason", StudyRows.MEETS));
+        header.addAll(List.of("rank", "name", "line", "leastMargin", "tightest", "reason", StudyRows.MEETS));
         return new Table(
                 header,
                 writer -> ledger.ranked((rank, entry) -> {
-                    writer.number(rank);
-                    writer.text(entry.name());
-                    writer.number((double) entry.line());
+                    for (double setting : entry.settings()) {
+                        writer.number(setting);
+                    }
                     for (int i = 0; i < ledger.columns().size(); i++) {
                         writer.number(
                                 entry.figures().isEmpty()
                                         ? Double.NaN
                                         : entry.figures().get(i));
                     }
+                    writer.number(rank);
+                    writer.text(entry.name());
+                    writer.number((double) entry.line());
                     writer.number(entry.leastMargin());
                     writer.text(entry.tightest());
                     writer.text(entry.reason());

@@ -20,7 +20,6 @@ import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
-import picocli.CommandLine.Option;
 
 /** The command {@code binspan tune}. */
 @Command(
@@ -58,12 +57,8 @@ final class TuneCommand implements Callable<Integer> {
     @Mixin
     private FreeOptions free;
 
-    @Option(
-            names = "--for",
-            paramLabel = "OBJECTIVE",
-            description = "What is made as large as possible: key, visibility, chsh or margin (the least margin of all"
-                    + " requirements); the key if not given, S where the detectors allow no key.")
-    private String objective;
+    @Mixin
+    private ObjectiveOption objective;
 
     @Mixin
     private StudyOutput output;
@@ -76,8 +71,8 @@ final class TuneCommand implements Callable<Integer> {
     public Integer call() throws InvalidScenarioException, UsageException, OutputFileException {
         output.check(input.file());
         Scenario scenario = input.read(console);
-        Objective wanted = Objectives.of(objective, scenario);
-        List<Axis> axes = Objectives.free(free, scenario);
+        Objective wanted = objective.of(scenario);
+        List<Axis> axes = free.axes(scenario);
         Tuning tuning = UsageException.unless("--free", () -> Tuning.of(scenario, axes, wanted));
         Tuning.Outcome outcome = ProgressBar.during(console, tuning::run);
         if (!outcome.feasible()) {

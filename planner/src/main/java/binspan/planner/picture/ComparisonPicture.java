@@ -7,12 +7,14 @@ import binspan.planner.plot.Picture;
 import binspan.planner.plot.RankedBars;
 import binspan.planner.plot.RequirementLine;
 import binspan.planner.report.FigureText;
+import binspan.planner.report.ReachSummary;
 import binspan.prediction.Requirement;
 import binspan.study.comparison.Comparison;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.DoubleFunction;
 import java.util.function.ToDoubleFunction;
 
 /** Links side by side: key rate, visibility and reach of each, in the order of their rank. */
@@ -30,20 +32,23 @@ public final class ComparisonPicture {
                 "Secret key rate",
                 "bit/s",
                 Requirement.KEY_RATE,
-                e -> e.prediction().key().asymptoticPerSecond()));
+                e -> e.prediction().key().asymptoticPerSecond(),
+                rate -> FigureText.of(rate, "bit/s")));
         panels.add(panel(
                 entries,
                 "Raw visibility",
                 "",
                 Requirement.RAW_VISIBILITY,
-                e -> e.prediction().fringe().raw()));
+                e -> e.prediction().fringe().raw(),
+                visibility -> FigureText.of(visibility, "")));
         if (entries.stream().anyMatch(entry -> entry.tightest() != null)) {
             panels.add(panel(
                     entries,
                     "Reach of all requirements",
                     "km",
                     null,
-                    e -> e.reachKm().orElse(Double.NaN)));
+                    e -> e.reachKm().orElse(Double.NaN),
+                    km -> ReachSummary.km(OptionalDouble.of(km))));
         }
         boolean tuned = entries.stream().anyMatch(entry -> !entry.free().isEmpty());
         String settings = tuned ? "each tuned for itself" : "settings as written";
@@ -60,11 +65,12 @@ public final class ComparisonPicture {
             String name,
             String unit,
             Requirement requirement,
-            ToDoubleFunction<Comparison.Entry> reading) {
+            ToDoubleFunction<Comparison.Entry> reading,
+            DoubleFunction<String> words) {
         double[] values = entries.stream().mapToDouble(reading).toArray();
         List<Bar> bars = new ArrayList<>();
         for (int i = 0; i < values.length; i++) {
-            String text = Double.isFinite(values[i]) ? FigureText.of(values[i], unit) : "none";
+            String text = Double.isFinite(values[i]) ? words.apply(values[i]) : "none";
             bars.add(new Bar(
                     Double.isFinite(values[i]) ? values[i] : Double.NaN,
                     entries.get(i).meets(),

@@ -82,7 +82,9 @@ final class CurvesChart {
         }
         heading(plot, panel, first);
         bands(plot);
-        panel.requirement().ifPresent(requirement -> limit(plot, panel.y(), requirement, range));
+        panel.requirement()
+                .ifPresent(requirement ->
+                        Limits.labelled(plot, panel.y(), requirement, range, AxisLocation.BOTTOM_OR_RIGHT));
         return plot;
     }
 
@@ -117,17 +119,6 @@ final class CurvesChart {
                     .addAnnotation(
                             new MetStretch(Double.isNaN(from) ? Double.NEGATIVE_INFINITY : from, to), Layer.BACKGROUND);
         }
-    }
-
-    private static void limit(XYPlot plot, Axis axis, RequirementLine requirement, Range range) {
-        double position = axis.position(requirement.value());
-        if (Double.isNaN(position)) {
-            return;
-        }
-        plot.getRenderer().addAnnotation(FailingSide.ofRange(position, requirement.atLeast()), Layer.BACKGROUND);
-        Limits.line(plot, position);
-        plot.setRangeAxis(1, new LabelAxis("", List.of(new Mark(requirement.label(), position)), range));
-        plot.setRangeAxisLocation(1, AxisLocation.BOTTOM_OR_RIGHT);
     }
 
     private SparseMarkers renderer(CurvePanel panel) {

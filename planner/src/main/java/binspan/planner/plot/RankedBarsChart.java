@@ -10,7 +10,6 @@ import org.jfree.chart.axis.AxisLocation;
 import org.jfree.chart.plot.CombinedDomainXYPlot;
 import org.jfree.chart.plot.PlotOrientation;
 import org.jfree.chart.plot.XYPlot;
-import org.jfree.chart.ui.Layer;
 import org.jfree.chart.ui.RectangleInsets;
 import org.jfree.chart.ui.TextAnchor;
 import org.jfree.data.Range;
@@ -70,7 +69,9 @@ final class RankedBarsChart {
         if (series.isEmpty() && panel.bars().stream().allMatch(bar -> bar.text().isEmpty())) {
             PlotStyle.sayEmpty(plot);
         }
-        panel.requirement().ifPresent(requirement -> limit(plot, panel.value(), requirement, range));
+        panel.requirement()
+                .ifPresent(requirement ->
+                        Limits.labelled(plot, panel.value(), requirement, range, AxisLocation.TOP_OR_RIGHT));
         return plot;
     }
 
@@ -134,17 +135,6 @@ final class RankedBarsChart {
                 plot.addAnnotation(text);
             }
         }
-    }
-
-    private static void limit(XYPlot plot, Axis axis, RequirementLine requirement, Range range) {
-        double position = axis.position(requirement.value());
-        if (Double.isNaN(position)) {
-            return;
-        }
-        plot.getRenderer().addAnnotation(FailingSide.ofRange(position, requirement.atLeast()), Layer.BACKGROUND);
-        Limits.line(plot, position);
-        plot.setRangeAxis(1, new LabelAxis("", List.of(new Mark(requirement.label(), position)), range));
-        plot.setRangeAxisLocation(1, AxisLocation.TOP_OR_RIGHT);
     }
 
     private List<LegendItem> legend() {

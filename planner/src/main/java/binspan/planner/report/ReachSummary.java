@@ -59,8 +59,8 @@ public final class ReachSummary {
         }
     }
 
-    /** A reach; to a tenth of a kilometre below ten. */
-    static String km(OptionalDouble length) {
+    /** A reach in whole kilometres, rounded down; to a tenth below ten. */
+    public static String km(OptionalDouble length) {
         if (length.isEmpty()) {
             return "nowhere";
         }

@@ -1,6 +1,7 @@
 package binspan.planner.table;
 
 import binspan.prediction.FiniteKeyOutlook;
+import binspan.scenario.Parameter;
 import binspan.study.FigureColumn;
 import binspan.study.comparison.RouteSurvey;
 import java.io.BufferedOutputStream;
@@ -30,6 +31,7 @@ public final class RouteLedger implements Closeable {
     /** Least margins that differ by less are taken as equal; then the higher key counts. */
     private static final double SAME_MARGIN = 1e-3;
 
+    private final List<Parameter> parameters;
     private final List<FigureColumn> columns;
     private final Path file;
     private final OutputStream out;
@@ -49,6 +51,7 @@ public final class RouteLedger implements Closeable {
      * @param leastMargin least margin; NaN where it cannot be judged or nothing is required
      * @param tightest the requirement with the least margin, empty where none is stated
      * @param reason why it fails, empty if it does not
+     * @param settings values of the parameters that are kept, in the units of their paths; NaN where it cannot be judged
      * @param figures figures of merit; empty where it cannot be judged
      */
     public record Entry(
@@ -58,18 +61,26 @@ public final class RouteLedger implements Closeable {
             double leastMargin,
             String tightest,
             String reason,
+            List<Double> settings,
             List<Double> figures) {}
 
     /**
      * An empty ledger.
      *
+     * @param parameters parameters whose values to keep: the tuned ones
      * @param columns figures of merit to keep
      */
-    public RouteLedger(List<FigureColumn> columns) throws IOException {
+    public RouteLedger(List<Parameter> parameters, List<FigureColumn> columns) throws IOException {
+        this.parameters = List.copyOf(parameters);
         this.columns = List.copyOf(columns);
         this.file = Files.createTempFile("binspan-routes", ".tmp");
         file.toFile().deleteOnExit();
         this.out = new BufferedOutputStream(Files.newOutputStream(file));
+    }
+
+    /** Parameters whose values are kept. */
+    public List<Parameter> parameters() {
+        return parameters;
     }
 
     /** Figures of merit that are kept. */
@@ -123,8 +134,13 @@ public final class RouteLedger implements Closeable {
         data.writeDouble(verdict.leastMargin());
         data.writeUTF(verdict.tightest() == null ? "" : verdict.tightest().fieldName());
         data.writeUTF(reason);
-        data.writeBoolean(verdict.refusal() == null);
-        if (verdict.refusal() == null) {
+        boolean judged = verdict.refusal() == null;
+        for (Parameter parameter : parameters) {
+            data.writeDouble(
+                    judged ? parameter.value(verdict.prediction().scenario()).orElse(Double.NaN) : Double.NaN);
+        }
+        data.writeBoolean(judged);
+        if (judged) {
             FiniteKeyOutlook finite = FiniteKeyOutlook.of(verdict.prediction());
             for (FigureColumn column : columns) {
                 data.writeDouble(column.of(verdict.prediction(), finite));
@@ -170,13 +186,17 @@ public final class RouteLedger implements Closeable {
         double margin = in.readDouble();
         String tightest = in.readUTF();
         String reason = in.readUTF();
-        List<Double> figures = new ArrayList<>();
-        if (in.readBoolean()) {
-            for (int i = 0; i < columns.size(); i++) {
-                figures.add(in.readDouble());
-            }
+        List<Double> settings = numbers(in, parameters.size());
+        List<Double> figures = numbers(in, in.readBoolean() ? columns.size() : 0);
+        return new Entry(name, line, meets, margin, tightest, reason, settings, figures);
+    }
+
+    private static List<Double> numbers(DataInputStream in, int count) throws IOException {
+        List<Double> numbers = new ArrayList<>();
+        for (int i = 0; i < count; i++) {
+            numbers.add(in.readDouble());
         }
-        return new Entry(name, line, meets, margin, tightest, reason, figures);
+        return numbers;
     }
 
     @Override

@@ -144,6 +144,25 @@ final class CompareCommandTest {
         StudyRun.check(StudyRun.shipped("harrow-ridge-overhead-line")).assertSame(rows.get(1), STUDY.figures(), 1e-12);
     }
 
+    /** Whichever file comes first. */
+    @Test
+    void linkWithoutKeyIsNotComparedForIt() throws IOException {
+        String onePort =
+                StudyRun.shipped("stonebridge-to-lower-weir").replaceFirst("\\},\\s+\\{ \"class\": [^}]+\\}", "}");
+        StudyRun single = StudyRun.of("compare", directory, StudyRun.requiring(onePort, "\"chshAtLeast\": 2.5"));
+        for (Run run : List.of(STUDY.run(single.file(), "--for", "key"), single.run(STUDY.file(), "--for", "key"))) {
+            assertThat(run)
+                    .isEqualTo(new Run(
+                            ExitStatus.REFUSED,
+                            "",
+                            "binspan: --for key: this link makes no key: both sides need both ports detected\n"));
+        }
+        assertThat(STUDY.run(single.file()).err())
+                .isEqualTo("binspan: not all of these links make a key; say what to compare them for: --for chsh\n");
+        assertThat(STUDY.run(single.file(), "--for", "chsh", "--as-written").status())
+                .isEqualTo(ExitStatus.MET);
+    }
+
     @Test
     void filesOfTheSameNameAreToldApartByTheirFiles() throws IOException {
         Path copy = Files.writeString(

@@ -289,7 +289,7 @@ final class StudyPicturesTest {
 
     private RouteLedger ledger(String rows) throws Exception {
         Path table = Files.writeString(directory.resolve("routes.csv"), "name,alice.lengthKm,bob.lengthKm\n" + rows);
-        RouteLedger ledger = new RouteLedger(FigureColumns.all(DAM));
+        RouteLedger ledger = new RouteLedger(List.of(), FigureColumns.all(DAM));
         List<Route> routes = new ArrayList<>();
         try (RouteReader reader = RouteReader.of(table.toString(), DAM)) {
             while (reader.hasNext()) {
