@@ -5,7 +5,7 @@ package binspan.planner.report;
  *
  * <p>The usual size of each (common practice) only orders quantities that are planned at 0 among the others.
  */
-enum DriftWords {
+public enum DriftWords {
     LENGTH("lengthKm", "fibre length, both arms", 50.0),
     CABLE_TEMPERATURE("cableTemperatureStepK", "cable temperature step", 1.0),
     WINDOW("windowWidthPs", "window width", 400.0),
@@ -33,13 +33,13 @@ enum DriftWords {
     }
 
     /** The quantity of a path in words, with its site or port. */
-    static String of(String path) {
+    public static String of(String path) {
         DriftWords known = find(path);
         return known == null ? path : place(path) + known.words;
     }
 
     /** Room as a share of the planned value, or of the usual size where 0 is planned. */
-    static double relativeRoom(String path, double planned, double limit) {
+    public static double relativeRoom(String path, double planned, double limit) {
         DriftWords known = find(path);
         double size = planned != 0.0 ? Math.abs(planned) : known == null ? 1.0 : known.usual;
         return Math.abs(limit - planned) / size;

@@ -3,7 +3,7 @@ package binspan.planner.report;
 import binspan.units.Digits;
 
 /** Figures for a person: three significant digits, a unit each, durations and rates in the size that one says aloud. */
-final class Figure {
+public final class Figure {
     private static final int DIGITS = 3;
     private static final double THOUSAND = 1000.0;
     private static final double PERCENT = 100.0;
@@ -16,67 +16,67 @@ final class Figure {
     private Figure() {}
 
     /** Three significant digits without a unit, for bare ratios. */
-    static String bare(double value) {
+    public static String bare(double value) {
         return Digits.significant(value, DIGITS);
     }
 
     /** Three significant digits and a unit that takes no prefix. */
-    static String in(double value, String unit) {
+    public static String in(double value, String unit) {
         return unit.isEmpty() ? bare(value) : bare(value) + " " + unit;
     }
 
     /** A number with a count of digits and a unit. */
-    static String digits(double value, int digits, String unit) {
+    public static String digits(double value, int digits, String unit) {
         String number = Digits.significant(value, digits);
         return unit.isEmpty() ? number : number + " " + unit;
     }
 
     /** A number as it was stated, floating-point dust left out. */
-    static String stated(double value, String unit) {
+    public static String stated(double value, String unit) {
         String number = Digits.shortest(value, FINEST);
         return unit.isEmpty() ? number : number + " " + unit;
     }
 
     /** A rate: prefixed from a thousand on, for example {@code 2.10 kbit/s} or {@code 0.0123 /s}. */
-    static String rate(double perSecond, String unit) {
+    public static String rate(double perSecond, String unit) {
         boolean large = perSecond != 0.0 && Double.isFinite(perSecond) && Digits.exponent(perSecond, DIGITS) >= DIGITS;
         return large ? Digits.prefixed(perSecond, unit, DIGITS) : in(perSecond, unit);
     }
 
     /** Counts per second. */
-    static String counts(double perSecond) {
+    public static String counts(double perSecond) {
         return rate(perSecond, "/s");
     }
 
     /** Stated counts per second, without zeros at their end. */
-    static String statedCounts(double perSecond) {
+    public static String statedCounts(double perSecond) {
         return perSecond < THOUSAND ? stated(perSecond, "/s") : Digits.shortestPrefixed(perSecond, "/s", FINEST);
     }
 
     /** A stated rate of pairs. */
-    static String statedPairs(double perSecond) {
+    public static String statedPairs(double perSecond) {
         return perSecond < THOUSAND
                 ? stated(perSecond, "pairs/s")
                 : Digits.shortestPrefixed(perSecond, " pairs/s", FINEST);
     }
 
     /** Bits per second. */
-    static String bits(double perSecond) {
+    public static String bits(double perSecond) {
         return rate(perSecond, "bit/s");
     }
 
     /** A ratio as a percentage. */
-    static String percent(double ratio) {
+    public static String percent(double ratio) {
         return Digits.significant(ratio * PERCENT, Math.abs(ratio) < 1e-4 ? 1 : DIGITS) + " %";
     }
 
     /** A loss, to a tenth of a decibel. */
-    static String decibels(double lossDb) {
+    public static String decibels(double lossDb) {
         return Digits.decimals(lossDb, 1) + " dB";
     }
 
     /** A time in the unit that a person would choose. */
-    static String duration(double seconds) {
+    public static String duration(double seconds) {
         if (!(seconds < 2.0 * YEAR)) {
             return Double.isFinite(seconds) ? bare(seconds / YEAR) + " years" : "never";
         }
@@ -90,7 +90,7 @@ final class Figure {
     }
 
     /** A stated time: the same, without zeros at its end. */
-    static String statedDuration(double seconds) {
+    public static String statedDuration(double seconds) {
         if (seconds < MINUTE || seconds > 2.0 * YEAR) {
             return stated(seconds, "s");
         }
@@ -101,7 +101,7 @@ final class Figure {
     }
 
     /** A value with its error: the error to one digit, two if the first is 1, the value to the same place. */
-    static String withError(double value, double error, TextStyle style) {
+    public static String withError(double value, double error, TextStyle style) {
         if (!(error > 0.0) || !Double.isFinite(error)) {
             return bare(value);
         }
@@ -122,14 +122,14 @@ final class Figure {
     }
 
     /** A difference with its sign, two digits and a unit. */
-    static String signed(double value, String unit) {
+    public static String signed(double value, String unit) {
         String number = Digits.significant(value, 2);
         String sign = value > 0.0 ? "+" : "";
         return sign + (unit.isEmpty() ? number : number + " " + unit);
     }
 
     /** A signed rate, prefixed from a thousand on. */
-    static String signedRate(double perSecond, String unit) {
+    public static String signedRate(double perSecond, String unit) {
         String size = rate(perSecond, unit);
         return perSecond > 0.0 ? "+" + size : size;
     }

@@ -4,7 +4,7 @@ import binspan.prediction.Requirement;
 import binspan.units.Digits;
 
 /** Requirements in the words and units of the trade. */
-final class RequirementWords {
+public final class RequirementWords {
     private static final double HOUR = 3600.0;
     private static final double PERCENT = 100.0;
     private static final int FEWEST_DIGITS = 3;
@@ -13,7 +13,7 @@ final class RequirementWords {
     private RequirementWords() {}
 
     /** Name of the required figure. */
-    static String name(Requirement requirement) {
+    public static String name(Requirement requirement) {
         return switch (requirement) {
             case RAW_VISIBILITY -> "raw visibility";
             case CHSH -> "CHSH S";
@@ -28,7 +28,7 @@ final class RequirementWords {
     }
 
     /** The same within a sentence, behind an article. */
-    static String noun(Requirement requirement) {
+    public static String noun(Requirement requirement) {
         return requirement == Requirement.CAR ? "ratio of coincidences to accidentals" : name(requirement);
     }
 
@@ -54,7 +54,7 @@ final class RequirementWords {
     }
 
     /** The required figure as it was stated. */
-    static String required(Requirement requirement, double value) {
+    public static String required(Requirement requirement, double value) {
         return switch (requirement) {
             case PHASE_QBER, TIME_QBER -> Figure.stated(value * PERCENT, "%");
             case KEY_RATE -> value < 1000.0 ? Figure.stated(value, "bit/s") : Figure.bits(value);
@@ -64,7 +64,7 @@ final class RequirementWords {
     }
 
     /** The predicted figure, with as many digits as it takes to tell it from the required one. */
-    static String predicted(Requirement requirement, double value, double required) {
+    public static String predicted(Requirement requirement, double value, double required) {
         int digits = FEWEST_DIGITS;
         while (digits < MOST_DIGITS && value != required && rounded(value, digits) == required) {
             digits++;
@@ -87,7 +87,7 @@ final class RequirementWords {
     }
 
     /** How much room is left, with its sign, in the requirement's own unit. */
-    static String margin(Requirement requirement, double margin) {
+    public static String margin(Requirement requirement, double margin) {
         return switch (requirement) {
             case PHASE_QBER, TIME_QBER -> Figure.signed(margin * PERCENT, "%");
             case KEY_RATE -> Figure.signedRate(margin, "bit/s");
