@@ -15,6 +15,9 @@ import java.util.List;
 
 /** Coincidences of a pulsed link by bob's arrival, alice's click inside her central window. */
 final class PulsedCoincidences {
+    /** Share of alice's photons of a slot in her central window below which that slot is left out. */
+    private static final double NEVER = 1e-16;
+
     private final LinkPrediction prediction;
     private final TimeBins bins;
     private final ArmLight alice;
@@ -83,6 +86,9 @@ final class PulsedCoincidences {
         double[] central = new double[bins.count()];
         int reach = endless() ? captures.reach() : 1;
         for (int offset = -reach; offset <= reach; offset++) {
+            if (captures.alice(a, offset) < NEVER) {
+                continue;
+            }
             for (int apart = -1; apart <= 1; apart++) {
                 boolean interferes = apart == 0 && (endless() || offset == 0);
                 double weight = interferes ? 1.0 : weight(a, b, offset, offset + apart);
