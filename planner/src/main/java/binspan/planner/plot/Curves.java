@@ -21,7 +21,7 @@ public record Curves(String title, Axis x, List<CurvePanel> panels, List<Interva
     }
 
     @Override
-    public PanelChart chart() {
-        return new CurvesChart(this).build();
+    public PanelChart chart(PlotTheme theme) {
+        return new CurvesChart(this, theme).build();
     }
 }

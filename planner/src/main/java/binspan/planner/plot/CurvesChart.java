@@ -29,11 +29,13 @@ final class CurvesChart {
     private static final double MARGIN = 0.07;
 
     private final Curves curves;
+    private final PlotTheme theme;
     private final Range xPositions;
     private final List<String> names;
     private final boolean several;
 
-    CurvesChart(Curves curves) {
+    CurvesChart(Curves curves, PlotTheme theme) {
+        this.theme = theme;
         this.curves = curves;
         this.xPositions = Positions.of(curves.x(), xValues(), 0.0);
         Set<String> distinct = new LinkedHashSet<>();
@@ -51,7 +53,7 @@ final class CurvesChart {
     }
 
     PanelChart build() {
-        ScaledAxis x = new ScaledAxis(curves.x(), xPositions);
+        ScaledAxis x = new ScaledAxis(curves.x(), xPositions, theme);
         CombinedDomainXYPlot combined = new CombinedDomainXYPlot(x);
         combined.setInsets(RectangleInsets.ZERO_INSETS);
         combined.setGap(6.0);
@@ -61,7 +63,7 @@ final class CurvesChart {
         }
         int count = curves.panels().size();
         int height = AXIS_HEIGHT + count * each();
-        return new PanelChart(PlotStyle.chart(curves.title(), combined), legend(), WIDTH, height);
+        return new PanelChart(PlotStyle.chart(curves.title(), combined, theme), legend(), WIDTH, height);
     }
 
     private int each() {
@@ -72,19 +74,19 @@ final class CurvesChart {
     private XYPlot subplot(CurvePanel panel, boolean first) {
         DoubleStream limit = panel.requirement().stream().mapToDouble(RequirementLine::value);
         Range range = Positions.of(panel.y(), DoubleStream.concat(yValues(panel), limit), MARGIN);
-        ScaledAxis y = new ScaledAxis(panel.y(), range);
+        ScaledAxis y = new ScaledAxis(panel.y(), range, theme);
         y.setLabel(null);
-        XYPlot plot = PlotStyle.plot(null, y);
+        XYPlot plot = PlotStyle.plot(null, y, theme);
         plot.setRenderer(renderer(panel));
         plot.setDataset(dataset(panel));
         if (yValues(panel).map(panel.y()::position).noneMatch(Double::isFinite)) {
-            PlotStyle.sayEmpty(plot);
+            PlotStyle.sayEmpty(plot, theme);
         }
         heading(plot, panel, first);
         bands(plot);
         panel.requirement()
                 .ifPresent(requirement ->
-                        Limits.labelled(plot, panel.y(), requirement, range, AxisLocation.BOTTOM_OR_RIGHT));
+                        new Limits(theme).labelled(plot, panel.y(), requirement, range, AxisLocation.BOTTOM_OR_RIGHT));
         return plot;
     }
 
@@ -99,12 +101,12 @@ final class CurvesChart {
         List<Mark> marks = new ArrayList<>();
         for (Mark mark : curves.marks()) {
             double position = curves.x().position(mark.value());
-            ValueMarker line = new ValueMarker(position, PlotStyle.INK, PlotStyle.MARK);
+            ValueMarker line = new ValueMarker(position, theme.ink().text(), PlotStyle.MARK);
             line.setAlpha(1.0f);
             plot.addDomainMarker(line, Layer.FOREGROUND);
             marks.add(new Mark(mark.label(), position));
         }
-        LabelAxis top = new LabelAxis(panel.y().title(), first ? marks : List.of(), xPositions);
+        LabelAxis top = new LabelAxis(panel.y().title(), first ? marks : List.of(), xPositions, theme);
         top.setLabelLocation(AxisLabelLocation.LOW_END);
         top.setLabelInsets(new RectangleInsets(4.0, 0.0, 4.0, 0.0));
         plot.setDomainAxis(1, top);
@@ -117,7 +119,8 @@ final class CurvesChart {
             double to = curves.x().position(met.upper());
             plot.getRenderer()
                     .addAnnotation(
-                            new MetStretch(Double.isNaN(from) ? Double.NEGATIVE_INFINITY : from, to), Layer.BACKGROUND);
+                            new MetStretch(Double.isNaN(from) ? Double.NEGATIVE_INFINITY : from, to, theme),
+                            Layer.BACKGROUND);
         }
     }
 
@@ -131,7 +134,7 @@ final class CurvesChart {
 
     /** Where each panel has one series, its title says which: all look alike. */
     private SeriesStyle style(Series series) {
-        return SeriesStyle.of(several ? names.indexOf(series.name()) : 0);
+        return SeriesStyle.of(several ? names.indexOf(series.name()) : 0, theme);
     }
 
     private DefaultXYDataset dataset(CurvePanel panel) {
@@ -152,12 +155,14 @@ final class CurvesChart {
 
     private List<LegendItem> legend() {
         Stream<LegendItem> series = several
-                ? names.stream().map(name -> LegendEntries.series(name, SeriesStyle.of(names.indexOf(name))))
+                ? names.stream()
+                        .map(name -> new LegendEntries(theme).series(name, SeriesStyle.of(names.indexOf(name), theme)))
                 : Stream.empty();
-        Stream<LegendItem> met = curves.met().isEmpty() ? Stream.empty() : Stream.of(LegendEntries.met(Limits.ALL_MET));
+        Stream<LegendItem> met =
+                curves.met().isEmpty() ? Stream.empty() : Stream.of(new LegendEntries(theme).met(Limits.ALL_MET));
         boolean limits =
                 curves.panels().stream().anyMatch(panel -> panel.requirement().isPresent());
-        Stream<LegendItem> failing = limits ? Stream.of(Limits.failingEntry()) : Stream.empty();
+        Stream<LegendItem> failing = limits ? Stream.of(new Limits(theme).failingEntry()) : Stream.empty();
         return Stream.of(series, met, failing).flatMap(items -> items).toList();
     }
 }

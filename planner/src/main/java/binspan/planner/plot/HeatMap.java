@@ -11,7 +11,7 @@ package binspan.planner.plot;
  */
 public record HeatMap(String title, Axis x, Axis y, HeatLayer heat, Overlays overlays) implements Panel {
     @Override
-    public PanelChart chart() {
-        return new HeatMapChart(this).build();
+    public PanelChart chart(PlotTheme theme) {
+        return new HeatMapChart(this, theme).build();
     }
 }

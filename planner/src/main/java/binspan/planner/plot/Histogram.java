@@ -22,7 +22,7 @@ public record Histogram(
     }
 
     @Override
-    public PanelChart chart() {
-        return new HistogramChart(this).build();
+    public PanelChart chart(PlotTheme theme) {
+        return new HistogramChart(this, theme).build();
     }
 }

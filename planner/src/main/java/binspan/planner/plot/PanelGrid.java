@@ -31,11 +31,12 @@ final class PanelGrid extends Plot {
     }
 
     /** A group as one chart. */
-    static PanelChart of(PanelGroup group) {
-        List<PanelChart> charts = group.panels().stream().map(Panel::chart).toList();
+    static PanelChart of(PanelGroup group, PlotTheme theme) {
+        List<PanelChart> charts =
+                group.panels().stream().map(panel -> panel.chart(theme)).toList();
         PanelGrid grid = new PanelGrid(charts, Math.min(group.columns(), charts.size()));
         return new PanelChart(
-                PlotStyle.chart(group.title(), grid),
+                PlotStyle.chart(group.title(), grid, theme),
                 charts.stream().flatMap(chart -> chart.legend().stream()).toList(),
                 IntStream.of(grid.widths()).sum(),
                 IntStream.of(grid.heights()).sum());

@@ -19,7 +19,7 @@ public record PanelGroup(String title, int columns, List<Panel> panels) implemen
     }
 
     @Override
-    public PanelChart chart() {
-        return PanelGrid.of(this);
+    public PanelChart chart(PlotTheme theme) {
+        return PanelGrid.of(this, theme);
     }
 }

@@ -15,7 +15,7 @@ public record RangeBars(String title, List<RangeBar> bars) implements Panel {
     }
 
     @Override
-    public PanelChart chart() {
-        return new RangeBarsChart(this).build();
+    public PanelChart chart(PlotTheme theme) {
+        return new RangeBarsChart(this, theme).build();
     }
 }

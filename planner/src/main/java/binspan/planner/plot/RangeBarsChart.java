@@ -1,7 +1,5 @@
 package binspan.planner.plot;
 
-import java.awt.Color;
-import java.awt.Paint;
 import java.util.List;
 import org.jfree.chart.LegendItem;
 import org.jfree.chart.annotations.XYTextAnnotation;
@@ -25,16 +23,18 @@ final class RangeBarsChart {
     private static final double TEXT_DISTANCE = 0.2;
     private static final double MARKER_SIZE = 15.0;
     private static final int DIAMOND = 3;
-    private static final Paint WHOLE = new Color(0xf1f2f4);
 
     private final RangeBars ranges;
+    private final PlotTheme theme;
     private final XYPlot plot;
 
-    RangeBarsChart(RangeBars ranges) {
+    RangeBarsChart(RangeBars ranges, PlotTheme theme) {
+        this.theme = theme;
         this.ranges = ranges;
         List<String> names =
                 ranges.bars().stream().map(bar -> bar.quantity().name()).toList();
-        this.plot = PlotStyle.plot(BarRows.labels(names), new ScaledAxis(Axis.linear("", ""), SHARES));
+        this.plot =
+                PlotStyle.plot(BarRows.labels(names, theme), new ScaledAxis(Axis.linear("", ""), SHARES, theme), theme);
     }
 
     PanelChart build() {
@@ -59,7 +59,7 @@ final class RangeBarsChart {
         }
         draw(wholes, boxes, planned);
         int height = FRAME_HEIGHT + ROW_HEIGHT * Math.max(2, ranges.bars().size());
-        return new PanelChart(PlotStyle.chart(ranges.title(), plot), legend(), WIDTH, height);
+        return new PanelChart(PlotStyle.chart(ranges.title(), plot, theme), legend(), WIDTH, height);
     }
 
     /** Where a value lies between the ends of its range, 0 to 1; zero on a logarithmic axis is its beginning. */
@@ -73,14 +73,16 @@ final class RangeBarsChart {
 
     private void draw(XYIntervalSeries wholes, XYIntervalSeries boxes, DefaultXYDataset planned) {
         plot.setDataset(0, BarRows.dataset(wholes));
-        plot.setRenderer(0, PatternPainter.renderer(new PatternPainter(WHOLE, i -> true)));
+        plot.setRenderer(
+                0, PatternPainter.renderer(new PatternPainter(theme.ground().range(), i -> true, theme)));
         plot.setDataset(1, BarRows.dataset(boxes));
-        plot.setRenderer(1, PatternPainter.renderer(new PatternPainter(PlotStyle.FILL, i -> true)));
+        plot.setRenderer(
+                1, PatternPainter.renderer(new PatternPainter(theme.fill().bar(), i -> true, theme)));
         XYLineAndShapeRenderer markers = new XYLineAndShapeRenderer(false, true);
         markers.setUseFillPaint(true);
-        markers.setDefaultFillPaint(Color.WHITE);
+        markers.setDefaultFillPaint(theme.ground().background());
         markers.setUseOutlinePaint(true);
-        markers.setDefaultOutlinePaint(PlotStyle.INK);
+        markers.setDefaultOutlinePaint(theme.ink().text());
         markers.setDefaultOutlineStroke(PlotStyle.LIMIT);
         markers.setAutoPopulateSeriesShape(false);
         markers.setDefaultShape(SeriesStyle.marker(DIAMOND, MARKER_SIZE));
@@ -107,15 +109,15 @@ final class RangeBarsChart {
     private void text(String text, double row, double share, TextAnchor anchor) {
         XYTextAnnotation annotation = new XYTextAnnotation(text, row, share);
         annotation.setFont(PlotStyle.TICK);
-        annotation.setPaint(PlotStyle.INK);
+        annotation.setPaint(theme.ink().text());
         annotation.setTextAnchor(anchor);
         plot.addAnnotation(annotation);
     }
 
-    private static List<LegendItem> legend() {
+    private List<LegendItem> legend() {
         return List.of(
-                LegendEntries.filled("whole range", WHOLE),
-                LegendEntries.filled("allowed", PlotStyle.FILL),
-                LegendEntries.marker("planned", SeriesStyle.marker(DIAMOND, MARKER_SIZE)));
+                new LegendEntries(theme).filled("whole range", theme.ground().range()),
+                new LegendEntries(theme).filled("allowed", theme.fill().bar()),
+                new LegendEntries(theme).marker("planned", SeriesStyle.marker(DIAMOND, MARKER_SIZE)));
     }
 }

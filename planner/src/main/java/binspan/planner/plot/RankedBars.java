@@ -23,7 +23,7 @@ public record RankedBars(String title, List<String> labels, List<BarPanel> panel
     }
 
     @Override
-    public PanelChart chart() {
-        return new RankedBarsChart(this).build();
+    public PanelChart chart(PlotTheme theme) {
+        return new RankedBarsChart(this, theme).build();
     }
 }

@@ -31,20 +31,22 @@ final class RankedBarsChart {
     private static final double TEXT_GAP = 0.008;
 
     private final RankedBars bars;
+    private final PlotTheme theme;
 
-    RankedBarsChart(RankedBars bars) {
+    RankedBarsChart(RankedBars bars, PlotTheme theme) {
+        this.theme = theme;
         this.bars = bars;
     }
 
     PanelChart build() {
-        CombinedDomainXYPlot combined = new CombinedDomainXYPlot(BarRows.labels(bars.labels()));
+        CombinedDomainXYPlot combined = new CombinedDomainXYPlot(BarRows.labels(bars.labels(), theme));
         combined.setOrientation(PlotOrientation.HORIZONTAL);
         combined.setInsets(RectangleInsets.ZERO_INSETS);
         combined.setGap(20.0);
         bars.panels().forEach(panel -> combined.add(subplot(panel), 1));
         int height =
                 Math.max(LEAST_HEIGHT, FRAME_HEIGHT + ROW_HEIGHT * bars.labels().size());
-        return new PanelChart(PlotStyle.chart(bars.title(), combined), legend(), width(), height);
+        return new PanelChart(PlotStyle.chart(bars.title(), combined, theme), legend(), width(), height);
     }
 
     private int width() {
@@ -53,25 +55,25 @@ final class RankedBarsChart {
         return labels + PANEL_WIDTH * bars.panels().size();
     }
 
-    private static XYPlot subplot(BarPanel panel) {
+    private XYPlot subplot(BarPanel panel) {
         Range range = range(panel);
-        XYPlot plot = PlotStyle.plot(null, new ScaledAxis(panel.value(), range));
+        XYPlot plot = PlotStyle.plot(null, new ScaledAxis(panel.value(), range, theme), theme);
         plot.setOrientation(PlotOrientation.HORIZONTAL);
         plot.setDomainGridlinesVisible(false);
         plot.setRangeZeroBaselineVisible(!panel.value().logarithmic());
-        plot.setRangeZeroBaselinePaint(PlotStyle.SOFT_INK);
+        plot.setRangeZeroBaselinePaint(theme.ink().soft());
         plot.setRangeZeroBaselineStroke(PlotStyle.HAIRLINE);
         plot.setRangeAxisLocation(AxisLocation.BOTTOM_OR_LEFT);
-        plot.setRenderer(PatternPainter.renderer(new PatternPainter(PlotStyle.FILL, met(panel))));
+        plot.setRenderer(PatternPainter.renderer(new PatternPainter(theme.fill().bar(), met(panel), theme)));
         XYIntervalSeries series = series(panel, range);
         plot.setDataset(BarRows.dataset(series));
         texts(plot, panel, range);
         if (series.isEmpty() && panel.bars().stream().allMatch(bar -> bar.text().isEmpty())) {
-            PlotStyle.sayEmpty(plot);
+            PlotStyle.sayEmpty(plot, theme);
         }
         panel.requirement()
                 .ifPresent(requirement ->
-                        Limits.labelled(plot, panel.value(), requirement, range, AxisLocation.TOP_OR_RIGHT));
+                        new Limits(theme).labelled(plot, panel.value(), requirement, range, AxisLocation.TOP_OR_RIGHT));
         return plot;
     }
 
@@ -118,7 +120,7 @@ final class RankedBarsChart {
         return series;
     }
 
-    private static void texts(XYPlot plot, BarPanel panel, Range range) {
+    private void texts(XYPlot plot, BarPanel panel, Range range) {
         double foot = foot(panel, range);
         double gap = TEXT_GAP * range.getLength();
         for (int row = 0; row < panel.bars().size(); row++) {
@@ -129,8 +131,8 @@ final class RankedBarsChart {
                 double from = Double.isNaN(end) ? foot : end;
                 XYTextAnnotation text = new XYTextAnnotation(bar.text(), row, left ? from - gap : from + gap);
                 text.setFont(PlotStyle.TICK);
-                text.setPaint(PlotStyle.INK);
-                text.setBackgroundPaint(PlotStyle.HALO);
+                text.setPaint(theme.ink().text());
+                text.setBackgroundPaint(theme.halo());
                 text.setTextAnchor(left ? TextAnchor.CENTER_RIGHT : TextAnchor.CENTER_LEFT);
                 plot.addAnnotation(text);
             }
@@ -145,11 +147,13 @@ final class RankedBarsChart {
         boolean limits =
                 bars.panels().stream().anyMatch(panel -> panel.requirement().isPresent());
         if (fails || limits) {
-            items.add(LegendEntries.filled("meets the requirements", PlotStyle.FILL));
-            items.add(LegendEntries.hatched("does not meet them", false, PlotStyle.INK));
+            items.add(new LegendEntries(theme)
+                    .filled("meets the requirements", theme.fill().bar()));
+            items.add(new LegendEntries(theme)
+                    .hatched("does not meet them", false, theme.ink().text()));
         }
         if (limits) {
-            items.add(Limits.failingEntry());
+            items.add(new Limits(theme).failingEntry());
         }
         return items;
     }

@@ -21,11 +21,11 @@ class ScaledAxis extends NumberAxis {
 
     private final transient Axis axis;
 
-    ScaledAxis(Axis axis, Range positions) {
+    ScaledAxis(Axis axis, Range positions, PlotTheme theme) {
         super(axis.title());
         this.axis = axis;
         setRange(positions);
-        PlotStyle.dress(this);
+        PlotStyle.dress(this, theme);
         setMinorTickMarksVisible(true);
     }
 
