@@ -24,6 +24,10 @@ import org.jfree.data.xy.DefaultXYDataset;
 final class HeatMapChart {
     private static final int WIDTH = 660;
     private static final int HEIGHT = 540;
+    static final Room LEAST = new Room(250.0, 160.0);
+    static final double FULL_HEIGHT = 260.0;
+    private static final double FRAME_WIDTH = 150.0;
+    private static final double FRAME_HEIGHT = 50.0;
     private static final double POINT_SIZE = 13.0;
     private static final float CONTOUR = 2.2f;
     private static final Stroke CASING = new BasicStroke(4.8f, BasicStroke.CAP_ROUND, BasicStroke.JOIN_ROUND);
@@ -33,6 +37,7 @@ final class HeatMapChart {
 
     private final HeatMap map;
     private final PlotTheme theme;
+    private final Room room;
     private final double[] x;
     private final double[] y;
     private final XYPlot plot;
@@ -40,15 +45,19 @@ final class HeatMapChart {
     private final List<MapLabels.Label> numbers = new ArrayList<>();
     private int layers;
 
-    HeatMapChart(HeatMap map, PlotTheme theme) {
+    HeatMapChart(HeatMap map, PlotTheme theme, Room room) {
         this.theme = theme;
+        this.room = room;
         this.map = map;
         Lattice lattice = map.heat().values();
         this.x = ContourLines.positions(map.x(), lattice.x());
         this.y = ContourLines.positions(map.y(), lattice.y());
         Range across = Positions.of(map.x(), DoubleStream.of(lattice.x()), 0.0);
         Range up = Positions.of(map.y(), DoubleStream.of(lattice.y()), 0.0);
-        this.plot = PlotStyle.plot(new ScaledAxis(map.x(), across, theme), new ScaledAxis(map.y(), up, theme), theme);
+        this.plot = PlotStyle.plot(
+                fitted(new ScaledAxis(map.x(), across, theme), room.width() - FRAME_WIDTH),
+                fitted(new ScaledAxis(map.y(), up, theme), room.height() - FRAME_HEIGHT),
+                theme);
     }
 
     PanelChart build() {
@@ -64,7 +73,12 @@ final class HeatMapChart {
         colours(region);
         labels.addAll(numbers);
         plot.addAnnotation(new MapLabels(labels, theme));
-        return new PanelChart(PlotStyle.chart(map.title(), plot, theme), legend(), WIDTH, HEIGHT);
+        return new PanelChart(
+                PlotStyle.chart(map.title(), plot, theme, room), legend(), room.wide(WIDTH), room.high(HEIGHT));
+    }
+
+    private ScaledAxis fitted(ScaledAxis axis, double length) {
+        return room.given() ? axis.wrapped(length) : axis;
     }
 
     private void colours(Optional<FeasibleRegion> region) {
@@ -81,7 +95,7 @@ final class HeatMapChart {
             PlotStyle.sayEmpty(plot, theme);
             return;
         }
-        plot.setRangeAxis(1, new ColourBarAxis(z, colours, theme));
+        plot.setRangeAxis(1, fitted(new ColourBarAxis(z, colours, theme), room.height() - FRAME_HEIGHT));
         plot.setRangeAxisLocation(1, AxisLocation.BOTTOM_OR_RIGHT);
     }
 

@@ -16,16 +16,21 @@ import org.jfree.data.xy.XYIntervalSeries;
 final class HistogramChart {
     private static final int WIDTH = 520;
     private static final int HEIGHT = 330;
+    static final Room LEAST = new Room(220.0, 140.0);
+    static final double FULL_HEIGHT = 180.0;
+    private static final double FRAME = 60.0;
     private static final double MARGIN = 0.05;
     private static final double LEAST_COUNT = 5.0;
     private static final Axis COUNT = Axis.linear("Count", "");
 
     private final Histogram histogram;
     private final PlotTheme theme;
+    private final Room room;
     private final Range range;
 
-    HistogramChart(Histogram histogram, PlotTheme theme) {
+    HistogramChart(Histogram histogram, PlotTheme theme, Room room) {
         this.theme = theme;
+        this.room = room;
         this.histogram = histogram;
         DoubleStream ends = histogram.bins().stream().flatMapToDouble(bin -> DoubleStream.of(bin.lower(), bin.upper()));
         DoubleStream limit = histogram.requirement().stream().mapToDouble(RequirementLine::value);
@@ -35,8 +40,11 @@ final class HistogramChart {
     PanelChart build() {
         DoubleStream counts = histogram.bins().stream().mapToDouble(Bin::count);
         Range up = Positions.of(COUNT, DoubleStream.concat(DoubleStream.of(0.0, LEAST_COUNT), counts), MARGIN);
-        XYPlot plot =
-                PlotStyle.plot(new ScaledAxis(histogram.x(), range, theme), new ScaledAxis(COUNT, up, theme), theme);
+        ScaledAxis across = new ScaledAxis(histogram.x(), range, theme);
+        if (room.given()) {
+            across.wrapped(room.width() - FRAME);
+        }
+        XYPlot plot = PlotStyle.plot(across, new ScaledAxis(COUNT, up, theme), theme);
         plot.setDomainGridlinesVisible(false);
         plot.setRenderer(PatternPainter.renderer(new PatternPainter(theme.fill().histogram(), i -> true, theme)));
         plot.setDomainAxis(1, LabelAxis.blank(range, theme));
@@ -47,7 +55,8 @@ final class HistogramChart {
         }
         histogram.requirement().ifPresent(requirement -> limit(plot, requirement));
         quantiles(plot);
-        return new PanelChart(PlotStyle.chart(histogram.title(), plot, theme), legend(), WIDTH, HEIGHT);
+        return new PanelChart(
+                PlotStyle.chart(histogram.title(), plot, theme, room), legend(), room.wide(WIDTH), room.high(HEIGHT));
     }
 
     private XYIntervalSeries bars() {
@@ -70,7 +79,12 @@ final class HistogramChart {
         plot.getRenderer()
                 .addAnnotation(FailingSide.ofDomain(position, requirement.atLeast(), theme), Layer.FOREGROUND);
         new Limits(theme).domainLine(plot, position);
-        plot.setDomainAxis(1, new LabelAxis("", List.of(new Mark(requirement.label(), position)), range, theme));
+        plot.setDomainAxis(1, new LabelAxis("", List.of(new Mark(label(requirement), position)), range, theme));
+    }
+
+    private String label(RequirementLine requirement) {
+        boolean fits = Words.length(requirement.label(), PlotStyle.TICK) < room.width() - 2.0 * FRAME;
+        return fits ? requirement.label() : requirement.brief().label();
     }
 
     private void quantiles(XYPlot plot) {

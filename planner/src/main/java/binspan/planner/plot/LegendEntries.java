@@ -78,6 +78,12 @@ record LegendEntries(PlotTheme theme) {
         return swatch(label, theme.fill().met(), edges, theme.fill().metEdge());
     }
 
+    /** That parts have no room. */
+    LegendItem leftOut(int parts) {
+        String label = parts + (parts == 1 ? " more panel needs" : " more panels need") + " a larger picture";
+        return new LegendItem(label, null, null, null, new Line2D.Double(), PlotStyle.HAIRLINE, CLEAR);
+    }
+
     /** The library fills the shape over its line: a line as wide as the box is the fill, the shape only an outline. */
     private LegendItem swatch(String label, Paint fill, Shape outline, Paint outlinePaint) {
         Stroke wide = new BasicStroke((float) SWATCH_HEIGHT, BasicStroke.CAP_BUTT, BasicStroke.JOIN_MITER);

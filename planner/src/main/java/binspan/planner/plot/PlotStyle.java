@@ -109,12 +109,26 @@ final class PlotStyle {
         return chart;
     }
 
+    /** The same with as little around it as can be. */
+    static JFreeChart tight(String title, Plot plot, PlotTheme theme) {
+        JFreeChart chart = chart(title, plot, theme);
+        chart.setPadding(new RectangleInsets(1.0, 2.0, 1.0, 6.0));
+        return chart;
+    }
+
+    /** A chart of one panel in a room. */
+    static JFreeChart chart(String title, Plot plot, PlotTheme theme, Room room) {
+        return room.given() ? tight(title, plot, theme) : chart(title, plot, theme);
+    }
+
     /** The whole page: titles above, the legend of all panels below. */
     static JFreeChart page(Picture picture, Plot plot, Collection<LegendItem> legend, PlotTheme theme) {
         JFreeChart chart = new JFreeChart(null, null, plot, false);
         chart.setBackgroundPaint(theme.ground().background());
         chart.setPadding(new RectangleInsets(10.0, 14.0, 10.0, 14.0));
-        chart.addSubtitle(heading(picture.title(), TITLE, 3.0, theme));
+        if (!picture.title().isEmpty()) {
+            chart.addSubtitle(heading(picture.title(), TITLE, 3.0, theme));
+        }
         if (!picture.subtitle().isEmpty()) {
             TextTitle subtitle = heading(picture.subtitle(), SUBTITLE, 10.0, theme);
             subtitle.setPaint(theme.ink().soft());

@@ -1,6 +1,7 @@
 package binspan.planner.plot;
 
 import java.util.List;
+import java.util.stream.Stream;
 import org.jfree.chart.LegendItem;
 import org.jfree.chart.annotations.XYTextAnnotation;
 import org.jfree.chart.plot.DatasetRenderingOrder;
@@ -17,7 +18,11 @@ final class RangeBarsChart {
     private static final int WIDTH = 1172;
     private static final int ROW_HEIGHT = 92;
     private static final int FRAME_HEIGHT = 24;
-    private static final Range SHARES = new Range(-0.13, 1.13);
+    static final double LEAST_WIDTH = 320.0;
+    private static final double TIGHT_ROW = 66.0;
+    private static final double MOST_LABEL_SHARE = 0.3;
+    private static final double TEXT_MARGIN = 6.0;
+    private static final double BESIDE = 0.13;
     private static final double HALF_BAR = 0.14;
     private static final double GAP = 0.008;
     private static final double TEXT_DISTANCE = 0.2;
@@ -26,15 +31,55 @@ final class RangeBarsChart {
 
     private final RangeBars ranges;
     private final PlotTheme theme;
+    private final Room room;
     private final XYPlot plot;
 
-    RangeBarsChart(RangeBars ranges, PlotTheme theme) {
+    RangeBarsChart(RangeBars ranges, PlotTheme theme, Room room) {
         this.theme = theme;
+        this.room = room;
         this.ranges = ranges;
         List<String> names =
                 ranges.bars().stream().map(bar -> bar.quantity().name()).toList();
-        this.plot =
-                PlotStyle.plot(BarRows.labels(names, theme), new ScaledAxis(Axis.linear("", ""), SHARES, theme), theme);
+        this.plot = PlotStyle.plot(
+                BarRows.labels(fitted(names), theme), new ScaledAxis(Axis.linear("", ""), shares(names), theme), theme);
+    }
+
+    /** The height of its rows. */
+    static double leastHeight(RangeBars ranges) {
+        return FRAME_HEIGHT + TIGHT_ROW * Math.max(2, ranges.bars().size());
+    }
+
+    private List<String> fitted(List<String> names) {
+        return room.given()
+                ? names.stream()
+                        .map(name -> Words.shortened(name, PlotStyle.TICK, MOST_LABEL_SHARE * room.width()))
+                        .toList()
+                : names;
+    }
+
+    /** The shares of a range that are drawn, room for the ends in words beside them. */
+    private Range shares(List<String> names) {
+        double beside = BESIDE;
+        if (room.given()) {
+            double labels = fitted(names).stream()
+                    .mapToDouble(RangeBarsChart::length)
+                    .max()
+                    .orElse(0.0);
+            double ends = ranges.bars().stream()
+                    .flatMap(bar -> Stream.of(
+                                    bar.quantity().lowest(), bar.quantity().highest())
+                            .map(end -> bar.quantity().text(end)))
+                    .mapToDouble(RangeBarsChart::length)
+                    .max()
+                    .orElse(0.0);
+            double left = Math.max(1.0, room.width() - labels - FRAME_HEIGHT - 2.0 * ends);
+            beside = Math.min(1.0, GAP + (ends + TEXT_MARGIN) / left);
+        }
+        return new Range(-beside, 1.0 + beside);
+    }
+
+    private static double length(String text) {
+        return Words.length(text, PlotStyle.TICK);
     }
 
     PanelChart build() {
@@ -59,7 +104,8 @@ final class RangeBarsChart {
         }
         draw(wholes, boxes, planned);
         int height = FRAME_HEIGHT + ROW_HEIGHT * Math.max(2, ranges.bars().size());
-        return new PanelChart(PlotStyle.chart(ranges.title(), plot, theme), legend(), WIDTH, height);
+        return new PanelChart(
+                PlotStyle.chart(ranges.title(), plot, theme, room), legend(), room.wide(WIDTH), room.high(height));
     }
 
     /** Where a value lies between the ends of its range, 0 to 1; zero on a logarithmic axis is its beginning. */

@@ -24,6 +24,12 @@ final class RankedBarsChart {
     private static final int FRAME_HEIGHT = 100;
     private static final int ROW_HEIGHT = 24;
     private static final int LEAST_HEIGHT = 320;
+    static final double LEAST_WIDTH = 240.0;
+    private static final double LEAST_PANEL_WIDTH = 118.0;
+    private static final double TIGHT_ROW = 19.0;
+    private static final double TIGHT_FRAME = 78.0;
+    private static final double LINE_HEIGHT = 18.0;
+    private static final double MOST_LABEL_SHARE = 0.36;
     private static final double HALF_BAR = 0.36;
     private static final double MARGIN = 0.04;
     private static final double TEXT_MARGIN = 0.06;
@@ -32,21 +38,60 @@ final class RankedBarsChart {
 
     private final RankedBars bars;
     private final PlotTheme theme;
+    private final Room room;
 
-    RankedBarsChart(RankedBars bars, PlotTheme theme) {
+    RankedBarsChart(RankedBars bars, PlotTheme theme, Room room) {
         this.theme = theme;
+        this.room = room;
         this.bars = bars;
     }
 
+    /** The height that the rows, one line of words above and three below the axis take. */
+    static double leastHeight(RankedBars bars) {
+        boolean limits =
+                bars.panels().stream().anyMatch(panel -> panel.requirement().isPresent());
+        return TIGHT_FRAME
+                + TIGHT_ROW * Math.max(2, bars.labels().size())
+                + (limits ? LINE_HEIGHT : 0.0)
+                + (bars.title().isEmpty() ? 0.0 : LINE_HEIGHT + LINE_HEIGHT / 2.0);
+    }
+
     PanelChart build() {
-        CombinedDomainXYPlot combined = new CombinedDomainXYPlot(BarRows.labels(bars.labels(), theme));
+        CombinedDomainXYPlot combined = new CombinedDomainXYPlot(BarRows.labels(labels(), theme));
         combined.setOrientation(PlotOrientation.HORIZONTAL);
         combined.setInsets(RectangleInsets.ZERO_INSETS);
         combined.setGap(20.0);
-        bars.panels().forEach(panel -> combined.add(subplot(panel), 1));
+        shown().forEach(panel -> combined.add(subplot(panel), 1));
         int height =
                 Math.max(LEAST_HEIGHT, FRAME_HEIGHT + ROW_HEIGHT * bars.labels().size());
-        return new PanelChart(PlotStyle.chart(bars.title(), combined, theme), legend(), width(), height);
+        return new PanelChart(
+                PlotStyle.chart(bars.title(), combined, theme, room), legend(), room.wide(width()), room.high(height));
+    }
+
+    /** The panels that have room. */
+    private List<BarPanel> shown() {
+        int most = new Room(room.width() - labelWidth(), room.height()).columns(LEAST_PANEL_WIDTH);
+        return bars.panels().subList(0, Math.min(most, bars.panels().size()));
+    }
+
+    private List<String> labels() {
+        return room.given()
+                ? bars.labels().stream()
+                        .map(label -> Words.shortened(label, PlotStyle.TICK, labelWidth()))
+                        .toList()
+                : bars.labels();
+    }
+
+    private double labelWidth() {
+        double longest = bars.labels().stream()
+                .mapToDouble(label -> Words.length(label, PlotStyle.TICK))
+                .max()
+                .orElse(0.0);
+        return Math.min(longest, MOST_LABEL_SHARE * room.width());
+    }
+
+    private double panelWidth() {
+        return (room.width() - labelWidth()) / shown().size() - LETTER_WIDTH;
     }
 
     private int width() {
@@ -57,7 +102,11 @@ final class RankedBarsChart {
 
     private XYPlot subplot(BarPanel panel) {
         Range range = range(panel);
-        XYPlot plot = PlotStyle.plot(null, new ScaledAxis(panel.value(), range, theme), theme);
+        ScaledAxis across = new ScaledAxis(panel.value(), range, theme);
+        if (room.given()) {
+            across.wrapped(panelWidth());
+        }
+        XYPlot plot = PlotStyle.plot(null, across, theme);
         plot.setOrientation(PlotOrientation.HORIZONTAL);
         plot.setDomainGridlinesVisible(false);
         plot.setRangeZeroBaselineVisible(!panel.value().logarithmic());
@@ -72,9 +121,13 @@ final class RankedBarsChart {
             PlotStyle.sayEmpty(plot, theme);
         }
         panel.requirement()
-                .ifPresent(requirement ->
-                        new Limits(theme).labelled(plot, panel.value(), requirement, range, AxisLocation.TOP_OR_RIGHT));
+                .ifPresent(requirement -> new Limits(theme)
+                        .labelled(plot, panel.value(), told(requirement), range, AxisLocation.TOP_OR_RIGHT));
         return plot;
+    }
+
+    private RequirementLine told(RequirementLine requirement) {
+        return Words.length(requirement.label(), PlotStyle.TICK) < panelWidth() ? requirement : requirement.brief();
     }
 
     /** Which of the bars that are drawn is filled. */
@@ -154,6 +207,9 @@ final class RankedBarsChart {
         }
         if (limits) {
             items.add(new Limits(theme).failingEntry());
+        }
+        if (shown().size() < bars.panels().size()) {
+            items.add(new LegendEntries(theme).leftOut(bars.panels().size() - shown().size()));
         }
         return items;
     }
