@@ -78,6 +78,7 @@ final class FibreSplit {
         for (int i = 0; i < channels.size(); i++) {
             Map<Object, Object> channel = new LinkedHashMap<>((Map<?, ?>) channels.get(i));
             ClassicalChannel light = span.classicalChannels().get(i);
+            channel.put("direction", light.direction().text());
             if (light.direction() == Direction.FORWARD) {
                 channel.put("launchDbm", arriving(light, firstKm));
             }

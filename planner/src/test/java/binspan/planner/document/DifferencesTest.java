@@ -25,11 +25,14 @@ final class DifferencesTest {
         Random random = new Random(7);
         int taken = 0;
         for (ScenarioDocument document : ShippedDocuments.all()) {
-            for (Parameter parameter : ScenarioLeaves.of(document.scenario())) {
-                taken += takenOver(document, parameter, value(parameter, random)) ? 1 : 0;
+            List<Parameter> parameters = ScenarioLeaves.of(document.scenario());
+            // All of the scenarios; of the presets, which differ little from them, some.
+            int step = ShippedDocuments.isPreset(document) ? 5 : 1;
+            for (int i = 0; i < parameters.size(); i += step) {
+                taken += takenOver(document, parameters.get(i), value(parameters.get(i), random)) ? 1 : 0;
             }
         }
-        assertThat(taken).isGreaterThan(1000);
+        assertThat(taken).isGreaterThan(800);
     }
 
     /** Whether the parameter can be varied in the scenario; if so, the document must follow. */

@@ -24,6 +24,10 @@ final class ShippedDocuments {
         return all().stream().filter(each -> each.name().equals(name + ".json")).findFirst().orElseThrow();
     }
 
+    static boolean isPreset(ScenarioDocument document) {
+        return Files.exists(FOLDERS.get(1).resolve(document.name()));
+    }
+
     private static Stream<ScenarioDocument> in(Path folder) {
         try (Stream<Path> files = Files.list(folder)) {
             return files.filter(file -> file.toString().endsWith(".json") && !file.toString().contains("schema"))
