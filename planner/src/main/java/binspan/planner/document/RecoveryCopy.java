@@ -24,8 +24,11 @@ import java.util.Optional;
  * @param text text of the document
  */
 record RecoveryCopy(Optional<Path> original, Instant time, Instant started, String savedDigest, String text) {
-    private static final String TITLE = "// Copy of a document that was not saved; the document begins below these lines.";
-    private static final String[] NAMES = {"// file: ", "// written: ", "// process since: ", "// saved: ", "// characters: "};
+    private static final String TITLE =
+            "// Copy of a document that was not saved; the document begins below these lines.";
+    private static final String[] NAMES = {
+        "// file: ", "// written: ", "// process since: ", "// saved: ", "// characters: "
+    };
     private static final int LINES = NAMES.length + 1;
     private static final long LARGEST_BYTES = 20_000_000;
 
