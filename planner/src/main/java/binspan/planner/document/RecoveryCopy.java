@@ -4,7 +4,6 @@ import binspan.planner.io.JsonText;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
-import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
@@ -52,7 +51,7 @@ record RecoveryCopy(Optional<Path> original, Instant time, Instant started, Stri
     static Optional<RecoveryCopy> read(Path file) {
         try {
             return Files.size(file) > LARGEST_BYTES ? Optional.empty() : parsed(Files.readString(file));
-        } catch (IOException | DateTimeException | InvalidPathException | NumberFormatException e) {
+        } catch (IOException | DateTimeException | IllegalArgumentException | IndexOutOfBoundsException e) {
             return Optional.empty();
         }
     }

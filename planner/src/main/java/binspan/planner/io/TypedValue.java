@@ -70,8 +70,9 @@ public record TypedValue(Object value, String error) {
         if (value instanceof Choice choice) {
             return choice.text();
         }
-        return field.kind() == Field.Kind.CHANNEL && !typed.startsWith("C")
-                ? "C" + typed
-                : field.kind() == Field.Kind.CHANNEL ? typed : value;
+        if (field.kind() != Field.Kind.CHANNEL) {
+            return value;
+        }
+        return typed.startsWith("C") ? typed : "C" + typed;
     }
 }
