@@ -93,11 +93,8 @@ final class CurvesChart {
             JFreeChart chart = PlotStyle.tight("", column(panels, width), theme);
             charts.add(new PanelChart(chart, List.of(), Math.max(1, (int) width), room.high(1)));
         }
-        List<LegendItem> legend = new ArrayList<>(legend());
-        if (shown < count) {
-            legend.add(new LegendEntries(theme).leftOut(count - shown));
-        }
-        return PanelGrid.sideBySide(curves.title(), charts, legend, columns, theme);
+        PanelGrid grid = PanelGrid.sideBySide(charts, columns);
+        return grid.chart(PlotStyle.tight(curves.title(), grid, theme), legend(), count - shown);
     }
 
     private CombinedDomainXYPlot column(List<CurvePanel> panels, double width) {
@@ -165,6 +162,7 @@ final class CurvesChart {
                 ? Words.shortened(panel.y().title(), PlotStyle.AXIS, width - LEFT)
                 : panel.y().title();
         LabelAxis top = new LabelAxis(title, first ? marks : List.of(), xPositions, theme);
+        top.setApart(room.given());
         top.setLabelLocation(AxisLabelLocation.LOW_END);
         top.setLabelInsets(new RectangleInsets(4.0, 0.0, 4.0, 0.0));
         plot.setDomainAxis(1, top);
