@@ -106,8 +106,13 @@ public final class Section {
         }
     }
 
-    /** Reads one component of a record. */
-    Object component(Record element, int index) {
+    /**
+     * Reads one component of a record.
+     *
+     * @param element a record of this section
+     * @param index place of the field, the first is 0
+     */
+    public Object component(Record element, int index) {
         try {
             return accessors()[index].invoke(element);
         } catch (ReflectiveOperationException e) {

@@ -82,7 +82,7 @@ public final class RequirementWords {
      * The predicted figure of tuned settings, "none" where there is none; best settings often meet a requirement exactly, and then it is not told to its
      * last digit.
      */
-    static String tuned(Requirement requirement, double value, double required, boolean met) {
+    public static String tuned(Requirement requirement, double value, double required, boolean met) {
         return Double.isFinite(value) ? predicted(requirement, value, met ? value : required) : "none";
     }
 
