@@ -96,6 +96,15 @@ public final class RequirementWords {
         };
     }
 
+    /** How much a predicted figure has risen or fallen, with its sign; times in the unit that one says aloud. */
+    public static String difference(Requirement requirement, double difference) {
+        return switch (requirement) {
+            case FIRST_KEY, FIVE_SIGMA ->
+                (difference < 0.0 ? "-" : "+") + Figure.duration(Math.abs(difference) * HOUR);
+            default -> margin(requirement, difference);
+        };
+    }
+
     /** A missing amount, without a sign. */
     static String amount(Requirement requirement, double missing) {
         return switch (requirement) {

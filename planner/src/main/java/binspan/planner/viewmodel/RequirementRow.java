@@ -75,7 +75,7 @@ public record RequirementRow(
                 requirement.predicted(saved.prediction(), saved.finite()),
                 requirement.predicted(now.prediction(), now.finite()),
                 requirement.atLeast() ? Change.Aim.HIGH : Change.Aim.LOW,
-                difference -> RequirementWords.margin(requirement, difference),
+                difference -> RequirementWords.difference(requirement, difference),
                 value -> RequirementWords.tuned(requirement, value, value, true));
     }
 
