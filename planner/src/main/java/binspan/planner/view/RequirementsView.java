@@ -16,7 +16,7 @@ import javafx.scene.layout.VBox;
 
 /** The stated requirements, each with a bar from failing to ample. */
 final class RequirementsView extends VBox {
-    private static final double[] COLUMNS = {23.0, 54.0, -23.0};
+    private static final double[] COLUMNS = {24.0, 50.0, -26.0};
     private static final double[] ROOMS = {0.01, 0.1, 1.0};
     private static final double MIDDLE = 0.5;
 

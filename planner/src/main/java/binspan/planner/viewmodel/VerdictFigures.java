@@ -51,7 +51,7 @@ final class VerdictFigures {
 
     private FigureGroup visibility() {
         LinkPrediction p = now.prediction();
-        String raw = Figure.withError(p.fringe().raw(), p.visibilitySigma(), TextStyle.PLAIN_UNICODE);
+        String raw = withError(p.fringe().raw(), p.visibilitySigma());
         return new FigureGroup(
                 VerdictBudget.TITLE,
                 List.of(
@@ -66,7 +66,7 @@ final class VerdictFigures {
     private FigureGroup bell() {
         LinkPrediction p = now.prediction();
         FigureColumn chsh = column("bell.chsh");
-        String s = Figure.withError(p.bell().chsh(), p.bell().sigma(p.uptime()), TextStyle.PLAIN_UNICODE);
+        String s = withError(p.bell().chsh(), p.bell().sigma(p.uptime()));
         return new FigureGroup(
                 VerdictRates.BELL,
                 List.of(
@@ -108,6 +108,13 @@ final class VerdictFigures {
             rows.add(row(column("qber.time"), Aim.LOW));
         }
         return new FigureGroup(VerdictRates.ERRORS, rows);
+    }
+
+    /** A figure with its error, which says by its size where there are too few counts to measure the figure. */
+    private static String withError(double value, double error) {
+        return error >= Figure.USELESS && Double.isFinite(error)
+                ? Figure.bare(value) + " \u00b1 " + Digits.significant(error, 1)
+                : Figure.withError(value, error, TextStyle.PLAIN_UNICODE);
     }
 
     private boolean required(Requirement requirement) {
