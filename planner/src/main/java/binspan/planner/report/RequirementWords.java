@@ -99,8 +99,7 @@ public final class RequirementWords {
     /** How much a predicted figure has risen or fallen, with its sign; times in the unit that one says aloud. */
     public static String difference(Requirement requirement, double difference) {
         return switch (requirement) {
-            case FIRST_KEY, FIVE_SIGMA ->
-                (difference < 0.0 ? "-" : "+") + Figure.duration(Math.abs(difference) * HOUR);
+            case FIRST_KEY, FIVE_SIGMA -> (difference < 0.0 ? "-" : "+") + Figure.duration(Math.abs(difference) * HOUR);
             default -> margin(requirement, difference);
         };
     }

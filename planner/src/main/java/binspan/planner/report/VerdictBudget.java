@@ -45,8 +45,8 @@ public final class VerdictBudget {
         VerdictBudget budget = new VerdictBudget(page, p.fringe().raw());
         page.gap();
         String scale = left(Digits.decimals(budget.floor, 1), BAR - 1) + "1";
-        page.line(page.style().strong(left(TITLE, NAME) + right("factor", NUMBER) + right("loss", NUMBER))
-                + "  " + scale);
+        page.line(page.style().strong(left(TITLE, NAME) + right("factor", NUMBER) + right("loss", NUMBER)) + "  "
+                + scale);
         double visibility = 1.0;
         for (VisibilityBudget.Entry entry : p.budget().entries()) {
             double after = visibility * entry.factor();

@@ -61,9 +61,7 @@ public final class VerdictHead {
         if (failed == 0) {
             return all == 1 ? "MEETS its requirement" : "MEETS all " + all + " requirements";
         }
-        return all == 1
-                ? "DOES NOT MEET its requirement"
-                : "DOES NOT MEET " + failed + " of " + all + " requirements";
+        return all == 1 ? "DOES NOT MEET its requirement" : "DOES NOT MEET " + failed + " of " + all + " requirements";
     }
 
     private static String source(Scenario scenario) {

@@ -27,9 +27,10 @@ public final class VerdictNotes {
     public static List<String> safety(Scenario scenario) {
         List<String> notes = new ArrayList<>();
         notes.add("Laser light in these fibres is invisible. Do not look into fibre ends or connectors; treat every"
-                        + " fibre as live until it is measured dark. Local rules and licensed practice come first.");
+                + " fibre as live until it is measured dark. Local rules and licensed practice come first.");
         if (cryogenic(scenario)) {
-            notes.add("Nanowire detectors are cooled with helium: cold surfaces burn, and escaping gas displaces the air"
+            notes.add(
+                    "Nanowire detectors are cooled with helium: cold surfaces burn, and escaping gas displaces the air"
                             + " of a room. Follow the cryostat's instructions and the site's rules.");
         }
         notes.add("All figures are an estimate, not a security proof.");

@@ -12,8 +12,7 @@ final class ChangeLabel extends Label {
 
     void show(Change change) {
         setText(mark(change.effect()) + change.text());
-        getStyleClass().removeAll("good", "bad", "soft");
-        getStyleClass().add(style(change.effect()));
+        Columns.restyle(this, "label", "change", style(change.effect()));
     }
 
     private static String mark(Change.Effect effect) {

@@ -1,5 +1,6 @@
 package binspan.planner.view;
 
+import java.util.List;
 import javafx.geometry.HPos;
 import javafx.geometry.Pos;
 import javafx.scene.control.Label;
@@ -33,6 +34,14 @@ final class Columns {
         Label label = new Label(text);
         label.getStyleClass().addAll(styles);
         return label;
+    }
+
+    /** Gives a label its styles, without work where it has them already. */
+    static void restyle(Label label, String... styles) {
+        List<String> wanted = List.of(styles);
+        if (!label.getStyleClass().equals(wanted)) {
+            label.getStyleClass().setAll(wanted);
+        }
     }
 
     /** A label that breaks its text into lines. */

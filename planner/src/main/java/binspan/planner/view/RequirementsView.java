@@ -105,8 +105,8 @@ final class RequirementsView extends VBox {
             setId("verdict-requirement-" + row.requirement().fieldName());
             sign.setText(row.met() ? TextStyle.PLAIN_UNICODE.met() : TextStyle.PLAIN_UNICODE.notMet());
             String style = row.met() ? "good" : "bad";
-            sign.getStyleClass().setAll("label", "sign", style);
-            predicted.getStyleClass().setAll("label", "figure", style);
+            Columns.restyle(sign, "label", "sign", style);
+            Columns.restyle(predicted, "label", "figure", style);
             name.setText(row.name());
             predicted.setText(row.predicted());
             change.show(row.change());

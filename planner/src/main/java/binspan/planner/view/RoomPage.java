@@ -45,6 +45,7 @@ public final class RoomPage extends BorderPane {
     private final VBox cautions = block("room-cautions");
     private final VBox changes = block("room-changes");
     private final VBox safety = block("room-safety");
+    private VerdictSheet shown;
 
     /**
      * Shows the room of a verdict.
@@ -55,8 +56,8 @@ public final class RoomPage extends BorderPane {
      */
     public RoomPage(VerdictModel model, Design design, Look look) {
         this.model = model;
-        this.table = new HeadroomTable(look, row -> design.selectionProperty()
-                .set(PartOfPath.find(design.scenario(), row.path())));
+        this.table = new HeadroomTable(
+                look, row -> design.selectionProperty().set(PartOfPath.find(design.scenario(), row.path())));
         getStyleClass().addAll("panel", "room");
         setId("room");
         build();
@@ -120,44 +121,54 @@ public final class RoomPage extends BorderPane {
         List<Node> lines = room.limits().stream()
                 .map(limit -> pair(limit.quantity(), limit.value()))
                 .toList();
-        fill(
-                stability,
-                VerdictStability.TITLE,
-                lines,
-                Words.of("verdict.stability.none"));
+        fill(stability, VerdictStability.TITLE, lines, Words.of("verdict.stability.none"));
         if (!lines.isEmpty()) {
             stability.getChildren().add(1, Columns.wrapped(VerdictStability.MEANING, "soft", "small"));
         }
-        stability.setAccessibleText(VerdictStability.TITLE + ": " + joined(room.limits().stream()
-                .map(limit -> limit.quantity() + " " + limit.value())
-                .toList()));
+        stability.setAccessibleText(VerdictStability.TITLE + ": "
+                + joined(room.limits().stream()
+                        .map(limit -> limit.quantity() + " " + limit.value())
+                        .toList()));
     }
 
+    /** Renews what differs from the last sheet: during a drag that is little. */
     private void show(VerdictSheet sheet) {
+        VerdictSheet last = shown;
+        shown = sheet;
+        if (last == null || !last.cautions().equals(sheet.cautions())) {
+            showCautions(sheet);
+        }
+        if (last == null || !last.changes().equals(sheet.changes())) {
+            showChanges(sheet);
+        }
+        if (last == null || !last.safety().equals(sheet.safety())) {
+            showSafety(sheet);
+        }
+    }
+
+    private void showCautions(VerdictSheet sheet) {
         List<String> warnings =
                 sheet.cautions().stream().map(VerdictText::line).toList();
-        fill(
-                cautions,
-                VerdictNotes.CAUTIONS,
-                sheet.cautions().stream().map(RoomPage::caution).toList(),
-                Words.of("verdict.cautions.none"));
+        List<Node> lines = sheet.cautions().stream().map(RoomPage::caution).toList();
+        fill(cautions, VerdictNotes.CAUTIONS, lines, Words.of("verdict.cautions.none"));
         cautions.setAccessibleText(VerdictNotes.CAUTIONS + ": " + joined(warnings));
+    }
+
+    private void showChanges(VerdictSheet sheet) {
         String heading = Words.of("verdict.changes");
-        fill(
-                changes,
-                heading,
-                sheet.changes().stream().map(RoomPage::change).toList(),
-                Words.of("verdict.changes.none"));
-        changes.setAccessibleText(heading + ": "
-                + joined(sheet.changes().stream().map(ScenarioChange::text).toList()));
-        fill(
-                safety,
-                VerdictNotes.SAFETY,
-                sheet.safety().stream()
-                        .map(note -> (Node) Columns.wrapped(note))
-                        .toList(),
-                "");
+        List<String> texts =
+                sheet.changes().stream().map(ScenarioChange::text).toList();
+        fill(changes, heading, paragraphs(texts), Words.of("verdict.changes.none"));
+        changes.setAccessibleText(heading + ": " + joined(texts));
+    }
+
+    private void showSafety(VerdictSheet sheet) {
+        fill(safety, VerdictNotes.SAFETY, paragraphs(sheet.safety()), "");
         safety.setAccessibleText(VerdictNotes.SAFETY + ": " + joined(sheet.safety()));
+    }
+
+    private static List<Node> paragraphs(List<String> texts) {
+        return texts.stream().map(text -> (Node) Columns.wrapped(text)).toList();
     }
 
     private static String joined(List<String> lines) {
@@ -178,10 +189,6 @@ public final class RoomPage extends BorderPane {
         HBox line = new HBox(Columns.label("!", "warn", "sign"), text);
         line.getStyleClass().add("line");
         return line;
-    }
-
-    private static Node change(ScenarioChange change) {
-        return Columns.wrapped(change.text());
     }
 
     private static Node pair(String name, String value) {

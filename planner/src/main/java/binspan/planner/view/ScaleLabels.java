@@ -23,7 +23,10 @@ final class ScaleLabels extends Region {
 
     @Override
     protected double computePrefHeight(double width) {
-        return labels.stream().mapToDouble(label -> label.prefHeight(-1.0)).max().orElse(0.0);
+        return labels.stream()
+                .mapToDouble(label -> label.prefHeight(-1.0))
+                .max()
+                .orElse(0.0);
     }
 
     @Override

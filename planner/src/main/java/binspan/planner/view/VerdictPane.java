@@ -106,7 +106,7 @@ public final class VerdictPane extends BorderPane {
         headline.setText(sheet.judged() ? sign + " " + sheet.headline() : sheet.headline());
         headline.setAccessibleText(sheet.headline());
         String state = !sheet.judged() ? "unjudged" : sheet.met() ? "meets" : "fails";
-        headline.getStyleClass().setAll("label", "headline", state);
+        Columns.restyle(headline, "label", "headline", state);
         requirements.show(sheet.requirements());
         budget.show(sheet.budget());
         show(sheet.figures());

@@ -26,9 +26,7 @@ public final class PartOfPath {
         String rest = path.substring(dot + 1);
         return switch (dot < 0 ? path : path.substring(0, dot)) {
             case "source" ->
-                rest.startsWith("signal.") || rest.startsWith("idler.")
-                        ? new LinkPart.Bands()
-                        : new LinkPart.Source();
+                rest.startsWith("signal.") || rest.startsWith("idler.") ? new LinkPart.Bands() : new LinkPart.Source();
             case "require" -> new LinkPart.Promise();
             case "alice", "both" -> ofArm(scenario, Site.ALICE, rest);
             case "bob" -> ofArm(scenario, Site.BOB, rest);

@@ -56,11 +56,7 @@ final class VerdictFigures {
                 VerdictBudget.TITLE,
                 List.of(
                         row(VerdictBudget.RAW, raw, column("visibility.raw"), Aim.HIGH),
-                        row(
-                                VerdictBudget.NET,
-                                Figure.bare(p.fringe().net()),
-                                column("visibility.net"),
-                                Aim.HIGH)));
+                        row(VerdictBudget.NET, Figure.bare(p.fringe().net()), column("visibility.net"), Aim.HIGH)));
     }
 
     private FigureGroup bell() {
@@ -125,8 +121,7 @@ final class VerdictFigures {
     private static FigureColumn singles(String arm, Function<LinkPrediction, Double> sum) {
         ResultField ofPort = FIELDS.get(arm + ".singlesPerSecond");
         return new FigureColumn(
-                new ResultField(
-                        ofPort.name(), ofPort.unit(), false, ofPort.stage(), (p, finite, port) -> sum.apply(p)),
+                new ResultField(ofPort.name(), ofPort.unit(), false, ofPort.stage(), (p, finite, port) -> sum.apply(p)),
                 0);
     }
 

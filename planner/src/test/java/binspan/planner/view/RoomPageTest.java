@@ -73,7 +73,9 @@ final class RoomPageTest {
     void showsAllThatTheModelFound(FxRobot robot) {
         Design design = new Design(VerdictLinks.meeting());
         VerdictModel model = show(robot, design);
-        assertThat(table(robot).getItems()).isEqualTo(model.fullProperty().get().rows()).isNotEmpty();
+        assertThat(table(robot).getItems())
+                .isEqualTo(model.fullProperty().get().rows())
+                .isNotEmpty();
         assertThat(texts(robot, "#room-stability"))
                 .containsAll(model.fullProperty().get().limits().stream()
                         .map(VerdictRoom.Limit::value)
@@ -105,8 +107,8 @@ final class RoomPageTest {
         show(robot, design);
         Node top = robot.lookup(".table-row-cell").nth(0).query();
         robot.clickOn(top);
-        LinkPart first =
-                PartOfPath.find(design.scenario(), table(robot).getItems().get(0).path());
+        LinkPart first = PartOfPath.find(
+                design.scenario(), table(robot).getItems().get(0).path());
         assertThat(design.selectionProperty().get()).isEqualTo(first);
         int other = 0;
         while (PartOfPath.find(
@@ -163,7 +165,8 @@ final class RoomPageTest {
         Design design = new Design(VerdictLinks.meeting());
         show(robot, design);
         robot.interact(() -> set(design, "timing.windowWidthPs", 350.0));
-        assertThat(texts(robot, "#room-changes")).containsExactly("Changed since saved", "window width: 400 ps → 350 ps");
+        assertThat(texts(robot, "#room-changes"))
+                .containsExactly("Changed since saved", "window width: 400 ps → 350 ps");
         assertThat(robot.lookup("#room-changes").query().getAccessibleText())
                 .isEqualTo("Changed since saved: window width: 400 ps → 350 ps");
     }
@@ -193,11 +196,9 @@ final class RoomPageTest {
         assertThat(((Label) table(robot).getPlaceholder()).getText()).startsWith("computing");
         robot.interact(held::finish);
         robot.interact(() -> set(design, "timing.windowWidthPs", 350.0));
-        WaitForAsyncUtils.waitFor(
-                20, TimeUnit.SECONDS, () -> table(robot).getOpacity() < 1.0);
+        WaitForAsyncUtils.waitFor(20, TimeUnit.SECONDS, () -> table(robot).getOpacity() < 1.0);
         robot.interact(held::finish);
-        WaitForAsyncUtils.waitFor(
-                20, TimeUnit.SECONDS, () -> table(robot).getOpacity() == 1.0);
+        WaitForAsyncUtils.waitFor(20, TimeUnit.SECONDS, () -> table(robot).getOpacity() == 1.0);
         assertThat(model.fullStaleProperty().get()).isFalse();
     }
 }

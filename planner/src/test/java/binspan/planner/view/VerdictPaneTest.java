@@ -163,7 +163,10 @@ final class VerdictPaneTest {
         ScrollPane scroll = robot.lookup("#verdict-scroll").queryAs(ScrollPane.class);
         assertThat(scroll.getContent().getLayoutBounds().getHeight())
                 .isGreaterThan(scroll.getViewportBounds().getHeight());
-        assertThat(robot.lookup("#verdict-cautions").query().localToScene(0.0, 0.0).getY())
+        assertThat(robot.lookup("#verdict-cautions")
+                        .query()
+                        .localToScene(0.0, 0.0)
+                        .getY())
                 .isLessThan(500.0);
     }
 

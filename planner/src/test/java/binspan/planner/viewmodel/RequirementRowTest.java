@@ -74,7 +74,8 @@ final class RequirementRowTest {
         LinkCheck check = LinkCheck.of(VerdictLinks.failing());
         RequirementRow row = RequirementRow.of(check, check).get(0);
         assertThat(row.spoken())
-                .startsWith("not met: raw visibility " + row.predicted() + ", required " + row.required() + ", margin -")
+                .startsWith(
+                        "not met: raw visibility " + row.predicted() + ", required " + row.required() + ", margin -")
                 .contains("falls short of");
     }
 }

@@ -80,7 +80,8 @@ final class ScenarioChangesTest {
         List<PathElement> path = new ArrayList<>(LINK.alice().path());
         path.add(new LossElement(Optional.of("monitor tap"), 0.4));
         assertThat(texts(withAlice(path))).containsExactly("alice: added: monitor tap");
-        List<PathElement> shorter = LINK.alice().path().subList(1, LINK.alice().path().size());
+        List<PathElement> shorter =
+                LINK.alice().path().subList(1, LINK.alice().path().size());
         String label = LINK.alice().path().get(0).label().orElseThrow();
         assertThat(texts(withAlice(shorter))).containsExactly("alice: removed: " + label);
     }
@@ -102,8 +103,9 @@ final class ScenarioChangesTest {
         List<PathElement> path = new ArrayList<>(LINK.alice().path());
         Collections.reverse(path);
         assertThat(path).hasSizeGreaterThan(1);
-        assertThat(texts(withAlice(path))).hasSize(1).allSatisfy(text -> assertThat(text)
-                .startsWith("alice: order changed to "));
+        assertThat(texts(withAlice(path)))
+                .hasSize(1)
+                .allSatisfy(text -> assertThat(text).startsWith("alice: order changed to "));
     }
 
     @Test
@@ -125,7 +127,8 @@ final class ScenarioChangesTest {
         assertThat(texts)
                 .contains("name: " + LINK.name() + " \u2192 Another name")
                 .contains("spread, window width: not stated \u2192 uniform 5 %");
-        assertThat(texts).filteredOn(text -> text.startsWith("provenance, "))
+        assertThat(texts)
+                .filteredOn(text -> text.startsWith("provenance, "))
                 .hasSize(LINK.provenance().size());
     }
 }

@@ -59,10 +59,16 @@ final class VerdictModelTest {
                 .get()
                 .requirements()
                 .forEach(row -> assertThat(page).contains(row.required(), row.predicted(), row.margin()));
-        model.fullProperty().get().rows().forEach(row -> assertThat(page)
-                .contains(row.name(), row.planned(), row.limit(), row.room(), row.fails()));
-        model.sheetProperty().get().budget().steps().forEach(step -> assertThat(page)
-                .contains(step.cause(), step.factor(), step.loss()));
+        model.fullProperty()
+                .get()
+                .rows()
+                .forEach(row ->
+                        assertThat(page).contains(row.name(), row.planned(), row.limit(), row.room(), row.fails()));
+        model.sheetProperty()
+                .get()
+                .budget()
+                .steps()
+                .forEach(step -> assertThat(page).contains(step.cause(), step.factor(), step.loss()));
     }
 
     @Test
@@ -118,10 +124,9 @@ final class VerdictModelTest {
         window(design, 300.0);
         LinkCheck before = LinkCheck.of(saved);
         LinkCheck now = LinkCheck.of(design.scenario());
-        double difference = now.prediction().fringe().raw()
-                - before.prediction().fringe().raw();
-        Change change =
-                model.sheetProperty().get().requirements().get(0).change();
+        double difference =
+                now.prediction().fringe().raw() - before.prediction().fringe().raw();
+        Change change = model.sheetProperty().get().requirements().get(0).change();
         assertThat(change.text()).isEqualTo(RequirementWords.margin(Requirement.RAW_VISIBILITY, difference));
         assertThat(change.effect()).isEqualTo(difference > 0.0 ? Change.Effect.BETTER : Change.Effect.WORSE);
         assertThat(figure(model.sheetProperty().get(), "accidentals").change().effect())
@@ -175,9 +180,8 @@ final class VerdictModelTest {
                 .orElseThrow();
         assertThat(room.tightest().orElseThrow().path()).isEqualTo(first.path());
         assertThat(room.limits().stream().map(VerdictRoom.Limit::quantity).toList())
-                .isEqualTo(check.stability().stream()
-                        .map(StabilityLimit::quantity)
-                        .toList());
+                .isEqualTo(
+                        check.stability().stream().map(StabilityLimit::quantity).toList());
     }
 
     @Test
@@ -299,8 +303,9 @@ final class VerdictModelTest {
         VerdictSheet sheet = model.sheetProperty().get();
         VerdictRoom room = model.fullProperty().get();
         String text = VerdictText.of(sheet, room);
-        room.rows().forEach(row -> assertThat(text)
-                .contains(String.join("\t", row.name(), row.planned(), row.limit(), row.room(), row.fails())));
+        room.rows()
+                .forEach(row -> assertThat(text)
+                        .contains(String.join("\t", row.name(), row.planned(), row.limit(), row.room(), row.fails())));
         sheet.cautions().forEach(caution -> assertThat(text).contains(caution.text(), "[" + caution.code() + "]"));
         assertThat(text).contains("window width: 400 ps \u2192 350 ps");
         assertThat(VerdictText.of(sheet, null)).doesNotContain("Headroom");
