@@ -8,7 +8,7 @@ import org.jfree.data.Range;
  * Where the ticks of an axis stand and what they say: steps of 1, 2 or 5 on a linear axis and, where three fit, on a
  * logarithmic one of less than a decade; 1, 2, 5 up to two decades; powers of ten beyond.
  */
-final class Ticks {
+public final class Ticks {
     private static final double DECADE = 1.0;
     private static final double FEW_DECADES = 2.0;
     private static final double SLACK = 1e-9;
@@ -37,10 +37,10 @@ final class Ticks {
      * @param position where
      * @param label its words; empty for a minor tick
      */
-    record Tick(double position, String label) {}
+    public record Tick(double position, String label) {}
 
     /** The ticks between two positions, so that at most so many labels would fill the axis. */
-    static List<Tick> of(Axis axis, Range positions, int most) {
+    public static List<Tick> of(Axis axis, Range positions, int most) {
         Ticks made = new Ticks(axis, positions, most);
         if (!axis.logarithmic()) {
             made.linear(positions.getLowerBound(), positions.getUpperBound(), niceStep(made.shortestStep));
