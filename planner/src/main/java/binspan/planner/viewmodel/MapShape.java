@@ -8,6 +8,7 @@ import binspan.study.region.MapLine;
 import binspan.study.region.MarginGrid;
 import binspan.study.region.RegionMap;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.function.IntBinaryOperator;
 import java.util.function.ToDoubleBiFunction;
@@ -114,7 +115,7 @@ public record MapShape(List<MapContour> contours, List<List<Point>> border, bool
 
     private static List<Point> reversed(List<Point> line) {
         List<Point> reversed = new ArrayList<>(line);
-        java.util.Collections.reverse(reversed);
+        Collections.reverse(reversed);
         return reversed;
     }
 
