@@ -27,22 +27,23 @@ final class LabelAxis extends NumberAxis {
      * @param title its own words, drawn at its lower end; empty for none
      * @param marks what it labels, at positions
      * @param positions the same as those of the axis opposite
+     * @param theme colours
      */
-    LabelAxis(String title, List<Mark> marks, Range positions) {
+    LabelAxis(String title, List<Mark> marks, Range positions, PlotTheme theme) {
         super(title.isEmpty() ? null : title);
         this.marks = marks.stream()
                 .filter(mark -> positions.contains(mark.value()))
                 .sorted(Comparator.comparingDouble(Mark::value))
                 .toList();
         setRange(positions);
-        PlotStyle.dress(this);
+        PlotStyle.dress(this, theme);
         setAxisLineVisible(false);
         setTickLabelsVisible(!this.marks.isEmpty());
     }
 
     /** As high as one with labels, but without any, so that plots side by side begin level. */
-    static LabelAxis blank(Range positions) {
-        LabelAxis axis = new LabelAxis("", List.of(new Mark(" ", positions.getCentralValue())), positions);
+    static LabelAxis blank(Range positions, PlotTheme theme) {
+        LabelAxis axis = new LabelAxis("", List.of(new Mark(" ", positions.getCentralValue())), positions, theme);
         axis.setTickMarksVisible(false);
         return axis;
     }

@@ -18,15 +18,61 @@ class ScaledAxis extends NumberAxis {
     private static final double HORIZONTAL_SPACING = 78.0;
     private static final double VERTICAL_SPACING = 24.0;
     private static final int MOST_LABELS = 12;
+    private static final int MOST_LINES = 3;
+    private static final double LINE_PITCH = 1.2;
+    private static final double SHORTEST_LINE = 60.0;
 
     private final transient Axis axis;
+    private transient List<String> lines = List.of();
 
-    ScaledAxis(Axis axis, Range positions) {
+    ScaledAxis(Axis axis, Range positions, PlotTheme theme) {
         super(axis.title());
         this.axis = axis;
         setRange(positions);
-        PlotStyle.dress(this);
+        PlotStyle.dress(this, theme);
         setMinorTickMarksVisible(true);
+    }
+
+    /** Breaks the title into lines no longer than a given length. */
+    ScaledAxis wrapped(double length) {
+        lines = Words.lines(axis.title(), getLabelFont(), Math.max(SHORTEST_LINE, length), MOST_LINES);
+        setLabel(lines.size() == 1 ? lines.get(0) : axis.title());
+        return this;
+    }
+
+    private double lineHeight() {
+        return getLabelFont().getSize2D() * LINE_PITCH;
+    }
+
+    @Override
+    protected Rectangle2D getLabelEnclosure(Graphics2D g2, RectangleEdge edge) {
+        Rectangle2D one = super.getLabelEnclosure(g2, edge);
+        double more = Math.max(0, lines.size() - 1) * lineHeight();
+        boolean level = RectangleEdge.isTopOrBottom(edge);
+        one.setRect(
+                one.getX(), one.getY(), one.getWidth() + (level ? 0.0 : more), one.getHeight() + (level ? more : 0.0));
+        return one;
+    }
+
+    @Override
+    protected AxisState drawLabel(
+            String label,
+            Graphics2D g2,
+            Rectangle2D plotArea,
+            Rectangle2D dataArea,
+            RectangleEdge edge,
+            AxisState state) {
+        if (lines.size() < 2 || label == null) {
+            return super.drawLabel(label, g2, plotArea, dataArea, edge, state);
+        }
+        double cursor = state.getCursor();
+        double step = (edge.equals(RectangleEdge.TOP) || edge.equals(RectangleEdge.LEFT) ? -1.0 : 1.0) * lineHeight();
+        boolean downwards = edge.equals(RectangleEdge.BOTTOM);
+        for (int i = 0; i < lines.size(); i++) {
+            state.setCursor(cursor + i * step);
+            super.drawLabel(lines.get(downwards ? i : lines.size() - 1 - i), g2, plotArea, dataArea, edge, state);
+        }
+        return state;
     }
 
     @Override

@@ -1,13 +1,15 @@
-package binspan.planner.cli;
+package binspan.planner.io;
 
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 
 /** Starter scenarios. */
-enum Preset {
+public enum Preset {
     PULSE_PAIR("pulse-pair", "two pump pulses per cycle, nanowire detectors, 2 x 30 km"),
     CONTINUOUS("continuous", "continuous pump, nanowire detectors, 2 x 25 km"),
     PULSE_TRAIN("pulse-train", "endless pump pulses at 1 GHz, nanowire detectors, 2 x 50 km"),
@@ -23,17 +25,17 @@ enum Preset {
     }
 
     /** Its name on the command line. */
-    String text() {
+    public String text() {
         return text;
     }
 
     /** What it is, in a few words. */
-    String summary() {
+    public String summary() {
         return summary;
     }
 
     /** The scenario with its comments. */
-    String scenario() {
+    public String scenario() {
         try (InputStream in = Preset.class.getResourceAsStream("/binspan/planner/presets/" + text + ".json")) {
             return new String(in.readAllBytes(), StandardCharsets.UTF_8);
         } catch (IOException e) {
@@ -42,7 +44,7 @@ enum Preset {
     }
 
     /** All names. */
-    static List<String> names() {
+    public static List<String> names() {
         List<String> names = new ArrayList<>();
         for (Preset preset : values()) {
             names.add(preset.text);
@@ -50,17 +52,8 @@ enum Preset {
         return names;
     }
 
-    /**
-     * The preset of a name.
-     *
-     * @throws UsageException if there is none
-     */
-    static Preset named(String name) throws UsageException {
-        for (Preset preset : values()) {
-            if (preset.text.equals(name)) {
-                return preset;
-            }
-        }
-        throw UsageException.unknown("preset", name, names());
+    /** The preset of a name, if there is one. */
+    public static Optional<Preset> find(String name) {
+        return Arrays.stream(values()).filter(each -> each.text.equals(name)).findFirst();
     }
 }

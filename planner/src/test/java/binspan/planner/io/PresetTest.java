@@ -1,8 +1,7 @@
-package binspan.planner.cli;
+package binspan.planner.io;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import binspan.planner.io.ScenarioReader;
 import binspan.scenario.Arm;
 import binspan.scenario.Detector;
 import binspan.scenario.DetectorClass;
