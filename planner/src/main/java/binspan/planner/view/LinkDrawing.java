@@ -19,6 +19,7 @@ import javafx.scene.layout.Pane;
 /** The drawn link: its symbols side by side with the running loss under them, in the width that it is given. */
 final class LinkDrawing extends Pane {
     private static final double PROFILE_TEXT = 0.85;
+    private static final double ROUNDING = 0.01;
     private static final double LEAST_PROFILE_EM = 4.0;
 
     private final LinkModel model;
@@ -79,7 +80,7 @@ final class LinkDrawing extends Pane {
         LinkLayout layout = LinkLayout.of(items, room, em);
         boolean focused = nodes.stream().anyMatch(LinkNode::isFocused);
         resizeTo(items.size());
-        LinkLabels labels = LinkLabels.of(layout, em);
+        LinkLabels labels = LinkLabels.of(items, layout, em);
         for (int i = 0; i < layout.columns().size(); i++) {
             Column column = layout.columns().get(i);
             for (int item : column.items()) {
@@ -91,7 +92,7 @@ final class LinkDrawing extends Pane {
                                 em);
             }
         }
-        setPrefWidth(layout.width());
+        setPrefWidth(Math.floor(layout.width() + ROUNDING));
         setMinHeight((LinkNode.HEIGHT_EM + LEAST_PROFILE_EM) * em);
         places.set(layout);
         mark();

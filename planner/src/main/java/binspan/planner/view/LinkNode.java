@@ -8,6 +8,7 @@ import binspan.planner.viewmodel.LinkLayout.Column;
 import binspan.planner.viewmodel.Words;
 import binspan.units.Digits;
 import javafx.css.PseudoClass;
+import javafx.geometry.Pos;
 import javafx.scene.AccessibleRole;
 import javafx.scene.Group;
 import javafx.scene.Node;
@@ -28,7 +29,9 @@ final class LinkNode extends Region {
     private static final double UNIT = 12.0;
     private static final double ROW_EM = 1.15;
     private static final double TOP_EM = 0.1;
-    private static final double WIDE_LOSS_EM = 3.1;
+    private static final double SYMBOL_EM = 2.45;
+    private static final double WIDE_LOSS_EM = 4.6;
+    private static final double OUTSIDE_EM = 2.5;
 
     private final Label name = label("link-name");
     private final Label detail = label("link-detail");
@@ -85,7 +88,7 @@ final class LinkNode extends Region {
     }
 
     private static double top(Drawn drawn, double em) {
-        return drawn.place() == 0 ? 0.0 : LIGHT_EM * em;
+        return (drawn.place() == 0 ? SYMBOL_EM : LIGHT_EM) * em;
     }
 
     private static double bottom(Drawn drawn, double em) {
@@ -94,16 +97,29 @@ final class LinkNode extends Region {
 
     private void words(Drawn drawn, double em, double top) {
         LinkLabels.Place place = drawn.label();
-        boolean lower = drawn.place() > 0;
-        boolean both = place.both() && !drawn.item().detail().isEmpty() && !lower;
-        String first = lower && !drawn.item().detail().isEmpty()
-                ? drawn.item().detail()
-                : drawn.item().name();
+        if (drawn.place() > 0) {
+            lowerPort(drawn, em, top);
+            return;
+        }
+        String more = place.both() ? drawn.item().detail() : "";
+        int row = place.both() && more.isEmpty() ? 1 : place.row();
         double x = place.x() - drawn.column().x();
-        double row = lower ? HEIGHT_EM - ROW_EM - TOP_EM : TOP_EM + (both || !place.both() ? place.row() : 1) * ROW_EM;
-        put(name, first, x, row * em - top, place.width());
-        put(detail, both ? drawn.item().detail() : "", x, (TOP_EM + ROW_EM) * em - top, place.width());
-        name.setPrefHeight(ROW_EM * em);
+        put(name, place.text(), x, (TOP_EM + row * ROW_EM) * em - top, place.width());
+        put(detail, more, x, (TOP_EM + ROW_EM) * em - top, place.width());
+    }
+
+    /** The lower port has its words under it, where nothing is lost, and over the clock's place. */
+    private void lowerPort(Drawn drawn, double em, double top) {
+        double outside = OUTSIDE_EM * em;
+        double y = (HEIGHT_EM - ROW_EM - TOP_EM) * em - top;
+        put(name, "", 0.0, 0.0, 0.0);
+        put(
+                detail,
+                drawn.item().detail(),
+                drawn.item().left() ? -outside : 0.0,
+                y,
+                drawn.column().width() + outside);
+        detail.setAlignment(drawn.item().left() ? Pos.CENTER_RIGHT : Pos.CENTER_LEFT);
     }
 
     private void loss(Drawn drawn, double em, double top) {
@@ -122,6 +138,7 @@ final class LinkNode extends Region {
     private static Label label(String style) {
         Label label = new Label();
         label.getStyleClass().add(style);
+        label.setAlignment(Pos.CENTER);
         label.setManaged(false);
         return label;
     }

@@ -114,8 +114,10 @@ final class LinkSymbols {
         line("link-light", 13.0, 0.0, half, 0.0);
         path("link-light", "M-13,0 C-16,0 -15,-11 " + -half + ",-11");
         path(ports > 1 ? "link-light" : "link-spare", "M-13,0 C-16,0 -15,11 " + -half + ",11");
-        path("link-light", "M13,0 C8,0 13,-18 6,-18 L-6,-18 C-13,-18 -8,0 -13,0");
-        path("link-light", "M13,0 C10,0 10,5 6,5 L-6,5 C-10,5 -10,0 -13,0");
+        path("link-light", "M13,0 C9,0 11,-8 6,-8 L-6,-8 C-11,-8 -9,0 -13,0");
+        path("link-light", "M13,0 C9,0 11,6 6,6 L-6,6 C-11,6 -9,0 -13,0");
+        add("link-light", new Circle(-3.0, -13.0, 5.0));
+        add("link-light", new Circle(3.0, -13.0, 5.0));
         add("link-solid", new Circle(13.0, 0.0, 2.6));
         add("link-solid", new Circle(-13.0, 0.0, 2.6));
     }

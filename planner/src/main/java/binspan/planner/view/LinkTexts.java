@@ -5,6 +5,7 @@ import binspan.planner.report.RequirementWords;
 import binspan.planner.viewmodel.LinkRoom;
 import binspan.planner.viewmodel.Site;
 import binspan.planner.viewmodel.Words;
+import java.util.OptionalDouble;
 import java.util.stream.Collectors;
 
 /** Room for more loss in words. */
@@ -17,7 +18,10 @@ final class LinkTexts {
             return "";
         }
         if (!known.unmet().isEmpty()) {
-            return Words.of("link.room.short");
+            OptionalDouble less = known.shortAt(site);
+            return less.isPresent()
+                    ? Words.of("link.room.short", Figure.decibels(less.getAsDouble()))
+                    : Words.of("link.room.hopeless");
         }
         return known.at(site)
                 .map(room -> Words.of("link.room", Figure.decibels(room.extraDb())))
@@ -28,7 +32,7 @@ final class LinkTexts {
     static String about(LinkRoom known, Site site) {
         if (!known.unmet().isEmpty()) {
             String names = known.unmet().stream().map(RequirementWords::name).collect(Collectors.joining(", "));
-            return Words.of("link.room.fails", names);
+            return Words.of("link.room.fails", names, room(known, site));
         }
         return known.at(site)
                 .map(room -> Words.of(

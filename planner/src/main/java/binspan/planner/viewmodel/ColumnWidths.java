@@ -10,10 +10,11 @@ final class ColumnWidths {
     static double least(Kind kind) {
         return switch (kind) {
             case CLOCK, REPAIR, LOSS, COUPLING, BAND -> 2.5;
-            case PORT, FILTER, COMPENSATOR -> 2.6;
+            case FILTER, COMPENSATOR -> 2.6;
+            case PORT -> 2.8;
             case FIBRE -> 3.0;
             case ANALYZER -> 3.6;
-            case SOURCE -> 4.2;
+            case SOURCE -> 5.4;
         };
     }
 
@@ -24,7 +25,7 @@ final class ColumnWidths {
             case FIBRE -> 3.0;
             case LOSS -> 5.0;
             case FILTER, COMPENSATOR, ANALYZER, PORT -> 5.4;
-            case SOURCE -> 6.4;
+            case SOURCE -> 6.6;
         };
     }
 
