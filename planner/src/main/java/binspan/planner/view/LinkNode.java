@@ -31,7 +31,8 @@ final class LinkNode extends Region {
     private static final double TOP_EM = 0.1;
     private static final double SYMBOL_EM = 2.45;
     private static final double WIDE_LOSS_EM = 4.6;
-    private static final double OUTSIDE_EM = 2.5;
+    private static final double OUTSIDE_EM = 2.0;
+    private static final double INSIDE_EM = 0.9;
 
     private final Label name = label("link-name");
     private final Label detail = label("link-detail");
@@ -111,14 +112,15 @@ final class LinkNode extends Region {
     /** The lower port has its words under it, where nothing is lost, and over the clock's place. */
     private void lowerPort(Drawn drawn, double em, double top) {
         double outside = OUTSIDE_EM * em;
+        double inside = INSIDE_EM * em;
         double y = (HEIGHT_EM - ROW_EM - TOP_EM) * em - top;
         put(name, "", 0.0, 0.0, 0.0);
         put(
                 detail,
                 drawn.item().detail(),
-                drawn.item().left() ? -outside : 0.0,
+                drawn.item().left() ? -outside : -inside,
                 y,
-                drawn.column().width() + outside);
+                drawn.column().width() + outside + inside);
         detail.setAlignment(drawn.item().left() ? Pos.CENTER_RIGHT : Pos.CENTER_LEFT);
     }
 

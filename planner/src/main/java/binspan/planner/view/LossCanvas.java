@@ -81,6 +81,18 @@ final class LossCanvas extends Canvas {
         pen.setLineWidth(look.em(0.08));
         double y = y(0.0);
         pen.strokeLine(0.0, y, layout.width(), y);
+        pen.setFill(look.palette().soft());
+        pen.setTextAlign(TextAlignment.CENTER);
+        pen.setTextBaseline(VPos.BOTTOM);
+        pen.fillText(Words.of("link.zero"), sourceX(), y);
+    }
+
+    private double sourceX() {
+        return layout.columns().stream()
+                .filter(column -> column.kind() == Kind.SOURCE)
+                .findFirst()
+                .orElseThrow()
+                .centre();
     }
 
     private void line(GraphicsContext pen, LossProfile profile) {
@@ -158,12 +170,7 @@ final class LossCanvas extends Canvas {
         }
         double width = layout.bar() * layout.pxPerKm();
         double y = getHeight() - look.em(0.7);
-        double middle = layout.columns().stream()
-                .filter(column -> column.kind() == Kind.SOURCE)
-                .findFirst()
-                .orElseThrow()
-                .centre();
-        double left = Math.max(0.0, middle - width / 2.0);
+        double left = Math.max(0.0, sourceX() - width / 2.0);
         double tick = look.em(0.25);
         pen.setStroke(look.palette().soft());
         pen.setFill(look.palette().soft());

@@ -9,12 +9,12 @@ final class ColumnWidths {
     /** Least width, em. */
     static double least(Kind kind) {
         return switch (kind) {
-            case CLOCK, REPAIR, LOSS, COUPLING, BAND -> 2.5;
-            case FILTER, COMPENSATOR -> 2.6;
-            case PORT -> 2.8;
-            case FIBRE -> 3.0;
-            case ANALYZER -> 3.6;
-            case SOURCE -> 5.4;
+            case CLOCK, REPAIR, COUPLING -> 2.0;
+            case LOSS, FILTER, COMPENSATOR, BAND -> 2.2;
+            case PORT -> 2.6;
+            case FIBRE -> 2.9;
+            case ANALYZER -> 3.4;
+            case SOURCE -> 4.6;
         };
     }
 
@@ -22,7 +22,7 @@ final class ColumnWidths {
     private static double easy(Kind kind) {
         return switch (kind) {
             case CLOCK, BAND, REPAIR, COUPLING -> 4.2;
-            case FIBRE -> 3.0;
+            case FIBRE -> 2.9;
             case LOSS -> 5.0;
             case FILTER, COMPENSATOR, ANALYZER, PORT -> 5.4;
             case SOURCE -> 6.6;

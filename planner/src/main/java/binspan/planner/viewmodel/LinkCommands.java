@@ -1,11 +1,13 @@
 package binspan.planner.viewmodel;
 
 import binspan.planner.document.Change;
+import binspan.planner.document.ElementEdits;
 import binspan.planner.viewmodel.LinkItem.Kind;
 import binspan.planner.viewmodel.LinkPart.Element;
 import binspan.scenario.FibreSpan;
 import binspan.scenario.PathElement;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.function.BiPredicate;
 
@@ -64,7 +66,7 @@ public final class LinkCommands {
         place(outside)
                 .ifPresent(place -> done(
                         Words.of("link.change.add", LinkWords.kind(kind)),
-                        PathEdits.add(place.site(), place.index(), kind),
+                        ElementEdits.add(design.scenario(), place.site().path(), type(kind), place.index()),
                         place));
     }
 
@@ -83,7 +85,7 @@ public final class LinkCommands {
         if (to != from.index()) {
             done(
                     Words.of("link.change.move", name(from)),
-                    PathEdits.move(from, to),
+                    ElementEdits.move(from.site().path(), from.index(), to),
                     new Element(from.site(), to));
         }
     }
@@ -107,8 +109,13 @@ public final class LinkCommands {
         if (!(km > 0.0 && km < selectedKm())) {
             return Words.of("link.refusal.splitPlace", LinkWords.kilometres(selectedKm()));
         }
-        done(Words.of("link.change.split", name(span)), PathEdits.split(design.scenario(), span, km), span);
+        done(Words.of("link.change.split", name(span)), ElementEdits.split(design.scenario(), span.site().path(), span.index(), km), span);
         return "";
+    }
+
+    /** The type of an element in the scenario file. */
+    private static String type(Kind kind) {
+        return kind.name().toLowerCase(Locale.ROOT);
     }
 
     private void removeSelected() {
@@ -117,7 +124,7 @@ public final class LinkCommands {
         LinkPart next = left == 0
                 ? new LinkPart.Coupling(gone.site())
                 : new Element(gone.site(), Math.min(gone.index(), left - 1));
-        done(Words.of("link.change.remove", name(gone)), PathEdits.remove(gone), next);
+        done(Words.of("link.change.remove", name(gone)), ElementEdits.remove(gone.site().path(), gone.index()), next);
     }
 
     private void moveTowards(Site site) {

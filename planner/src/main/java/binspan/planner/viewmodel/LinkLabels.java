@@ -6,7 +6,7 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * Where the words over the drawn link stand: in a wide column name and detail above one another; in a run of narrow
+ * Where the words over the drawn link stand: in a column that is wide enough name and detail above one another; in a run of narrow
  * ones a name alone, in two rows by turns. Neighbours in a row share the space between them as their lengths ask; none
  * reaches over another.
  *
@@ -14,8 +14,10 @@ import java.util.List;
  */
 public record LinkLabels(List<Place> places) {
     private static final double WIDE_EM = 4.6;
-    private static final double LETTER_EM = 0.49;
-    private static final double MARGIN_EM = 0.6;
+    private static final double MOSTLY = 0.75;
+    private static final double SURE_EM = 2.3;
+    private static final double LETTER_EM = 0.53;
+    private static final double MARGIN_EM = 0.7;
 
     /** Copies the list. */
     public LinkLabels {
@@ -53,7 +55,7 @@ public record LinkLabels(List<Place> places) {
         List<Place> wishes = wishes(items, layout, em);
         List<Place> places = new ArrayList<>();
         for (int i = 0; i < wishes.size(); i++) {
-            places.add(placed(wishes, i, layout));
+            places.add(placed(wishes, i, layout, em));
         }
         return new LinkLabels(places);
     }
@@ -64,25 +66,30 @@ public record LinkLabels(List<Place> places) {
         int run = 0;
         for (Column column : layout.columns()) {
             LinkItem item = items.get(column.items().get(0));
-            boolean wide = column.width() >= WIDE_EM * em;
+            double need = em * length(item.name().length(), item.detail().length());
+            boolean wide = column.width() >= Math.max(WIDE_EM * em, MOSTLY * need);
             run = wide ? 0 : run + 1;
             String text = !wide && item.kind() == Kind.PORT ? item.detail() : item.name();
-            int letters = Math.max(text.length(), wide ? item.detail().length() : 0);
-            double width = (letters * LETTER_EM + MARGIN_EM) * em;
+            double width = wide ? need : em * length(text.length(), 0);
             int row = wide ? 0 : (run + 1) % 2;
             wishes.add(new Place(row, wide, text, column.centre() - width / 2.0, width));
         }
         return wishes;
     }
 
-    private static Place placed(List<Place> wishes, int i, LinkLayout layout) {
+    private static double length(int letters, int others) {
+        return Math.max(letters, others) * LETTER_EM + MARGIN_EM;
+    }
+
+    private static Place placed(List<Place> wishes, int i, LinkLayout layout, double em) {
         Place wish = wishes.get(i);
         double left = 0.0;
         double right = layout.width();
         for (int row = 0; row < 2; row++) {
             if (wish.in(row)) {
-                left = Math.max(left, border(wishes, layout, i, -1, row));
-                right = Math.min(right, border(wishes, layout, i, 1, row));
+                double middle = layout.columns().get(i).centre();
+                left = Math.max(left, middle - reach(wishes, layout, i, new Way(-1, row, em)));
+                right = Math.min(right, middle + reach(wishes, layout, i, new Way(1, row, em)));
             }
         }
         double width = Math.min(wish.width(), right - left);
@@ -90,16 +97,44 @@ public record LinkLabels(List<Place> places) {
         return new Place(wish.row(), wish.both(), wish.text(), x, width);
     }
 
-    /** How far a text may reach towards its next neighbour in a row: the space is shared by their lengths. */
-    private static double border(List<Place> wishes, LinkLayout layout, int i, int step, int row) {
-        for (int j = i + step; j >= 0 && j < wishes.size(); j += step) {
-            if (wishes.get(j).in(row)) {
-                double here = layout.columns().get(i).centre();
-                double there = layout.columns().get(j).centre();
-                double mine = wishes.get(i).width();
-                return here + (there - here) * mine / (mine + wishes.get(j).width());
+    /** To the next one in a row: step -1 to the left, 1 to the right. */
+    private record Way(int step, int row, double em) {}
+
+    /** How far a text may reach towards its next neighbour in a row. */
+    private static double reach(List<Place> wishes, LinkLayout layout, int i, Way way) {
+        double here = layout.columns().get(i).centre();
+        for (int j = i + way.step(); j >= 0 && j < wishes.size(); j += way.step()) {
+            if (wishes.get(j).in(way.row())) {
+                double gap = Math.abs(layout.columns().get(j).centre() - here);
+                return shared(
+                        gap,
+                        claim(wishes.get(i), layout.columns().get(i), way.em()),
+                        claim(wishes.get(j), layout.columns().get(j), way.em()));
             }
         }
-        return step < 0 ? 0.0 : layout.width();
+        return way.step() < 0 ? here : layout.width() - here;
+    }
+
+    /** What a text asks for on one side of its middle: all of it, and what it gets first. */
+    private record Claim(double whole, double sure, boolean wide) {}
+
+    private static Claim claim(Place wish, Column column, double em) {
+        double whole = wish.width() / 2.0;
+        double sure = wish.both() ? column.width() / 2.0 : SURE_EM * em;
+        return new Claim(whole, Math.min(whole, sure), wish.both());
+    }
+
+    /** The part of a gap that goes to the first of two: in proportion to what they ask for, but what is sure first. */
+    private static double shared(double gap, Claim mine, Claim other) {
+        double least = mine.sure();
+        double rest = other.sure();
+        if (least + rest > gap) {
+            if (mine.wide() == other.wide()) {
+                return gap * least / (least + rest);
+            }
+            return mine.wide() ? least : gap - rest;
+        }
+        double share = gap * mine.whole() / (mine.whole() + other.whole());
+        return Math.max(least, Math.min(share, gap - rest));
     }
 }
