@@ -27,12 +27,12 @@ public record LossShortage(OptionalDouble alice, OptionalDouble bob) {
         LinkPredictor predictor = new LinkPredictor();
         return new LossShortage(
                 nearest(
-                        less -> margins.least(predictor.of(Edits.withArms(
-                                scenario, relieved(scenario.alice(), less), scenario.bob()))),
+                        less -> margins.least(predictor.of(
+                                Edits.withArms(scenario, relieved(scenario.alice(), less), scenario.bob()))),
                         ArmBudget.of(scenario, true).lossDb()),
                 nearest(
-                        less -> margins.least(predictor.of(Edits.withArms(
-                                scenario, scenario.alice(), relieved(scenario.bob(), less)))),
+                        less -> margins.least(predictor.of(
+                                Edits.withArms(scenario, scenario.alice(), relieved(scenario.bob(), less)))),
                         ArmBudget.of(scenario, false).lossDb()));
     }
 

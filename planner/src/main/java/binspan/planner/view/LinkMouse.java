@@ -70,7 +70,8 @@ final class LinkMouse implements EventHandler<MouseEvent> {
     }
 
     private double x(MouseEvent event) {
-        return drawing.sceneToLocal(new Point2D(event.getSceneX(), event.getSceneY())).getX();
+        return drawing.sceneToLocal(new Point2D(event.getSceneX(), event.getSceneY()))
+                .getX();
     }
 
     private void drag(MouseEvent event) {

@@ -121,7 +121,6 @@ final class LinkNode extends Region {
                 drawn.item().left() ? -outside : -inside,
                 y,
                 drawn.column().width() + outside + inside);
-        detail.setAlignment(drawn.item().left() ? Pos.CENTER_RIGHT : Pos.CENTER_LEFT);
     }
 
     private void loss(Drawn drawn, double em, double top) {

@@ -36,9 +36,7 @@ final class LinkTexts {
         }
         return known.at(site)
                 .map(room -> Words.of(
-                        "link.room.limit",
-                        Figure.decibels(room.extraDb()),
-                        RequirementWords.name(room.requirement())))
+                        "link.room.limit", Figure.decibels(room.extraDb()), RequirementWords.name(room.requirement())))
                 .orElseGet(() -> Words.of("link.room.none"));
     }
 }

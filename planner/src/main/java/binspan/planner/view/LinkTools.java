@@ -27,7 +27,8 @@ final class LinkTools extends HBox {
     private static final String CUT = "M0,5 H4 V7 H0 Z M8,5 H12 V7 H8 Z M5.2,0 H6.8 V4 H5.2 Z M5.2,8 H6.8 V12 H5.2 Z";
     private static final String LEFT = "M8,0 L8,11 L0,5.5 Z";
     private static final String RIGHT = "M0,0 L0,11 L8,5.5 Z";
-    private static final String CROSS = "M0,2 L2,0 L5.5,3.5 L9,0 L11,2 L7.5,5.5 L11,9 L9,11 L5.5,7.5 L2,11 L0,9 L3.5,5.5 Z";
+    private static final String CROSS =
+            "M0,2 L2,0 L5.5,3.5 L9,0 L11,2 L7.5,5.5 L11,9 L9,11 L5.5,7.5 L2,11 L0,9 L3.5,5.5 Z";
 
     private final LinkModel model;
     private final MenuButton add = new MenuButton(Words.of("link.add"));

@@ -19,7 +19,7 @@ import javafx.scene.text.TextAlignment;
 
 /** The running loss of both arms under the drawn link, the room for more, and the scale of the fibre. */
 final class LossCanvas extends Canvas {
-    private static final double TOP_EM = 1.0;
+    private static final double TOP_EM = 1.2;
     private static final double BOTTOM_EM = 1.35;
     private static final double MOST_ROOM_SHARE = 0.3;
     private static final double TEXT = 0.85;
@@ -77,14 +77,10 @@ final class LossCanvas extends Canvas {
     }
 
     private void zero(GraphicsContext pen) {
-        pen.setStroke(look.palette().grid());
-        pen.setLineWidth(look.em(0.08));
-        double y = y(0.0);
-        pen.strokeLine(0.0, y, layout.width(), y);
         pen.setFill(look.palette().soft());
         pen.setTextAlign(TextAlignment.CENTER);
         pen.setTextBaseline(VPos.BOTTOM);
-        pen.fillText(Words.of("link.zero"), sourceX(), y);
+        pen.fillText(Words.of("link.zero"), sourceX(), y(0.0));
     }
 
     private double sourceX() {
@@ -111,8 +107,7 @@ final class LossCanvas extends Canvas {
     private void numbers(GraphicsContext pen, LossProfile profile) {
         pen.setFill(look.palette().soft());
         double gap = look.em(0.25);
-        profile.numbers()
-                .forEach(number -> beside(pen, profile, number.x(), y(number.db()) - gap, number.text()));
+        profile.numbers().forEach(number -> beside(pen, profile, number.x(), y(number.db()) - gap, number.text()));
     }
 
     private void total(GraphicsContext pen, LossProfile profile) {

@@ -24,7 +24,8 @@ record FibreScale(double pxPerKm, double leastPx) {
      */
     static FibreScale of(Kind[] kinds, double[] km, double room, double leastPx) {
         int spans = (int) Arrays.stream(kinds).filter(Kind.FIBRE::equals).count();
-        double[] longestFirst = Arrays.stream(km).filter(length -> length > 0.0).sorted().toArray();
+        double[] longestFirst =
+                Arrays.stream(km).filter(length -> length > 0.0).sorted().toArray();
         double drawn = 0.0;
         double scale = 0.0;
         for (int i = longestFirst.length - 1; i >= 0; i--) {

@@ -109,7 +109,10 @@ public final class LinkCommands {
         if (!(km > 0.0 && km < selectedKm())) {
             return Words.of("link.refusal.splitPlace", LinkWords.kilometres(selectedKm()));
         }
-        done(Words.of("link.change.split", name(span)), ElementEdits.split(design.scenario(), span.site().path(), span.index(), km), span);
+        done(
+                Words.of("link.change.split", name(span)),
+                ElementEdits.split(design.scenario(), span.site().path(), span.index(), km),
+                span);
         return "";
     }
 
@@ -124,7 +127,10 @@ public final class LinkCommands {
         LinkPart next = left == 0
                 ? new LinkPart.Coupling(gone.site())
                 : new Element(gone.site(), Math.min(gone.index(), left - 1));
-        done(Words.of("link.change.remove", name(gone)), ElementEdits.remove(gone.site().path(), gone.index()), next);
+        done(
+                Words.of("link.change.remove", name(gone)),
+                ElementEdits.remove(gone.site().path(), gone.index()),
+                next);
     }
 
     private void moveTowards(Site site) {
@@ -144,7 +150,8 @@ public final class LinkCommands {
 
     private Optional<Element> selected() {
         return design.selectionProperty().get() instanceof Element element
-                        && element.index() < element.site().arm(design.scenario()).path().size()
+                        && element.index()
+                                < element.site().arm(design.scenario()).path().size()
                 ? Optional.of(element)
                 : Optional.empty();
     }
@@ -167,7 +174,8 @@ public final class LinkCommands {
             return Optional.of(new Element(coupling.site(), 0));
         }
         return outerSite(part)
-                .map(site -> new Element(site, site.arm(design.scenario()).path().size()));
+                .map(site ->
+                        new Element(site, site.arm(design.scenario()).path().size()));
     }
 
     private static Optional<Site> outerSite(LinkPart part) {

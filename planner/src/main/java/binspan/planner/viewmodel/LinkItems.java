@@ -66,18 +66,18 @@ final class LinkItems {
             case COUPLING -> lossy(new LinkPart.Coupling(site), Kind.COUPLING, "", entry);
             case REPAIR_MARGIN -> lossy(new LinkPart.Repair(site), Kind.REPAIR, "", entry);
             case ANALYZER_EXCESS ->
-                lossy(
-                        new LinkPart.Analyzer(site),
-                        Kind.ANALYZER,
-                        Figure.stated(scenario.imbalanceNs(), "ns"),
-                        entry);
+                lossy(new LinkPart.Analyzer(site), Kind.ANALYZER, Figure.stated(scenario.imbalanceNs(), "ns"), entry);
             default -> element(entry);
         }
     }
 
     private void element(Entry entry) {
         String detail = LinkWords.detail(arm.path().get(entry.element()), entry.dispersionPsPerNm());
-        lossy(new LinkPart.Element(site, entry.element()), Kind.valueOf(entry.kind().name()), detail, entry);
+        lossy(
+                new LinkPart.Element(site, entry.element()),
+                Kind.valueOf(entry.kind().name()),
+                detail,
+                entry);
     }
 
     private void lossy(LinkPart part, Kind kind, String detail, Entry entry) {
@@ -119,7 +119,6 @@ final class LinkItems {
     private void plain(LinkPart part, Kind kind, String detail, double runningDb) {
         String name = LinkWords.kind(kind);
         String described = LinkWords.described(site, kind, name, detail, "");
-        items.add(
-                new LinkItem(part, Optional.of(site), kind, name, detail, 0.0, runningDb, 0.0, described));
+        items.add(new LinkItem(part, Optional.of(site), kind, name, detail, 0.0, runningDb, 0.0, described));
     }
 }

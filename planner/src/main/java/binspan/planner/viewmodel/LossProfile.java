@@ -66,7 +66,12 @@ public record LossProfile(
         double rim = site == Site.ALICE ? 0.0 : layout.width();
         List<Corner> line = drawing.line;
         return new LossProfile(
-                site, line, placed(drawing.steps, em), drawing.running, line.get(line.size() - 1).x(), rim);
+                site,
+                line,
+                placed(drawing.steps, em),
+                drawing.running,
+                line.get(line.size() - 1).x(),
+                rim);
     }
 
     /** Whether it goes to the left. */

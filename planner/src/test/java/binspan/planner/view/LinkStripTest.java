@@ -180,8 +180,7 @@ final class LinkStripTest {
         robot.moveTo("#link-item-7").press(MouseButton.PRIMARY).moveBy(-20, 0).moveTo("#link-item-5");
         robot.moveBy(-20, 0).release(MouseButton.PRIMARY);
         assertThat(selection()).isEqualTo(new Element(Site.ALICE, 2));
-        assertThat(bench.labels(Site.ALICE))
-                .containsExactly("upper duct", "dam patch panel", "Fernhill patch panel");
+        assertThat(bench.labels(Site.ALICE)).containsExactly("upper duct", "dam patch panel", "Fernhill patch panel");
         assertThat(bench.done()).containsExactly("moved Fernhill patch panel");
     }
 

@@ -26,7 +26,7 @@ final class LinkLayoutTest {
     record Drawn(List<LinkItem> items, double room, int mostInAnArm) {}
 
     static List<Drawn> links() {
-        return IntStream.range(0, 300).mapToObj(LinkLayoutTest::link).toList();
+        return IntStream.range(0, 120).mapToObj(LinkLayoutTest::link).toList();
     }
 
     private static Drawn link(int number) {
@@ -91,7 +91,8 @@ final class LinkLayoutTest {
             held.addAll(column.items());
         }
         assertThat(layout.width()).isCloseTo(x, within(DUST));
-        assertThat(held).isEqualTo(IntStream.range(0, drawn.items().size()).boxed().toList());
+        assertThat(held)
+                .isEqualTo(IntStream.range(0, drawn.items().size()).boxed().toList());
     }
 
     @ParameterizedTest

@@ -186,8 +186,7 @@ final class LinkModelTest {
         assertThat(bench.model().commands().splitAt(Double.NaN)).isNotEmpty();
         assertThat(bench.done()).isEmpty();
         assertThat(bench.model().commands().splitAt(10.0)).isEmpty();
-        FibreSpan first =
-                (FibreSpan) bench.design().scenario().alice().path().get(1);
+        FibreSpan first = (FibreSpan) bench.design().scenario().alice().path().get(1);
         assertThat(first.lengthKm()).isEqualTo(10.0);
         assertThat(SourcePosition.fibreKm(bench.design().scenario().alice())).isCloseTo(30.2, within(1e-9));
         assertThat(sum(bench, Site.ALICE)).isCloseTo(before, within(1e-9));
