@@ -34,7 +34,7 @@ final class WithoutEffect {
     private static Optional<String> pump(Pump pump, String name) {
         boolean pair = pump.mode() == PumpMode.PULSE_PAIR;
         boolean emission = name.equals("pairEmissionFwhmPs") && pump.mode() == PumpMode.CONTINUOUS;
-        if (emission || !pair && (PAIR_ONLY.contains(name) || name.equals("phaseNoiseRmsRad"))) {
+        if (emission || (!pair && (PAIR_ONLY.contains(name) || name.equals("phaseNoiseRmsRad")))) {
             return mode(pump);
         }
         if (name.equals("phaseNoiseRmsRad") && !pump.madeByInterferometer()) {
