@@ -1,7 +1,7 @@
 package binspan.planner.viewmodel;
 
 import binspan.planner.document.Change;
-import binspan.planner.io.TypedValue;
+import binspan.planner.document.FieldEntry;
 import binspan.planner.report.ParameterWords;
 import binspan.scenario.Choice;
 import binspan.scenario.Field;
@@ -174,12 +174,14 @@ public final class FieldModel implements FormRow {
 
     private void typed(String typed) {
         begin();
-        if (typed.isEmpty()) {
-            error.set(edits.statedIn(place) != null ? edits.remove(place) : "");
-            return;
+        FieldEntry entry = FieldEntry.read(place.field(), place.path(), typed);
+        if (entry instanceof FieldEntry.Refused refused) {
+            error.set(refused.problem().message());
+        } else if (((FieldEntry.Accepted) entry).change() instanceof Change.Put put) {
+            error.set(edits.put(place, put.value()));
+        } else {
+            error.set(edits.remove(place));
         }
-        TypedValue reading = TypedValue.of(place.field(), typed);
-        error.set(reading.error().isEmpty() ? edits.put(place, reading.value()) : reading.error());
     }
 
     private void begin() {

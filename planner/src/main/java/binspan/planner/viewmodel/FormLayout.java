@@ -161,6 +161,6 @@ final class FormLayout {
 
     private Section typed(Content content, String object) {
         Object element = PlannedValue.at(scenario, object).orElseThrow();
-        return PlannedValue.sectionOf(content, element);
+        return content.sectionOf((Record) element);
     }
 }

@@ -31,9 +31,9 @@ final class PlannedValue {
         }
     }
 
-    /** The value or object of a path, absent where the scenario leaves it open or has no such place. */
+    /** The value or object of a path, the scenario itself for an empty one; absent where the scenario leaves it open or has no such place. */
     static Optional<Object> at(Scenario scenario, String path) {
-        return Optional.ofNullable(new PlannedValue(scenario, path).value);
+        return path.isEmpty() ? Optional.of(scenario) : Optional.ofNullable(new PlannedValue(scenario, path).value);
     }
 
     /** The registry's entry of a path, the index of an element left out. */
@@ -41,33 +41,18 @@ final class PlannedValue {
         return new PlannedValue(scenario, path).place;
     }
 
-    /** What an object is. */
-    static Section sectionOf(Content content, Object element) {
-        return content.byType().values().stream()
-                .filter(section -> section.type().isInstance(element))
-                .findFirst()
-                .orElseThrow();
-    }
-
     private Section below(Content content, Section here) {
         if (content.byType().isEmpty()) {
             return here;
         }
         return content.typed() && value != null && !(value instanceof List<?>)
-                ? sectionOf(content, value)
+                ? content.sectionOf((Record) value)
                 : content.byType().values().iterator().next();
     }
 
     private Object component(Section section, Field field) {
-        try {
-            Object found = section.type()
-                    .getRecordComponents()[section.fields().indexOf(field)]
-                    .getAccessor()
-                    .invoke(value);
-            return found instanceof Optional<?> optional ? optional.orElse(null) : number(found);
-        } catch (ReflectiveOperationException e) {
-            throw new IllegalStateException(field.name(), e);
-        }
+        Object found = section.component((Record) value, section.indexOf(field.name()));
+        return found instanceof Optional<?> optional ? optional.orElse(null) : number(found);
     }
 
     private static Object number(Object found) {
