@@ -14,6 +14,8 @@ import javafx.scene.layout.VBox;
 
 /** Forms of stating one thing: a choice of the form, beside or below it the fields of the form. */
 final class AlternativesBox extends VBox {
+    private static final int LONG_NAME = 11;
+
     private final AlternativesModel model;
     private final BiConsumer<FieldModel, Boolean> explain;
     private final ComboBox<String> chooser = new ComboBox<>();
@@ -45,12 +47,16 @@ final class AlternativesBox extends VBox {
         Form form = model.forms().get(model.shownProperty().get());
         boolean focused = chooser.isFocused();
         getChildren().clear();
-        if (form.models().size() == 1) {
-            FieldModel only = form.models().get(0);
-            getChildren().add(new FieldRow(only, headed(only), explain));
-        } else {
-            getChildren().add(new HBox(headed(null)));
+        if (form.models().size() > 1) {
+            getChildren().add(headed(List.of(), "form-labels"));
             form.models().forEach(each -> getChildren().add(new FieldRow(each, null, explain)));
+        } else if (longNames()) {
+            HBox below = new HBox(FieldRow.mark(form.models()));
+            below.getStyleClass().add("form-labels");
+            getChildren().addAll(headed(List.of(), "form-labels-wide"), new FieldRow(form.models().get(0), below, explain));
+        } else {
+            HBox beside = headed(form.models(), "form-labels");
+            getChildren().add(new FieldRow(form.models().get(0), beside, explain));
         }
         getChildren().add(new ErrorLine(model.errorProperty()));
         chooser.getSelectionModel().select(model.shownProperty().get());
@@ -59,10 +65,13 @@ final class AlternativesBox extends VBox {
         }
     }
 
-    private HBox headed(FieldModel changing) {
-        List<FieldModel> fields = changing == null ? List.of() : List.of(changing);
-        HBox both = new HBox(FieldRow.mark(fields), chooser);
-        both.getStyleClass().add("form-labels");
+    private boolean longNames() {
+        return model.forms().stream().anyMatch(form -> form.label().length() > LONG_NAME);
+    }
+
+    private HBox headed(List<FieldModel> changing, String style) {
+        HBox both = new HBox(FieldRow.mark(changing), chooser);
+        both.getStyleClass().add(style);
         both.setAlignment(Pos.CENTER_LEFT);
         HBox.setHgrow(chooser, Priority.ALWAYS);
         return both;

@@ -11,24 +11,33 @@ import javafx.scene.Node;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.TitledPane;
+import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.VBox;
 
 /** The values of a catalogue class, which of them are in force, and where they come from. */
-final class ClassTablePane extends TitledPane {
+final class ClassTablePane extends VBox {
+    private static final double QUANTITY = 27.0;
+    private static final double OF_CLASS = 40.0;
+    private static final double OF_FILE = 33.0;
+
+    private final TitledPane more = new TitledPane();
     private final ClassRow model;
 
     /**
      * Shows the table of a class.
      *
-     * @param open whether it is unfolded, kept from one part to the next
+     * @param open whether limits and sources are unfolded, kept from one part to the next
      */
     ClassTablePane(ClassRow model, BooleanProperty open) {
         this.model = model;
         setId("form-class");
         getStyleClass().add("form-class");
-        setAnimated(false);
-        expandedProperty().bindBidirectional(open);
+        more.setId("form-class-sources");
+        more.setText(Words.of("form.class.sources"));
+        more.setAnimated(false);
+        more.setExpanded(open.get());
+        open.bind(more.expandedProperty());
         model.tableProperty().addListener((source, before, now) -> show(now));
         show(model.tableProperty().get());
     }
@@ -40,21 +49,22 @@ final class ClassTablePane extends TitledPane {
     }
 
     private void fill(ClassTable table) {
-        setText(table.meaning());
-        VBox content = new VBox(grid(table.lines()));
-        content.getStyleClass().add("form-class-content");
+        getChildren().setAll(note(table.meaning()), grid(table.lines()));
         List<String> points = model.operatingPoints();
         if (!points.isEmpty()) {
-            content.getChildren().add(points(points));
+            getChildren().add(points(points));
         }
-        table.limits().forEach(limit -> content.getChildren().add(note(limit)));
-        table.sources().forEach(source -> content.getChildren().add(note(source)));
-        setContent(content);
+        VBox notes = new VBox(note(String.join("; ", table.limits()) + "."));
+        table.sources().forEach(source -> notes.getChildren().add(note(source)));
+        notes.getStyleClass().add("form-class-notes");
+        more.setContent(notes);
+        getChildren().add(more);
     }
 
     private static GridPane grid(List<Line> lines) {
         GridPane grid = new GridPane();
         grid.getStyleClass().add("form-class-grid");
+        grid.getColumnConstraints().addAll(share(QUANTITY), share(OF_CLASS), share(OF_FILE));
         grid.addRow(0, head("form.class.quantity"), head("form.class.value"), head("form.class.file"));
         for (int i = 0; i < lines.size(); i++) {
             Line line = lines.get(i);
@@ -63,6 +73,12 @@ final class ClassTablePane extends TitledPane {
             grid.addRow(i + 1, cell(line.quantity(), "form-class-quantity"), ofClass, stated);
         }
         return grid;
+    }
+
+    private static ColumnConstraints share(double percent) {
+        ColumnConstraints column = new ColumnConstraints();
+        column.setPercentWidth(percent);
+        return column;
     }
 
     private static Label head(String key) {

@@ -9,6 +9,7 @@ import javafx.scene.control.TextField;
 import javafx.scene.control.Tooltip;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
 /** Explains the field that is focused or pointed at: what it means, what is allowed, what stands by default, where its value comes from. */
@@ -39,7 +40,9 @@ final class Explanation extends VBox {
         HBox line = new HBox(words, source);
         line.getStyleClass().add("form-source");
         HBox.setHgrow(source, Priority.ALWAYS);
-        getChildren().addAll(path, meaning, allowed, line);
+        Region space = new Region();
+        VBox.setVgrow(space, Priority.ALWAYS);
+        getChildren().addAll(path, meaning, allowed, space, line);
         show();
     }
 
@@ -78,8 +81,7 @@ final class Explanation extends VBox {
         boolean none = shown == null;
         path.setText(none ? "" : shown.writtenPath());
         meaning.setText(none ? Words.of("form.explain.none") : capital(shown.meaning()) + ".");
-        allowed.setText(
-                none ? "" : Words.of("form.explain.allowed", shown.allowed(), shown.defaultProperty().get()));
+        allowed.setText(none ? "" : allowed());
         source.setDisable(none);
         if (!source.isFocused()) {
             source.setText(none ? "" : shown.provenanceProperty().get());
@@ -87,6 +89,16 @@ final class Explanation extends VBox {
         String key = none ? "" : shown.provenancePath();
         source.setAccessibleText(none ? "" : Words.of("form.source", shown.label()));
         source.setTooltip(none ? null : new Tooltip(Words.of("form.source.help", key, source.getText())));
+    }
+
+    private String allowed() {
+        String stands = shown.defaultProperty().get();
+        if (!shown.choices().isEmpty()) {
+            return shown.optional() ? Words.of("form.explain.default", stands) : "";
+        }
+        return shown.optional()
+                ? Words.of("form.explain.allowed", shown.allowed(), stands)
+                : Words.of("form.explain.required", shown.allowed());
     }
 
     private void said() {

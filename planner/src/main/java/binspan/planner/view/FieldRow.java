@@ -17,7 +17,7 @@ import javafx.scene.control.Tooltip;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.HBox;
-import javafx.scene.layout.Pane;
+import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 
 /** One field: label, slider, entry and unit on a line, below it what is wrong. */
@@ -50,6 +50,8 @@ final class FieldRow extends VBox {
             line.getChildren().add(entry);
             entry.getStyleClass().add("form-wide");
         }
+        entry.setMaxWidth(Double.MAX_VALUE);
+        HBox.setHgrow(entry, Priority.ALWAYS);
         if (!model.withoutEffect().isEmpty() && model.optional()) {
             line.getChildren().add(Buttons.remove(id("form-drop", model.path()), () -> model.textProperty().set("")));
         }
@@ -132,6 +134,7 @@ final class FieldRow extends VBox {
     private Label unit() {
         Label unit = new Label(model.unit());
         unit.getStyleClass().addAll("form-unit", "soft");
+        unit.setTooltip(unit.getText().isEmpty() ? null : new Tooltip(unit.getText()));
         return unit;
     }
 
@@ -168,9 +171,8 @@ final class FieldRow extends VBox {
         slider.focusedProperty().addListener((source, before, focused) -> model.settle());
         slider.addEventFilter(KeyEvent.KEY_PRESSED, event -> keys(slider, event));
         follow.run();
-        Pane space = new HBox(slider);
-        space.getStyleClass().add("form-slide");
-        return space;
+        slider.managedProperty().bind(slider.visibleProperty());
+        return slider;
     }
 
     /** Page keys move by a tenth, Escape takes the movement back. */

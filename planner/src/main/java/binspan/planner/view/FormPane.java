@@ -32,7 +32,7 @@ public final class FormPane extends VBox {
     private final VBox fields = new VBox();
     private final ScrollPane scroll = new ScrollPane(fields);
     private final Explanation explanation = new Explanation();
-    private final BooleanProperty classOpen = new SimpleBooleanProperty(this, "classOpen", true);
+    private final BooleanProperty classOpen = new SimpleBooleanProperty(this, "classOpen", false);
 
     /** Shows the form of a model. */
     public FormPane(FormModel model) {
@@ -95,6 +95,7 @@ public final class FormPane extends VBox {
             return new AlternativesBox(alternatives, this::explain);
         }
         if (row instanceof ClassRow table) {
+            classOpen.unbind();
             return new ClassTablePane(table, classOpen);
         }
         return row instanceof GroupRow group ? heading(group) : adding((AddRow) row);
@@ -120,7 +121,7 @@ public final class FormPane extends VBox {
         add.getStyleClass().add("form-button");
         add.setOnAction(event -> row.add());
         VBox box = new VBox(add, new ErrorLine(row.errorProperty()));
-        box.getStyleClass().add("form-field");
+        box.getStyleClass().add("form-adding");
         return box;
     }
 
