@@ -1,4 +1,4 @@
-package binspan.planner.cli;
+package binspan.planner.export;
 
 import binspan.planner.picture.RegionPicture;
 import binspan.planner.report.RequiredFigure;
@@ -22,10 +22,16 @@ import java.util.Map;
 import java.util.Optional;
 
 /** The region of two parameters as a report; its table holds the points of the map with their least margin. */
-final class RegionReports {
-    private RegionReports() {}
+public final class RegionReport {
+    private RegionReport() {}
 
-    static StudyReport of(Scenario scenario, RegionMap map) {
+    /**
+     * What a region has to show. Its table is computed when it is written.
+     *
+     * @param scenario the link as written
+     * @param map a region that is not empty
+     */
+    public static StudyReport of(Scenario scenario, RegionMap map) {
         List<Axis> axes = List.of(map.horizontal(), map.vertical());
         int rows = map.vertical().steps();
         return new StudyReport(

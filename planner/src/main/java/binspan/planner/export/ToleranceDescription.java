@@ -1,4 +1,4 @@
-package binspan.planner.cli;
+package binspan.planner.export;
 
 import binspan.planner.table.TableJson;
 import binspan.study.tolerance.BuildShare;

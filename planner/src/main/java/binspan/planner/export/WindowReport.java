@@ -1,4 +1,4 @@
-package binspan.planner.cli;
+package binspan.planner.export;
 
 import binspan.planner.picture.WindowPicture;
 import binspan.planner.report.RequiredFigure;
@@ -22,12 +22,18 @@ import java.util.Map;
 import java.util.Optional;
 
 /** The windows of one parameter as a report; its table has three rows for each window: lower end, best point, upper end. */
-final class WindowReports {
+public final class WindowReport {
     private static final String RANGE = "range";
 
-    private WindowReports() {}
+    private WindowReport() {}
 
-    static StudyReport of(Scenario scenario, OperatingIntervals found) {
+    /**
+     * What the windows have to show.
+     *
+     * @param scenario the link as written
+     * @param found at least one window
+     */
+    public static StudyReport of(Scenario scenario, OperatingIntervals found) {
         List<List<Double>> points = new ArrayList<>();
         List<Integer> numbers = new ArrayList<>();
         List<String> places = new ArrayList<>();

@@ -1,4 +1,4 @@
-package binspan.planner.cli;
+package binspan.planner.export;
 
 import binspan.planner.table.RowWriter;
 import binspan.planner.table.StudyRows;

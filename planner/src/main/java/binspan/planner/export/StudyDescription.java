@@ -1,4 +1,4 @@
-package binspan.planner.cli;
+package binspan.planner.export;
 
 import binspan.planner.report.RequiredFigure;
 import binspan.study.Axis;

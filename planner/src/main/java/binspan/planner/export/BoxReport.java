@@ -1,4 +1,4 @@
-package binspan.planner.cli;
+package binspan.planner.export;
 
 import binspan.planner.picture.BoxPicture;
 import binspan.planner.report.BoxSummary;
@@ -21,12 +21,19 @@ import java.util.Map;
 import java.util.Optional;
 
 /** The largest box as a report; its table has four rows: lower corner, middle, upper corner, binding point. */
-final class BoxReports {
+public final class BoxReport {
     private static final List<String> POINTS = List.of("from", "middle", "to", "binding");
 
-    private BoxReports() {}
+    private BoxReport() {}
 
-    static StudyReport of(Scenario scenario, OperatingBox box) {
+    /**
+     * What a box has to show.
+     *
+     * @param scenario the link as written
+     * @param box a box that was found
+     * @throws java.util.NoSuchElementException if none was found
+     */
+    public static StudyReport of(Scenario scenario, OperatingBox box) {
         List<Axis> axes = box.question().axes();
         List<List<Double>> points = List.of(
                 box.sides().stream().map(side -> side.from().value()).toList(),
@@ -75,8 +82,8 @@ final class BoxReports {
         entry.put("middle", side.centre());
         entry.put("share", side.share());
         entry.put("tolerance", side.tolerance());
-        entry.put("fromEndedBy", WindowReports.name(side.from()));
-        entry.put("toEndedBy", WindowReports.name(side.to()));
+        entry.put("fromEndedBy", WindowReport.name(side.from()));
+        entry.put("toEndedBy", WindowReport.name(side.to()));
         return StudyDescription.finite(entry);
     }
 }

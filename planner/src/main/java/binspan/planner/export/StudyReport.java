@@ -1,4 +1,4 @@
-package binspan.planner.cli;
+package binspan.planner.export;
 
 import binspan.planner.plot.Picture;
 import binspan.planner.report.TextStyle;
@@ -16,7 +16,7 @@ import java.util.function.Supplier;
  * @param summary text for a terminal
  * @param picture describes the picture, if the study has one
  */
-record StudyReport(
+public record StudyReport(
         Map<String, Object> description,
         Table table,
         Function<TextStyle, String> summary,
