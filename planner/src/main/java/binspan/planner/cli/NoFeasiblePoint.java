@@ -19,11 +19,7 @@ final class NoFeasiblePoint {
      * @param prediction prediction at that point
      */
     static UsageException of(String what, RequirementMargins margins, LinkPrediction prediction) {
-        if (margins.met(prediction)) {
-            return UsageException.of(what + " inside the model's slots: the window would be wider than the separation,"
-                    + " or the slots longer than the pump cycle");
-        }
-        return UsageException.of(what + "; at the nearest point " + MissWords.of(margins, prediction));
+        return UsageException.of(MissWords.nowhere(what, margins, prediction));
     }
 
     /**

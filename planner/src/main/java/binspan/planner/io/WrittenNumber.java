@@ -1,9 +1,9 @@
-package binspan.planner.cli;
+package binspan.planner.io;
 
 import java.util.regex.Pattern;
 
-/** Numbers as a person writes them on a command line: plain or with an exponent, {@code 0.02} or {@code 2e-2}. */
-final class WrittenNumber {
+/** Numbers as a person types them: plain or with an exponent, {@code 0.02} or {@code 2e-2}. */
+public final class WrittenNumber {
     private static final Pattern NUMBER = Pattern.compile("[+-]?(\\d+\\.?\\d*|\\.\\d+)([eE][+-]?\\d{1,3})?");
 
     private WrittenNumber() {}
@@ -13,7 +13,7 @@ final class WrittenNumber {
      *
      * @throws IllegalArgumentException if the text is no number
      */
-    static double of(String text) {
+    public static double of(String text) {
         double value = NUMBER.matcher(text).matches() ? Double.parseDouble(text) : Double.NaN;
         if (!Double.isFinite(value)) {
             throw new IllegalArgumentException("found \"" + text + "\"; allowed a number such as 0.02 or 2e-2");
