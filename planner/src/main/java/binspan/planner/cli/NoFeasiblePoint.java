@@ -1,8 +1,6 @@
 package binspan.planner.cli;
 
 import binspan.planner.report.MissWords;
-import binspan.prediction.LinkPrediction;
-import binspan.prediction.RequirementMargins;
 import binspan.study.Axis;
 import binspan.study.window.PointVerdict;
 import java.util.List;
@@ -10,17 +8,6 @@ import java.util.List;
 /** Says that nothing meets the requirements, and how near it comes. */
 final class NoFeasiblePoint {
     private NoFeasiblePoint() {}
-
-    /**
-     * At a point that fails by the least.
-     *
-     * @param what what was searched
-     * @param margins the requirements
-     * @param prediction prediction at that point
-     */
-    static UsageException of(String what, RequirementMargins margins, LinkPrediction prediction) {
-        return UsageException.of(MissWords.nowhere(what, margins, prediction));
-    }
 
     /**
      * At a point of some axes that fails by the least.

@@ -64,8 +64,15 @@ public final class SweepModel extends StudyModel<StudyTable> {
         Scenario scenario = design().scenario();
         background().workers().execute(() -> {
             List<FigureColumn> found = FigureColumns.all(scenario);
-            background().window().execute(() -> known.setAll(found));
+            background().window().execute(() -> know(found));
         });
+    }
+
+    private void know(List<FigureColumn> found) {
+        if (!found.equals(known)) {
+            known.setAll(found);
+            shown.retainAll(found);
+        }
     }
 
     /** The first parameter, always used. */
