@@ -21,17 +21,6 @@ record SeriesStyle(Color colour, Stroke stroke, Shape marker) {
     private static final float WIDTH = 2.2f;
     private static final double SIZE = 8.0;
 
-    /** Of three colour normal, red-blind and green-blind views the least distance of two in OKLab is above 0.1. */
-    private static final List<OkLab> COLOURS = List.of(
-            OkLab.ofHue(0.33, 0.170, 265.0),
-            OkLab.ofHue(0.68, 0.160, 47.0),
-            OkLab.ofHue(0.50, 0.080, 186.0),
-            OkLab.ofHue(0.66, 0.170, 297.0),
-            OkLab.ofHue(0.27, 0.085, 22.0),
-            OkLab.ofHue(0.65, 0.100, 195.0),
-            OkLab.ofHue(0.51, 0.150, 273.0),
-            OkLab.ofHue(0.38, 0.065, 228.0));
-
     private static final float[][] DASHES = {
         {},
         {11.0f, 4.0f},
@@ -62,9 +51,8 @@ record SeriesStyle(Color colour, Stroke stroke, Shape marker) {
             HOURGLASS);
 
     /** The style of the series with an index from 0. */
-    static SeriesStyle of(int index) {
-        int i = Math.floorMod(index, COLOURS.size());
-        return new SeriesStyle(new Color(COLOURS.get(i).rgb()), dashed(i, WIDTH), marker(i, SIZE));
+    static SeriesStyle of(int index, PlotTheme theme) {
+        return new SeriesStyle(theme.seriesColour(index), dashed(index, WIDTH), marker(index, SIZE));
     }
 
     /** A stroke of a width with the dash pattern of an index. */
