@@ -27,12 +27,21 @@ final class FreeRows extends VBox {
     private final Look look;
     private final boolean ranges;
 
-    FreeRows(String study, FreeParameters free, Design design, Look look) {
+    /**
+     * Rows of parameters.
+     *
+     * @param study name of the study, which the ids begin with
+     * @param free what may be set
+     * @param design the link
+     * @param look gives the widths
+     * @param ranges whether the ranges are shown, a row for each parameter
+     */
+    FreeRows(String study, FreeParameters free, Design design, Look look, boolean ranges) {
         this.study = study;
         this.free = free;
         this.design = design;
         this.look = look;
-        this.ranges = study.equals("tune");
+        this.ranges = ranges;
         getStyleClass().add("study-free");
         free.axes().addListener((ListChangeListener<WrittenAxis>) change -> arrange());
         arrange();

@@ -13,7 +13,7 @@ import javafx.scene.layout.HBox;
 
 /** A parameter to choose, as words with its path, or to write as a path. */
 final class ParameterBox extends ComboBox<String> {
-    private static final double WIDTH = 17.0;
+    private static final double WIDTH = 15.5;
 
     ParameterBox(String id, Design design, StringProperty path, Look look) {
         setId(id);

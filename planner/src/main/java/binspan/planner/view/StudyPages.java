@@ -43,7 +43,7 @@ public final class StudyPages {
         aim(row, model.aimProperty())
                 .disableProperty()
                 .bind(model.retunedProperty().not());
-        FreeRows free = new FreeRows(model.name(), model.free(), model.design(), look);
+        FreeRows free = new FreeRows(model.name(), model.free(), model.design(), look, false);
         free.visibleProperty().bind(model.retunedProperty());
         free.managedProperty().bind(free.visibleProperty());
         return new StudyPage(model, new VBox(row, free), look, files);
@@ -68,9 +68,9 @@ public final class StudyPages {
 
     /** The best settings. */
     StudyPage tune(TuneModel model) {
+        FreeRows free = new FreeRows(model.name(), model.free(), model.design(), look, true);
         OptionRow row = new OptionRow(model.name(), look);
         aim(row, model.aimProperty());
-        FreeRows free = new FreeRows(model.name(), model.free(), model.design(), look);
         StudyPage page = new StudyPage(model, new VBox(free, row), look, files);
         page.below(new TunedSteps(model));
         return page;

@@ -38,6 +38,7 @@ final class StudyViews {
     private void add(String name, String view, Node node) {
         ToggleButton toggle = new ToggleButton(Words.of("studies." + view));
         toggle.setId(name + "-show-" + view);
+        toggle.getStyleClass().add("study-view");
         toggle.setToggleGroup(group);
         node.visibleProperty().bind(toggle.selectedProperty());
         toggles.getChildren().add(toggle);

@@ -20,8 +20,8 @@ import javafx.scene.layout.VBox;
 
 /** What the sweep varies and shows. */
 final class SweepOptions extends VBox {
-    private static final double NUMBER = 5.5;
-    private static final double COUNT = 4.0;
+    private static final double NUMBER = 4.6;
+    private static final double COUNT = 3.4;
 
     private final SweepModel model;
     private final Look look;

@@ -3,6 +3,7 @@ package binspan.planner.viewmodel;
 import binspan.planner.report.Figure;
 import binspan.planner.report.FigureWords;
 import binspan.planner.report.ParameterWords;
+import binspan.planner.report.RequiredFigure;
 import binspan.planner.report.RequirementWords;
 import binspan.planner.table.RowWriter;
 import binspan.planner.table.StudyRows;
@@ -16,6 +17,7 @@ import binspan.study.FigureColumn;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 
@@ -30,6 +32,7 @@ public record TableLines(List<Column> columns, List<List<Object>> rows, int tota
     /** Most rows that are shown. */
     public static final int MOST_ROWS = 10_000;
 
+    private static final String OWN = "studies.column.";
     private static final String TIGHTEST = "tightest";
 
     /**
@@ -37,13 +40,13 @@ public record TableLines(List<Column> columns, List<List<Object>> rows, int tota
      *
      * @param name its name in files
      * @param title what it holds, with the unit
-     * @param varied whether it holds values of a parameter
+     * @param exact whether its numbers are shown as they are, not in three digits
      */
-    public record Column(String name, String title, boolean varied) {
+    public record Column(String name, String title, boolean exact) {
         /** A cell for a person. */
         public String text(Object cell) {
             if (cell instanceof Double number) {
-                return !Double.isFinite(number) ? "" : varied ? Figure.stated(number, "") : Figure.bare(number);
+                return !Double.isFinite(number) ? "" : exact ? Figure.stated(number, "") : Figure.bare(number);
             }
             if (cell instanceof Boolean met) {
                 return Words.of(met ? "studies.yes" : "studies.no");
@@ -70,12 +73,43 @@ public record TableLines(List<Column> columns, List<List<Object>> rows, int tota
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
-        return new TableLines(columns, collector.rows, collector.total);
+        List<Integer> order = order(columns, scenario);
+        return new TableLines(
+                picked(columns, order),
+                collector.rows.stream().map(row -> picked(row, order)).toList(),
+                collector.total);
+    }
+
+    /** What tells the rows apart stands first, then what was varied, then what is required. */
+    private static List<Integer> order(List<Column> columns, Scenario scenario) {
+        List<String> required = RequiredFigure.of(scenario.require()).stream()
+                .map(RequiredFigure::figure)
+                .toList();
+        List<Integer> order = new ArrayList<>();
+        for (int i = 0; i < columns.size(); i++) {
+            order.add(i);
+        }
+        order.sort(Comparator.comparingInt(i -> place(columns.get(i), required)));
+        return order;
+    }
+
+    private static int place(Column column, List<String> required) {
+        if (column.name().equals(StudyRows.MEETS)) {
+            return 2;
+        }
+        if (Words.has(OWN + column.name())) {
+            return 0;
+        }
+        return column.exact() ? 1 : required.contains(column.name()) ? 3 : 4;
+    }
+
+    private static <T> List<T> picked(List<T> all, List<Integer> order) {
+        return order.stream().map(all::get).toList();
     }
 
     private static Column column(String name, Scenario scenario) {
-        if (Words.has("studies.column." + name)) {
-            return new Column(name, Words.of("studies.column." + name), false);
+        if (Words.has(OWN + name)) {
+            return new Column(name, Words.of(OWN + name), name.equals("rank"));
         }
         String bare = name.startsWith(StudyRows.PREDICTED) ? name.substring(StudyRows.PREDICTED.length()) : name;
         Optional<FigureColumn> figure = figure(bare);

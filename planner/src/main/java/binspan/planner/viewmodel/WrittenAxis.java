@@ -1,9 +1,9 @@
 package binspan.planner.viewmodel;
 
 import binspan.planner.io.WrittenNumber;
+import binspan.planner.report.Figure;
 import binspan.scenario.Parameter;
 import binspan.scenario.ParameterPaths;
-import binspan.scenario.Range;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.DefaultAxes;
@@ -37,8 +37,8 @@ public final class WrittenAxis {
     /** Writes the usual range of the parameter, or nothing where it has none. */
     public void propose(Scenario scenario) {
         proposed = usual(scenario, path.get());
-        from.set(proposed == null ? "" : Range.plain(proposed.from()));
-        to.set(proposed == null ? "" : Range.plain(proposed.to()));
+        from.set(proposed == null ? "" : Figure.stated(proposed.from(), ""));
+        to.set(proposed == null ? "" : Figure.stated(proposed.to(), ""));
         logarithmic.set(proposed != null && proposed.logarithmic());
     }
 
@@ -52,8 +52,8 @@ public final class WrittenAxis {
     private boolean untouched() {
         return proposed == null
                 ? from.get().isEmpty() && to.get().isEmpty()
-                : from.get().equals(Range.plain(proposed.from()))
-                        && to.get().equals(Range.plain(proposed.to()))
+                : from.get().equals(Figure.stated(proposed.from(), ""))
+                        && to.get().equals(Figure.stated(proposed.to(), ""))
                         && logarithmic.get() == proposed.logarithmic();
     }
 
@@ -75,10 +75,14 @@ public final class WrittenAxis {
     Axis axis(Scenario scenario, int usualSteps) {
         Parameter parameter = ParameterPaths.find(scenario, path.get());
         parameter.over(scenario);
-        if (untouched() && proposed != null && steps.get().isBlank()) {
-            return new Axis(parameter, proposed.from(), proposed.to(), usualSteps, proposed.logarithmic());
-        }
-        return new Axis(parameter, number(from), number(to), count(usualSteps), logarithmic.get());
+        double first = end(from, proposed == null ? Double.NaN : proposed.from());
+        double last = end(to, proposed == null ? Double.NaN : proposed.to());
+        return new Axis(parameter, first, last, count(usualSteps), logarithmic.get());
+    }
+
+    /** An end as it is written; the usual one is meant exactly. */
+    private double end(StringProperty text, double usual) {
+        return text.get().equals(Figure.stated(usual, "")) ? usual : number(text);
     }
 
     private double number(StringProperty text) {
