@@ -1,6 +1,6 @@
 package binspan.planner.viewmodel;
 
-import binspan.planner.cli.WrittenNumber;
+import binspan.planner.io.WrittenNumber;
 import binspan.scenario.Parameter;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
