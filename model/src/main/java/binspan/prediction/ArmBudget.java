@@ -70,10 +70,18 @@ public record ArmBudget(List<Entry> entries) {
      * @param alice whether alice's arm is meant, else bob's
      */
     public static ArmBudget of(LinkPrediction prediction, boolean alice) {
-        Scenario scenario = prediction.scenario();
+        return of(prediction.scenario(), alice);
+    }
+
+    /**
+     * The budget of an arm of a link that is not predicted yet.
+     *
+     * @param scenario the link
+     * @param alice whether alice's arm is meant, else bob's
+     */
+    public static ArmBudget of(Scenario scenario, boolean alice) {
         PathInputs in = PathInputs.of(scenario, alice ? scenario.alice() : scenario.bob());
-        double fibre = (alice ? prediction.pathA() : prediction.pathB()).fibreDispersionPsPerNm();
-        Adding adding = new Adding(in.wavelengthNm(), fibre);
+        Adding adding = new Adding(in.wavelengthNm(), fibreDispersion(in));
         adding.put(Kind.COUPLING, in.couplingLossDb());
         for (int i = 0; i < in.elements().size(); i++) {
             adding.put(i, in.elements().get(i));
@@ -81,6 +89,14 @@ public record ArmBudget(List<Entry> entries) {
         adding.put(Kind.REPAIR_MARGIN, in.repairMarginDb());
         adding.put(Kind.ANALYZER_EXCESS, in.excessLossDb());
         return new ArmBudget(adding.entries);
+    }
+
+    private static double fibreDispersion(PathInputs in) {
+        return in.elements().stream()
+                .mapToDouble(element -> element instanceof FibreSpan span
+                        ? FibreOptics.dispersionPsPerNm(span, in.wavelengthNm())
+                        : 0.0)
+                .sum();
     }
 
     /** Loss of the whole arm, dB. */

@@ -3,6 +3,7 @@ package binspan.planner.cli;
 import binspan.planner.export.ReachReport;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
+import binspan.planner.io.WrittenNumber;
 import binspan.scenario.LinkLength;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;

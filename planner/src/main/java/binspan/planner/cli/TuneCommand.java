@@ -67,8 +67,7 @@ final class TuneCommand implements Callable<Integer> {
         Tuning tuning = UsageException.unless("--free", () -> Tuning.of(scenario, axes, wanted));
         Tuning.Outcome outcome = ProgressBar.during(console, tuning::run);
         if (!outcome.feasible()) {
-            throw NoFeasiblePoint.of(
-                    "no settings of the free parameters meet all requirements", tuning.margins(), outcome.prediction());
+            throw UsageException.of(TuneReport.infeasible(tuning, outcome));
         }
         output.deliver(TuneReport.of(tuning, outcome), console);
         return ExitStatus.MET;

@@ -1,6 +1,7 @@
 package binspan.planner.export;
 
 import binspan.planner.picture.TunePicture;
+import binspan.planner.report.MissWords;
 import binspan.planner.report.TuneSummary;
 import binspan.planner.table.Column;
 import binspan.planner.table.StudyRows;
@@ -30,6 +31,12 @@ public final class TuneReport {
                 StudyRows.of(table, table.columns(), List.of(new Column("settings", TuningTable.SETTINGS::get))),
                 style -> TuneSummary.text(tuning, outcome, style),
                 Optional.of(() -> TunePicture.of(tuning, outcome)));
+    }
+
+    /** Why there is nothing to show: no settings are feasible, and how near they come. */
+    public static String infeasible(Tuning tuning, Tuning.Outcome outcome) {
+        return MissWords.nowhere(
+                "no settings of the free parameters meet all requirements", tuning.margins(), outcome.prediction());
     }
 
     private static Map<String, Object> description(Tuning tuning, Tuning.Outcome outcome) {

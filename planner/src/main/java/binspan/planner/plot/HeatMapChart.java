@@ -24,7 +24,7 @@ import org.jfree.data.xy.DefaultXYDataset;
 final class HeatMapChart {
     private static final int WIDTH = 660;
     private static final int HEIGHT = 540;
-    static final Room LEAST = new Room(250.0, 160.0);
+    static final Room LEAST = new Room(330.0, 160.0);
     static final double FULL_HEIGHT = 260.0;
     private static final double FRAME_WIDTH = 150.0;
     private static final double FRAME_HEIGHT = 50.0;

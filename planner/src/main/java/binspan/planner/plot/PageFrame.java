@@ -1,5 +1,6 @@
 package binspan.planner.plot;
 
+import java.awt.Font;
 import java.awt.Graphics2D;
 import java.awt.image.BufferedImage;
 import java.util.Collection;
@@ -7,6 +8,7 @@ import org.jfree.chart.JFreeChart;
 import org.jfree.chart.LegendItem;
 import org.jfree.chart.block.RectangleConstraint;
 import org.jfree.chart.plot.Plot;
+import org.jfree.chart.title.LegendTitle;
 import org.jfree.chart.title.Title;
 import org.jfree.chart.ui.RectangleInsets;
 import org.jfree.data.Range;
@@ -14,6 +16,7 @@ import org.jfree.data.Range;
 /** What stands around the panels of a page of given size: titles, legend, a narrow margin. */
 final class PageFrame {
     private static final double MARGIN = 4.0;
+    private static final Font SMALL = PlotStyle.TICK.deriveFont(12.5f);
 
     /** Both margins together. */
     static final double SIDES = 2.0 * MARGIN;
@@ -23,8 +26,20 @@ final class PageFrame {
     /** The page with a narrow margin. */
     static JFreeChart page(Picture picture, Plot plot, Collection<LegendItem> legend, PlotTheme theme) {
         JFreeChart chart = PlotStyle.page(picture, plot, legend, theme);
+        for (Object each : chart.getSubtitles()) {
+            if (each instanceof LegendTitle entries) {
+                narrow(entries);
+            }
+        }
         chart.setPadding(new RectangleInsets(MARGIN, MARGIN, MARGIN, MARGIN));
         return chart;
+    }
+
+    private static void narrow(LegendTitle legend) {
+        legend.setItemFont(SMALL);
+        legend.setItemLabelPadding(new RectangleInsets(1.0, 2.0, 1.0, 8.0));
+        legend.setLegendItemGraphicPadding(new RectangleInsets(1.0, 2.0, 1.0, 3.0));
+        legend.setPadding(new RectangleInsets(2.0, 2.0, 0.0, 2.0));
     }
 
     /** Height of all that is not panels. */

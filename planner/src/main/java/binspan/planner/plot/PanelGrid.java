@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.function.IntUnaryOperator;
 import java.util.function.ToIntFunction;
 import java.util.stream.IntStream;
+import org.jfree.chart.JFreeChart;
 import org.jfree.chart.LegendItem;
 import org.jfree.chart.plot.Plot;
 import org.jfree.chart.plot.PlotRenderingInfo;
@@ -62,21 +63,25 @@ final class PanelGrid extends Plot {
             charts.add(layout.shown().get(i).chart(theme, layout.rooms().get(i)));
             legend.addAll(charts.get(i).legend());
         }
-        if (layout.hidden() > 0) {
-            legend.add(new LegendEntries(theme).leftOut(layout.hidden()));
-        }
-        return sideBySide(group.title(), charts, legend, layout.columns(), theme);
+        int leftOut =
+                layout.hidden() + charts.stream().mapToInt(PanelChart::leftOut).sum();
+        PanelGrid grid = new PanelGrid(charts, layout.columns());
+        return grid.chart(PlotStyle.tight(group.title(), grid, theme), legend, leftOut);
     }
 
-    /** Charts of equal width as one. */
-    static PanelChart sideBySide(
-            String title, List<PanelChart> charts, List<LegendItem> legend, int columns, PlotTheme theme) {
-        PanelGrid grid = new PanelGrid(charts, columns);
+    /** Charts of equal width side by side; those that do not fit into the row stand below. */
+    static PanelGrid sideBySide(List<PanelChart> charts, int columns) {
+        return new PanelGrid(charts, columns);
+    }
+
+    /** The grid as a panel. */
+    PanelChart chart(JFreeChart around, List<LegendItem> legend, int leftOut) {
         return new PanelChart(
-                PlotStyle.tight(title, grid, theme),
+                around,
                 legend,
-                IntStream.of(grid.widths()).sum(),
-                IntStream.of(grid.heights()).sum());
+                IntStream.of(widths()).sum(),
+                IntStream.of(heights()).sum(),
+                leftOut);
     }
 
     @Override

@@ -21,10 +21,11 @@ final class RangeBarsChart {
     static final double LEAST_WIDTH = 320.0;
     private static final double TIGHT_ROW = 66.0;
     private static final double MOST_LABEL_SHARE = 0.3;
-    private static final double TEXT_MARGIN = 6.0;
+    private static final double TEXT_MARGIN = 12.0;
     private static final double BESIDE = 0.13;
     private static final double HALF_BAR = 0.14;
     private static final double GAP = 0.008;
+    private static final double GAP_POINTS = 9.0;
     private static final double TEXT_DISTANCE = 0.2;
     private static final double MARKER_SIZE = 15.0;
     private static final int DIAMOND = 3;
@@ -139,8 +140,9 @@ final class RangeBarsChart {
     /** Ends of the range beside the bar, those of the box below and away from each other, the planned value above. */
     private void texts(RangeBar bar, int row, Interval box) {
         Axis axis = bar.quantity();
-        text(axis.text(axis.lowest()), row, -GAP, TextAnchor.CENTER_RIGHT);
-        text(axis.text(axis.highest()), row, 1.0 + GAP, TextAnchor.CENTER_LEFT);
+        double gap = room.given() ? GAP_POINTS / room.width() : GAP;
+        text(axis.text(axis.lowest()), row, -gap, TextAnchor.CENTER_RIGHT);
+        text(axis.text(axis.highest()), row, 1.0 + gap, TextAnchor.CENTER_LEFT);
         if (box.lower() > 0.0) {
             text(axis.text(bar.box().lower()), row + TEXT_DISTANCE, box.lower(), TextAnchor.TOP_RIGHT);
         }

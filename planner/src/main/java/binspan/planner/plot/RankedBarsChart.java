@@ -65,7 +65,11 @@ final class RankedBarsChart {
         int height =
                 Math.max(LEAST_HEIGHT, FRAME_HEIGHT + ROW_HEIGHT * bars.labels().size());
         return new PanelChart(
-                PlotStyle.chart(bars.title(), combined, theme, room), legend(), room.wide(width()), room.high(height));
+                PlotStyle.chart(bars.title(), combined, theme, room),
+                legend(),
+                room.wide(width()),
+                room.high(height),
+                bars.panels().size() - shown().size());
     }
 
     /** The panels that have room. */
@@ -138,7 +142,7 @@ final class RankedBarsChart {
         return i -> drawn.get(i).met();
     }
 
-    private static Range range(BarPanel panel) {
+    private Range range(BarPanel panel) {
         DoubleStream limit = panel.requirement().stream().mapToDouble(RequirementLine::value);
         DoubleStream values = DoubleStream.concat(panel.bars().stream().mapToDouble(Bar::value), limit);
         boolean zero = !panel.value().logarithmic();
@@ -151,8 +155,21 @@ final class RankedBarsChart {
         }
         boolean negative = zero && panel.bars().stream().anyMatch(bar -> bar.value() < 0.0);
         boolean positive = !zero || panel.bars().stream().anyMatch(bar -> !(bar.value() < 0.0));
-        double more = (TEXT_MARGIN + LETTER_MARGIN * letters) * all.getLength();
+        double more = textShare(panel, letters) * all.getLength();
         return new Range(all.getLowerBound() - (negative ? more : 0.0), all.getUpperBound() + (positive ? more : 0.0));
+    }
+
+    /** Room for the words at the ends of the bars, as a share of what the bars span. */
+    private double textShare(BarPanel panel, int letters) {
+        if (!room.given()) {
+            return TEXT_MARGIN + LETTER_MARGIN * letters;
+        }
+        double longest = LETTER_WIDTH
+                + panel.bars().stream()
+                        .mapToDouble(bar -> Words.length(bar.text(), PlotStyle.TICK))
+                        .max()
+                        .orElse(0.0);
+        return longest / Math.max(LETTER_WIDTH, panelWidth() - longest);
     }
 
     private static double foot(BarPanel panel, Range range) {
@@ -207,9 +224,6 @@ final class RankedBarsChart {
         }
         if (limits) {
             items.add(new Limits(theme).failingEntry());
-        }
-        if (shown().size() < bars.panels().size()) {
-            items.add(new LegendEntries(theme).leftOut(bars.panels().size() - shown().size()));
         }
         return items;
     }

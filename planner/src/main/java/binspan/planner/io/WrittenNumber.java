@@ -1,8 +1,8 @@
-package binspan.planner.cli;
+package binspan.planner.io;
 
 import java.util.regex.Pattern;
 
-/** Numbers as a person writes them on a command line: plain or with an exponent, {@code 0.02} or {@code 2e-2}. */
+/** Numbers as a person types them: plain or with an exponent, {@code 0.02} or {@code 2e-2}. */
 public final class WrittenNumber {
     private static final Pattern NUMBER = Pattern.compile("[+-]?(\\d+\\.?\\d*|\\.\\d+)([eE][+-]?\\d{1,3})?");
 
