@@ -16,6 +16,8 @@ public final class MapAxis {
     /** In paths that lead to an element of an arm, which may have moved to another place. */
     private static final String ELEMENT = ".path";
 
+    private static final double ROUNDING = 1e-9;
+
     private final ReadOnlyObjectWrapper<Axis> axis = new ReadOnlyObjectWrapper<>(this, "axis");
     private final ReadOnlyStringWrapper error = new ReadOnlyStringWrapper(this, "error", "");
     private boolean ownRange;
@@ -106,9 +108,10 @@ public final class MapAxis {
         return true;
     }
 
-    /** Whether a value lies on the axis. */
+    /** Whether a value lies on the axis, but for the last digits that scaling a link leaves. */
     public boolean contains(double value) {
-        return value >= axis().from() && value <= axis().to();
+        double slack = ROUNDING * Math.abs(value);
+        return value >= axis().from() - slack && value <= axis().to() + slack;
     }
 
     private Parameter parameter() {
