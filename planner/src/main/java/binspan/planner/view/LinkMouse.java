@@ -66,6 +66,7 @@ final class LinkMouse implements EventHandler<MouseEvent> {
             fromX = x(event);
             model.select(held);
             drawing.focus();
+            event.consume(); // or the scroll pane takes the focus
         }
     }
 
