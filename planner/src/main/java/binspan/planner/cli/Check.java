@@ -1,10 +1,8 @@
 package binspan.planner.cli;
 
+import binspan.planner.export.CheckForm;
 import binspan.planner.io.InvalidScenarioException;
-import binspan.planner.report.ResultJson;
 import binspan.planner.report.TextStyle;
-import binspan.planner.report.Verdict;
-import binspan.planner.report.WorksheetText;
 import binspan.prediction.LinkCheck;
 import java.io.PrintStream;
 import java.util.List;
@@ -12,18 +10,11 @@ import java.util.List;
 /** Checks scenarios one after the other. */
 final class Check {
     private final Console console;
-    private final Form form;
+    private final CheckForm form;
     private final boolean several;
     private int printed;
 
-    /** What is printed about each scenario. */
-    enum Form {
-        VERDICT,
-        JSON,
-        WORKSHEET
-    }
-
-    private Check(Console console, Form form, boolean several) {
+    private Check(Console console, CheckForm form, boolean several) {
         this.console = console;
         this.form = form;
         this.several = several;
@@ -37,7 +28,7 @@ final class Check {
      * @param console where to print it
      * @return the worst exit status
      */
-    static int run(List<String> files, Form form, Console console) {
+    static int run(List<String> files, CheckForm form, Console console) {
         Check check = new Check(console, form, files.size() > 1);
         int worst = ExitStatus.MET;
         for (String file : files) {
@@ -63,16 +54,12 @@ final class Check {
     private void print(String file, LinkCheck outcome) {
         PrintStream out = console.out();
         begin(file, out);
-        switch (form) {
-            case JSON -> ResultJson.write(outcome, out);
-            case WORKSHEET -> WorksheetText.print(outcome, out, TextStyle.ofStandardOutput(console.colour()));
-            default -> Verdict.print(outcome, out, TextStyle.ofStandardOutput(console.colour()));
-        }
+        out.print(form.text(outcome, TextStyle.ofStandardOutput(console.colour())));
     }
 
     /** Several results are told apart by the file's name, or as items of one JSON list. */
     private void begin(String file, PrintStream out) {
-        if (several && form == Form.JSON) {
+        if (several && form == CheckForm.JSON) {
             out.print(printed == 0 ? "[\n" : ",\n");
         } else if (several) {
             out.print(printed == 0 ? "" : "\n");
@@ -83,9 +70,9 @@ final class Check {
 
     private void end() {
         PrintStream out = console.out();
-        if (form == Form.JSON && several) {
+        if (form == CheckForm.JSON && several) {
             out.print(printed == 0 ? "[]\n" : "\n]\n");
-        } else if (form == Form.JSON && printed > 0) {
+        } else if (form == CheckForm.JSON && printed > 0) {
             out.print("\n");
         }
     }

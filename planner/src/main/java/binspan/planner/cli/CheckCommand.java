@@ -1,5 +1,6 @@
 package binspan.planner.cli;
 
+import binspan.planner.export.CheckForm;
 import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.ArgGroup;
@@ -56,10 +57,10 @@ final class CheckCommand implements Callable<Integer> {
         return Check.run(files, form(), console);
     }
 
-    private Check.Form form() {
+    private CheckForm form() {
         if (output != null && output.json) {
-            return Check.Form.JSON;
+            return CheckForm.JSON;
         }
-        return output != null && output.worksheet ? Check.Form.WORKSHEET : Check.Form.VERDICT;
+        return output != null && output.worksheet ? CheckForm.WORKSHEET : CheckForm.VERDICT;
     }
 }

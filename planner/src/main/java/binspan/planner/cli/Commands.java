@@ -36,6 +36,7 @@ final class Commands {
     static CommandLine tree(Console console) {
         CommandLine line = new CommandLine(new Root())
                 .addSubcommand(new CheckCommand(console))
+                .addSubcommand(new ViewCommand(console))
                 .addSubcommand(new SweepCommand(console))
                 .addSubcommand(new WindowCommand(console))
                 .addSubcommand(new TuneCommand(console))

@@ -1,10 +1,8 @@
 package binspan.planner.cli;
 
+import binspan.planner.export.CompareReport;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
-import binspan.planner.picture.ComparisonPicture;
-import binspan.planner.report.ComparisonSummary;
-import binspan.planner.table.TableJson;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.DefaultAxes;
@@ -12,10 +10,7 @@ import binspan.study.comparison.Comparison;
 import binspan.study.comparison.LinkOption;
 import binspan.study.tuning.Objective;
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
-import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.function.Function;
 import picocli.CommandLine.Command;
@@ -93,7 +88,7 @@ final class CompareCommand implements Callable<Integer> {
         } catch (IllegalArgumentException e) {
             throw UsageException.of(e.getMessage());
         }
-        output.deliver(report(title(scenarios), wanted, entries), console);
+        output.deliver(CompareReport.of(title(scenarios), wanted, entries), console);
         return entries.get(0).meets() ? ExitStatus.MET : ExitStatus.UNMET;
     }
 
@@ -109,25 +104,5 @@ final class CompareCommand implements Callable<Integer> {
 
     private String title(List<Scenario> scenarios) {
         return scenarios.size() == 1 ? scenarios.get(0).name() : scenarios.size() + " links compared";
-    }
-
-    private static StudyReport report(String title, Objective objective, List<Comparison.Entry> entries) {
-        Map<String, Object> description = TableJson.head(title, "compare");
-        description.put("objective", objective.text());
-        List<Map<String, Object>> links = new ArrayList<>();
-        for (Comparison.Entry entry : entries) {
-            Map<String, Object> link = new LinkedHashMap<>();
-            link.put("option", entry.option().name());
-            link.put("setting", entry.setting().meaning());
-            link.put("tuned", StudyDescription.values(entry.free(), entry.values()));
-            link.put("meets", entry.meets());
-            links.add(link);
-        }
-        description.put("ranking", links);
-        return new StudyReport(
-                description,
-                CompareRows.of(entries),
-                style -> ComparisonSummary.text(title, entries, style),
-                Optional.of(() -> ComparisonPicture.of(title, entries)));
     }
 }

@@ -101,6 +101,11 @@ public final class Console {
         return terminal && capable(environment) && errorsOnTerminal();
     }
 
+    /** Environment variables. */
+    Map<String, String> environment() {
+        return environment;
+    }
+
     /** Whether an own failure prints where it happened. */
     boolean debug() {
         return !environment.getOrDefault(DEBUG, "").isEmpty();

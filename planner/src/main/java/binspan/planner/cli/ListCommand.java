@@ -1,5 +1,6 @@
 package binspan.planner.cli;
 
+import binspan.planner.io.Preset;
 import binspan.planner.io.JsonText;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;

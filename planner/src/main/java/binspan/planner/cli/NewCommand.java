@@ -1,5 +1,6 @@
 package binspan.planner.cli;
 
+import binspan.planner.io.Preset;
 import binspan.planner.io.OutputFileException;
 import java.util.ArrayList;
 import java.util.concurrent.Callable;
@@ -48,7 +49,9 @@ final class NewCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws UsageException, OutputFileException {
-        destination.write(Preset.named(preset).scenario(), console);
+        Preset found =
+                Preset.find(preset).orElseThrow(() -> UsageException.unknown("preset", preset, Preset.names()));
+        destination.write(found.scenario(), console);
         return ExitStatus.MET;
     }
 }

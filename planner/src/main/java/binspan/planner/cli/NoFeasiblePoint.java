@@ -1,8 +1,6 @@
 package binspan.planner.cli;
 
 import binspan.planner.report.MissWords;
-import binspan.prediction.LinkPrediction;
-import binspan.prediction.RequirementMargins;
 import binspan.study.Axis;
 import binspan.study.window.PointVerdict;
 import java.util.List;
@@ -10,21 +8,6 @@ import java.util.List;
 /** Says that nothing meets the requirements, and how near it comes. */
 final class NoFeasiblePoint {
     private NoFeasiblePoint() {}
-
-    /**
-     * At a point that fails by the least.
-     *
-     * @param what what was searched
-     * @param margins the requirements
-     * @param prediction prediction at that point
-     */
-    static UsageException of(String what, RequirementMargins margins, LinkPrediction prediction) {
-        if (margins.met(prediction)) {
-            return UsageException.of(what + " inside the model's slots: the window would be wider than the separation,"
-                    + " or the slots longer than the pump cycle");
-        }
-        return UsageException.of(what + "; at the nearest point " + MissWords.of(margins, prediction));
-    }
 
     /**
      * At a point of some axes that fails by the least.

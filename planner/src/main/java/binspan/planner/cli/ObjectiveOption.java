@@ -1,7 +1,7 @@
 package binspan.planner.cli;
 
+import binspan.planner.export.StudyDefaults;
 import binspan.planner.report.RequiredFigure;
-import binspan.prediction.LinkPredictor;
 import binspan.scenario.Scenario;
 import binspan.study.tuning.Objective;
 import java.util.Arrays;
@@ -25,7 +25,7 @@ final class ObjectiveOption {
      * @throws UsageException if there is no such objective, or the link cannot have it
      */
     Objective of(Scenario scenario) throws UsageException {
-        Objective natural = Objective.natural(LinkPredictor.predict(scenario));
+        Objective natural = StudyDefaults.objective(scenario);
         if (word == null) {
             return natural;
         }

@@ -1,5 +1,6 @@
 package binspan.planner.cli;
 
+import binspan.planner.export.CheckForm;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -10,18 +11,18 @@ import java.util.List;
  * @param files file names
  * @param form what to print
  */
-record PlainCheck(List<String> files, Check.Form form) {
+record PlainCheck(List<String> files, CheckForm form) {
     /** The check that a command line asks for, or null if it is anything less plain. */
     static PlainCheck of(String[] args) {
         if (args.length == 0 || !args[0].equals("check")) {
             return null;
         }
         List<String> files = new ArrayList<>();
-        Check.Form form = Check.Form.VERDICT;
+        CheckForm form = CheckForm.VERDICT;
         for (int i = 1; i < args.length; i++) {
             if (!args[i].startsWith("-") || args[i].equals(ScenarioInput.STANDARD_INPUT)) {
                 files.add(args[i]);
-            } else if (form == Check.Form.VERDICT && option(args[i]) != null) {
+            } else if (form == CheckForm.VERDICT && option(args[i]) != null) {
                 form = option(args[i]);
             } else {
                 return null;
@@ -30,10 +31,10 @@ record PlainCheck(List<String> files, Check.Form form) {
         return files.isEmpty() ? null : new PlainCheck(files, form);
     }
 
-    private static Check.Form option(String word) {
+    private static CheckForm option(String word) {
         return switch (word) {
-            case CheckCommand.JSON -> Check.Form.JSON;
-            case CheckCommand.WORKSHEET -> Check.Form.WORKSHEET;
+            case CheckCommand.JSON -> CheckForm.JSON;
+            case CheckCommand.WORKSHEET -> CheckForm.WORKSHEET;
             default -> null;
         };
     }

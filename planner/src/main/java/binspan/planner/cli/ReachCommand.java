@@ -1,10 +1,9 @@
 package binspan.planner.cli;
 
+import binspan.planner.export.ReachReport;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
-import binspan.planner.picture.ReachPicture;
-import binspan.planner.report.ReachSummary;
-import binspan.planner.table.TableJson;
+import binspan.planner.io.WrittenNumber;
 import binspan.scenario.LinkLength;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
@@ -13,12 +12,7 @@ import binspan.study.FigureColumns;
 import binspan.study.tuning.Objective;
 import binspan.study.tuning.Reach;
 import binspan.study.tuning.SourcePosition;
-import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
-import java.util.Optional;
-import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -95,7 +89,7 @@ final class ReachCommand implements Callable<Integer> {
         String blamed = fibre && free.given() ? "--free" : input.file();
         Reach reach = UsageException.unless(blamed, () -> new Reach(scenario, axes, wanted, columns));
         Reach.Outcome outcome = ProgressBar.during(console, reach::run);
-        output.deliver(report(reach, outcome), console);
+        output.deliver(ReachReport.of(reach, outcome), console);
         return ExitStatus.MET;
     }
 
@@ -113,47 +107,5 @@ final class ReachCommand implements Callable<Integer> {
             case "bob" -> 1.0;
             default -> WrittenNumber.of(place);
         };
-    }
-
-    private static StudyReport report(Reach reach, Reach.Outcome outcome) {
-        return new StudyReport(
-                description(reach, outcome),
-                ReachRows.of(reach, outcome),
-                style -> ReachSummary.text(reach, outcome, style),
-                Optional.of(() -> ReachPicture.of(reach, outcome)));
-    }
-
-    private static Map<String, Object> description(Reach reach, Reach.Outcome outcome) {
-        Map<String, Object> description = TableJson.head(reach.scenario().name(), "reach");
-        description.put("sourceShareOfAlice", SourcePosition.of(reach.scenario()));
-        description.put("free", StudyDescription.ranges(reach.free()));
-        description.put("objective", reach.objective().text());
-        List<Map<String, Object>> limits = new ArrayList<>();
-        for (Reach.Limit limit : outcome.limits()) {
-            Map<String, Object> entry = new LinkedHashMap<>();
-            entry.put("name", limit.goal().requirement().fieldName());
-            entry.put("required", limit.goal().required());
-            entry.put("stated", limit.goal().stated());
-            lengths(limit, entry);
-            limits.add(entry);
-        }
-        description.put("limits", limits);
-        if (outcome.all() != null) {
-            Map<String, Object> all = new LinkedHashMap<>();
-            lengths(outcome.all(), all);
-            description.put("all", all);
-        }
-        return StudyDescription.finite(description);
-    }
-
-    private static void lengths(Reach.Limit limit, Map<String, Object> entry) {
-        put(entry, "asWrittenKm", limit.asWrittenKm());
-        put(entry, "retunedKm", limit.retunedKm());
-    }
-
-    private static void put(Map<String, Object> entry, String name, OptionalDouble km) {
-        if (km.isPresent()) {
-            entry.put(name, km.getAsDouble());
-        }
     }
 }

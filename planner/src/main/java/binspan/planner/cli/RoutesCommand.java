@@ -1,25 +1,17 @@
 package binspan.planner.cli;
 
+import binspan.planner.export.RoutesReport;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
-import binspan.planner.picture.RoutesPicture;
-import binspan.planner.report.RoutesSummary;
 import binspan.planner.table.RouteLedger;
-import binspan.planner.table.StudyRows;
-import binspan.planner.table.Table;
 import binspan.planner.table.TableException;
-import binspan.planner.table.TableJson;
 import binspan.scenario.Parameter;
 import binspan.scenario.Scenario;
 import binspan.study.FigureColumn;
 import binspan.study.FigureColumns;
 import binspan.study.comparison.RouteSurvey;
 import java.io.IOException;
-import java.io.UncheckedIOException;
-import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
-import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -90,66 +82,10 @@ final class RoutesCommand implements Callable<Integer> {
         try (RouteLedger ledger = new RouteLedger(parameters, columns)) {
             RouteJudge judge = new RouteJudge(survey, ledger, console);
             judge.judge(routes);
-            output.deliver(report(template, ledger, judge.bad()), console);
+            output.deliver(RoutesReport.of(survey, ledger, judge.bad()), console);
             return judge.bad() > 0
                     ? ExitStatus.REFUSED
                     : ledger.met() == ledger.count() ? ExitStatus.MET : ExitStatus.UNMET;
         }
-    }
-
-    private StudyReport report(Scenario template, RouteLedger ledger, int bad) {
-        Map<String, Object> description = TableJson.head(template.name(), "routes");
-        description.put("tuned", tune);
-        description.put("routes", ledger.count());
-        description.put("routesMet", ledger.met());
-        description.put("badRows", bad);
-        return new StudyReport(
-                description,
-                table(ledger),
-                style -> unchecked(() -> RoutesSummary.text(template, ledger, bad, style)),
-                Optional.of(() -> unchecked(() -> RoutesPicture.of(template.name(), ledger))));
-    }
-
-    /** Work on the ledger's file. */
-    @FunctionalInterface
-    private interface FromFile<T> {
-        T get() throws IOException;
-    }
-
-    private static <T> T unchecked(FromFile<T> work) {
-        try {
-            return work.get();
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        }
-    }
-
-    private static Table table(RouteLedger ledger) {
-        List<String> header = new ArrayList<>();
-        ledger.parameters().forEach(parameter -> header.add(parameter.path()));
-        ledger.columns().forEach(column -> header.add(column.name()));
-        header.addAll(List.of("rank", "name", "line", "leastMargin", "tightest", "reason", StudyRows.MEETS));
-        return new Table(
-                header,
-                writer -> ledger.ranked((rank, entry) -> {
-                    for (double setting : entry.settings()) {
-                        writer.number(setting);
-                    }
-                    for (int i = 0; i < ledger.columns().size(); i++) {
-                        writer.number(
-                                entry.figures().isEmpty()
-                                        ? Double.NaN
-                                        : entry.figures().get(i));
-                    }
-                    writer.number(rank);
-                    writer.text(entry.name());
-                    writer.number((double) entry.line());
-                    writer.number(entry.leastMargin());
-                    writer.text(entry.tightest());
-                    writer.text(entry.reason());
-                    writer.flag(entry.meets());
-                    writer.endRow();
-                    return true;
-                }));
     }
 }

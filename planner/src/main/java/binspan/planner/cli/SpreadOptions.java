@@ -1,5 +1,6 @@
 package binspan.planner.cli;
 
+import binspan.planner.io.WrittenNumber;
 import binspan.scenario.Parameter;
 import binspan.scenario.Scenario;
 import binspan.scenario.Spread;

@@ -1,12 +1,12 @@
 package binspan.planner.cli;
 
+import binspan.planner.export.StudyFiles;
+import binspan.planner.export.StudyReport;
 import binspan.planner.io.OutputFileException;
 import binspan.planner.io.Printable;
 import binspan.planner.io.WholeFile;
 import binspan.planner.plot.PictureFile;
 import binspan.planner.report.TextStyle;
-import binspan.planner.table.TableCsv;
-import binspan.planner.table.TableJson;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.InvalidPathException;
@@ -102,10 +102,10 @@ final class StudyOutput {
      * @throws OutputFileException if a file cannot be written; nothing of it is left
      */
     void deliver(StudyReport report, Console console) throws OutputFileException {
-        put(csv, out -> TableCsv.write(report.table(), out), console);
-        put(json, out -> TableJson.write(report.description(), report.table(), out), console);
+        put(csv, out -> StudyFiles.csv(report, out), console);
+        put(json, out -> StudyFiles.json(report, out), console);
         if (plot != null && report.picture().isPresent()) {
-            PictureFile.of(plot).write(report.picture().get().get(), force);
+            StudyFiles.picture(report, plot, force);
         }
         if (summarised()) {
             console.out().print(report.summary().apply(TextStyle.ofStandardOutput(console.colour())));

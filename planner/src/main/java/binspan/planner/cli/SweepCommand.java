@@ -1,23 +1,17 @@
 package binspan.planner.cli;
 
+import binspan.planner.export.StudyDefaults;
+import binspan.planner.export.SweepReport;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
 import binspan.planner.picture.SweepPicture;
-import binspan.planner.report.RequiredFigure;
-import binspan.planner.report.SweepSummary;
-import binspan.planner.table.StudyRows;
-import binspan.planner.table.TableJson;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.FigureColumn;
 import binspan.study.FigureColumns;
 import binspan.study.StudyTable;
 import binspan.study.Sweep;
-import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Map;
-import java.util.Optional;
-import java.util.Set;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -53,8 +47,6 @@ import picocli.CommandLine.Option;
             "Exit status: 0 done, 2 bad input or usage, 3 the program's own failure."
         })
 final class SweepCommand implements Callable<Integer> {
-    private static final int[] STEPS = {201, 101, 21, 11};
-
     private final Console console;
 
     @Mixin
@@ -82,56 +74,25 @@ final class SweepCommand implements Callable<Integer> {
     public Integer call() throws InvalidScenarioException, UsageException, OutputFileException {
         output.check(input.file());
         Scenario scenario = input.read(console);
-        List<Axis> axes = vary.grid(scenario, STEPS);
+        List<Axis> axes = vary.grid(scenario, StudyDefaults.SWEEP_STEPS);
         if (axes.size() > SweepPicture.MOST_AXES) {
             output.refusePicture("a picture shows one or two varied parameters");
         }
-        List<FigureColumn> shown = shown(scenario);
-        Sweep sweep = UsageException.unless("--vary", () -> new Sweep(scenario, axes, computed(scenario, shown)));
+        List<FigureColumn> asked = asked(scenario);
+        Sweep sweep = UsageException.unless("--vary", () -> new Sweep(scenario, axes, computed(scenario, asked)));
         StudyTable table = ProgressBar.during(console, sweep::run);
-        output.deliver(report(sweep, table, shown), console);
+        output.deliver(SweepReport.of(sweep, table, asked), console);
         return ExitStatus.MET;
     }
 
-    private List<FigureColumn> shown(Scenario scenario) throws UsageException {
+    private List<FigureColumn> asked(Scenario scenario) throws UsageException {
         return show.isEmpty()
-                ? FigureColumns.all(scenario)
+                ? List.of()
                 : UsageException.unless("--show " + String.join(",", show), () -> FigureColumns.named(scenario, show));
     }
 
-    /** The figures to show and those that the summary speaks of. */
-    private List<FigureColumn> computed(Scenario scenario, List<FigureColumn> shown) {
-        Set<FigureColumn> computed = new LinkedHashSet<>(shown);
-        if (output.summarised()) {
-            List<String> wanted = SweepSummary.figures(scenario);
-            for (FigureColumn column : FigureColumns.all(scenario)) {
-                if (wanted.contains(column.name())) {
-                    computed.add(column);
-                }
-            }
-        }
-        return List.copyOf(computed);
-    }
-
-    private StudyReport report(Sweep sweep, StudyTable table, List<FigureColumn> shown) {
-        List<FigureColumn> drawn = show.isEmpty() ? List.of() : shown;
-        return new StudyReport(
-                description(sweep, table),
-                StudyRows.of(table, shown, List.of()),
-                style -> SweepSummary.text(sweep.scenario(), sweep.axes(), table, style),
-                sweep.axes().size() > SweepPicture.MOST_AXES
-                        ? Optional.empty()
-                        : Optional.of(() -> SweepPicture.of(sweep.scenario(), sweep.axes(), table, drawn)));
-    }
-
-    private static Map<String, Object> description(Sweep sweep, StudyTable table) {
-        Map<String, Object> description = TableJson.head(sweep.scenario().name(), "sweep");
-        description.put("vary", StudyDescription.axes(sweep.axes()));
-        description.put(
-                "requirements",
-                StudyDescription.requirements(RequiredFigure.of(sweep.scenario().require())));
-        description.put("points", table.rows());
-        description.put("pointsMet", table.met());
-        return description;
+    /** The figures to show and, where one is printed, those that the summary speaks of. */
+    private List<FigureColumn> computed(Scenario scenario, List<FigureColumn> asked) {
+        return output.summarised() || asked.isEmpty() ? SweepReport.computed(scenario, asked) : asked;
     }
 }

@@ -1,10 +1,9 @@
 package binspan.planner.cli;
 
+import binspan.planner.export.StudyDefaults;
+import binspan.planner.export.ToleranceReport;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
-import binspan.planner.picture.TolerancePicture;
-import binspan.planner.report.ToleranceSummary;
-import binspan.planner.table.StudyRows;
 import binspan.scenario.Scenario;
 import binspan.scenario.Spread;
 import binspan.study.FigureColumn;
@@ -14,7 +13,6 @@ import binspan.study.tolerance.Tolerance;
 import binspan.study.tolerance.ToleranceResult;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -64,14 +62,14 @@ final class ToleranceCommand implements Callable<Integer> {
     @Option(
             names = "--samples",
             paramLabel = "N",
-            defaultValue = "8192",
+            defaultValue = "" + StudyDefaults.SAMPLES,
             description = "Number of builds, best a power of two; ${DEFAULT-VALUE} if not given.")
     private int samples;
 
     @Option(
             names = "--seed",
             paramLabel = "N",
-            defaultValue = "1",
+            defaultValue = "" + StudyDefaults.SEED,
             description = "Seed of the random shift of the sample points; ${DEFAULT-VALUE} if not given.")
     private long seed;
 
@@ -104,13 +102,7 @@ final class ToleranceCommand implements Callable<Integer> {
         Tolerance tolerance = UsageException.unless(
                 SPREAD, () -> new Tolerance(scenario, ParameterSpread.of(scenario, more), samples, seed, columns));
         ToleranceResult result = ProgressBar.during(console, tolerance::run);
-        output.deliver(
-                new StudyReport(
-                        ToleranceDescription.of(result),
-                        StudyRows.of(result.table(), columns, List.of()),
-                        style -> ToleranceSummary.text(result, style),
-                        Optional.of(() -> TolerancePicture.of(result))),
-                console);
+        output.deliver(ToleranceReport.of(result), console);
         return ExitStatus.MET;
     }
 }

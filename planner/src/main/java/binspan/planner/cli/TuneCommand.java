@@ -1,22 +1,13 @@
 package binspan.planner.cli;
 
+import binspan.planner.export.TuneReport;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
-import binspan.planner.picture.TunePicture;
-import binspan.planner.report.TuneSummary;
-import binspan.planner.table.Column;
-import binspan.planner.table.StudyRows;
-import binspan.planner.table.TableJson;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
-import binspan.study.FigureColumns;
-import binspan.study.StudyTable;
 import binspan.study.tuning.Objective;
 import binspan.study.tuning.Tuning;
-import binspan.study.tuning.TuningTable;
 import java.util.List;
-import java.util.Map;
-import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -76,31 +67,9 @@ final class TuneCommand implements Callable<Integer> {
         Tuning tuning = UsageException.unless("--free", () -> Tuning.of(scenario, axes, wanted));
         Tuning.Outcome outcome = ProgressBar.during(console, tuning::run);
         if (!outcome.feasible()) {
-            throw NoFeasiblePoint.of(
-                    "no settings of the free parameters meet all requirements", tuning.margins(), outcome.prediction());
+            throw UsageException.of(TuneReport.infeasible(tuning, outcome));
         }
-        output.deliver(report(tuning, outcome), console);
+        output.deliver(TuneReport.of(tuning, outcome), console);
         return ExitStatus.MET;
-    }
-
-    private static StudyReport report(Tuning tuning, Tuning.Outcome outcome) {
-        StudyTable table = TuningTable.of(tuning, outcome, FigureColumns.all(tuning.scenario()));
-        return new StudyReport(
-                description(tuning, outcome),
-                StudyRows.of(table, table.columns(), List.of(new Column("settings", TuningTable.SETTINGS::get))),
-                style -> TuneSummary.text(tuning, outcome, style),
-                Optional.of(() -> TunePicture.of(tuning, outcome)));
-    }
-
-    private static Map<String, Object> description(Tuning tuning, Tuning.Outcome outcome) {
-        Map<String, Object> description = TableJson.head(tuning.scenario().name(), "tune");
-        description.put("free", StudyDescription.ranges(tuning.free()));
-        description.put("objective", tuning.objective().text());
-        description.put("asWritten", tuning.objective().value(outcome.asWritten(), tuning.margins()));
-        description.put("best", tuning.objective().value(outcome.prediction(), tuning.margins()));
-        description.put("settings", StudyDescription.values(tuning.free(), outcome.values()));
-        description.put("seed", tuning.seed());
-        description.put("evaluations", outcome.evaluations());
-        return StudyDescription.finite(description);
     }
 }

@@ -25,10 +25,10 @@ final class VaryOptions {
      * @param steps number of values where it is not stated, for one parameter, for two, ...; as many as are allowed
      * @throws UsageException if a path or a range is wrong, or if there are too many
      */
-    List<Axis> grid(Scenario scenario, int... steps) throws UsageException {
+    List<Axis> grid(Scenario scenario, List<Integer> steps) throws UsageException {
         List<Axis> axes = new ArrayList<>();
-        for (PathOption option : options(scenario, steps.length)) {
-            axes.add(axis(option, steps[texts.size() - 1]));
+        for (PathOption option : options(scenario, steps.size())) {
+            axes.add(axis(option, steps.get(texts.size() - 1)));
         }
         return axes;
     }

@@ -1,5 +1,9 @@
 package binspan.planner.cli;
 
+import binspan.planner.export.BoxReport;
+import binspan.planner.export.RegionReport;
+import binspan.planner.export.StudyReport;
+import binspan.planner.export.WindowReport;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
 import binspan.scenario.Scenario;
@@ -94,7 +98,7 @@ final class WindowCommand implements Callable<Integer> {
         if (found.windows().isEmpty()) {
             throw NoFeasiblePoint.of(NOWHERE, axes, found.nearest().orElseThrow());
         }
-        return WindowReports.of(scenario, found);
+        return WindowReport.of(scenario, found);
     }
 
     private StudyReport map(Scenario scenario, List<Axis> axes) throws UsageException {
@@ -104,7 +108,7 @@ final class WindowCommand implements Callable<Integer> {
         if (map.nearest().isPresent()) {
             throw NoFeasiblePoint.of(NOWHERE, axes, map.nearest().get());
         }
-        return RegionReports.of(scenario, map);
+        return RegionReport.of(scenario, map);
     }
 
     private StudyReport box(Scenario scenario, List<Axis> axes) throws UsageException {
@@ -115,6 +119,6 @@ final class WindowCommand implements Callable<Integer> {
         if (!found.found()) {
             throw NoFeasiblePoint.of(NOWHERE, axes, found.nearest().orElseThrow());
         }
-        return BoxReports.of(scenario, found);
+        return BoxReport.of(scenario, found);
     }
 }

@@ -1,5 +1,6 @@
 package binspan.planner.cli;
 
+import binspan.planner.io.WrittenNumber;
 import binspan.study.Axis;
 import java.util.List;
 import java.util.OptionalInt;

@@ -12,9 +12,9 @@ final class BarRows {
     private BarRows() {}
 
     /** The labels of the rows. */
-    static SymbolAxis labels(List<String> labels) {
+    static SymbolAxis labels(List<String> labels, PlotTheme theme) {
         SymbolAxis axis = new SymbolAxis(null, labels.toArray(String[]::new));
-        PlotStyle.dress(axis);
+        PlotStyle.dress(axis, theme);
         axis.setGridBandsVisible(false);
         axis.setTickMarksVisible(false);
         axis.setInverted(true);

@@ -18,8 +18,11 @@ final class ColourBarAxis extends ScaledAxis {
     private static final double WIDTH = 18.0;
     private static final int SHADES = 256;
 
-    ColourBarAxis(Axis axis, Range positions) {
-        super(axis, positions);
+    private final transient PlotTheme theme;
+
+    ColourBarAxis(Axis axis, Range positions, PlotTheme theme) {
+        super(axis, positions, theme);
+        this.theme = theme;
     }
 
     @Override
@@ -39,7 +42,7 @@ final class ColourBarAxis extends ScaledAxis {
             PlotRenderingInfo plotState) {
         Rectangle2D bar = new Rectangle2D.Double(cursor + GAP, dataArea.getY(), WIDTH, dataArea.getHeight());
         PlotArea.fill(g2, shades(), bar, RenderingHints.VALUE_INTERPOLATION_NEAREST_NEIGHBOR);
-        g2.setPaint(PlotStyle.SOFT_INK);
+        g2.setPaint(theme.ink().soft());
         g2.setStroke(PlotStyle.HAIRLINE);
         g2.draw(bar);
         return super.draw(g2, bar.getMaxX(), plotArea, dataArea, edge, plotState);

@@ -21,7 +21,17 @@ public record Curves(String title, Axis x, List<CurvePanel> panels, List<Interva
     }
 
     @Override
-    public PanelChart chart() {
-        return new CurvesChart(this).build();
+    public PanelChart chart(PlotTheme theme, Room room) {
+        return new CurvesChart(this, theme, room).build();
+    }
+
+    @Override
+    public Room least() {
+        return CurvesChart.LEAST;
+    }
+
+    @Override
+    public double fullHeight(double width) {
+        return CurvesChart.fullHeight(panels.size());
     }
 }

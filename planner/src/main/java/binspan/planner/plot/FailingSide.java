@@ -25,13 +25,13 @@ final class FailingSide extends AbstractXYAnnotation {
     }
 
     /** For values on the range axis. */
-    static FailingSide ofRange(double limit, boolean below) {
-        return new FailingSide(limit, below, PlotStyle.HATCH, false);
+    static FailingSide ofRange(double limit, boolean below, PlotTheme theme) {
+        return new FailingSide(limit, below, theme.ink().hatch(), false);
     }
 
     /** For values on the domain axis, dark enough to lie over bars. */
-    static FailingSide ofDomain(double limit, boolean below) {
-        return new FailingSide(limit, below, PlotStyle.SOFT_INK, true);
+    static FailingSide ofDomain(double limit, boolean below, PlotTheme theme) {
+        return new FailingSide(limit, below, theme.ink().soft(), true);
     }
 
     @Override

@@ -1,6 +1,5 @@
 package binspan.planner.plot;
 
-import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.RenderingHints;
 import java.awt.geom.AffineTransform;
@@ -16,19 +15,19 @@ import org.jfree.chart.plot.XYPlot;
 /** The image of a map, veiled and hatched outside its feasible region. */
 final class HeatAnnotation extends AbstractXYAnnotation {
     private static final long serialVersionUID = 1L;
-    private static final Color VEIL = new Color(0xff, 0xff, 0xff, 0x73);
-    private static final Color LINES = new Color(0x1f, 0x23, 0x28, 0x88);
     private static final double SPACING = 12.0;
 
     private final transient BufferedImage image;
     private final transient Rectangle2D positions;
     private final transient Optional<FeasibleRegion> region;
+    private final transient PlotTheme theme;
 
     /** An image that fills a rectangle of positions. */
-    HeatAnnotation(BufferedImage image, Rectangle2D positions, Optional<FeasibleRegion> region) {
+    HeatAnnotation(BufferedImage image, Rectangle2D positions, Optional<FeasibleRegion> region, PlotTheme theme) {
         this.image = image;
         this.positions = positions;
         this.region = region;
+        this.theme = theme;
     }
 
     @Override
@@ -59,11 +58,11 @@ final class HeatAnnotation extends AbstractXYAnnotation {
         return transform;
     }
 
-    private static void veil(Graphics2D g2, FeasibleRegion region, AffineTransform toPixels, Rectangle2D dataArea) {
+    private void veil(Graphics2D g2, FeasibleRegion region, AffineTransform toPixels, Rectangle2D dataArea) {
         Area outside = new Area(dataArea);
         outside.subtract(new Area(toPixels.createTransformedShape(region.inside())));
-        g2.setPaint(VEIL);
+        g2.setPaint(theme.veil());
         g2.fill(outside);
-        Hatching.rising(g2, outside, SPACING, LINES);
+        Hatching.rising(g2, outside, SPACING, theme.mapHatch());
     }
 }

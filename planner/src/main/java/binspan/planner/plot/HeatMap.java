@@ -11,7 +11,17 @@ package binspan.planner.plot;
  */
 public record HeatMap(String title, Axis x, Axis y, HeatLayer heat, Overlays overlays) implements Panel {
     @Override
-    public PanelChart chart() {
-        return new HeatMapChart(this).build();
+    public PanelChart chart(PlotTheme theme, Room room) {
+        return new HeatMapChart(this, theme, room).build();
+    }
+
+    @Override
+    public Room least() {
+        return HeatMapChart.LEAST;
+    }
+
+    @Override
+    public double fullHeight(double width) {
+        return HeatMapChart.FULL_HEIGHT;
     }
 }

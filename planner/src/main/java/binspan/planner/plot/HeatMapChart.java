@@ -1,7 +1,6 @@
 package binspan.planner.plot;
 
 import java.awt.BasicStroke;
-import java.awt.Color;
 import java.awt.Stroke;
 import java.awt.geom.Rectangle2D;
 import java.awt.image.BufferedImage;
@@ -25,6 +24,10 @@ import org.jfree.data.xy.DefaultXYDataset;
 final class HeatMapChart {
     private static final int WIDTH = 660;
     private static final int HEIGHT = 540;
+    static final Room LEAST = new Room(330.0, 160.0);
+    static final double FULL_HEIGHT = 260.0;
+    private static final double FRAME_WIDTH = 150.0;
+    private static final double FRAME_HEIGHT = 50.0;
     private static final double POINT_SIZE = 13.0;
     private static final float CONTOUR = 2.2f;
     private static final Stroke CASING = new BasicStroke(4.8f, BasicStroke.CAP_ROUND, BasicStroke.JOIN_ROUND);
@@ -33,6 +36,8 @@ final class HeatMapChart {
     private static final int[] TENTHS = {5, 3, 7, 2, 8, 4, 6, 1, 9};
 
     private final HeatMap map;
+    private final PlotTheme theme;
+    private final Room room;
     private final double[] x;
     private final double[] y;
     private final XYPlot plot;
@@ -40,18 +45,23 @@ final class HeatMapChart {
     private final List<MapLabels.Label> numbers = new ArrayList<>();
     private int layers;
 
-    HeatMapChart(HeatMap map) {
+    HeatMapChart(HeatMap map, PlotTheme theme, Room room) {
+        this.theme = theme;
+        this.room = room;
         this.map = map;
         Lattice lattice = map.heat().values();
         this.x = ContourLines.positions(map.x(), lattice.x());
         this.y = ContourLines.positions(map.y(), lattice.y());
         Range across = Positions.of(map.x(), DoubleStream.of(lattice.x()), 0.0);
         Range up = Positions.of(map.y(), DoubleStream.of(lattice.y()), 0.0);
-        this.plot = PlotStyle.plot(new ScaledAxis(map.x(), across), new ScaledAxis(map.y(), up));
+        this.plot = PlotStyle.plot(
+                fitted(new ScaledAxis(map.x(), across, theme), room.width() - FRAME_WIDTH),
+                fitted(new ScaledAxis(map.y(), up, theme), room.height() - FRAME_HEIGHT),
+                theme);
     }
 
     PanelChart build() {
-        plot.setBackgroundPaint(PlotStyle.BLANK);
+        plot.setBackgroundPaint(theme.ground().blank());
         plot.setDomainGridlinesVisible(false);
         plot.setRangeGridlinesVisible(false);
         plot.setDatasetRenderingOrder(DatasetRenderingOrder.FORWARD);
@@ -62,8 +72,13 @@ final class HeatMapChart {
         boxes();
         colours(region);
         labels.addAll(numbers);
-        plot.addAnnotation(new MapLabels(labels));
-        return new PanelChart(PlotStyle.chart(map.title(), plot), legend(), WIDTH, HEIGHT);
+        plot.addAnnotation(new MapLabels(labels, theme));
+        return new PanelChart(
+                PlotStyle.chart(map.title(), plot, theme, room), legend(), room.wide(WIDTH), room.high(HEIGHT));
+    }
+
+    private ScaledAxis fitted(ScaledAxis axis, double length) {
+        return room.given() ? axis.wrapped(length) : axis;
     }
 
     private void colours(Optional<FeasibleRegion> region) {
@@ -75,12 +90,12 @@ final class HeatMapChart {
                 .toArray(double[][]::new);
         Rectangle2D extent = new Rectangle2D.Double(x[0], y[0], x[x.length - 1] - x[0], y[y.length - 1] - y[0]);
         BufferedImage image = HeatImage.of(x, y, positions, colours);
-        plot.getRenderer(0).addAnnotation(new HeatAnnotation(image, extent, region), Layer.BACKGROUND);
+        plot.getRenderer(0).addAnnotation(new HeatAnnotation(image, extent, region, theme), Layer.BACKGROUND);
         if (missing() == (long) values.length * x.length) {
-            PlotStyle.sayEmpty(plot);
+            PlotStyle.sayEmpty(plot, theme);
             return;
         }
-        plot.setRangeAxis(1, new ColourBarAxis(z, colours));
+        plot.setRangeAxis(1, fitted(new ColourBarAxis(z, colours, theme), room.height() - FRAME_HEIGHT));
         plot.setRangeAxisLocation(1, AxisLocation.BOTTOM_OR_RIGHT);
     }
 
@@ -122,13 +137,13 @@ final class HeatMapChart {
         addCased(line, renderer, BORDER_CASING);
     }
 
-    /** Lines are drawn twice, white and wide below, so that they show on dark and light colours. */
+    /** Lines are drawn twice, in the background's colour and wide below, so that they show on dark and light colours. */
     private void addCased(DefaultXYDataset lines, XYLineAndShapeRenderer renderer, Stroke casingStroke) {
         XYLineAndShapeRenderer casing = new XYLineAndShapeRenderer(true, false);
         for (int i = 0; i < lines.getSeriesCount(); i++) {
-            casing.setSeriesPaint(i, Color.WHITE);
+            casing.setSeriesPaint(i, theme.ground().background());
             casing.setSeriesStroke(i, casingStroke);
-            renderer.setSeriesPaint(i, PlotStyle.INK);
+            renderer.setSeriesPaint(i, theme.ink().text());
         }
         casing.setDrawSeriesLineAsPath(true);
         renderer.setDrawSeriesLineAsPath(true);
@@ -177,10 +192,10 @@ final class HeatMapChart {
         XYLineAndShapeRenderer renderer = new XYLineAndShapeRenderer(false, true);
         renderer.setUseFillPaint(true);
         renderer.setDrawOutlines(true);
-        renderer.setDefaultFillPaint(Color.WHITE);
+        renderer.setDefaultFillPaint(theme.ground().background());
         renderer.setDefaultOutlineStroke(PlotStyle.LIMIT);
         renderer.setUseOutlinePaint(true);
-        renderer.setDefaultOutlinePaint(PlotStyle.INK);
+        renderer.setDefaultOutlinePaint(theme.ink().text());
         for (int i = 0; i < map.overlays().points().size(); i++) {
             PointMark mark = map.overlays().points().get(i);
             Point at = position(mark.point());
@@ -195,9 +210,16 @@ final class HeatMapChart {
         for (BoxOutline box : map.overlays().boxes()) {
             Point low = position(new Point(box.x().lower(), box.y().lower()));
             Point high = position(new Point(box.x().upper(), box.y().upper()));
-            plot.addAnnotation(new XYBoxAnnotation(low.x(), low.y(), high.x(), high.y(), CASING, Color.WHITE, null));
-            plot.addAnnotation(
-                    new XYBoxAnnotation(low.x(), low.y(), high.x(), high.y(), PlotStyle.LIMIT, PlotStyle.INK, null));
+            plot.addAnnotation(new XYBoxAnnotation(
+                    low.x(), low.y(), high.x(), high.y(), CASING, theme.ground().background(), null));
+            plot.addAnnotation(new XYBoxAnnotation(
+                    low.x(),
+                    low.y(),
+                    high.x(),
+                    high.y(),
+                    PlotStyle.LIMIT,
+                    theme.ink().text(),
+                    null));
             List<Point> corners = List.of(high, new Point(low.x(), high.y()), low, new Point(high.x(), low.y()));
             labels.add(new MapLabels.Label(box.label(), corners, true));
         }
@@ -208,13 +230,16 @@ final class HeatMapChart {
         List<Contour> contours = map.overlays().contours();
         for (int i = 0; i < contours.size(); i++) {
             String label = (i + 1) + "  " + contours.get(i).label();
-            items.add(LegendEntries.line(label, SeriesStyle.dashed(i, CONTOUR), PlotStyle.INK));
+            items.add(new LegendEntries(theme)
+                    .line(label, SeriesStyle.dashed(i, CONTOUR), theme.ink().text()));
         }
         if (map.overlays().margin().isPresent()) {
-            items.add(LegendEntries.hatched("not all requirements met", true, PlotStyle.SOFT_INK));
+            items.add(new LegendEntries(theme)
+                    .hatched("not all requirements met", true, theme.ink().soft()));
         }
         if (missing() > 0) {
-            items.add(LegendEntries.filled(map.heat().blank(), PlotStyle.BLANK));
+            items.add(new LegendEntries(theme)
+                    .filled(map.heat().blank(), theme.ground().blank()));
         }
         return items;
     }

@@ -22,7 +22,17 @@ public record Histogram(
     }
 
     @Override
-    public PanelChart chart() {
-        return new HistogramChart(this).build();
+    public PanelChart chart(PlotTheme theme, Room room) {
+        return new HistogramChart(this, theme, room).build();
+    }
+
+    @Override
+    public Room least() {
+        return HistogramChart.LEAST;
+    }
+
+    @Override
+    public double fullHeight(double width) {
+        return HistogramChart.FULL_HEIGHT;
     }
 }

@@ -16,14 +16,21 @@ import org.jfree.data.xy.XYIntervalSeries;
 final class HistogramChart {
     private static final int WIDTH = 520;
     private static final int HEIGHT = 330;
+    static final Room LEAST = new Room(220.0, 140.0);
+    static final double FULL_HEIGHT = 180.0;
+    private static final double FRAME = 60.0;
     private static final double MARGIN = 0.05;
     private static final double LEAST_COUNT = 5.0;
     private static final Axis COUNT = Axis.linear("Count", "");
 
     private final Histogram histogram;
+    private final PlotTheme theme;
+    private final Room room;
     private final Range range;
 
-    HistogramChart(Histogram histogram) {
+    HistogramChart(Histogram histogram, PlotTheme theme, Room room) {
+        this.theme = theme;
+        this.room = room;
         this.histogram = histogram;
         DoubleStream ends = histogram.bins().stream().flatMapToDouble(bin -> DoubleStream.of(bin.lower(), bin.upper()));
         DoubleStream limit = histogram.requirement().stream().mapToDouble(RequirementLine::value);
@@ -33,18 +40,25 @@ final class HistogramChart {
     PanelChart build() {
         DoubleStream counts = histogram.bins().stream().mapToDouble(Bin::count);
         Range up = Positions.of(COUNT, DoubleStream.concat(DoubleStream.of(0.0, LEAST_COUNT), counts), MARGIN);
-        XYPlot plot = PlotStyle.plot(new ScaledAxis(histogram.x(), range), new ScaledAxis(COUNT, up));
+        ScaledAxis across = new ScaledAxis(histogram.x(), range, theme);
+        if (room.given()) {
+            across.wrapped(room.width() - FRAME);
+        }
+        ScaledAxis counted = new ScaledAxis(COUNT, up, theme);
+        counted.setDense(room.given());
+        XYPlot plot = PlotStyle.plot(across, counted, theme);
         plot.setDomainGridlinesVisible(false);
-        plot.setRenderer(PatternPainter.renderer(new PatternPainter(PlotStyle.LIGHT_FILL, i -> true)));
-        plot.setDomainAxis(1, LabelAxis.blank(range));
+        plot.setRenderer(PatternPainter.renderer(new PatternPainter(theme.fill().histogram(), i -> true, theme)));
+        plot.setDomainAxis(1, LabelAxis.blank(range, theme));
         plot.setDomainAxisLocation(1, AxisLocation.TOP_OR_RIGHT);
         plot.setDataset(BarRows.dataset(bars()));
         if (histogram.bins().isEmpty()) {
-            PlotStyle.sayEmpty(plot);
+            PlotStyle.sayEmpty(plot, theme);
         }
         histogram.requirement().ifPresent(requirement -> limit(plot, requirement));
         quantiles(plot);
-        return new PanelChart(PlotStyle.chart(histogram.title(), plot), legend(), WIDTH, HEIGHT);
+        return new PanelChart(
+                PlotStyle.chart(histogram.title(), plot, theme, room), legend(), room.wide(WIDTH), room.high(HEIGHT));
     }
 
     private XYIntervalSeries bars() {
@@ -64,9 +78,15 @@ final class HistogramChart {
         if (Double.isNaN(position)) {
             return;
         }
-        plot.getRenderer().addAnnotation(FailingSide.ofDomain(position, requirement.atLeast()), Layer.FOREGROUND);
-        Limits.domainLine(plot, position);
-        plot.setDomainAxis(1, new LabelAxis("", List.of(new Mark(requirement.label(), position)), range));
+        plot.getRenderer()
+                .addAnnotation(FailingSide.ofDomain(position, requirement.atLeast(), theme), Layer.FOREGROUND);
+        new Limits(theme).domainLine(plot, position);
+        plot.setDomainAxis(1, new LabelAxis("", List.of(new Mark(label(requirement), position)), range, theme));
+    }
+
+    private String label(RequirementLine requirement) {
+        boolean fits = Words.length(requirement.label(), PlotStyle.TICK) < room.width() - 2.0 * FRAME;
+        return fits ? requirement.label() : requirement.brief().label();
     }
 
     private void quantiles(XYPlot plot) {
@@ -74,7 +94,7 @@ final class HistogramChart {
             double position =
                     histogram.x().position(histogram.quantiles().get(i).value());
             if (!Double.isNaN(position)) {
-                ValueMarker marker = new ValueMarker(position, PlotStyle.INK, stroke(i));
+                ValueMarker marker = new ValueMarker(position, theme.ink().text(), stroke(i));
                 marker.setAlpha(1.0f);
                 plot.addDomainMarker(marker, Layer.FOREGROUND);
             }
@@ -88,10 +108,14 @@ final class HistogramChart {
     private List<LegendItem> legend() {
         List<LegendItem> items = new ArrayList<>();
         for (int i = 0; i < histogram.quantiles().size(); i++) {
-            items.add(LegendEntries.line(histogram.quantiles().get(i).label(), stroke(i), PlotStyle.INK));
+            items.add(new LegendEntries(theme)
+                    .line(
+                            histogram.quantiles().get(i).label(),
+                            stroke(i),
+                            theme.ink().text()));
         }
         if (histogram.requirement().isPresent()) {
-            items.add(Limits.failingEntry());
+            items.add(new Limits(theme).failingEntry());
         }
         return items;
     }

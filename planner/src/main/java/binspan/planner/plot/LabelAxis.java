@@ -18,8 +18,10 @@ import org.jfree.data.Range;
 final class LabelAxis extends NumberAxis {
     private static final long serialVersionUID = 1L;
     private static final double GAP = 12.0;
+    private static final String NO_BREAK_SPACE = "\u00a0";
 
     private final transient List<Mark> marks;
+    private boolean apart;
 
     /**
      * An axis of labels.
@@ -27,22 +29,28 @@ final class LabelAxis extends NumberAxis {
      * @param title its own words, drawn at its lower end; empty for none
      * @param marks what it labels, at positions
      * @param positions the same as those of the axis opposite
+     * @param theme colours
      */
-    LabelAxis(String title, List<Mark> marks, Range positions) {
+    LabelAxis(String title, List<Mark> marks, Range positions, PlotTheme theme) {
         super(title.isEmpty() ? null : title);
         this.marks = marks.stream()
                 .filter(mark -> positions.contains(mark.value()))
                 .sorted(Comparator.comparingDouble(Mark::value))
                 .toList();
         setRange(positions);
-        PlotStyle.dress(this);
+        PlotStyle.dress(this, theme);
         setAxisLineVisible(false);
         setTickLabelsVisible(!this.marks.isEmpty());
     }
 
+    /** Whether labels on both sides of close marks keep a blank between them. */
+    void setApart(boolean keepApart) {
+        apart = keepApart;
+    }
+
     /** As high as one with labels, but without any, so that plots side by side begin level. */
-    static LabelAxis blank(Range positions) {
-        LabelAxis axis = new LabelAxis("", List.of(new Mark(" ", positions.getCentralValue())), positions);
+    static LabelAxis blank(Range positions, PlotTheme theme) {
+        LabelAxis axis = new LabelAxis("", List.of(new Mark(" ", positions.getCentralValue())), positions, theme);
         axis.setTickMarksVisible(false);
         return axis;
     }
@@ -53,7 +61,7 @@ final class LabelAxis extends NumberAxis {
         List<NumberTick> made = new ArrayList<>();
         for (int i = 0; i < marks.size(); i++) {
             TextAnchor anchor = crowded ? aside(i) : inside(g2, marks.get(i), dataArea, edge);
-            String label = crowded ? joined(i) : marks.get(i).label();
+            String label = crowded ? spaced(i) : marks.get(i).label();
             made.add(new NumberTick(TickType.MAJOR, marks.get(i).value(), label, anchor, anchor, 0.0));
         }
         return made;
@@ -61,6 +69,14 @@ final class LabelAxis extends NumberAxis {
 
     private TextAnchor aside(int index) {
         return index < marks.size() / 2 ? TextAnchor.BOTTOM_RIGHT : TextAnchor.BOTTOM_LEFT;
+    }
+
+    private String spaced(int index) {
+        String words = joined(index);
+        if (!apart || words.isEmpty()) {
+            return words;
+        }
+        return index < marks.size() / 2 ? words + NO_BREAK_SPACE : NO_BREAK_SPACE + words;
     }
 
     /** The words of the left half at its last mark, those of the right half at its first, nothing at the others. */

@@ -22,10 +22,12 @@ final class MapLabels extends AbstractXYAnnotation {
     private static final double[][] SIDES = {{1, 0}, {1, -1}, {1, 1}, {-1, 0}, {-1, -1}, {-1, 1}, {0, -1}, {0, 1}};
 
     private final transient List<Label> labels;
+    private final transient PlotTheme theme;
 
     /** Labels, those with the least choice of places first. */
-    MapLabels(List<Label> labels) {
+    MapLabels(List<Label> labels, PlotTheme theme) {
         this.labels = List.copyOf(labels);
+        this.theme = theme;
     }
 
     /**
@@ -65,7 +67,7 @@ final class MapLabels extends AbstractXYAnnotation {
         }
     }
 
-    private static Rectangle2D place(
+    private Rectangle2D place(
             Graphics2D g2, Label label, List<Point2D> anchors, List<Rectangle2D> taken, Rectangle2D dataArea) {
         FontMetrics metrics = g2.getFontMetrics();
         double width = metrics.stringWidth(label.text()) + 2.0 * PADDING;
@@ -112,13 +114,13 @@ final class MapLabels extends AbstractXYAnnotation {
         return cost;
     }
 
-    private static Rectangle2D draw(Graphics2D g2, Label label, Rectangle2D box) {
+    private Rectangle2D draw(Graphics2D g2, Label label, Rectangle2D box) {
         double round = label.beside() ? 4.0 : box.getHeight();
         RoundRectangle2D plate =
                 new RoundRectangle2D.Double(box.getX(), box.getY(), box.getWidth(), box.getHeight(), round, round);
-        g2.setPaint(PlotStyle.HALO);
+        g2.setPaint(theme.halo());
         g2.fill(plate);
-        g2.setPaint(PlotStyle.INK);
+        g2.setPaint(theme.ink().text());
         if (!label.beside()) {
             g2.setStroke(PlotStyle.HAIRLINE);
             g2.draw(plate);

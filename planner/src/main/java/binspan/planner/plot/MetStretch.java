@@ -20,11 +20,13 @@ final class MetStretch extends AbstractXYAnnotation {
 
     private final double from;
     private final double to;
+    private final transient PlotTheme theme;
 
     /** The stretch between two positions. */
-    MetStretch(double from, double to) {
+    MetStretch(double from, double to, PlotTheme theme) {
         this.from = from;
         this.to = to;
+        this.theme = theme;
     }
 
     @Override
@@ -40,7 +42,7 @@ final class MetStretch extends AbstractXYAnnotation {
             return;
         }
         Rectangle2D strip = PlotArea.strip(dataArea, domain, plot.getDomainAxisEdge(), from, to);
-        g2.setPaint(PlotStyle.MET_FILL);
+        g2.setPaint(theme.fill().met());
         g2.fill(strip);
         Path2D edges = new Path2D.Double();
         if (from > domain.getLowerBound()) {
@@ -49,7 +51,7 @@ final class MetStretch extends AbstractXYAnnotation {
         if (to < domain.getUpperBound()) {
             edge(edges, new Line2D.Double(strip.getMaxX(), strip.getMinY(), strip.getMaxX(), strip.getMaxY()), -1.0);
         }
-        g2.setPaint(PlotStyle.MET_EDGE);
+        g2.setPaint(theme.fill().metEdge());
         g2.setStroke(PlotStyle.LIMIT);
         g2.draw(edges);
     }

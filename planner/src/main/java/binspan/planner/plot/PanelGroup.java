@@ -10,6 +10,8 @@ import java.util.List;
  * @param panels row by row
  */
 public record PanelGroup(String title, int columns, List<Panel> panels) implements Panel {
+    private static final double HEAD_HEIGHT = 30.0;
+
     /** Copies the panels. */
     public PanelGroup {
         panels = List.copyOf(panels);
@@ -19,7 +21,24 @@ public record PanelGroup(String title, int columns, List<Panel> panels) implemen
     }
 
     @Override
-    public PanelChart chart() {
-        return PanelGrid.of(this);
+    public PanelChart chart(PlotTheme theme, Room room) {
+        return PanelGrid.of(this, theme, room);
+    }
+
+    @Override
+    public Room least() {
+        Room first = panels.get(0).least();
+        return new Room(first.width(), first.height() + headHeight());
+    }
+
+    @Override
+    public double fullHeight(double width) {
+        Room room = new Room(width, Double.POSITIVE_INFINITY);
+        return PanelLayout.of(panels, columns, room).fullHeight() + headHeight();
+    }
+
+    /** Height of the title. */
+    double headHeight() {
+        return title.isEmpty() ? 0.0 : HEAD_HEIGHT;
     }
 }

@@ -1,6 +1,5 @@
 package binspan.planner.plot;
 
-import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.Paint;
 import java.awt.geom.RectangularShape;
@@ -15,11 +14,13 @@ final class PatternPainter implements XYBarPainter {
 
     private final Paint fill;
     private final IntPredicate filled;
+    private final PlotTheme theme;
 
     /** A painter that fills the bars whose index passes a test and hatches the others. */
-    PatternPainter(Paint fill, IntPredicate filled) {
+    PatternPainter(Paint fill, IntPredicate filled, PlotTheme theme) {
         this.fill = fill;
         this.filled = filled;
+        this.theme = theme;
     }
 
     /** A renderer without shadows that uses a painter. */
@@ -35,12 +36,12 @@ final class PatternPainter implements XYBarPainter {
     public void paintBar(
             Graphics2D g2, XYBarRenderer renderer, int row, int column, RectangularShape bar, RectangleEdge base) {
         boolean solid = filled.test(column);
-        g2.setPaint(solid ? fill : Color.WHITE);
+        g2.setPaint(solid ? fill : theme.ground().background());
         g2.fill(bar);
         if (!solid) {
-            Hatching.falling(g2, bar, SPACING, PlotStyle.INK);
+            Hatching.falling(g2, bar, SPACING, theme.ink().text());
         }
-        g2.setPaint(PlotStyle.INK);
+        g2.setPaint(theme.ink().text());
         g2.setStroke(PlotStyle.HAIRLINE);
         g2.draw(bar);
     }

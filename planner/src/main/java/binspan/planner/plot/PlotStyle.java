@@ -1,7 +1,6 @@
 package binspan.planner.plot;
 
 import java.awt.BasicStroke;
-import java.awt.Color;
 import java.awt.Font;
 import java.awt.Stroke;
 import java.util.Collection;
@@ -24,20 +23,8 @@ import org.jfree.chart.ui.RectangleEdge;
 import org.jfree.chart.ui.RectangleInsets;
 import org.jfree.chart.ui.VerticalAlignment;
 
-/** Fonts, colours and strokes that all pictures share. Sizes are in pixels of 1/96 inch: 13.5 is about 10 pt. */
+/** Fonts, strokes and distances that all pictures share. Sizes are in pixels of 1/96 inch: 13.5 is about 10 pt. */
 final class PlotStyle {
-    static final Color INK = new Color(0x1f2328);
-    static final Color SOFT_INK = new Color(0x50575e);
-    static final Color GRID = new Color(0xe2e4e7);
-    static final Color FAINT_GRID = new Color(0xf0f1f3);
-    static final Color HATCH = new Color(0xb4b9bf);
-    static final Color FILL = new Color(OkLab.ofHue(0.56, 0.09, 245.0).rgb());
-    static final Color LIGHT_FILL = new Color(OkLab.ofHue(0.80, 0.06, 245.0).rgb());
-    static final Color MET_FILL = new Color(0x2f, 0x9e, 0x77, 0x38);
-    static final Color MET_EDGE = new Color(OkLab.ofHue(0.42, 0.09, 165.0).rgb());
-    static final Color BLANK = new Color(0xe6e6e6);
-    static final Color HALO = new Color(0xff, 0xff, 0xff, 0xdc);
-
     static final Stroke HAIRLINE = new BasicStroke(1.0f);
     static final Stroke LIMIT = new BasicStroke(1.8f);
     static final Stroke MARK =
@@ -66,84 +53,98 @@ final class PlotStyle {
     }
 
     /** Fonts, colours and ticks of an axis. */
-    static void dress(NumberAxis axis) {
+    static void dress(NumberAxis axis, PlotTheme theme) {
         axis.setLabelFont(AXIS);
-        axis.setLabelPaint(INK);
+        axis.setLabelPaint(theme.ink().text());
         axis.setLabelInsets(new RectangleInsets(6.0, 6.0, 6.0, 6.0));
         axis.setTickLabelFont(TICK);
-        axis.setTickLabelPaint(INK);
+        axis.setTickLabelPaint(theme.ink().text());
         axis.setTickLabelInsets(new RectangleInsets(4.0, 7.0, 4.0, 7.0));
-        axis.setAxisLinePaint(SOFT_INK);
-        axis.setTickMarkPaint(SOFT_INK);
+        axis.setAxisLinePaint(theme.ink().soft());
+        axis.setTickMarkPaint(theme.ink().soft());
         axis.setTickMarkOutsideLength(5.0f);
         axis.setMinorTickMarkOutsideLength(3.0f);
     }
 
-    /** A white plot with a light grid. */
-    static XYPlot plot(ValueAxis domain, ValueAxis range) {
+    /** A plain plot with a faint grid. */
+    static XYPlot plot(ValueAxis domain, ValueAxis range, PlotTheme theme) {
         XYPlot plot = new XYPlot(null, domain, range, null);
-        plot.setBackgroundPaint(Color.WHITE);
-        plot.setOutlinePaint(SOFT_INK);
+        plot.setBackgroundPaint(theme.ground().background());
+        plot.setOutlinePaint(theme.ink().soft());
         plot.setOutlineStroke(HAIRLINE);
         plot.setAxisOffset(RectangleInsets.ZERO_INSETS);
         plot.setInsets(RectangleInsets.ZERO_INSETS);
-        grid(plot);
+        grid(plot, theme);
         return plot;
     }
 
     /** Says that there is nothing to see, over whatever else is drawn. */
-    static void sayEmpty(XYPlot plot) {
+    static void sayEmpty(XYPlot plot, PlotTheme theme) {
         TextTitle message = new TextTitle("no values to show", AXIS);
-        message.setPaint(SOFT_INK);
-        message.setBackgroundPaint(Color.WHITE);
+        message.setPaint(theme.ink().soft());
+        message.setBackgroundPaint(theme.ground().background());
         message.setPadding(new RectangleInsets(4.0, 10.0, 4.0, 10.0));
         plot.addAnnotation(new XYTitleAnnotation(0.5, 0.5, message, RectangleAnchor.CENTER));
     }
 
-    private static void grid(XYPlot plot) {
-        plot.setDomainGridlinePaint(GRID);
+    private static void grid(XYPlot plot, PlotTheme theme) {
+        plot.setDomainGridlinePaint(theme.ink().grid());
         plot.setDomainGridlineStroke(HAIRLINE);
-        plot.setRangeGridlinePaint(GRID);
+        plot.setRangeGridlinePaint(theme.ink().grid());
         plot.setRangeGridlineStroke(HAIRLINE);
-        plot.setDomainMinorGridlinePaint(FAINT_GRID);
+        plot.setDomainMinorGridlinePaint(theme.ink().faintGrid());
         plot.setDomainMinorGridlineStroke(HAIRLINE);
-        plot.setRangeMinorGridlinePaint(FAINT_GRID);
+        plot.setRangeMinorGridlinePaint(theme.ink().faintGrid());
         plot.setRangeMinorGridlineStroke(HAIRLINE);
     }
 
     /** A chart of one panel, without a legend. */
-    static JFreeChart chart(String title, Plot plot) {
+    static JFreeChart chart(String title, Plot plot, PlotTheme theme) {
         JFreeChart chart = new JFreeChart(null, null, plot, false);
-        chart.setBackgroundPaint(Color.WHITE);
+        chart.setBackgroundPaint(theme.ground().background());
         chart.setPadding(new RectangleInsets(4.0, 8.0, 4.0, 14.0));
         if (!title.isEmpty()) {
-            chart.addSubtitle(heading(title, PANEL, 8.0));
+            chart.addSubtitle(heading(title, PANEL, 8.0, theme));
         }
         return chart;
+    }
+
+    /** The same with as little around it as can be. */
+    static JFreeChart tight(String title, Plot plot, PlotTheme theme) {
+        JFreeChart chart = chart(title, plot, theme);
+        chart.setPadding(new RectangleInsets(6.0, 2.0, 1.0, 14.0));
+        return chart;
+    }
+
+    /** A chart of one panel in a room. */
+    static JFreeChart chart(String title, Plot plot, PlotTheme theme, Room room) {
+        return room.given() ? tight(title, plot, theme) : chart(title, plot, theme);
     }
 
     /** The whole page: titles above, the legend of all panels below. */
-    static JFreeChart page(Picture picture, Plot plot, Collection<LegendItem> legend) {
+    static JFreeChart page(Picture picture, Plot plot, Collection<LegendItem> legend, PlotTheme theme) {
         JFreeChart chart = new JFreeChart(null, null, plot, false);
-        chart.setBackgroundPaint(Color.WHITE);
+        chart.setBackgroundPaint(theme.ground().background());
         chart.setPadding(new RectangleInsets(10.0, 14.0, 10.0, 14.0));
-        chart.addSubtitle(heading(picture.title(), TITLE, 3.0));
+        if (!picture.title().isEmpty()) {
+            chart.addSubtitle(heading(picture.title(), TITLE, 3.0, theme));
+        }
         if (!picture.subtitle().isEmpty()) {
-            TextTitle subtitle = heading(picture.subtitle(), SUBTITLE, 10.0);
-            subtitle.setPaint(SOFT_INK);
+            TextTitle subtitle = heading(picture.subtitle(), SUBTITLE, 10.0, theme);
+            subtitle.setPaint(theme.ink().soft());
             chart.addSubtitle(subtitle);
         }
         if (!legend.isEmpty()) {
-            chart.addSubtitle(legend(legend));
+            chart.addSubtitle(legend(legend, theme));
         }
         return chart;
     }
 
-    private static TextTitle heading(String text, Font font, double below) {
+    private static TextTitle heading(String text, Font font, double below, PlotTheme theme) {
         TextTitle title = new TextTitle(
                 text,
                 font,
-                INK,
+                theme.ink().text(),
                 RectangleEdge.TOP,
                 HorizontalAlignment.LEFT,
                 Title.DEFAULT_VERTICAL_ALIGNMENT,
@@ -152,14 +153,14 @@ final class PlotStyle {
         return title;
     }
 
-    private static LegendTitle legend(Collection<LegendItem> items) {
+    private static LegendTitle legend(Collection<LegendItem> items, PlotTheme theme) {
         LegendItemCollection collection = new LegendItemCollection();
         items.forEach(collection::add);
         LegendTitle legend = new LegendTitle(() -> collection, LEFT_ALIGNED_ROWS, LEFT_ALIGNED_ROWS);
         legend.setPosition(RectangleEdge.BOTTOM);
         legend.setHorizontalAlignment(HorizontalAlignment.LEFT);
         legend.setItemFont(TICK);
-        legend.setItemPaint(INK);
+        legend.setItemPaint(theme.ink().text());
         legend.setItemLabelPadding(new RectangleInsets(3.0, 4.0, 3.0, 18.0));
         legend.setLegendItemGraphicPadding(new RectangleInsets(3.0, 4.0, 3.0, 4.0));
         legend.setPadding(new RectangleInsets(6.0, 4.0, 2.0, 4.0));

@@ -15,7 +15,17 @@ public record RangeBars(String title, List<RangeBar> bars) implements Panel {
     }
 
     @Override
-    public PanelChart chart() {
-        return new RangeBarsChart(this).build();
+    public PanelChart chart(PlotTheme theme, Room room) {
+        return new RangeBarsChart(this, theme, room).build();
+    }
+
+    @Override
+    public Room least() {
+        return new Room(RangeBarsChart.LEAST_WIDTH, RangeBarsChart.leastHeight(this));
+    }
+
+    @Override
+    public double fullHeight(double width) {
+        return least().height();
     }
 }

@@ -23,7 +23,17 @@ public record RankedBars(String title, List<String> labels, List<BarPanel> panel
     }
 
     @Override
-    public PanelChart chart() {
-        return new RankedBarsChart(this).build();
+    public PanelChart chart(PlotTheme theme, Room room) {
+        return new RankedBarsChart(this, theme, room).build();
+    }
+
+    @Override
+    public Room least() {
+        return new Room(RankedBarsChart.LEAST_WIDTH, RankedBarsChart.leastHeight(this));
+    }
+
+    @Override
+    public double fullHeight(double width) {
+        return least().height();
     }
 }

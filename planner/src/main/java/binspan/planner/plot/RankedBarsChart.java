@@ -24,6 +24,12 @@ final class RankedBarsChart {
     private static final int FRAME_HEIGHT = 100;
     private static final int ROW_HEIGHT = 24;
     private static final int LEAST_HEIGHT = 320;
+    static final double LEAST_WIDTH = 240.0;
+    private static final double LEAST_PANEL_WIDTH = 118.0;
+    private static final double TIGHT_ROW = 19.0;
+    private static final double TIGHT_FRAME = 78.0;
+    private static final double LINE_HEIGHT = 18.0;
+    private static final double MOST_LABEL_SHARE = 0.36;
     private static final double HALF_BAR = 0.36;
     private static final double MARGIN = 0.04;
     private static final double TEXT_MARGIN = 0.06;
@@ -31,20 +37,65 @@ final class RankedBarsChart {
     private static final double TEXT_GAP = 0.008;
 
     private final RankedBars bars;
+    private final PlotTheme theme;
+    private final Room room;
 
-    RankedBarsChart(RankedBars bars) {
+    RankedBarsChart(RankedBars bars, PlotTheme theme, Room room) {
+        this.theme = theme;
+        this.room = room;
         this.bars = bars;
     }
 
+    /** The height that the rows, one line of words above and three below the axis take. */
+    static double leastHeight(RankedBars bars) {
+        boolean limits =
+                bars.panels().stream().anyMatch(panel -> panel.requirement().isPresent());
+        return TIGHT_FRAME
+                + TIGHT_ROW * Math.max(2, bars.labels().size())
+                + (limits ? LINE_HEIGHT : 0.0)
+                + (bars.title().isEmpty() ? 0.0 : LINE_HEIGHT + LINE_HEIGHT / 2.0);
+    }
+
     PanelChart build() {
-        CombinedDomainXYPlot combined = new CombinedDomainXYPlot(BarRows.labels(bars.labels()));
+        CombinedDomainXYPlot combined = new CombinedDomainXYPlot(BarRows.labels(labels(), theme));
         combined.setOrientation(PlotOrientation.HORIZONTAL);
         combined.setInsets(RectangleInsets.ZERO_INSETS);
         combined.setGap(20.0);
-        bars.panels().forEach(panel -> combined.add(subplot(panel), 1));
+        shown().forEach(panel -> combined.add(subplot(panel), 1));
         int height =
                 Math.max(LEAST_HEIGHT, FRAME_HEIGHT + ROW_HEIGHT * bars.labels().size());
-        return new PanelChart(PlotStyle.chart(bars.title(), combined), legend(), width(), height);
+        return new PanelChart(
+                PlotStyle.chart(bars.title(), combined, theme, room),
+                legend(),
+                room.wide(width()),
+                room.high(height),
+                bars.panels().size() - shown().size());
+    }
+
+    /** The panels that have room. */
+    private List<BarPanel> shown() {
+        int most = new Room(room.width() - labelWidth(), room.height()).columns(LEAST_PANEL_WIDTH);
+        return bars.panels().subList(0, Math.min(most, bars.panels().size()));
+    }
+
+    private List<String> labels() {
+        return room.given()
+                ? bars.labels().stream()
+                        .map(label -> Words.shortened(label, PlotStyle.TICK, labelWidth()))
+                        .toList()
+                : bars.labels();
+    }
+
+    private double labelWidth() {
+        double longest = bars.labels().stream()
+                .mapToDouble(label -> Words.length(label, PlotStyle.TICK))
+                .max()
+                .orElse(0.0);
+        return Math.min(longest, MOST_LABEL_SHARE * room.width());
+    }
+
+    private double panelWidth() {
+        return (room.width() - labelWidth()) / shown().size() - LETTER_WIDTH;
     }
 
     private int width() {
@@ -53,26 +104,34 @@ final class RankedBarsChart {
         return labels + PANEL_WIDTH * bars.panels().size();
     }
 
-    private static XYPlot subplot(BarPanel panel) {
+    private XYPlot subplot(BarPanel panel) {
         Range range = range(panel);
-        XYPlot plot = PlotStyle.plot(null, new ScaledAxis(panel.value(), range));
+        ScaledAxis across = new ScaledAxis(panel.value(), range, theme);
+        if (room.given()) {
+            across.wrapped(panelWidth());
+        }
+        XYPlot plot = PlotStyle.plot(null, across, theme);
         plot.setOrientation(PlotOrientation.HORIZONTAL);
         plot.setDomainGridlinesVisible(false);
         plot.setRangeZeroBaselineVisible(!panel.value().logarithmic());
-        plot.setRangeZeroBaselinePaint(PlotStyle.SOFT_INK);
+        plot.setRangeZeroBaselinePaint(theme.ink().soft());
         plot.setRangeZeroBaselineStroke(PlotStyle.HAIRLINE);
         plot.setRangeAxisLocation(AxisLocation.BOTTOM_OR_LEFT);
-        plot.setRenderer(PatternPainter.renderer(new PatternPainter(PlotStyle.FILL, met(panel))));
+        plot.setRenderer(PatternPainter.renderer(new PatternPainter(theme.fill().bar(), met(panel), theme)));
         XYIntervalSeries series = series(panel, range);
         plot.setDataset(BarRows.dataset(series));
         texts(plot, panel, range);
         if (series.isEmpty() && panel.bars().stream().allMatch(bar -> bar.text().isEmpty())) {
-            PlotStyle.sayEmpty(plot);
+            PlotStyle.sayEmpty(plot, theme);
         }
         panel.requirement()
-                .ifPresent(requirement ->
-                        Limits.labelled(plot, panel.value(), requirement, range, AxisLocation.TOP_OR_RIGHT));
+                .ifPresent(requirement -> new Limits(theme)
+                        .labelled(plot, panel.value(), told(requirement), range, AxisLocation.TOP_OR_RIGHT));
         return plot;
+    }
+
+    private RequirementLine told(RequirementLine requirement) {
+        return Words.length(requirement.label(), PlotStyle.TICK) < panelWidth() ? requirement : requirement.brief();
     }
 
     /** Which of the bars that are drawn is filled. */
@@ -83,7 +142,7 @@ final class RankedBarsChart {
         return i -> drawn.get(i).met();
     }
 
-    private static Range range(BarPanel panel) {
+    private Range range(BarPanel panel) {
         DoubleStream limit = panel.requirement().stream().mapToDouble(RequirementLine::value);
         DoubleStream values = DoubleStream.concat(panel.bars().stream().mapToDouble(Bar::value), limit);
         boolean zero = !panel.value().logarithmic();
@@ -96,8 +155,21 @@ final class RankedBarsChart {
         }
         boolean negative = zero && panel.bars().stream().anyMatch(bar -> bar.value() < 0.0);
         boolean positive = !zero || panel.bars().stream().anyMatch(bar -> !(bar.value() < 0.0));
-        double more = (TEXT_MARGIN + LETTER_MARGIN * letters) * all.getLength();
+        double more = textShare(panel, letters) * all.getLength();
         return new Range(all.getLowerBound() - (negative ? more : 0.0), all.getUpperBound() + (positive ? more : 0.0));
+    }
+
+    /** Room for the words at the ends of the bars, as a share of what the bars span. */
+    private double textShare(BarPanel panel, int letters) {
+        if (!room.given()) {
+            return TEXT_MARGIN + LETTER_MARGIN * letters;
+        }
+        double longest = LETTER_WIDTH
+                + panel.bars().stream()
+                        .mapToDouble(bar -> Words.length(bar.text(), PlotStyle.TICK))
+                        .max()
+                        .orElse(0.0);
+        return longest / Math.max(LETTER_WIDTH, panelWidth() - longest);
     }
 
     private static double foot(BarPanel panel, Range range) {
@@ -118,7 +190,7 @@ final class RankedBarsChart {
         return series;
     }
 
-    private static void texts(XYPlot plot, BarPanel panel, Range range) {
+    private void texts(XYPlot plot, BarPanel panel, Range range) {
         double foot = foot(panel, range);
         double gap = TEXT_GAP * range.getLength();
         for (int row = 0; row < panel.bars().size(); row++) {
@@ -129,8 +201,8 @@ final class RankedBarsChart {
                 double from = Double.isNaN(end) ? foot : end;
                 XYTextAnnotation text = new XYTextAnnotation(bar.text(), row, left ? from - gap : from + gap);
                 text.setFont(PlotStyle.TICK);
-                text.setPaint(PlotStyle.INK);
-                text.setBackgroundPaint(PlotStyle.HALO);
+                text.setPaint(theme.ink().text());
+                text.setBackgroundPaint(theme.halo());
                 text.setTextAnchor(left ? TextAnchor.CENTER_RIGHT : TextAnchor.CENTER_LEFT);
                 plot.addAnnotation(text);
             }
@@ -145,11 +217,13 @@ final class RankedBarsChart {
         boolean limits =
                 bars.panels().stream().anyMatch(panel -> panel.requirement().isPresent());
         if (fails || limits) {
-            items.add(LegendEntries.filled("meets the requirements", PlotStyle.FILL));
-            items.add(LegendEntries.hatched("does not meet them", false, PlotStyle.INK));
+            items.add(new LegendEntries(theme)
+                    .filled("meets the requirements", theme.fill().bar()));
+            items.add(new LegendEntries(theme)
+                    .hatched("does not meet them", false, theme.ink().text()));
         }
         if (limits) {
-            items.add(Limits.failingEntry());
+            items.add(new Limits(theme).failingEntry());
         }
         return items;
     }

@@ -8,6 +8,7 @@ import java.awt.geom.AffineTransform;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
+import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -17,20 +18,9 @@ import java.util.List;
  * @param stroke with its dash pattern
  * @param marker about eight pixels wide, centred on zero
  */
-record SeriesStyle(Color colour, Stroke stroke, Shape marker) {
+public record SeriesStyle(Color colour, Stroke stroke, Shape marker) {
     private static final float WIDTH = 2.2f;
     private static final double SIZE = 8.0;
-
-    /** Of three colour normal, red-blind and green-blind views the least distance of two in OKLab is above 0.1. */
-    private static final List<OkLab> COLOURS = List.of(
-            OkLab.ofHue(0.33, 0.170, 265.0),
-            OkLab.ofHue(0.68, 0.160, 47.0),
-            OkLab.ofHue(0.50, 0.080, 186.0),
-            OkLab.ofHue(0.66, 0.170, 297.0),
-            OkLab.ofHue(0.27, 0.085, 22.0),
-            OkLab.ofHue(0.65, 0.100, 195.0),
-            OkLab.ofHue(0.51, 0.150, 273.0),
-            OkLab.ofHue(0.38, 0.065, 228.0));
 
     private static final float[][] DASHES = {
         {},
@@ -62,9 +52,17 @@ record SeriesStyle(Color colour, Stroke stroke, Shape marker) {
             HOURGLASS);
 
     /** The style of the series with an index from 0. */
-    static SeriesStyle of(int index) {
-        int i = Math.floorMod(index, COLOURS.size());
-        return new SeriesStyle(new Color(COLOURS.get(i).rgb()), dashed(i, WIDTH), marker(i, SIZE));
+    public static SeriesStyle of(int index, PlotTheme theme) {
+        return new SeriesStyle(theme.seriesColour(index), dashed(index, WIDTH), marker(index, SIZE));
+    }
+
+    /** The dashes of the series with an index from 0: lengths of strokes and gaps in turn, in points; empty for a whole line. */
+    public static List<Double> dashes(int index) {
+        List<Double> lengths = new ArrayList<>();
+        for (float length : DASHES[Math.floorMod(index, DASHES.length)]) {
+            lengths.add((double) length);
+        }
+        return lengths;
     }
 
     /** A stroke of a width with the dash pattern of an index. */

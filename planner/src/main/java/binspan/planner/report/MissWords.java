@@ -31,6 +31,21 @@ public final class MissWords {
         return where + ": " + of(tightest.requirement(), tightest.required(), tightest.predicted());
     }
 
+    /**
+     * That nothing meets the requirements, and how near it comes.
+     *
+     * @param what what was searched
+     * @param margins the requirements
+     * @param prediction prediction at the point that fails by the least
+     */
+    public static String nowhere(String what, RequirementMargins margins, LinkPrediction prediction) {
+        if (margins.met(prediction)) {
+            return what + " inside the model's slots: the window would be wider than the separation,"
+                    + " or the slots longer than the pump cycle";
+        }
+        return what + "; at the nearest point " + of(margins, prediction);
+    }
+
     private static String of(Requirement requirement, double required, double predicted) {
         if (requirement == Requirement.SLOTS) {
             return SlotWords.END;

@@ -29,7 +29,7 @@ public final class ProgressLine {
     }
 
     /** The time left in words, no more exact than such a guess can be. */
-    static String left(double seconds) {
+    public static String left(double seconds) {
         if (seconds < SOON) {
             return "a few seconds left";
         }

@@ -1,8 +1,6 @@
 package binspan.planner.report;
 
 import binspan.prediction.LinkCheck;
-import java.io.IOException;
-import java.io.UncheckedIOException;
 
 /**
  * The verdict on a link for a person: whether it meets its requirements, what it costs where, how much may drift, and
@@ -10,22 +8,6 @@ import java.io.UncheckedIOException;
  */
 public final class Verdict {
     private Verdict() {}
-
-    /**
-     * Prints the verdict.
-     *
-     * @param check what was found
-     * @param out where to
-     * @param style colour and characters
-     * @throws UncheckedIOException if the output refuses
-     */
-    public static void print(LinkCheck check, Appendable out, TextStyle style) {
-        try {
-            out.append(text(check, style));
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        }
-    }
 
     /** The verdict as a text that ends with a line break. */
     public static String text(LinkCheck check, TextStyle style) {

@@ -3,10 +3,8 @@ package binspan.planner.report;
 import binspan.prediction.LinkCheck;
 import binspan.worksheet.Worksheet;
 import binspan.worksheet.WorksheetLine;
-import java.io.IOException;
-import java.io.UncheckedIOException;
 
-/** Prints a worksheet: each line with its formula, the numbers put in, the value and the source. */
+/** A worksheet for a person: each line with its formula, the numbers put in, the value and the source. */
 public final class WorksheetText {
     private static final int SYMBOL = 12;
 
@@ -15,22 +13,6 @@ public final class WorksheetText {
 
     private WorksheetText(TextPage page) {
         this.page = page;
-    }
-
-    /**
-     * Prints the worksheet of a check.
-     *
-     * @param check what was found
-     * @param out where to
-     * @param style colour and characters
-     * @throws UncheckedIOException if the output refuses
-     */
-    public static void print(LinkCheck check, Appendable out, TextStyle style) {
-        try {
-            out.append(text(check, style));
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        }
     }
 
     /** The worksheet as a text that ends with a line break. */

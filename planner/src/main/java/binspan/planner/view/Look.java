@@ -63,11 +63,14 @@ public final class Look {
 
     /** Gives a scene this look and keeps it so. */
     public void dress(Scene scene) {
-        follow(() -> {
-            scene.getStylesheets().setAll(SHEETS.stream().map(Look::sheet).toList());
-            scene.getStylesheets().add(sheet(theme.get().text()));
-            scene.getRoot().setStyle("-fx-font-size: " + em(1.0) + "px;");
-        });
+        follow(() -> apply(scene));
+    }
+
+    /** Gives a scene, such as that of a dialog, the look of this moment. */
+    public void apply(Scene scene) {
+        scene.getStylesheets().setAll(SHEETS.stream().map(Look::sheet).toList());
+        scene.getStylesheets().add(sheet(theme.get().text()));
+        scene.getRoot().setStyle("-fx-font-size: " + em(1.0) + "px;");
     }
 
     private static String sheet(String name) {

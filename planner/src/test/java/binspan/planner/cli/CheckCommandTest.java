@@ -2,6 +2,7 @@ package binspan.planner.cli;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import binspan.planner.io.Preset;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;

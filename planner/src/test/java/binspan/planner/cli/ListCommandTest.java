@@ -2,6 +2,7 @@ package binspan.planner.cli;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import binspan.planner.io.Preset;
 import binspan.planner.io.ScenarioReader;
 import binspan.scenario.DetectorClass;
 import binspan.scenario.FibreClass;

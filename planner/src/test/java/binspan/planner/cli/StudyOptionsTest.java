@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
+import binspan.planner.io.Preset;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.ScenarioReader;
 import binspan.scenario.Scenario;
@@ -20,7 +21,7 @@ import picocli.CommandLine;
 
 /** The options that name parameters, as every study reads them. */
 final class StudyOptionsTest {
-    private static final int[] STEPS = {201, 101, 21, 11};
+    private static final List<Integer> STEPS = List.of(201, 101, 21, 11);
     private static final Scenario SCENARIO = scenario(Preset.PULSE_PAIR.scenario());
 
     private static Scenario scenario(String text) {

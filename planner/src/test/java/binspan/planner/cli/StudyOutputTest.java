@@ -3,6 +3,7 @@ package binspan.planner.cli;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
+import binspan.planner.export.StudyReport;
 import binspan.planner.io.OutputFileException;
 import binspan.planner.plot.Axis;
 import binspan.planner.plot.Bar;

@@ -3,6 +3,7 @@ package binspan.planner.cli;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import binspan.planner.io.Preset;
 import binspan.planner.report.JsonTree;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;

@@ -46,7 +46,9 @@ final class DifferencesTest {
             return false;
         }
         ScenarioDocument changed = document.with(Differences.between(before, after));
-        assertThat(changed.scenario()).as(document.name() + " " + parameter.path()).isEqualTo(after);
+        assertThat(changed.scenario())
+                .as(document.name() + " " + parameter.path())
+                .isEqualTo(after);
         return true;
     }
 
@@ -54,7 +56,8 @@ final class DifferencesTest {
         Range range = parameter.range();
         double low = Math.max(range.lowest(), -1000.0);
         double value = low + (Math.min(range.highest(), low + 100.0) - low) * random.nextDouble();
-        boolean count = parameter instanceof FieldParameter single && single.field().kind() == Field.Kind.COUNT;
+        boolean count =
+                parameter instanceof FieldParameter single && single.field().kind() == Field.Kind.COUNT;
         return count ? Math.rint(value) : value;
     }
 
@@ -63,7 +66,8 @@ final class DifferencesTest {
         for (ScenarioDocument document : ShippedDocuments.all()) {
             for (double share : new double[] {0.0, 0.31, 1.0}) {
                 Scenario moved = SourcePosition.moved(document.scenario(), share);
-                assertThat(document.with(Differences.between(document.scenario(), moved)).scenario())
+                assertThat(document.with(Differences.between(document.scenario(), moved))
+                                .scenario())
                         .isEqualTo(moved);
             }
         }

@@ -36,14 +36,17 @@ final class ElementEditsTest {
                 ScenarioDocument twice = after.with(ElementEdits.add(after.scenario(), "bob", type, at));
                 PathElement added = twice.scenario().bob().path().get(at);
                 assertThat(added.label()).isPresent();
-                assertThat(twice.with(ElementEdits.remove("bob", at)).scenario()).isEqualTo(after.scenario());
+                assertThat(twice.with(ElementEdits.remove("bob", at)).scenario())
+                        .isEqualTo(after.scenario());
             }
         }
     }
 
     @Test
     void templatesFitTheArm() throws RefusedEditException {
-        Arm bob = FERNHILL.with(ElementEdits.add(FERNHILL.scenario(), "bob", "filter", 5)).scenario().bob();
+        Arm bob = FERNHILL.with(ElementEdits.add(FERNHILL.scenario(), "bob", "filter", 5))
+                .scenario()
+                .bob();
         assertThat(((FilterElement) bob.path().get(5)).bandwidthFwhmGHz())
                 .isEqualTo(FERNHILL.scenario().source().idler().bandwidthFwhmGHz());
         ScenarioDocument compensated = FERNHILL.with(ElementEdits.add(FERNHILL.scenario(), "alice", "compensator", 5));
@@ -85,11 +88,14 @@ final class ElementEditsTest {
             ScenarioDocument document = withoutLeaks(shipped);
             LinkPrediction whole = LinkPredictor.predict(document.scenario());
             for (String arm : List.of("alice", "bob")) {
-                List<PathElement> path = ("alice".equals(arm) ? document.scenario().alice() : document.scenario().bob()).path();
+                List<PathElement> path = ("alice".equals(arm)
+                                ? document.scenario().alice()
+                                : document.scenario().bob())
+                        .path();
                 for (int i = 0; i < path.size(); i++) {
                     if (path.get(i) instanceof FibreSpan span) {
-                        ScenarioDocument split = document.with(
-                                ElementEdits.split(document.scenario(), arm, i, share * span.lengthKm()));
+                        ScenarioDocument split =
+                                document.with(ElementEdits.split(document.scenario(), arm, i, share * span.lengthKm()));
                         assertSame(LinkPredictor.predict(split.scenario()), whole);
                         splits++;
                     }
@@ -106,12 +112,16 @@ final class ElementEditsTest {
     private static ScenarioDocument withoutLeaks(ScenarioDocument document) throws RefusedEditException {
         ScenarioDocument tight = document;
         for (String arm : List.of("alice", "bob")) {
-            List<PathElement> path = ("alice".equals(arm) ? document.scenario().alice() : document.scenario().bob()).path();
+            List<PathElement> path = ("alice".equals(arm)
+                            ? document.scenario().alice()
+                            : document.scenario().bob())
+                    .path();
             for (int i = 0; i < path.size(); i++) {
                 String at = arm + ".path[" + i + "].";
                 if (path.get(i) instanceof FilterElement) {
                     tight = tight.with(List.of(new Put(at + "isolationDb", 300)));
-                } else if (path.get(i) instanceof FibreSpan span && !span.classicalChannels().isEmpty()) {
+                } else if (path.get(i) instanceof FibreSpan span
+                        && !span.classicalChannels().isEmpty()) {
                     tight = tight.with(List.of(new Put(at + "connectors", 0), new Put(at + "splices", 0)));
                 }
             }
@@ -153,8 +163,8 @@ final class ElementEditsTest {
     void lightThatRunsOnLeaksFromBothSpans() throws RefusedEditException {
         ScenarioDocument darkened = FERNHILL;
         for (int i = 0; i < 2; i++) {
-            darkened = darkened.with(List.of(
-                    new Put("alice.path[1].classicalChannels[" + i + "].ramanCoefficientPerKmNm", 0)));
+            darkened = darkened.with(
+                    List.of(new Put("alice.path[1].classicalChannels[" + i + "].ramanCoefficientPerKmNm", 0)));
         }
         double launched = -10.0;
         double classicalWholeDb = 0.35 * 22.0;
@@ -174,7 +184,11 @@ final class ElementEditsTest {
     }
 
     private static double background(ScenarioDocument document) {
-        return LinkPredictor.predict(document.scenario()).counts().loadsA().get(0).backgroundPerSecond();
+        return LinkPredictor.predict(document.scenario())
+                .counts()
+                .loadsA()
+                .get(0)
+                .backgroundPerSecond();
     }
 
     @Test

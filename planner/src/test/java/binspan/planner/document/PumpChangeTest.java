@@ -11,6 +11,7 @@ import binspan.scenario.PumpMode;
 import binspan.scenario.Scenario;
 import binspan.scenario.Source;
 import java.util.List;
+import java.util.Map;
 import org.assertj.core.data.Percentage;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -21,7 +22,8 @@ final class PumpChangeTest {
     private static final Percentage ROUNDED = Percentage.withPercentage(1e-9);
 
     private static boolean gated(Scenario scenario) {
-        return scenario.alice().detectors().stream().anyMatch(detector -> detector.gate().isPresent());
+        return scenario.alice().detectors().stream()
+                .anyMatch(detector -> detector.gate().isPresent());
     }
 
     private static ScenarioDocument to(ScenarioDocument document, PumpMode mode) throws RefusedEditException {
@@ -35,7 +37,8 @@ final class PumpChangeTest {
             case CONTINUOUS -> source.pairRatePerSecond().orElseThrow();
             case PULSE_PAIR ->
                 source.meanPairsPerCycle().orElseThrow()
-                        * source.pump().repetitionRateMHz().orElseThrow() * 1e6;
+                        * source.pump().repetitionRateMHz().orElseThrow()
+                        * 1e6;
             case PULSE_TRAIN -> source.meanPairsPerCycle().orElseThrow() * 1e9 / scenario.imbalanceNs();
         };
     }
@@ -73,8 +76,9 @@ final class PumpChangeTest {
         ScenarioDocument gated = ShippedDocuments.named("avalanche");
         assertThatExceptionOfType(RefusedEditException.class)
                 .isThrownBy(() -> to(gated, PumpMode.CONTINUOUS))
-                .withMessageContaining("alice.detectors[0].gate: found gating with a continuous pump, which has no slots"
-                        + " to gate; needs a free-running detector");
+                .withMessageContaining(
+                        "alice.detectors[0].gate: found gating with a continuous pump, which has no slots"
+                                + " to gate; needs a free-running detector");
     }
 
     @Test
@@ -83,17 +87,25 @@ final class PumpChangeTest {
                 .with(List.of(
                         new Put("source.signal.uncorrelatedPhotonsPerCycle", 0.001),
                         new Put("source.idler.uncorrelatedPhotonsPerCycle", 0.0),
-                        new Put("spread.source.signal.uncorrelatedPhotonsPerCycle.normal", 0.0005)));
+                        new Put("spread.source.signal.uncorrelatedPhotonsPerCycle", Map.of("normal", 0.0005))));
         ScenarioDocument continuous = to(document, PumpMode.CONTINUOUS);
         Source source = continuous.scenario().source();
         assertThat(source.signal().uncorrelatedPhotonsPerSecond()).isCloseTo(80_000.0, ROUNDED);
         assertThat(continuous.scenario().spread())
                 .containsKey("source.pairRatePerSecond")
                 .doesNotContainKey("source.meanPairsPerCycle");
-        assertThat(continuous.scenario().spread().get("source.signal.uncorrelatedPhotonsPerSecond").width())
+        assertThat(continuous
+                        .scenario()
+                        .spread()
+                        .get("source.signal.uncorrelatedPhotonsPerSecond")
+                        .width())
                 .isCloseTo(40_000.0, ROUNDED);
         assertThat(continuous.scenario().provenance()).containsKey("source.pairRatePerSecond");
-        assertThat(to(continuous, PumpMode.PULSE_TRAIN).scenario().source().signal().uncorrelatedPhotonsPerCycle())
+        assertThat(to(continuous, PumpMode.PULSE_TRAIN)
+                        .scenario()
+                        .source()
+                        .signal()
+                        .uncorrelatedPhotonsPerCycle())
                 .isCloseTo(80_000.0 * 2e-9, ROUNDED);
     }
 

@@ -64,14 +64,22 @@ final class UserFilesTest {
         assertThat(read.theme()).isEqualTo("system");
         assertThat(read.windowWidth()).isEqualTo(1280);
         Path folder = directory.resolve("d\u00e9 p\u00f4t");
-        read.withTheme("dark").withWindow(1000, 700).withLastDirectory(folder).withScalePercent(150).write(directory);
+        read.withTheme("dark")
+                .withWindow(1000, 700)
+                .withLastDirectory(folder)
+                .withScalePercent(150)
+                .write(directory);
         Settings again = Settings.read(directory);
         assertThat(again.theme()).isEqualTo("dark");
         assertThat(again.scalePercent()).isEqualTo(150);
         assertThat(again.windowWidth()).isEqualTo(1000);
         assertThat(again.windowHeight()).isEqualTo(700);
         assertThat(again.lastDirectory()).hasValue(folder);
-        assertThat(file).content().contains("later=a b").startsWith("lastDirectory=").endsWith("\n");
+        assertThat(file)
+                .content()
+                .contains("later=a b")
+                .startsWith("lastDirectory=")
+                .endsWith("\n");
     }
 
     @Test

@@ -20,7 +20,7 @@ final class LabelAxisTest {
 
     private static List<NumberTick> ticks(Mark... marks) {
         Graphics2D g2 = new BufferedImage(10, 10, BufferedImage.TYPE_INT_RGB).createGraphics();
-        return new LabelAxis("", List.of(marks), new Range(0.0, 1.0))
+        return new LabelAxis("", List.of(marks), new Range(0.0, 1.0), PlotTheme.LIGHT)
                 .refreshTicks(g2, new AxisState(), new Rectangle2D.Double(0.0, 0.0, 1000.0, 10.0), RectangleEdge.TOP);
     }
 

@@ -1,15 +1,12 @@
 package binspan.planner.report;
 
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import binspan.scenario.DetectorClass;
 import binspan.scenario.Parameter;
 import binspan.scenario.ParameterPaths;
 import binspan.scenario.Scenario;
 import binspan.scenario.Values;
-import java.io.IOException;
-import java.io.UncheckedIOException;
 import java.util.List;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
@@ -232,27 +229,5 @@ final class VerdictTest {
         assertThat(plain(ReportScenarios.good().put("name", "evil \u001b[2J name")))
                 .startsWith("evil ?[2J name\n")
                 .doesNotContain("\u001b");
-    }
-
-    @Test
-    void outputThatRefusesIsAnError() {
-        Appendable broken = new Appendable() {
-            @Override
-            public Appendable append(CharSequence text) throws IOException {
-                throw new IOException("full");
-            }
-
-            @Override
-            public Appendable append(CharSequence text, int start, int end) throws IOException {
-                throw new IOException("full");
-            }
-
-            @Override
-            public Appendable append(char c) throws IOException {
-                throw new IOException("full");
-            }
-        };
-        assertThatThrownBy(() -> Verdict.print(ReportScenarios.check(ReportScenarios.good()), broken, TextStyle.PLAIN))
-                .isInstanceOf(UncheckedIOException.class);
     }
 }

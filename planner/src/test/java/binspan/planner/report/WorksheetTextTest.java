@@ -68,11 +68,7 @@ final class WorksheetTextTest {
     }
 
     @Test
-    void printedTextIsTheText() {
-        StringBuilder out = new StringBuilder();
-        LinkCheck check = ReportScenarios.check(ReportScenarios.onePort());
-        WorksheetText.print(check, out, TextStyle.PLAIN);
-        assertThat(out).hasToString(WorksheetText.text(check, TextStyle.PLAIN));
-        assertThat(out).startsWith("Worksheet of Never ending\n");
+    void namesTheLink() {
+        assertThat(plain(ReportScenarios.onePort())).startsWith("Worksheet of Never ending\n");
     }
 }

@@ -1,0 +1,108 @@
+package binspan.planner.view;
+
+import binspan.planner.report.ParameterWords;
+import binspan.planner.viewmodel.Design;
+import binspan.planner.viewmodel.FreeParameters;
+import binspan.planner.viewmodel.Words;
+import binspan.planner.viewmodel.WrittenAxis;
+import binspan.scenario.ParameterPaths;
+import javafx.beans.property.SimpleStringProperty;
+import javafx.beans.property.StringProperty;
+import javafx.collections.ListChangeListener;
+import javafx.scene.Node;
+import javafx.scene.control.Button;
+import javafx.scene.control.CheckBox;
+import javafx.scene.control.Label;
+import javafx.scene.control.TextField;
+import javafx.scene.control.Tooltip;
+import javafx.scene.layout.VBox;
+
+/** What a search may set: each parameter with a tick and, where there is room, its range; and further ones to add. */
+final class FreeRows extends VBox {
+    private static final double NUMBER = 6.0;
+
+    private final String study;
+    private final FreeParameters free;
+    private final Design design;
+    private final Look look;
+    private final boolean ranges;
+
+    /**
+     * Rows of parameters.
+     *
+     * @param study name of the study, which the ids begin with
+     * @param free what may be set
+     * @param design the link
+     * @param look gives the widths
+     * @param ranges whether the ranges are shown, a row for each parameter
+     */
+    FreeRows(String study, FreeParameters free, Design design, Look look, boolean ranges) {
+        this.study = study;
+        this.free = free;
+        this.design = design;
+        this.look = look;
+        this.ranges = ranges;
+        getStyleClass().add("study-free");
+        free.axes().addListener((ListChangeListener<WrittenAxis>) change -> arrange());
+        arrange();
+    }
+
+    private void arrange() {
+        OptionRow together = new OptionRow(study, look);
+        getChildren().clear();
+        for (int i = 0; i < free.axes().size(); i++) {
+            WrittenAxis axis = free.axes().get(i);
+            OptionRow row = ranges ? new OptionRow(study, look) : together;
+            row.with(tick(i, axis));
+            if (ranges) {
+                range(row, i, axis);
+                getChildren().add(row);
+            }
+        }
+        getChildren().add(adding(together));
+    }
+
+    private CheckBox tick(int index, WrittenAxis axis) {
+        String path = axis.pathProperty().get();
+        CheckBox box = new CheckBox(ParameterWords.name(path));
+        box.setId(study + "-free-" + index);
+        box.setTooltip(new Tooltip(path));
+        box.selectedProperty().bindBidirectional(axis.usedProperty());
+        if (ranges) {
+            look.follow(() -> box.setPrefWidth(look.em(15.0)));
+        }
+        return box;
+    }
+
+    private void range(OptionRow row, int index, WrittenAxis axis) {
+        row.with(number(row, index, "from", axis.fromProperty()), number(row, index, "to", axis.toProperty()));
+        row.with(new Label(unit(axis.pathProperty().get())));
+        CheckBox log = row.check("log", axis.logarithmicProperty());
+        log.setId(study + "-log-" + index);
+    }
+
+    private Node number(OptionRow row, int index, String name, StringProperty value) {
+        TextField field = row.field(name, value, NUMBER);
+        Node pair = row.labelled(name, field);
+        field.setId(study + "-" + name + "-" + index);
+        return pair;
+    }
+
+    private String unit(String path) {
+        try {
+            return ParameterPaths.find(design.scenario(), path).unit();
+        } catch (IllegalArgumentException e) {
+            return "";
+        }
+    }
+
+    private OptionRow adding(OptionRow row) {
+        StringProperty path = new SimpleStringProperty("");
+        ParameterBox box = new ParameterBox(study + "-more", design, path, look);
+        Button add = new Button(Words.of("studies.add"));
+        add.setId(study + "-add");
+        add.disableProperty().bind(path.isEmpty());
+        add.setOnAction(event -> free.add(path.get().strip()));
+        return row.with(box, add);
+    }
+}

@@ -1,0 +1,132 @@
+package binspan.planner.view;
+
+import binspan.planner.export.StudyFiles;
+import binspan.planner.export.StudyReport;
+import binspan.planner.io.OutputFileException;
+import binspan.planner.report.TextStyle;
+import binspan.planner.viewmodel.StudyModel;
+import binspan.planner.viewmodel.Words;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Locale;
+import java.util.function.Supplier;
+import javafx.scene.control.MenuButton;
+import javafx.scene.control.MenuItem;
+import javafx.scene.image.Image;
+import javafx.scene.input.Clipboard;
+import javafx.scene.input.ClipboardContent;
+
+/** Copies and exports what a study has found; everything is made and written in the background. */
+final class StudyHandout {
+    private static final TextStyle PLAIN = new TextStyle(false, true);
+
+    private final StudyModel<?> model;
+    private final StudyPicture picture;
+    private final FileQuestions files;
+
+    StudyHandout(StudyModel<?> model, StudyPicture picture, FileQuestions files) {
+        this.model = model;
+        this.picture = picture;
+        this.files = files;
+    }
+
+    /** Writes a report to a file. */
+    @FunctionalInterface
+    private interface Writing {
+        void to(StudyReport report, String file, boolean replace) throws OutputFileException;
+    }
+
+    /** The menus to copy and to export. */
+    List<MenuButton> menus() {
+        MenuItem copied = item("copy.picture", this::copyPicture);
+        MenuButton copy = menu(
+                "copy",
+                copied,
+                item("copy.table", () -> copy("table", () -> StudyFiles.csvText(report()))),
+                item(
+                        "copy.summary",
+                        () -> copy("summary", () -> report().summary().apply(PLAIN))));
+        MenuItem png = item("export.png", () -> export(".png", StudyFiles::picture));
+        MenuItem svg = item("export.svg", () -> export(".svg", StudyFiles::picture));
+        MenuButton export = menu(
+                "export",
+                item("export.csv", () -> export(".csv", StudyFiles::csv)),
+                item("export.json", () -> export(".json", StudyFiles::json)),
+                png,
+                svg);
+        for (MenuItem drawn : List.of(copied, png, svg)) {
+            drawn.disableProperty()
+                    .bind(model.run()
+                            .resultProperty()
+                            .map(found -> found.report().picture().isEmpty()));
+        }
+        return List.of(copy, export);
+    }
+
+    private MenuButton menu(String key, MenuItem... items) {
+        MenuButton button = new MenuButton(Words.of("studies." + key), null, items);
+        button.setId(model.name() + "-" + key);
+        return button;
+    }
+
+    private MenuItem item(String key, Runnable action) {
+        MenuItem item = new MenuItem(Words.of("studies." + key));
+        item.setId(model.name() + "-" + key.replace('.', '-'));
+        item.setOnAction(event -> action.run());
+        return item;
+    }
+
+    private StudyReport report() {
+        return model.run().resultProperty().get().report();
+    }
+
+    private void copyPicture() {
+        Image image = picture.image();
+        if (image != null) {
+            ClipboardContent content = new ClipboardContent();
+            content.putImage(image);
+            put(content, "picture");
+        }
+    }
+
+    private void copy(String what, Supplier<String> text) {
+        model.background().workers().execute(() -> {
+            String made = text.get();
+            model.background().window().execute(() -> {
+                ClipboardContent content = new ClipboardContent();
+                content.putString(made);
+                put(content, what);
+            });
+        });
+    }
+
+    private void put(ClipboardContent content, String what) {
+        Clipboard.getSystemClipboard().setContent(content);
+        model.design().notice(Words.of("studies.copied", Words.of("studies." + what)));
+    }
+
+    private void export(String ending, Writing writing) {
+        String kind = ending.substring(1).toUpperCase(Locale.ROOT);
+        StudyReport report = report();
+        files.toSave(Words.of("studies.export.title"), proposed() + ending, kind, ending)
+                .ifPresent(file -> model.background().workers().execute(() -> write(report, file, writing)));
+    }
+
+    private String proposed() {
+        String words = model.design().scenario().name().toLowerCase(Locale.ROOT).replaceAll("[^\\p{L}\\p{N}]+", "-");
+        return words + "-" + model.name();
+    }
+
+    /** The question has settled already whether an existing file is replaced. */
+    private void write(StudyReport report, Path file, Writing writing) {
+        String words;
+        try {
+            writing.to(report, file.toString(), true);
+            words = Words.of("studies.export.written", file);
+        } catch (OutputFileException e) {
+            words = e.getMessage();
+        }
+        String said = words;
+        model.background().window().execute(() -> model.design().notice(said));
+    }
+}

@@ -1,0 +1,105 @@
+package binspan.planner.view;
+
+import binspan.planner.export.StudyDefaults;
+import binspan.planner.report.FigureWords;
+import binspan.planner.viewmodel.SweepModel;
+import binspan.planner.viewmodel.Words;
+import binspan.planner.viewmodel.WrittenAxis;
+import binspan.study.FigureColumn;
+import javafx.beans.binding.Bindings;
+import javafx.beans.property.BooleanProperty;
+import javafx.beans.property.StringProperty;
+import javafx.collections.ListChangeListener;
+import javafx.scene.Node;
+import javafx.scene.control.CheckBox;
+import javafx.scene.control.CustomMenuItem;
+import javafx.scene.control.MenuButton;
+import javafx.scene.control.TextField;
+import javafx.scene.control.Tooltip;
+import javafx.scene.layout.VBox;
+
+/** What the sweep varies and shows. */
+final class SweepOptions extends VBox {
+    private static final double NUMBER = 4.6;
+    private static final double COUNT = 3.4;
+
+    private final SweepModel model;
+    private final Look look;
+
+    SweepOptions(SweepModel model, Look look) {
+        this.model = model;
+        this.look = look;
+        OptionRow first = new OptionRow(model.name(), look);
+        axis(first, "1", model.first());
+        OptionRow second = new OptionRow(model.name(), look);
+        CheckBox both = second.check("second", model.second().usedProperty());
+        axis(second, "2", model.second());
+        second.getChildren().stream()
+                .filter(each -> each != both)
+                .forEach(each -> each.disableProperty()
+                        .bind(model.second().usedProperty().not()));
+        getChildren().addAll(first, second, new OptionRow(model.name(), look).with(figures()));
+    }
+
+    private void axis(OptionRow row, String number, WrittenAxis axis) {
+        ParameterBox box = new ParameterBox("sweep-path-" + number, model.design(), axis.pathProperty(), look);
+        box.setOnAction(event -> axis.propose(model.design().scenario()));
+        row.with(box);
+        row.with(text(row, "from", number, axis.fromProperty()), text(row, "to", number, axis.toProperty()));
+        row.with(steps(row, number, axis.stepsProperty()));
+        BooleanProperty logarithmic = axis.logarithmicProperty();
+        row.check("log", logarithmic).setId("sweep-log-" + number);
+    }
+
+    private Node text(OptionRow row, String name, String number, StringProperty value) {
+        TextField field = row.field(name, value, NUMBER);
+        Node pair = row.labelled(name, field);
+        field.setId("sweep-" + name + "-" + number);
+        return pair;
+    }
+
+    private Node steps(OptionRow row, String number, StringProperty value) {
+        TextField field = row.field("steps", value, COUNT);
+        field.promptTextProperty()
+                .bind(Bindings.createStringBinding(
+                        () -> Integer.toString(StudyDefaults.SWEEP_STEPS.get(
+                                model.second().usedProperty().get() ? 1 : 0)),
+                        model.second().usedProperty()));
+        Node pair = row.labelled("steps", field);
+        field.setId("sweep-steps-" + number);
+        return pair;
+    }
+
+    private MenuButton figures() {
+        MenuButton menu = new MenuButton();
+        menu.setId("sweep-figures");
+        menu.setTooltip(new Tooltip(Words.of("studies.sweep.figures.hint")));
+        menu.textProperty()
+                .bind(Bindings.createStringBinding(
+                        () -> model.shown().isEmpty()
+                                ? Words.of("studies.sweep.figures.usual")
+                                : Words.of(
+                                        "studies.sweep.figures.some",
+                                        Integer.toString(model.shown().size())),
+                        model.shown()));
+        model.known().addListener((ListChangeListener<FigureColumn>) change ->
+                menu.getItems().setAll(model.known().stream().map(this::tick).toList()));
+        model.findFigures();
+        model.design().scenarioProperty().addListener((source, before, after) -> menu.hide());
+        menu.setOnShowing(event -> model.findFigures());
+        return menu;
+    }
+
+    private CustomMenuItem tick(FigureColumn figure) {
+        CheckBox box = new CheckBox(FigureWords.title(figure));
+        box.setSelected(model.shown().contains(figure));
+        box.selectedProperty().addListener((source, before, after) -> {
+            if (after) {
+                model.shown().add(figure);
+            } else {
+                model.shown().remove(figure);
+            }
+        });
+        return new CustomMenuItem(box, false);
+    }
+}

@@ -1,0 +1,140 @@
+package binspan.planner.viewmodel;
+
+import binspan.planner.export.CompareReport;
+import binspan.scenario.Choice;
+import binspan.scenario.DetectorClass;
+import binspan.scenario.FibreClass;
+import binspan.scenario.Scenario;
+import binspan.study.Axis;
+import binspan.study.DefaultAxes;
+import binspan.study.Execution;
+import binspan.study.comparison.Comparison;
+import binspan.study.comparison.LinkOption;
+import binspan.study.comparison.LinkOptions;
+import binspan.study.tuning.Objective;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.function.Function;
+import javafx.beans.property.BooleanProperty;
+import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.SimpleBooleanProperty;
+import javafx.beans.property.SimpleObjectProperty;
+import javafx.collections.FXCollections;
+import javafx.collections.ObservableSet;
+
+/** Which detectors or fibres serve the link best. */
+public final class DetectorsModel extends StudyModel<List<Comparison.Entry>> {
+    private final BooleanProperty fibres = new SimpleBooleanProperty(this, "fibres", false);
+    private final ObservableSet<DetectorClass> detectorClasses =
+            FXCollections.observableSet(DetectorClass.SNSPD, DetectorClass.INGAAS_FREE_RUNNING);
+    private final ObservableSet<FibreClass> fibreClasses =
+            FXCollections.observableSet(FibreClass.G652D, FibreClass.G654E);
+    private final BooleanProperty present = new SimpleBooleanProperty(this, "present", true);
+    private final BooleanProperty mixed = new SimpleBooleanProperty(this, "mixed", false);
+    private final BooleanProperty retuned = new SimpleBooleanProperty(this, "retuned", true);
+    private final ObjectProperty<Aim> aim = new SimpleObjectProperty<>(this, "aim", Aim.USUAL);
+
+    /** The study of a link, not run yet. */
+    public DetectorsModel(Design design, Background background) {
+        super("compare", design, background);
+        follow(fibres, detectorClasses, fibreClasses, present, mixed, retuned, aim);
+        design.scenarioProperty().addListener((source, before, after) -> check());
+        check();
+    }
+
+    @Override
+    Function<Execution, StudyRun.Result<List<Comparison.Entry>>> work(Scenario scenario) {
+        List<LinkOption> options = options(scenario);
+        boolean tuned = retuned.get();
+        Aim wanted = aim.get();
+        return execution -> {
+            Objective objective = wanted.of(scenario);
+            Function<Scenario, List<Axis>> free = tuned ? DefaultAxes::tuned : each -> List.of();
+            List<Comparison.Entry> entries = new Comparison(options, free, objective).run(execution);
+            return new StudyRun.Result<>(CompareReport.of(scenario.name(), objective, entries), entries);
+        };
+    }
+
+    private List<LinkOption> options(Scenario scenario) {
+        List<LinkOption> options = new ArrayList<>();
+        if (present.get()) {
+            options.add(LinkOption.of(Words.of("studies.compare.present"), scenario));
+        }
+        if (fibres.get()) {
+            fibreClasses.stream().sorted().forEach(fibre -> options.add(LinkOptions.fibre(scenario, fibre)));
+        } else {
+            detectors(scenario, options);
+        }
+        if (options.isEmpty()) {
+            throw new IllegalArgumentException(Words.of("studies.compare.nothing"));
+        }
+        return options;
+    }
+
+    private void detectors(Scenario scenario, List<LinkOption> options) {
+        List<DetectorClass> chosen = detectorClasses.stream().sorted().toList();
+        for (DetectorClass alice : chosen) {
+            for (DetectorClass bob : chosen) {
+                if (alice == bob || mixed.get()) {
+                    options.add(LinkOptions.detectors(scenario, alice, bob));
+                }
+            }
+        }
+    }
+
+    /**
+     * Takes an entry with its settings over into the link, as one change; not if the link has changed since.
+     *
+     * @return whether it was done
+     */
+    public boolean apply(Comparison.Entry entry) {
+        if (run().staleProperty().get()) {
+            return false;
+        }
+        Scenario chosen = entry.prediction().scenario();
+        return design().change(change(entry.option().name()), null, scenario -> chosen);
+    }
+
+    private static String change(String option) {
+        if (option.equals(Words.of("studies.compare.present"))) {
+            return Words.of("studies.compare.change.written");
+        }
+        boolean fibre = Choice.texts(FibreClass.class).contains(option);
+        return Words.of(fibre ? "studies.compare.change.fibres" : "studies.compare.change", option);
+    }
+
+    /** Whether fibres are compared instead of detectors. */
+    public BooleanProperty fibresProperty() {
+        return fibres;
+    }
+
+    /** Detector classes to compare. */
+    public ObservableSet<DetectorClass> detectorClasses() {
+        return detectorClasses;
+    }
+
+    /** Fibre classes to compare. */
+    public ObservableSet<FibreClass> fibreClasses() {
+        return fibreClasses;
+    }
+
+    /** Whether the link as written takes part. */
+    public BooleanProperty presentProperty() {
+        return present;
+    }
+
+    /** Whether alice and bob may have different detectors. */
+    public BooleanProperty mixedProperty() {
+        return mixed;
+    }
+
+    /** Whether each link is tuned for itself. */
+    public BooleanProperty retunedProperty() {
+        return retuned;
+    }
+
+    /** What the links are tuned and ranked for. */
+    public ObjectProperty<Aim> aimProperty() {
+        return aim;
+    }
+}

@@ -1,0 +1,97 @@
+package binspan.planner.viewmodel;
+
+import binspan.planner.export.StudyDefaults;
+import binspan.planner.export.SweepReport;
+import binspan.scenario.Scenario;
+import binspan.study.Axis;
+import binspan.study.Execution;
+import binspan.study.FigureColumn;
+import binspan.study.FigureColumns;
+import binspan.study.StudyTable;
+import binspan.study.Sweep;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.function.Function;
+import javafx.collections.FXCollections;
+import javafx.collections.ObservableList;
+
+/** The figures of merit along one or two parameters. */
+public final class SweepModel extends StudyModel<StudyTable> {
+    private final WrittenAxis first;
+    private final WrittenAxis second;
+    private final ObservableList<FigureColumn> known = FXCollections.observableArrayList();
+    private final ObservableList<FigureColumn> shown = FXCollections.observableArrayList();
+
+    /** The study of a link, not run yet: along the width of the window. */
+    public SweepModel(Design design, Background background) {
+        super("sweep", design, background);
+        Scenario scenario = design.scenario();
+        first = new WrittenAxis(scenario, "timing.windowWidthPs");
+        second = new WrittenAxis(scenario, scenario.pulsed() ? "source.meanPairsPerCycle" : "source.pairRatePerSecond");
+        second.usedProperty().set(false);
+        follow(first.parts());
+        follow(second.parts());
+        follow(shown);
+        design.scenarioProperty().addListener((source, before, after) -> renew(after));
+        check();
+    }
+
+    private void renew(Scenario scenario) {
+        first.renew(scenario);
+        second.renew(scenario);
+        check();
+    }
+
+    @Override
+    Function<Execution, StudyRun.Result<StudyTable>> work(Scenario scenario) {
+        int steps = StudyDefaults.SWEEP_STEPS.get(second.usedProperty().get() ? 1 : 0);
+        List<Axis> axes = new ArrayList<>(List.of(first.axis(scenario, steps)));
+        if (second.usedProperty().get()) {
+            axes.add(second.axis(scenario, steps));
+        }
+        List<String> names = shown.stream().map(FigureColumn::name).toList();
+        new Sweep(scenario, axes, List.of());
+        return execution -> {
+            List<FigureColumn> asked = names.isEmpty() ? List.of() : FigureColumns.named(scenario, names);
+            Sweep sweep = new Sweep(scenario, axes, SweepReport.computed(scenario, asked));
+            StudyTable table = sweep.run(execution);
+            return new StudyRun.Result<>(SweepReport.of(sweep, table, asked), table);
+        };
+    }
+
+    /** Finds in the background which figures of merit the link has. */
+    public void findFigures() {
+        Scenario scenario = design().scenario();
+        background().workers().execute(() -> {
+            List<FigureColumn> found = FigureColumns.all(scenario);
+            background().window().execute(() -> know(found));
+        });
+    }
+
+    private void know(List<FigureColumn> found) {
+        if (!found.equals(known)) {
+            known.setAll(found);
+            shown.retainAll(found);
+        }
+    }
+
+    /** The first parameter, always used. */
+    public WrittenAxis first() {
+        return first;
+    }
+
+    /** The second parameter; used where its property says so. */
+    public WrittenAxis second() {
+        return second;
+    }
+
+    /** Figures of merit of the link, once they are found. */
+    public ObservableList<FigureColumn> known() {
+        return FXCollections.unmodifiableObservableList(known);
+    }
+
+    /** Figures to show; empty for the usual ones in the picture and all in the table. */
+    public ObservableList<FigureColumn> shown() {
+        return shown;
+    }
+}
