@@ -37,7 +37,7 @@ public final class Ticks {
      * @param position where
      * @param label its words; empty for a minor tick
      */
-    public record Tick(double position, String label) {}
+    record Tick(double position, String label) {}
 
     /**
      * A tick of an axis that is drawn elsewhere.
@@ -91,7 +91,7 @@ public final class Ticks {
     }
 
     /** The ticks between two positions, so that at most so many labels would fill the axis. */
-    public static List<Tick> of(Axis axis, Range positions, int most) {
+    static List<Tick> of(Axis axis, Range positions, int most) {
         Ticks made = new Ticks(axis, positions, most);
         if (!axis.logarithmic()) {
             made.linear(positions.getLowerBound(), positions.getUpperBound(), niceStep(made.shortestStep));

@@ -2,7 +2,6 @@ package binspan.planner.view;
 
 import binspan.optics.TimeBins;
 import binspan.optics.Window;
-import binspan.planner.plot.Ticks;
 import binspan.planner.viewmodel.SlotPlot;
 import binspan.planner.viewmodel.SlotPlot.Kind;
 import binspan.planner.viewmodel.SlotPlot.Layer;
@@ -50,9 +49,9 @@ final class HistogramDrawing {
     private void grid() {
         pen.setStroke(look.palette().grid());
         pen.setLineWidth(1.0);
-        for (Ticks.Tick tick : frame.upwards(look)) {
+        for (TimeFrame.Mark tick : frame.upwards(look)) {
             if (!tick.label().isEmpty()) {
-                double y = crisp(tick.position());
+                double y = crisp(tick.pixel());
                 pen.strokeLine(frame.left(), y, frame.left() + frame.width(), y);
             }
         }
@@ -176,13 +175,13 @@ final class HistogramDrawing {
         pen.strokeRect(crisp(frame.left()), crisp(frame.top()), Math.floor(frame.width()), Math.floor(frame.height()));
         pen.setFont(look.font(SMALL));
         pen.setFill(look.palette().soft());
-        for (Ticks.Tick tick : frame.across(look)) {
-            double x = crisp(tick.position());
+        for (TimeFrame.Mark tick : frame.across(look)) {
+            double x = crisp(tick.pixel());
             pen.strokeLine(x, bottom, x, bottom + look.em(tick.label().isEmpty() ? 0.2 : 0.35));
             text(tick.label(), x, bottom + look.em(0.4), TextAlignment.CENTER, VPos.TOP);
         }
-        for (Ticks.Tick tick : frame.upwards(look)) {
-            double y = crisp(tick.position());
+        for (TimeFrame.Mark tick : frame.upwards(look)) {
+            double y = crisp(tick.pixel());
             pen.strokeLine(frame.left() - look.em(0.3), y, frame.left(), y);
             text(tick.label(), frame.left() - look.em(0.45), y, TextAlignment.RIGHT, VPos.CENTER);
         }

@@ -64,6 +64,7 @@ final class MainWindow implements WindowMenus.Pages {
         pages.setId("pages");
         pages.setTabClosingPolicy(TabPane.TabClosingPolicy.UNAVAILABLE);
         parts.pages().forEach(page -> pages.getTabs().add(tab(page)));
+        pages.getSelectionModel().select(0);
         lower = new HBox(parts.form(), pages);
         HBox.setHgrow(pages, Priority.ALWAYS);
         left = new VBox(parts.link(), lower);
@@ -84,8 +85,11 @@ final class MainWindow implements WindowMenus.Pages {
         whole.setPadding(new Insets(gap));
         width(parts.form(), FORM_NARROWEST, FORM_WIDTH);
         width(parts.verdict(), VERDICT_NARROWEST, VERDICT_WIDTH);
+        // Form and verdict get their usual width first; what is left belongs to link and pages.
         left.setMinWidth(0.0);
+        left.setPrefWidth(look.em(FORM_NARROWEST + PAGES_NARROWEST));
         pages.setMinWidth(look.em(PAGES_NARROWEST));
+        pages.setPrefWidth(look.em(PAGES_NARROWEST));
         parts.link().setMinSize(0.0, look.em(LINK_HEIGHT));
         parts.link().setPrefHeight(look.em(LINK_HEIGHT));
         parts.link().setMaxHeight(look.em(LINK_HEIGHT));
@@ -98,8 +102,10 @@ final class MainWindow implements WindowMenus.Pages {
     }
 
     private static Tab tab(Page page) {
-        Tab tab = new Tab(Words.of("page." + page.key()), page.content());
+        Tab tab = new Tab(Words.of("page." + page.key()));
         tab.setId(PAGE + page.key());
+        // A page that nobody has looked at costs nothing at the start.
+        tab.selectedProperty().addListener((source, before, selected) -> tab.setContent(page.content()));
         return tab;
     }
 

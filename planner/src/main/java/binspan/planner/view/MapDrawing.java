@@ -88,15 +88,15 @@ final class MapDrawing {
     private void grid() {
         pen.setStroke(look.palette().grid());
         pen.setLineWidth(1.0);
-        for (Ticks.Tick tick : frame.across(look)) {
+        for (Ticks.Placed tick : frame.across(look)) {
             if (!tick.label().isEmpty()) {
-                double x = crisp(frame.x(tick.position()));
+                double x = crisp(frame.x(tick.share()));
                 pen.strokeLine(x, frame.top(), x, frame.top() + frame.height());
             }
         }
-        for (Ticks.Tick tick : frame.upwards(look)) {
+        for (Ticks.Placed tick : frame.upwards(look)) {
             if (!tick.label().isEmpty()) {
-                double y = crisp(frame.y(tick.position()));
+                double y = crisp(frame.y(tick.share()));
                 pen.strokeLine(frame.left(), y, frame.left() + frame.width(), y);
             }
         }
@@ -114,20 +114,20 @@ final class MapDrawing {
         double bottom = frame.top() + frame.height();
         pen.strokeRect(crisp(frame.left()), crisp(frame.top()), Math.floor(frame.width()), Math.floor(frame.height()));
         pen.setFont(look.font(NAME));
-        for (Ticks.Tick tick : frame.across(look)) {
-            double x = crisp(frame.x(tick.position()));
+        for (Ticks.Placed tick : frame.across(look)) {
+            double x = crisp(frame.x(tick.share()));
             pen.strokeLine(x, bottom, x, bottom + length(tick));
             text(tick.label(), x, bottom + look.em(TICK + GAP), TextAlignment.CENTER, VPos.TOP);
         }
-        for (Ticks.Tick tick : frame.upwards(look)) {
-            double y = crisp(frame.y(tick.position()));
+        for (Ticks.Placed tick : frame.upwards(look)) {
+            double y = crisp(frame.y(tick.share()));
             pen.strokeLine(frame.left() - length(tick), y, frame.left(), y);
             text(tick.label(), frame.left() - look.em(TICK + GAP), y, TextAlignment.RIGHT, VPos.CENTER);
         }
         titles(bottom);
     }
 
-    private double length(Ticks.Tick tick) {
+    private double length(Ticks.Placed tick) {
         return look.em(tick.label().isEmpty() ? SHORT_TICK : TICK);
     }
 

@@ -4,7 +4,6 @@ import binspan.planner.plot.Ticks;
 import binspan.planner.report.ParameterWords;
 import binspan.study.Axis;
 import java.util.List;
-import org.jfree.data.Range;
 
 /**
  * Where a map lies on the screen: pixels of its plot and the two axes along it.
@@ -77,24 +76,19 @@ record MapFrame(double left, double top, double width, double height, Axis horiz
         return x >= left && x <= left + width && y >= top && y <= top + height;
     }
 
-    /** Ticks across, their positions as shares. */
-    List<Ticks.Tick> across(Look look) {
+    /** Ticks across. */
+    List<Ticks.Placed> across(Look look) {
         return ticks(horizontal, width / look.em(LABEL_WIDTH));
     }
 
     /** Ticks upwards. */
-    List<Ticks.Tick> upwards(Look look) {
+    List<Ticks.Placed> upwards(Look look) {
         return ticks(vertical, height / look.em(LABEL_HEIGHT));
     }
 
-    private static List<Ticks.Tick> ticks(Axis axis, double room) {
-        boolean logarithmic = axis.logarithmic();
-        double from = logarithmic ? Math.log10(axis.from()) : axis.from();
-        double to = logarithmic ? Math.log10(axis.to()) : axis.to();
+    private static List<Ticks.Placed> ticks(Axis axis, double room) {
         int most = Math.max(2, Math.min(MOST_LABELS, (int) room));
-        return Ticks.of(drawn(axis), new Range(from, to), most).stream()
-                .map(tick -> new Ticks.Tick((tick.position() - from) / (to - from), tick.label()))
-                .toList();
+        return Ticks.of(axis.from(), axis.to(), axis.logarithmic(), most);
     }
 
     /** Name and unit of an axis. */

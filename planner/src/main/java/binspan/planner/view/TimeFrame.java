@@ -1,10 +1,8 @@
 package binspan.planner.view;
 
 import binspan.optics.TimeBins;
-import binspan.planner.plot.Axis;
 import binspan.planner.plot.Ticks;
 import java.util.List;
-import org.jfree.data.Range;
 
 /**
  * Where a histogram lies on the screen.
@@ -30,7 +28,7 @@ record TimeFrame(
     /** Decades that a logarithmic scale shows. */
     private static final double DECADES = 5.0;
 
-    private static final double HEADROOM = 1.12;
+    private static final double HEADROOM = 1.28;
     private static final double LABEL_WIDTH = 4.5;
     private static final double LABEL_HEIGHT = 2.0;
     private static final double NANO = 1e9;
@@ -85,24 +83,28 @@ record TimeFrame(
     }
 
     /** Ticks along the time axis, their positions in pixels. */
-    List<Ticks.Tick> across(Look look) {
+    List<Mark> across(Look look) {
         double scale = unit().equals("ps") ? PICO : NANO;
-        Axis axis = new Axis("t", unit(), false, from * scale, to * scale);
         int most = Math.max(2, (int) (width / look.em(LABEL_WIDTH)));
-        return Ticks.of(axis, new Range(from * scale, to * scale), most).stream()
-                .map(tick -> new Ticks.Tick(x(tick.position() / scale), tick.label()))
+        return Ticks.of(from * scale, to * scale, false, most).stream()
+                .map(tick -> new Mark(left + tick.share() * width, tick.label()))
                 .toList();
     }
 
     /** Ticks along the axis of rates, their positions in pixels. */
-    List<Ticks.Tick> upwards(Look look) {
+    List<Mark> upwards(Look look) {
         double lowest = logarithmic ? highest * Math.pow(10.0, -DECADES) : 0.0;
-        Axis axis = new Axis("rate", "1/s", logarithmic, logarithmic ? lowest : Double.NaN, highest);
-        Range positions = logarithmic ? new Range(Math.log10(lowest), Math.log10(highest)) : new Range(lowest, highest);
         int most = Math.max(2, (int) (height / look.em(LABEL_HEIGHT)));
-        return Ticks.of(axis, positions, most).stream()
-                .map(tick -> new Ticks.Tick(
-                        y(logarithmic ? Math.pow(10.0, tick.position()) : tick.position()), tick.label()))
+        return Ticks.of(lowest, highest, logarithmic, most).stream()
+                .map(tick -> new Mark(top + height * (1.0 - tick.share()), tick.label()))
                 .toList();
     }
+
+    /**
+     * A tick on the screen.
+     *
+     * @param pixel where
+     * @param label its words; empty for a minor tick
+     */
+    record Mark(double pixel, String label) {}
 }

@@ -10,6 +10,7 @@ import java.util.List;
  * @param id name for tests and styles: alice, bob, pair
  * @param title what is counted
  * @param note rates in words
+ * @param timeAxis key of the title of the time axis; {0} is the unit
  * @param bins bins of the time axis, s
  * @param layers what stands on one another, the lowest first
  * @param windows windows in rising order, s; of a side one for each slot
@@ -20,6 +21,7 @@ public record SlotPlot(
         String id,
         String title,
         String note,
+        String timeAxis,
         TimeBins bins,
         List<Layer> layers,
         List<Window> windows,

@@ -42,7 +42,12 @@ final class SlotPlots {
         return new SlotPlot(
                 site.path(),
                 Words.of("slots.title." + site.path()),
-                Words.of("slots.note.side", inWindow, rms),
+                Words.of(
+                        "slots.note.side",
+                        inWindow,
+                        rms,
+                        Figure.in(clicks.bins().width() * 1e12, "ps")),
+                "slots.axis.time",
                 clicks.bins(),
                 List.of(
                         new Layer(
@@ -69,8 +74,10 @@ final class SlotPlots {
         }
         return new SlotPlot(
                 "pair",
-                Words.of(prediction.scenario().pulsed() ? "slots.title.pair" : "slots.title.difference"),
+                Words.of((prediction.scenario().pulsed() ? "slots.title.pair" : "slots.title.difference")
+                        + (allPorts ? ".all" : "")),
                 note(shown),
+                prediction.scenario().pulsed() ? "slots.axis.pair" : "slots.axis.difference",
                 shown.bins(),
                 List.of(
                         new Layer(
