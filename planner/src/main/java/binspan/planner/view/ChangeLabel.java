@@ -1,6 +1,6 @@
 package binspan.planner.view;
 
-import binspan.planner.viewmodel.Change;
+import binspan.planner.viewmodel.ChangeMark;
 import javafx.scene.control.Label;
 
 /** How a figure has changed since the link was saved: a mark for better or worse and the difference. */
@@ -10,12 +10,12 @@ final class ChangeLabel extends Label {
         setMinWidth(USE_PREF_SIZE);
     }
 
-    void show(Change change) {
+    void show(ChangeMark change) {
         setText(mark(change.effect()) + change.text());
         Columns.restyle(this, "label", "change", style(change.effect()));
     }
 
-    private static String mark(Change.Effect effect) {
+    private static String mark(ChangeMark.Effect effect) {
         return switch (effect) {
             case NONE, OTHER -> "";
             case BETTER -> "\u25b2 ";
@@ -23,7 +23,7 @@ final class ChangeLabel extends Label {
         };
     }
 
-    private static String style(Change.Effect effect) {
+    private static String style(ChangeMark.Effect effect) {
         return switch (effect) {
             case NONE, OTHER -> "soft";
             case BETTER -> "good";

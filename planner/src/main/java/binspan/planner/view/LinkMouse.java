@@ -66,6 +66,7 @@ final class LinkMouse implements EventHandler<MouseEvent> {
             fromX = x(event);
             model.select(held);
             drawing.focus();
+            event.consume(); // or the scroll pane takes the focus
         }
     }
 
@@ -137,12 +138,9 @@ final class LinkMouse implements EventHandler<MouseEvent> {
 
     private void showDrop(LinkDrop where, Element element) {
         drop.setVisible(where.index() != element.index());
-        Node node = drawing.node(held);
+        LinkNode node = drawing.node(held);
         drop.autosize();
         drop.resizeRelocate(
-                where.x() - drop.getWidth() / 2.0,
-                0.0,
-                drop.prefWidth(-1),
-                node.getLayoutBounds().getHeight());
+                where.x() - drop.getWidth() / 2.0, node.getLayoutY(), drop.prefWidth(-1), node.getHeight());
     }
 }

@@ -43,6 +43,7 @@ final class LinkNode extends Region {
         getStyleClass().add("link-item");
         setId("link-item-" + index);
         setFocusTraversable(false);
+        setPickOnBounds(false); // words reach over neighbours, the ground does not
         setAccessibleRole(AccessibleRole.BUTTON);
         Tooltip.install(this, tooltip);
     }

@@ -71,7 +71,7 @@ final class Session {
         notices = new Notices(stage, look);
         files = answers != null ? answers : new FileQuestions(stage, settings.lastDirectory().orElse(null));
         filing = new Filing(model.design(), model.file(), files, notices);
-        window = new MainWindow(model, WindowParts.of(model, look, files), look);
+        window = new MainWindow(model, WindowParts.of(model, look, files, this::showRoom), look);
         window.menus(menus().bar(this::close));
     }
 
@@ -82,6 +82,10 @@ final class Session {
                 model.checks(),
                 new Exports.Regions(() -> (Region) window.root(), () -> window.shown().content(), window::link));
         return new WindowMenus(model, look, filing, exports, window, new Help(notices));
+    }
+
+    private void showRoom() {
+        window.show("room");
     }
 
     /** Closes the window as its own button does. */

@@ -128,14 +128,25 @@ public final class Design {
     public boolean change(String what, Object drag, UnaryOperator<Scenario> change) {
         try {
             Scenario before = scenario.get();
-            return done(apply(what, drag, Differences.between(before, change.apply(before))));
+            return told(apply(what, drag, Differences.between(before, change.apply(before))));
         } catch (IllegalArgumentException e) {
             notice.set(e.getMessage());
             return false;
         }
     }
 
-    private boolean done(List<EditProblem> problems) {
+    /**
+     * Changes the scenario file as one step; a refusal is told as a notice.
+     *
+     * @param what the change in words, for undo
+     * @param changes what to change
+     * @return whether it was done
+     */
+    public boolean edit(String what, List<Change> changes) {
+        return told(apply(what, null, changes));
+    }
+
+    private boolean told(List<EditProblem> problems) {
         if (!problems.isEmpty()) {
             notice.set(problems.get(0).path() + ": " + problems.get(0).message());
         }

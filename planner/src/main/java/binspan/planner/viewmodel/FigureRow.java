@@ -7,7 +7,7 @@ package binspan.planner.viewmodel;
  * @param value its value with unit
  * @param change against the saved link
  */
-public record FigureRow(String name, String value, Change change) {
+public record FigureRow(String name, String value, ChangeMark change) {
     /** The row for somebody who hears it. */
     public String spoken() {
         return name + " " + value + (change.spoken().isEmpty() ? "" : ", " + change.spoken());

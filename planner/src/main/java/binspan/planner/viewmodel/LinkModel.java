@@ -60,7 +60,7 @@ public final class LinkModel {
 
     /** Whether the room shown is that of the present link. */
     public boolean roomIsPresent() {
-        return left.get().filter(known -> known.scenario() == design.scenario()).isPresent();
+        return left.get().filter(known -> known.scenario().equals(design.scenario())).isPresent();
     }
 
     /** Moves the source. */

@@ -1,6 +1,6 @@
 package binspan.planner.viewmodel;
 
-import binspan.planner.cli.WrittenNumber;
+import binspan.planner.io.WrittenNumber;
 import binspan.scenario.Parameter;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
@@ -15,6 +15,8 @@ import javafx.beans.property.ReadOnlyStringWrapper;
 public final class MapAxis {
     /** In paths that lead to an element of an arm, which may have moved to another place. */
     private static final String ELEMENT = ".path";
+
+    private static final double ROUNDING = 1e-9;
 
     private final ReadOnlyObjectWrapper<Axis> axis = new ReadOnlyObjectWrapper<>(this, "axis");
     private final ReadOnlyStringWrapper error = new ReadOnlyStringWrapper(this, "error", "");
@@ -106,9 +108,10 @@ public final class MapAxis {
         return true;
     }
 
-    /** Whether a value lies on the axis. */
+    /** Whether a value lies on the axis, but for the last digits that scaling a link leaves. */
     public boolean contains(double value) {
-        return value >= axis().from() && value <= axis().to();
+        double slack = ROUNDING * Math.abs(value);
+        return value >= axis().from() - slack && value <= axis().to() + slack;
     }
 
     private Parameter parameter() {

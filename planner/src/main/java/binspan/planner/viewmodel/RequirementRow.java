@@ -32,7 +32,7 @@ public record RequirementRow(
         String margin,
         boolean met,
         double barShare,
-        Change change,
+        ChangeMark change,
         String why) {
 
     private static final double SHARPNESS = 100.0;
@@ -69,12 +69,12 @@ public record RequirementRow(
         return Math.copySign(Math.min(1.0, Math.log1p(SHARPNESS * room) / Math.log1p(SHARPNESS)), logRatio);
     }
 
-    private static Change change(RequirementOutcome outcome, LinkCheck now, LinkCheck saved) {
+    private static ChangeMark change(RequirementOutcome outcome, LinkCheck now, LinkCheck saved) {
         Requirement requirement = outcome.requirement();
-        return Change.of(
+        return ChangeMark.of(
                 requirement.predicted(saved.prediction(), saved.finite()),
                 requirement.predicted(now.prediction(), now.finite()),
-                requirement.atLeast() ? Change.Aim.HIGH : Change.Aim.LOW,
+                requirement.atLeast() ? ChangeMark.Aim.HIGH : ChangeMark.Aim.LOW,
                 difference -> RequirementWords.difference(requirement, difference),
                 value -> RequirementWords.tuned(requirement, value, value, true));
     }

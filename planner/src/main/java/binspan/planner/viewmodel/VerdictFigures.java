@@ -8,7 +8,7 @@ import binspan.planner.report.TextStyle;
 import binspan.planner.report.VerdictBudget;
 import binspan.planner.report.VerdictKey;
 import binspan.planner.report.VerdictRates;
-import binspan.planner.viewmodel.Change.Aim;
+import binspan.planner.viewmodel.ChangeMark.Aim;
 import binspan.prediction.LinkCheck;
 import binspan.prediction.LinkPrediction;
 import binspan.prediction.Requirement;
@@ -138,7 +138,7 @@ final class VerdictFigures {
     }
 
     private FigureRow row(String name, String value, FigureColumn column, Aim aim) {
-        Change change = Change.of(
+        ChangeMark change = ChangeMark.of(
                 value(column, saved),
                 value(column, now),
                 aim,

@@ -67,9 +67,9 @@ public record VerdictSheet(
 
     /** Whether any figure differs noticeably from the saved link. */
     public boolean figuresChanged() {
-        return requirements.stream().anyMatch(row -> row.change().effect() != Change.Effect.NONE)
+        return requirements.stream().anyMatch(row -> row.change().effect() != ChangeMark.Effect.NONE)
                 || figures.stream()
                         .flatMap(group -> group.rows().stream())
-                        .anyMatch(row -> row.change().effect() != Change.Effect.NONE);
+                        .anyMatch(row -> row.change().effect() != ChangeMark.Effect.NONE);
     }
 }

@@ -223,6 +223,17 @@ final class MapModelTest {
     }
 
     @Test
+    void aLinkDraggedToTheEndLeavesTheAxisAsItIs() {
+        model.chooseVertical(LENGTH);
+        Axis before = model.vertical().axis();
+        for (double length = 10.0; length < before.to() + 100.0; length += 37.0) {
+            model.handle().dragTo(0.04, length);
+        }
+        assertEquals(before.to(), value(LENGTH), 1e-6);
+        assertSame(before, model.vertical().axis());
+    }
+
+    @Test
     void keysMoveByShares() {
         Axis up = model.vertical().axis();
         double before = up.share(value(WINDOW));

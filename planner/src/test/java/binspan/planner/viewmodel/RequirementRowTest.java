@@ -55,7 +55,7 @@ final class RequirementRowTest {
             assertThat(Math.signum(row.barShare()))
                     .isEqualTo(Math.signum(outcome.margin().orElseThrow()));
             assertThat(row.margin()).startsWith(outcome.met() ? "+" : "-");
-            assertThat(row.change()).isEqualTo(Change.NONE);
+            assertThat(row.change()).isEqualTo(ChangeMark.NONE);
             assertThat(row.why().isEmpty()).isEqualTo(outcome.met());
         }
     }

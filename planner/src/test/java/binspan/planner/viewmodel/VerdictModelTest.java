@@ -126,15 +126,15 @@ final class VerdictModelTest {
         LinkCheck now = LinkCheck.of(design.scenario());
         double difference =
                 now.prediction().fringe().raw() - before.prediction().fringe().raw();
-        Change change = model.sheetProperty().get().requirements().get(0).change();
+        ChangeMark change = model.sheetProperty().get().requirements().get(0).change();
         assertThat(change.text()).isEqualTo(RequirementWords.margin(Requirement.RAW_VISIBILITY, difference));
-        assertThat(change.effect()).isEqualTo(difference > 0.0 ? Change.Effect.BETTER : Change.Effect.WORSE);
+        assertThat(change.effect()).isEqualTo(difference > 0.0 ? ChangeMark.Effect.BETTER : ChangeMark.Effect.WORSE);
         assertThat(figure(model.sheetProperty().get(), "accidentals").change().effect())
-                .isEqualTo(Change.Effect.BETTER);
+                .isEqualTo(ChangeMark.Effect.BETTER);
         assertThat(figure(model.sheetProperty().get(), "secret, endless run")
                         .change()
                         .effect())
-                .isEqualTo(Change.Effect.WORSE);
+                .isEqualTo(ChangeMark.Effect.WORSE);
         assertThat(model.sheetProperty().get().changes())
                 .containsExactly(new ScenarioChange("window width", "400 ps", "300 ps"));
         window(design, 400.0);
@@ -147,8 +147,8 @@ final class VerdictModelTest {
         Design design = new Design(VerdictLinks.meeting());
         VerdictModel model = of(design);
         design.change("pairs", null, s -> VerdictLinks.with(s, "source.meanPairsPerCycle", 0.02));
-        Change change = figure(model.sheetProperty().get(), "singles, bob").change();
-        assertThat(change.effect()).isEqualTo(Change.Effect.OTHER);
+        ChangeMark change = figure(model.sheetProperty().get(), "singles, bob").change();
+        assertThat(change.effect()).isEqualTo(ChangeMark.Effect.OTHER);
         assertThat(change.spoken()).startsWith("changed since saved: -");
     }
 
@@ -157,9 +157,9 @@ final class VerdictModelTest {
         Design design = new Design(VerdictLinks.failing());
         VerdictModel model = of(design);
         design.change("step", null, s -> VerdictLinks.with(s, "timing.cableTemperatureStepK", 0.05));
-        Change change =
+        ChangeMark change =
                 figure(model.sheetProperty().get(), "time to the first key").change();
-        assertThat(change).isEqualTo(new Change("was never", Change.Effect.BETTER));
+        assertThat(change).isEqualTo(new ChangeMark("was never", ChangeMark.Effect.BETTER));
     }
 
     @Test

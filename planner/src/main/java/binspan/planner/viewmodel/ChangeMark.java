@@ -8,9 +8,9 @@ import java.util.function.DoubleFunction;
  * @param text the difference with its sign and unit, or what the figure was where there is no difference; empty without change
  * @param effect whether that is for the better
  */
-public record Change(String text, Effect effect) {
+public record ChangeMark(String text, Effect effect) {
     /** No change. */
-    public static final Change NONE = new Change("", Effect.NONE);
+    public static final ChangeMark NONE = new ChangeMark("", Effect.NONE);
 
     /** Less than this share of the figure counts as no change: the last digit shown is ten times as large. */
     private static final double NOTICEABLE = 1e-4;
@@ -40,20 +40,20 @@ public record Change(String text, Effect effect) {
      * @param difference puts a difference into words
      * @param value puts a figure, or that there is none, into words
      */
-    static Change of(
+    static ChangeMark of(
             double before, double now, Aim aim, DoubleFunction<String> difference, DoubleFunction<String> value) {
         if (Double.isFinite(before) && Double.isFinite(now)) {
             double size = Math.max(Math.abs(before), Math.abs(now));
             return Math.abs(now - before) <= NOTICEABLE * size
                     ? NONE
-                    : new Change(difference.apply(now - before), effect(aim, now > before));
+                    : new ChangeMark(difference.apply(now - before), effect(aim, now > before));
         }
         if (!Double.isFinite(before) && !Double.isFinite(now)) {
             return NONE;
         }
         boolean found = Double.isFinite(now);
         Effect effect = aim == Aim.NEITHER ? Effect.OTHER : found ? Effect.BETTER : Effect.WORSE;
-        return new Change(Words.of("verdict.change.was", value.apply(before)), effect);
+        return new ChangeMark(Words.of("verdict.change.was", value.apply(before)), effect);
     }
 
     private static Effect effect(Aim aim, boolean risen) {
