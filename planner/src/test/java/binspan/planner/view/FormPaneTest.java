@@ -113,14 +113,16 @@ class FormPaneTest {
                 .requestFocus());
         type(robot, "#form-source", "data sheet");
         robot.push(KeyCode.ENTER);
-        assertThat(edited.design().scenario().provenance()).containsEntry("alice.detectors[0].deadTimeNs", "data sheet");
+        assertThat(edited.design().scenario().provenance())
+                .containsEntry("alice.detectors[0].deadTimeNs", "data sheet");
     }
 
     @Test
     void anotherClassChangesTheTableBelow(FxRobot robot) {
         robot.interact(() -> {
             @SuppressWarnings("unchecked")
-            ComboBox<String> classes = robot.lookup("#form-alice-detectors-0-class").queryAs(ComboBox.class);
+            ComboBox<String> classes =
+                    robot.lookup("#form-alice-detectors-0-class").queryAs(ComboBox.class);
             classes.setValue("ingaas-gated");
         });
         assertThat(edited.text()).contains("\"class\": \"ingaas-gated\", \"efficiency\": 0.82");
