@@ -47,12 +47,6 @@ final class FieldRow extends VBox {
         }
         entry.setMaxWidth(Double.MAX_VALUE);
         HBox.setHgrow(entry, Priority.ALWAYS);
-        if (!model.withoutEffect().isEmpty() && model.optional()) {
-            line.getChildren()
-                    .add(Buttons.remove(
-                            id("form-drop", model.path()),
-                            () -> model.textProperty().set("")));
-        }
         getChildren().addAll(line, new ErrorLine(model.errorProperty()));
         idle();
         explained(explain);
@@ -143,8 +137,20 @@ final class FieldRow extends VBox {
             Label reason = new Label(model.withoutEffect());
             reason.getStyleClass().addAll("form-note", "soft");
             reason.setWrapText(true);
-            getChildren().add(reason);
+            reason.setMaxWidth(Double.MAX_VALUE);
+            HBox.setHgrow(reason, Priority.ALWAYS);
+            HBox line = new HBox(reason);
+            line.getStyleClass().add("form-idle");
+            if (model.optional()) {
+                line.getChildren().add(Buttons.remove(id("form-drop", model.path()), this::drop));
+            }
+            getChildren().add(line);
         }
+    }
+
+    private void drop() {
+        model.textProperty().set("");
+        model.settle();
     }
 
     private void explained(BiConsumer<FieldModel, Boolean> explain) {

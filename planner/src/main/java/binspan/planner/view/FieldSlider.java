@@ -34,8 +34,7 @@ final class FieldSlider extends Slider {
     /** Stands where the value is, unless it is being dragged. */
     private void follow() {
         SliderScale scale = model.sliderProperty().get();
-        setDisable(scale == null || !model.withoutEffect().isEmpty());
-        setVisible(scale != null);
+        setVisible(scale != null && model.withoutEffect().isEmpty());
         if (scale != null && !isValueChanging()) {
             following = true;
             setValue(scale.position(model.valueProperty().get()));
