@@ -3,6 +3,7 @@ package binspan.planner.view;
 import binspan.planner.viewmodel.Words;
 import javafx.scene.control.Button;
 import javafx.scene.control.Tooltip;
+import javafx.scene.layout.Region;
 
 /** Small buttons of the form. */
 final class Buttons {
@@ -14,6 +15,7 @@ final class Buttons {
         button.setId(id);
         button.getStyleClass().add("form-button");
         button.setTooltip(new Tooltip(Words.of("form.remove.help")));
+        button.setMinWidth(Region.USE_PREF_SIZE);
         button.setOnAction(event -> action.run());
         return button;
     }

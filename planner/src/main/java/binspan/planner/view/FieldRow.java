@@ -1,7 +1,6 @@
 package binspan.planner.view;
 
 import binspan.planner.viewmodel.FieldModel;
-import binspan.planner.viewmodel.SliderScale;
 import binspan.planner.viewmodel.Words;
 import java.util.List;
 import java.util.Locale;
@@ -11,7 +10,6 @@ import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.Control;
 import javafx.scene.control.Label;
-import javafx.scene.control.Slider;
 import javafx.scene.control.TextField;
 import javafx.scene.control.Tooltip;
 import javafx.scene.input.KeyCode;
@@ -22,9 +20,6 @@ import javafx.scene.layout.VBox;
 
 /** One field: label, slider, entry and unit on a line, below it what is wrong. */
 final class FieldRow extends VBox {
-    private static final double SLIDER_STEP = 0.01;
-    private static final double SLIDER_PAGE = 0.1;
-
     private final FieldModel model;
     private final Control entry;
 
@@ -45,19 +40,13 @@ final class FieldRow extends VBox {
         line.getStyleClass().add("form-line");
         line.setAlignment(Pos.CENTER_LEFT);
         if (model.choices().isEmpty() && model.field().kind().numeric()) {
-            line.getChildren().addAll(slider(), entry, unit());
+            line.getChildren().addAll(new FieldSlider(model), entry, unit());
         } else {
             line.getChildren().add(entry);
             entry.getStyleClass().add("form-wide");
         }
         entry.setMaxWidth(Double.MAX_VALUE);
         HBox.setHgrow(entry, Priority.ALWAYS);
-        if (!model.withoutEffect().isEmpty() && model.optional()) {
-            line.getChildren()
-                    .add(Buttons.remove(
-                            id("form-drop", model.path()),
-                            () -> model.textProperty().set("")));
-        }
         getChildren().addAll(line, new ErrorLine(model.errorProperty()));
         idle();
         explained(explain);
@@ -143,64 +132,25 @@ final class FieldRow extends VBox {
         return unit;
     }
 
-    private Node slider() {
-        Slider slider = new Slider(0.0, 1.0, 0.0);
-        slider.setId(id("form-slide", model.path()));
-        slider.getStyleClass().add("form-slider");
-        slider.setBlockIncrement(SLIDER_STEP);
-        slider.setAccessibleText(Words.of("form.slider", model.label()));
-        boolean[] following = {false};
-        Runnable follow = () -> {
-            SliderScale scale = model.sliderProperty().get();
-            slider.setDisable(scale == null || !model.withoutEffect().isEmpty());
-            slider.setVisible(scale != null);
-            if (scale != null && !slider.isValueChanging()) {
-                following[0] = true;
-                slider.setValue(scale.position(model.valueProperty().get()));
-                following[0] = false;
-            }
-        };
-        model.valueProperty().addListener((source, before, now) -> follow.run());
-        model.sliderProperty().addListener((source, before, now) -> follow.run());
-        slider.valueProperty().addListener((source, before, now) -> {
-            if (!following[0]) {
-                model.slide(now.doubleValue());
-            }
-        });
-        slider.valueChangingProperty().addListener((source, before, changing) -> {
-            if (!changing) {
-                model.settle();
-                follow.run();
-            }
-        });
-        slider.focusedProperty().addListener((source, before, focused) -> model.settle());
-        slider.addEventFilter(KeyEvent.KEY_PRESSED, event -> keys(slider, event));
-        follow.run();
-        slider.managedProperty().bind(slider.visibleProperty());
-        return slider;
-    }
-
-    /** Page keys move by a tenth, Escape takes the movement back. */
-    private void keys(Slider slider, KeyEvent event) {
-        if (event.getCode() == KeyCode.ESCAPE) {
-            model.takeBack();
-        } else if (event.getCode() == KeyCode.PAGE_UP) {
-            slider.setValue(slider.getValue() + SLIDER_PAGE);
-        } else if (event.getCode() == KeyCode.PAGE_DOWN) {
-            slider.setValue(slider.getValue() - SLIDER_PAGE);
-        } else {
-            return;
-        }
-        event.consume();
-    }
-
     private void idle() {
         if (!model.withoutEffect().isEmpty()) {
             Label reason = new Label(model.withoutEffect());
             reason.getStyleClass().addAll("form-note", "soft");
             reason.setWrapText(true);
-            getChildren().add(reason);
+            reason.setMaxWidth(Double.MAX_VALUE);
+            HBox.setHgrow(reason, Priority.ALWAYS);
+            HBox line = new HBox(reason);
+            line.getStyleClass().add("form-idle");
+            if (model.optional()) {
+                line.getChildren().add(Buttons.remove(id("form-drop", model.path()), this::drop));
+            }
+            getChildren().add(line);
         }
+    }
+
+    private void drop() {
+        model.textProperty().set("");
+        model.settle();
     }
 
     private void explained(BiConsumer<FieldModel, Boolean> explain) {
