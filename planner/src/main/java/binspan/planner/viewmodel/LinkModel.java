@@ -60,7 +60,9 @@ public final class LinkModel {
 
     /** Whether the room shown is that of the present link. */
     public boolean roomIsPresent() {
-        return left.get().filter(known -> known.scenario().equals(design.scenario())).isPresent();
+        return left.get()
+                .filter(known -> known.scenario().equals(design.scenario()))
+                .isPresent();
     }
 
     /** Moves the source. */

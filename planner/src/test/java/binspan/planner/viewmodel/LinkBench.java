@@ -5,7 +5,6 @@ import binspan.planner.document.RefusedEditException;
 import binspan.planner.document.ScenarioDocument;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.scenario.PathElement;
-import binspan.scenario.Scenario;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Files;
@@ -27,7 +26,6 @@ public final class LinkBench {
     private final Design design;
     private final LinkModel model;
     private final List<String> done = new ArrayList<>();
-    private final List<Scenario> seen = new ArrayList<>();
 
     /** The bench of a shipped link. */
     public LinkBench(String name) {
@@ -37,7 +35,6 @@ public final class LinkBench {
     /** The bench of a document. */
     public LinkBench(ScenarioDocument document) {
         design = new Design(document.scenario());
-        design.scenarioProperty().addListener((property, before, now) -> seen.add(now));
         model = new LinkModel(design, Background.NONE, new Desk(document)::edit);
     }
 
@@ -65,11 +62,6 @@ public final class LinkBench {
     /** The edits in words. */
     public List<String> done() {
         return done;
-    }
-
-    /** The scenarios in the order in which they were shown. */
-    public List<Scenario> seen() {
-        return seen;
     }
 
     /** Labels of an arm's path, from the source on. */
