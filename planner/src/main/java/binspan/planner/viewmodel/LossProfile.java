@@ -19,8 +19,7 @@ import java.util.List;
  * @param endX where the loss ends and the room for more may be drawn, px
  * @param rimX outer end of the drawing, px
  */
-public record LossProfile(
-        Site site, List<Corner> line, List<LossNumber> numbers, double totalDb, double endX, double rimX) {
+public record LossProfile(Site site, List<Corner> line, List<Mark> numbers, double totalDb, double endX, double rimX) {
     private static final double DIGIT_EM = 0.52;
     private static final double GAP_EM = 0.5;
 
@@ -46,7 +45,7 @@ public record LossProfile(
      * @param width room for it, px
      * @param text the number
      */
-    public record LossNumber(double x, double db, double width, String text) {}
+    public record Mark(double x, double db, double width, String text) {}
 
     /**
      * The profile of an arm.
@@ -80,15 +79,14 @@ public record LossProfile(
     }
 
     /** The larger steps first, each where no number stands yet. The last step is left to the total. */
-    private static List<LossNumber> placed(List<Step> steps, double em) {
-        List<LossNumber> placed = new ArrayList<>();
+    private static List<Mark> placed(List<Step> steps, double em) {
+        List<Mark> placed = new ArrayList<>();
         steps.stream()
                 .limit(Math.max(0, steps.size() - 1))
                 .sorted(Comparator.comparingDouble(Step::lossDb).reversed())
                 .forEach(step -> {
                     String text = Digits.decimals(step.db(), 1);
-                    LossNumber number =
-                            new LossNumber(step.x(), step.db(), (text.length() * DIGIT_EM + GAP_EM) * em, text);
+                    Mark number = new Mark(step.x(), step.db(), (text.length() * DIGIT_EM + GAP_EM) * em, text);
                     if (steps.get(steps.size() - 1).clears(number)
                             && placed.stream().noneMatch(other -> overlap(step.outward(), number, other))) {
                         placed.add(number);
@@ -97,7 +95,7 @@ public record LossProfile(
         return placed;
     }
 
-    private static boolean overlap(double outward, LossNumber one, LossNumber other) {
+    private static boolean overlap(double outward, Mark one, Mark other) {
         double first = one.x() * outward;
         double second = other.x() * outward;
         return first < second + other.width() && second < first + one.width();
@@ -106,7 +104,7 @@ public record LossProfile(
     /** A step of the line: where its level begins, how much it is, which way is out. */
     private record Step(double x, double db, double lossDb, double outward) {
         /** Whether a number ends before this step. */
-        boolean clears(LossNumber number) {
+        boolean clears(Mark number) {
             return number.x() * outward + number.width() <= x * outward;
         }
     }

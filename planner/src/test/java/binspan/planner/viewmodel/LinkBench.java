@@ -1,9 +1,14 @@
 package binspan.planner.viewmodel;
 
 import binspan.planner.document.Change;
+import binspan.planner.document.RefusedEditException;
 import binspan.planner.document.ScenarioDocument;
+import binspan.planner.io.InvalidScenarioException;
 import binspan.scenario.PathElement;
-import binspan.scenario.Scenario;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -21,7 +26,6 @@ public final class LinkBench {
     private final Design design;
     private final LinkModel model;
     private final List<String> done = new ArrayList<>();
-    private final List<Scenario> seen = new ArrayList<>();
 
     /** The bench of a shipped link. */
     public LinkBench(String name) {
@@ -30,14 +34,19 @@ public final class LinkBench {
 
     /** The bench of a document. */
     public LinkBench(ScenarioDocument document) {
-        design = new Design(document);
-        design.scenarioProperty().addListener((property, before, now) -> seen.add(now));
-        model = new LinkModel(design, Background.NONE, this::edit);
+        design = new Design(document.scenario());
+        model = new LinkModel(design, Background.NONE, new Desk(document)::edit);
     }
 
     /** A shipped document. */
     public static ScenarioDocument shipped(String name) {
-        return Designs.shipped(name);
+        try {
+            return ScenarioDocument.of(Files.readString(Path.of("..", "scenarios", name + ".json")), name);
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        } catch (InvalidScenarioException e) {
+            throw new IllegalStateException(e);
+        }
     }
 
     /** The shared design. */
@@ -55,11 +64,6 @@ public final class LinkBench {
         return done;
     }
 
-    /** The scenarios in the order in which they were shown. */
-    public List<Scenario> seen() {
-        return seen;
-    }
-
     /** Labels of an arm's path, from the source on. */
     public List<String> labels(Site site) {
         return site.arm(design.scenario()).path().stream()
@@ -68,11 +72,22 @@ public final class LinkBench {
                 .toList();
     }
 
-    private boolean edit(String what, List<Change> changes) {
-        boolean edited = design.edit(what, changes);
-        if (edited) {
-            done.add(what);
+    private final class Desk {
+        private ScenarioDocument document;
+
+        Desk(ScenarioDocument document) {
+            this.document = document;
         }
-        return edited;
+
+        boolean edit(String what, List<Change> changes) {
+            try {
+                document = document.with(changes);
+            } catch (RefusedEditException e) {
+                design.notice(e.getMessage());
+                return false;
+            }
+            done.add(what);
+            return design.change(what, null, before -> document.scenario());
+        }
     }
 }
