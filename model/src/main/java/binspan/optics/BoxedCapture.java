@@ -13,6 +13,7 @@ final class BoxedCapture {
     private static final double SIGMAS_PER_PANEL = 12.0;
     private static final int MOST_PANELS = 8;
     private static final double REACH = 6.5;
+    private static final double NEVER = 1e-18;
 
     private final PairSpectrum spectrum;
     private final double betaA;
@@ -42,12 +43,52 @@ final class BoxedCapture {
         double sum = 0.0;
         double mass = 0.0;
         for (int i = -steps; i <= steps; i++) {
-            double x = i * step / birthRms;
-            double weight = Math.exp(-x * x / 2.0);
+            double weight = birthWeight(i * step);
             mass += weight;
             sum += weight * captured(captureA, captureB, i * step);
         }
         return sum / mass;
+    }
+
+    /** The share of the pairs whose photon clicks inside alice's window and in each of bob's bins, both about each photon's mean arrival. */
+    double[] binned(PortTiming a, PortTiming b, Window windowA, TimeBins binsB) {
+        double sigmaA = Math.sqrt(0.25 / spectrum.alice().variance() + a.variance());
+        double sigmaB = Math.sqrt(0.25 / spectrum.bob().variance() + b.variance());
+        double step = birthStep(sigmaA, sigmaB);
+        int steps = (int) Math.ceil(BIRTH_REACH * birthRms / step);
+        resolve(sigmaA, sigmaB);
+        double earliest = steps * step;
+        CaptureTable captureA = CaptureTable.of(a, windowA, sigmaA, earliest + Math.abs(betaA) * grid.farthestAlice());
+        double farthest = earliest + Math.abs(betaB) * grid.farthestBob();
+        ArrivalDeposit deposit = new ArrivalDeposit(b, sigmaB, binsB, -farthest, farthest);
+        double mass = 0.0;
+        for (int i = -steps; i <= steps; i++) {
+            mass += birthWeight(i * step);
+        }
+        for (int i = -steps; i <= steps; i++) {
+            born(captureA, deposit, i * step, birthWeight(i * step) / mass);
+        }
+        return deposit.binned();
+    }
+
+    private double birthWeight(double t0) {
+        double x = t0 / birthRms;
+        return Math.exp(-x * x / 2.0);
+    }
+
+    /** Lays down bob's photons of the pairs born at one time. */
+    private void born(CaptureTable captureA, ArrivalDeposit deposit, double t0, double weight) {
+        double lastDetuning = Double.NaN;
+        double ofAlice = 0.0;
+        for (int i = 0; i < grid.probability.length; i++) {
+            if (grid.alice[i] != lastDetuning) {
+                lastDetuning = grid.alice[i];
+                ofAlice = weight * captureA.at(t0 + betaA * lastDetuning);
+            }
+            if (ofAlice > NEVER) {
+                deposit.put(t0 + betaB * grid.bob[i], ofAlice * grid.probability[i]);
+            }
+        }
     }
 
     /** Makes the grid so fine that a panel spreads the arrivals over few of the widths by which the clicks are blurred. */
@@ -109,5 +150,30 @@ final class BoxedCapture {
             captured += nodes.weight[i] * port.capture(window.from() - late, window.to() - late, sigma);
         }
         return captured / filters.area();
+    }
+
+    /** The same in the bins of a histogram. */
+    static double[] singles(Passband filters, double inversePump, double beta, PortTiming port, TimeBins bins) {
+        double sigma = Math.sqrt((1.0 / filters.variance() + inversePump) / 4.0 + port.variance());
+        Window all = new Window(bins.start(), bins.end());
+        if (filters.flat() && !port.tailed()) {
+            double width = 2.0 * filters.halfWidth() * Math.abs(beta);
+            double[] shares = new double[bins.count()];
+            for (int i = 0; i < shares.length; i++) {
+                shares[i] = WindowCapture.box(bins.edge(i), bins.edge(i + 1), width, sigma);
+            }
+            return shares;
+        }
+        DetuningNodes nodes = DetuningNodes.of(filters, beta, new DetuningNodes.View(all, sigma, port.tailTime(), 0.0));
+        if (nodes.count() == 0) {
+            return new double[bins.count()];
+        }
+        double first = beta * nodes.detuning[0];
+        double last = beta * nodes.detuning[nodes.count() - 1];
+        ArrivalDeposit deposit = new ArrivalDeposit(port, sigma, bins, Math.min(first, last), Math.max(first, last));
+        for (int i = 0; i < nodes.count(); i++) {
+            deposit.put(beta * nodes.detuning[i], nodes.weight[i] / filters.area());
+        }
+        return deposit.binned();
     }
 }

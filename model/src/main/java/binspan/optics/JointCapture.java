@@ -41,6 +41,59 @@ final class JointCapture {
                 correlation);
     }
 
+    /** The share of the pairs whose photon clicks inside alice's window and in each of bob's bins, both about each photon's own mean arrival. */
+    double[] binned(PortTiming a, PortTiming b, Window windowA, TimeBins binsB) {
+        if (boxed != null) {
+            return boxed.binned(a, b, windowA, binsB);
+        }
+        double sigmaA = Math.sqrt(arrival.pairA() + a.variance());
+        double sigmaB = Math.sqrt(arrival.pairB() + b.variance());
+        double correlation = arrival.pairCovariance() / (sigmaA * sigmaB);
+        if (a.capture(windowA.from(), windowA.to(), sigmaA) == 0.0) {
+            return new double[binsB.count()];
+        }
+        if (a.tailed() || b.tailed()) {
+            return tailed(a, b, windowA, binsB, new Factors(sigmaA, sigmaB, correlation));
+        }
+        double fromA = windowA.from() / sigmaA;
+        double toA = windowA.to() / sigmaA;
+        return BinnedCaptures.each(
+                binsB,
+                sigmaB,
+                b,
+                (from, to) -> BivariateNormal.rectangle(fromA, toA, from / sigmaB, to / sigmaB, correlation));
+    }
+
+    /** Two correlated arrivals as a common factor and what each has of its own. */
+    private record Factors(double sigmaA, double sigmaB, double correlation) {
+        double shared() {
+            return Math.min(STRONGEST_WITH_TAILS, Math.abs(correlation));
+        }
+
+        /** Step of the trapezoidal rule over the common factor. */
+        double step() {
+            double r = shared();
+            return 0.75 / Math.sqrt(1.0 + 2.0 * r / (1.0 - r));
+        }
+    }
+
+    /** The same rule as for one window, bob's photons laid down at their mean arrivals for each value of the common factor. */
+    private static double[] tailed(PortTiming a, PortTiming b, Window windowA, TimeBins binsB, Factors factors) {
+        double common = Math.sqrt(factors.shared());
+        double own = Math.sqrt(1.0 - factors.shared());
+        double reach = REACH * common * factors.sigmaB();
+        ArrivalDeposit deposit = new ArrivalDeposit(b, own * factors.sigmaB(), binsB, -reach, reach);
+        double step = factors.step();
+        for (int i = (int) (-REACH / step); i * step <= REACH; i++) {
+            double z = i * step;
+            double shiftA = common * factors.sigmaA() * z;
+            double captured = a.capture(windowA.from() - shiftA, windowA.to() - shiftA, own * factors.sigmaA());
+            double shiftB = Math.signum(factors.correlation()) * common * factors.sigmaB() * z;
+            deposit.put(shiftB, captured * Math.exp(-z * z / 2.0) * step / SQRT_TWO_PI);
+        }
+        return deposit.binned();
+    }
+
     /**
      * One common factor: t_X = g_X z + e_X with z standard normal and e_X independent, tails included; the trapezoidal rule over z converges
      * exponentially, its step set by the smoothing that e_X gives.

@@ -60,8 +60,13 @@ public final class OpticalPaths {
         return -lambda * lambda / (2.0 * Math.PI * PhysicalConstants.SPEED_OF_LIGHT) * perMetre;
     }
 
-    /** Loss of an element that is not fibre, dB. */
-    static double componentLossDb(PathElement element, double fibreDispersion) {
+    /**
+     * Loss of an element that is not fibre, dB; 0 for fibre.
+     *
+     * @param element the element
+     * @param fibreDispersion dispersion of all the arm's fibre, on which a compensator's loss may depend, ps/nm
+     */
+    public static double componentLossDb(PathElement element, double fibreDispersion) {
         if (element instanceof LossElement loss) {
             return loss.lossDb();
         }
@@ -80,8 +85,13 @@ public final class OpticalPaths {
                 + dispersion / compensator.figureOfMeritPsPerNmDb().getAsDouble();
     }
 
-    /** Dispersion that an element adds to the fibre's, ps/nm. */
-    private static double compensatedPsPerNm(PathElement element, double fibreDispersion) {
+    /**
+     * Dispersion that an element adds to the fibre's, ps/nm; 0 for everything but a compensator.
+     *
+     * @param element the element
+     * @param fibreDispersion dispersion of all the arm's fibre, of which a compensator may take a share, ps/nm
+     */
+    public static double compensatedPsPerNm(PathElement element, double fibreDispersion) {
         if (!(element instanceof Compensator compensator)) {
             return 0.0;
         }

@@ -6,6 +6,7 @@ import binspan.scenario.Range;
 import binspan.scenario.Scenario;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
 import org.apache.commons.numbers.rootfinder.BrentSolver;
@@ -17,6 +18,7 @@ import org.apache.commons.numbers.rootfinder.BrentSolver;
 final class HeadroomSearch {
     private static final BrentSolver ROOT = new BrentSolver(1e-6, 1e-15, 0.0);
     private static final double FIRST_SHARE = 0.05;
+    private static final double UPWARDS_STEP = 0.1;
     private static final double STEEPEST = 10.0;
     private static final double NEGLIGIBLE = 1e-6;
     private static final double GROWTH = 4.0;
@@ -39,6 +41,28 @@ final class HeadroomSearch {
             DriftingQuantities.of(scenario).forEach(quantity -> search.add(quantity, headroom));
         }
         return headroom;
+    }
+
+    /**
+     * The limit of a quantity that only grows, for the requirements that are met; absent where none is met or none fails within its range.
+     *
+     * @param scenario the link
+     * @param outcomes its requirements
+     * @param parameter the quantity, which has a planned value
+     * @param scenarios the link at each value of it
+     */
+    static Optional<Headroom> upwards(
+            Scenario scenario,
+            List<RequirementOutcome> outcomes,
+            Parameter parameter,
+            DoubleFunction<Scenario> scenarios) {
+        HeadroomSearch search = new HeadroomSearch(scenario, outcomes);
+        if (search.held.requirements().isEmpty()) {
+            return Optional.empty();
+        }
+        Axis axis = new Axis(parameter, scenarios, parameter.value(scenario).orElseThrow());
+        OptionalDouble limit = search.limit(axis, UPWARDS_STEP, Double.POSITIVE_INFINITY);
+        return limit.isPresent() ? Optional.of(search.headroom(axis, limit.getAsDouble())) : Optional.empty();
     }
 
     private void add(DriftingQuantities.Quantity quantity, List<Headroom> headroom) {

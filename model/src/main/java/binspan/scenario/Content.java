@@ -40,8 +40,12 @@ public record Content(Map<String, Section> byType) {
         return Optional.ofNullable(byType.get(type));
     }
 
-    /** The section that describes a record. */
-    Section sectionOf(Record element) {
+    /**
+     * The section that describes a record.
+     *
+     * @throws java.util.NoSuchElementException if none does
+     */
+    public Section sectionOf(Record element) {
         return byType.values().stream()
                 .filter(section -> section.describes(element))
                 .findFirst()

@@ -155,6 +155,11 @@ public record Field(
         return value instanceof Double number ? OptionalDouble.of(number) : Optional.ofNullable(value);
     }
 
+    /** That it is missing, in words. */
+    public String missing() {
+        return "missing; needs " + allowed() + ": " + meaning;
+    }
+
     /** What is allowed here, in words. */
     public String allowed() {
         return switch (kind) {

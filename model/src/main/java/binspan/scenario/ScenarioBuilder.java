@@ -69,7 +69,7 @@ public final class ScenarioBuilder {
             return byDefault == null ? field.absent() : field.component(byDefault);
         }
         if (byDefault == null) {
-            problems.add(new Problem(path, "missing; needs " + field.allowed() + ": " + field.meaning()));
+            problems.add(new Problem(path, field.missing()));
             return null;
         }
         return resolve(field, byDefault, path);

@@ -82,7 +82,7 @@ public final class Section {
     }
 
     /** Position of a field, -1 if there is none of that name. */
-    int indexOf(String fieldName) {
+    public int indexOf(String fieldName) {
         for (int i = 0; i < fields.size(); i++) {
             if (fields.get(i).name().equals(fieldName)) {
                 return i;
@@ -91,7 +91,8 @@ public final class Section {
         return -1;
     }
 
-    boolean describes(Record element) {
+    /** Whether a record is one of this section. */
+    public boolean describes(Record element) {
         return type.isInstance(element);
     }
 
@@ -106,8 +107,13 @@ public final class Section {
         }
     }
 
-    /** Reads one component of a record. */
-    Object component(Record element, int index) {
+    /**
+     * Reads one component of a record that the section describes.
+     *
+     * @param element the record
+     * @param index position of the field
+     */
+    public Object component(Record element, int index) {
         try {
             return accessors()[index].invoke(element);
         } catch (ReflectiveOperationException e) {
@@ -134,8 +140,11 @@ public final class Section {
     /**
      * The object that stands in a record and leaves no room for a field, such as the gate of a detector for its dark
      * counts.
+     *
+     * @param element record that the section describes
+     * @param field one of its fields
      */
-    Optional<Field> excluding(Record element, Field field) {
+    public Optional<Field> excluding(Record element, Field field) {
         for (Alternatives group : alternatives) {
             if (group.fields().contains(field.name())) {
                 for (String other : group.fields()) {

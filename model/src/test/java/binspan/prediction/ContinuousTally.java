@@ -45,6 +45,24 @@ final class ContinuousTally {
         }
     }
 
+    /** Numbers of time differences t_A - t_B of two ports in bins of equal width. */
+    double[] differences(int portA, int portB, double start, double width, int bins) {
+        double[] counts = new double[bins];
+        int first = 0;
+        for (double alice : times[portA]) {
+            double latest = alice - start;
+            double earliest = latest - bins * width;
+            while (first < times[2 + portB].length && times[2 + portB][first] <= earliest) {
+                first++;
+            }
+            for (int k = first; k < times[2 + portB].length && times[2 + portB][k] <= latest; k++) {
+                int bin = (int) ((alice - times[2 + portB][k] - start) / width);
+                counts[Math.min(bins - 1, bin)]++;
+            }
+        }
+        return counts;
+    }
+
     /** Drops the clicks that come while their detector is dead. */
     void deaden(double deadTime) {
         for (int i = 0; i < 4; i++) {

@@ -235,7 +235,7 @@ final class PhotonByPhotonTest {
     }
 
     /** Unequal splitters, paths and detectors; dispersion as of a fibre, in ps^2. */
-    private static Values stated(Values stated, double separationNs, double betaA, double betaB) {
+    static Values stated(Values stated, double separationNs, double betaA, double betaB) {
         stated.put("imbalanceNs", separationNs);
         for (String band : List.of("signal", "idler")) {
             SampleScenarios.part(stated, "source." + band).put("bandwidthFwhmGHz", BANDWIDTH_GHZ);
@@ -271,12 +271,12 @@ final class PhotonByPhotonTest {
         SampleScenarios.part(stated, arm).put("path", List.of(element));
     }
 
-    private static double pumpRms(Scenario scenario) {
+    static double pumpRms(Scenario scenario) {
         return FWHM_PER_RMS
                 / (2.0 * scenario.source().pump().pairEmissionFwhmPs().orElseThrow() * PICO);
     }
 
-    private static Side[] sides(Scenario scenario, double betaA, double betaB) {
+    static Side[] sides(Scenario scenario, double betaA, double betaB) {
         double filter = 2.0 * Math.PI * BANDWIDTH_GHZ * 1e9 / FWHM_PER_RMS;
         double e = Math.pow(10.0, -0.04);
         Side alice = new Side(
@@ -303,12 +303,12 @@ final class PhotonByPhotonTest {
         return new Side[] {alice, bob};
     }
 
-    private static double widest(Side[] sides, double pumpRms) {
+    static double widest(Side[] sides, double pumpRms) {
         return 5.0 * (Math.max(sides[0].filterRms(), sides[1].filterRms()) + pumpRms);
     }
 
     /** Share of the drawn pairs of which both photons pass, by direct summation over both detunings. */
-    private static double bothPass(Side[] sides, double pumpRms, double widest) {
+    static double bothPass(Side[] sides, double pumpRms, double widest) {
         int cells = 2000;
         double sum = 0.0;
         for (int i = 0; i < cells; i++) {

@@ -46,6 +46,17 @@ public record OperatingRegion(Scenario scenario, Axis horizontal, Axis vertical)
         return new RegionSearch(this, execution).result();
     }
 
+    /**
+     * Computes the margins at the points of the map and nothing else: quick enough to follow a hand that moves a parameter. They equal those of {@link
+     * #run} at every point.
+     *
+     * @throws CancellationException if it shall stop
+     */
+    public MarginGrid survey(Execution execution) {
+        RegionGrid grid = RegionGrid.of(this, RegionGrid.shares(horizontal), RegionGrid.shares(vertical), execution);
+        return new MarginGrid(this, function().margins(), grid);
+    }
+
     /** The margins over the map, for one thread. */
     MarginFunction function() {
         return new MarginFunction(scenario, List.of(horizontal, vertical));

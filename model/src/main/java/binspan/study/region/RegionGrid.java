@@ -1,5 +1,6 @@
 package binspan.study.region;
 
+import binspan.study.Axis;
 import binspan.study.Execution;
 import binspan.study.Workers;
 import binspan.study.window.MarginFunction;
@@ -42,6 +43,15 @@ final class RegionGrid {
         return grid;
     }
 
+    /** The shares of the way along an axis at which its steps lie. */
+    static double[] shares(Axis axis) {
+        double[] shares = new double[axis.steps()];
+        for (int i = 0; i < shares.length; i++) {
+            shares[i] = (double) i / (shares.length - 1);
+        }
+        return shares;
+    }
+
     private void fill(MarginFunction function, int i, int j) {
         double[] here = function.at(u[i], v[j]);
         for (int k = 0; k < here.length; k++) {
@@ -81,6 +91,17 @@ final class RegionGrid {
     /** A crossing. */
     Spot spot(int i, int j) {
         return new Spot(u[i], v[j]);
+    }
+
+    /** The requirement with the least margin at a crossing, the first of equal ones. */
+    int tightest(int i, int j) {
+        int tightest = 0;
+        for (int k = 1; k < margins.length; k++) {
+            if (margin(k, i, j) < margin(tightest, i, j)) {
+                tightest = k;
+            }
+        }
+        return tightest;
     }
 
     /** The margins of all requirements along a line across the second axis. */

@@ -1,6 +1,5 @@
 package binspan.study.region;
 
-import binspan.study.Axis;
 import binspan.study.Execution;
 import binspan.study.region.RegionMap.RequirementContour;
 import binspan.study.window.MarginFunction;
@@ -33,9 +32,7 @@ final class RegionSearch {
     }
 
     RegionMap result() {
-        double[] u = shares(region.horizontal());
-        double[] v = shares(region.vertical());
-        compute(u, v, execution);
+        compute(RegionGrid.shares(region.horizontal()), RegionGrid.shares(region.vertical()), execution);
         RegionGrid asked = grid;
         for (int round = 1; round < MOST_ROUNDS; round++) {
             HiddenSpots hidden = new HiddenSpots(grid, crossings, function, execution).search();
@@ -51,14 +48,6 @@ final class RegionSearch {
     private void compute(double[] u, double[] v, Execution run) {
         grid = RegionGrid.of(region, u, v, run.part(0.0, GRID_END));
         crossings = GridCrossings.of(region, grid, run.part(GRID_END, CROSSINGS_END));
-    }
-
-    private static double[] shares(Axis axis) {
-        double[] shares = new double[axis.steps()];
-        for (int i = 0; i < shares.length; i++) {
-            shares[i] = (double) i / (shares.length - 1);
-        }
-        return shares;
     }
 
     private static double[] with(double[] lines, NavigableSet<Double> more) {

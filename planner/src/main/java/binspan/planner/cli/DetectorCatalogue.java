@@ -1,5 +1,7 @@
 package binspan.planner.cli;
 
+import binspan.planner.report.DetectorClassWords;
+import binspan.planner.report.FibreClassWords;
 import binspan.scenario.DetectorClass;
 import binspan.scenario.DetectorClass.Typical;
 import binspan.scenario.Gate;
@@ -11,8 +13,7 @@ import java.util.Map;
 
 /** The detector classes as a listing. */
 final class DetectorCatalogue {
-    private static final String NOTE = "Planning values inside the published ones named with each class."
-            + " Values of your own in the scenario replace those of the class.";
+    private static final String NOTE = DetectorClassWords.PLANNED + " " + FibreClassWords.REPLACED;
 
     private DetectorCatalogue() {}
 
@@ -31,18 +32,13 @@ final class DetectorCatalogue {
     private static String values(DetectorClass detector) {
         Typical typical = detector.typical();
         String dark = detector.gate()
-                .map(DetectorCatalogue::gating)
+                .map(DetectorClassWords::gating)
                 .orElse(Range.plain(typical.darkCountsPerSecond()) + " dark counts per second");
         return "Efficiency " + Range.plain(typical.efficiency()) + ", " + dark + ", jitter "
                 + Range.plain(typical.jitterFwhmPs())
                 + " ps FWHM, dead time " + Range.plain(typical.deadTimeNs()) + " ns, afterpulses "
                 + Range.plain(typical.afterpulseProbability()) + "; " + Range.plain(detector.shortestNm()) + " to "
                 + Range.plain(detector.longestNm()) + " nm.";
-    }
-
-    private static String gating(Gate gate) {
-        return "gated with " + Range.plain(gate.darkProbability()) + " dark clicks per gate of "
-                + Range.plain(gate.widthNs()) + " ns";
     }
 
     /** The listing as rows of named values; what a class does not have is absent. */

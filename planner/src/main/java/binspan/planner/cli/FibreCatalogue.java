@@ -1,9 +1,8 @@
 package binspan.planner.cli;
 
-import binspan.scenario.DispersionLaw;
+import binspan.planner.report.FibreClassWords;
 import binspan.scenario.FibreClass;
 import binspan.scenario.FibreLimit;
-import binspan.scenario.Range;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -13,28 +12,22 @@ import java.util.Map;
 /** The fibre classes as a listing. */
 final class FibreCatalogue {
     private static final double DISPERSION_NM = 1550.0;
-    private static final String PLANNED =
-            "Planning values of deployed cable, splices and connectors apart (common practice)."
-                    + " Values of your own in the scenario replace those of the class.";
     private static final String HEAD = """
 
                      dB/km at          ps/(nm km)
             class    1310  1550  1625  at 1550
             """;
-    private static final String LIMITS = "Limits of ITU-T Recommendations G.652 to G.657, from memory: compare with the"
-            + " Recommendation before quoting them.";
-
     private FibreCatalogue() {}
 
     /** The listing for a terminal. */
     static String text() {
-        StringBuilder text = new StringBuilder(Paragraph.of(PLANNED, 0)).append(HEAD);
+        StringBuilder text = new StringBuilder(Paragraph.of(FibreClassWords.PLANNED + " " + FibreClassWords.REPLACED, 0)).append(HEAD);
         for (FibreClass fibre : FibreClass.values()) {
             text.append(planned(fibre));
         }
-        text.append('\n').append(Paragraph.of(LIMITS, 0)).append('\n');
+        text.append('\n').append(Paragraph.of(FibreClassWords.LIMITS, 0)).append('\n');
         for (FibreClass fibre : FibreClass.values()) {
-            text.append(fibre.text()).append('\n').append(Paragraph.of(limits(fibre), 4));
+            text.append(fibre.text()).append('\n').append(Paragraph.of(String.join("; ", FibreClassWords.limits(fibre)), 4));
         }
         return text.toString();
     }
@@ -49,38 +42,6 @@ final class FibreCatalogue {
                 fibre.attenuation().at1625(),
                 fibre.dispersion().at(DISPERSION_NM),
                 fibre.meaning());
-    }
-
-    private static String limits(FibreClass fibre) {
-        List<String> limits = new ArrayList<>();
-        for (FibreLimit limit : fibre.limits()) {
-            limits.add(limit.quantity().text() + " " + allowed(limit) + band(limit));
-        }
-        fibre.dispersionBounds().ifPresent(bounds -> limits.add(between(bounds)));
-        return String.join("; ", limits);
-    }
-
-    private static String allowed(FibreLimit limit) {
-        String unit = limit.quantity().unit();
-        Range range = limit.allowed();
-        return range.lowest() == 0.0 ? "at most " + Range.plain(range.highest()) + " " + unit : range.text(unit);
-    }
-
-    private static String between(DispersionLaw.Middle bounds) {
-        double lowest = bounds.lowest().at(DISPERSION_NM);
-        double highest = bounds.highest().at(DISPERSION_NM);
-        return String.format(
-                Locale.ROOT, "dispersion %.2f to %.2f ps/(nm km) at 1550 nm (bounding lines)", lowest, highest);
-    }
-
-    private static String band(FibreLimit limit) {
-        if (!bounded(limit)) {
-            return "";
-        }
-        String from = Range.plain(limit.fromNm());
-        return limit.fromNm() == limit.toNm()
-                ? " at " + from + " nm"
-                : " over " + from + "-" + Range.plain(limit.toNm()) + " nm";
     }
 
     private static boolean bounded(FibreLimit limit) {

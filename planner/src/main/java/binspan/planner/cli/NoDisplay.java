@@ -37,6 +37,9 @@ final class NoDisplay {
                 return UsageException.of("no display to open a window on (DISPLAY leads to none); " + REMEDY);
             }
         }
-        throw failure instanceof Error error ? error : (RuntimeException) failure;
+        if (failure instanceof Error error) {
+            throw error;
+        }
+        throw (RuntimeException) failure;
     }
 }

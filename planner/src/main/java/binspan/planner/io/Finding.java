@@ -14,4 +14,9 @@ record Finding(Place place, String path, String message) {
         String at = path.isEmpty() ? "" : path + ": ";
         return Printable.line(file + ":" + place + ": " + at + message);
     }
+
+    /** The finding in parts. */
+    FileError error() {
+        return new FileError(place.line(), place.column(), path, Printable.line(message));
+    }
 }

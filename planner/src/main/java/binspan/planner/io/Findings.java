@@ -90,6 +90,12 @@ final class Findings {
         return found.isEmpty();
     }
 
+    /** The errors in the order of the file; of very many the first. */
+    List<FileError> errors() {
+        found.sort(Comparator.comparing(Finding::place));
+        return found.stream().limit(SHOWN).map(Finding::error).toList();
+    }
+
     /** The errors in the order of the file, one line each; of very many the first and their number. */
     List<String> lines(String file) {
         found.sort(Comparator.comparing(Finding::place));

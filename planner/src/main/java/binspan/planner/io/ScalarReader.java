@@ -13,7 +13,7 @@ import java.util.List;
 /** Reads single values: numbers, words, texts, flags and channels. */
 final class ScalarReader {
     static final int LONGEST_TEXT = 1000;
-    private static final int LONGEST_CHANNEL = 12;
+    private static final int LONGEST_CHANNEL = 24;
 
     private ScalarReader() {}
 

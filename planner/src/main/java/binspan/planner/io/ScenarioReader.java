@@ -24,6 +24,16 @@ public final class ScenarioReader {
     }
 
     /**
+     * The text of a scenario file as it stands, a byte order mark in front apart.
+     *
+     * @param file file name, relative to the working directory or absolute
+     * @throws InvalidScenarioException if it is missing, a directory, unreadable, too large or not UTF-8
+     */
+    public static String text(String file) throws InvalidScenarioException {
+        return FileText.of(file);
+    }
+
+    /**
      * Reads a scenario from a stream, to its end.
      *
      * @param in the stream, left open
@@ -62,6 +72,6 @@ public final class ScenarioReader {
         } catch (SyntaxException e) {
             findings.add(e.finding());
         }
-        throw new InvalidScenarioException(findings.lines(name));
+        throw new InvalidScenarioException(findings.lines(name), findings.errors());
     }
 }

@@ -4,7 +4,7 @@ package binspan.planner.plot;
  * The colours of heat maps: from a dark blue through greens to a pale yellow, lightness rising all the way, so that the
  * order survives without colour. The steps are of equal length in OKLab.
  */
-final class ColourScale {
+public final class ColourScale {
     private static final int COLOURS = 256;
     private static final int FINE = 8192;
     private static final int[] RGB = table();
@@ -12,7 +12,7 @@ final class ColourScale {
     private ColourScale() {}
 
     /** The colour 0xRRGGBB at a share of the scale, 0 to 1; shares beyond take the end. */
-    static int rgb(double share) {
+    public static int rgb(double share) {
         return RGB[(int) Math.round(Math.max(0.0, Math.min(1.0, share)) * (COLOURS - 1))];
     }
 

@@ -83,7 +83,7 @@ final class CurvesChart {
     private PanelChart within() {
         int rows = new Room(room.width(), room.height() - TIGHT_AXIS).rows(TIGHT_PANEL);
         int count = curves.panels().size();
-        int columns = Math.min(count > rows ? 2 : 1, room.columns(COLUMN));
+        int columns = Math.min(count > rows || squat() ? 2 : 1, room.columns(COLUMN));
         int shown = Math.min(count, rows * columns);
         int high = (shown + columns - 1) / columns;
         List<PanelChart> charts = new ArrayList<>();
@@ -95,6 +95,12 @@ final class CurvesChart {
         }
         PanelGrid grid = PanelGrid.sideBySide(charts, columns);
         return grid.chart(PlotStyle.tight(curves.title(), grid, theme), legend(), count - shown);
+    }
+
+    /** Whether one column would be low and wide. */
+    private boolean squat() {
+        boolean low = room.height() < fullHeight(curves.panels().size());
+        return low && curves.panels().size() > 1 && room.width() > 2.0 * NARROW;
     }
 
     private CombinedDomainXYPlot column(List<CurvePanel> panels, double width) {
@@ -122,6 +128,7 @@ final class CurvesChart {
         DoubleStream limit = panel.requirement().stream().mapToDouble(RequirementLine::value);
         Range range = Positions.of(panel.y(), DoubleStream.concat(yValues(panel), limit), MARGIN);
         ScaledAxis y = new ScaledAxis(panel.y(), range, theme);
+        y.setDense(room.given());
         y.setLabel(null);
         XYPlot plot = PlotStyle.plot(null, y, theme);
         plot.setRenderer(renderer(panel));

@@ -27,7 +27,8 @@ final class HeatMapChart {
     static final Room LEAST = new Room(330.0, 160.0);
     static final double FULL_HEIGHT = 260.0;
     private static final double FRAME_WIDTH = 150.0;
-    private static final double FRAME_HEIGHT = 50.0;
+    private static final double FRAME_HEIGHT = 66.0;
+    private static final double HEAD_HEIGHT = 30.0;
     private static final double POINT_SIZE = 13.0;
     private static final float CONTOUR = 2.2f;
     private static final Stroke CASING = new BasicStroke(4.8f, BasicStroke.CAP_ROUND, BasicStroke.JOIN_ROUND);
@@ -56,7 +57,7 @@ final class HeatMapChart {
         Range up = Positions.of(map.y(), DoubleStream.of(lattice.y()), 0.0);
         this.plot = PlotStyle.plot(
                 fitted(new ScaledAxis(map.x(), across, theme), room.width() - FRAME_WIDTH),
-                fitted(new ScaledAxis(map.y(), up, theme), room.height() - FRAME_HEIGHT),
+                fitted(new ScaledAxis(map.y(), up, theme), upright()),
                 theme);
     }
 
@@ -77,6 +78,11 @@ final class HeatMapChart {
                 PlotStyle.chart(map.title(), plot, theme, room), legend(), room.wide(WIDTH), room.high(HEIGHT));
     }
 
+    /** Length of a title that runs beside the map. */
+    private double upright() {
+        return room.height() - FRAME_HEIGHT - (map.title().isEmpty() ? 0.0 : HEAD_HEIGHT);
+    }
+
     private ScaledAxis fitted(ScaledAxis axis, double length) {
         return room.given() ? axis.wrapped(length) : axis;
     }
@@ -95,7 +101,7 @@ final class HeatMapChart {
             PlotStyle.sayEmpty(plot, theme);
             return;
         }
-        plot.setRangeAxis(1, fitted(new ColourBarAxis(z, colours, theme), room.height() - FRAME_HEIGHT));
+        plot.setRangeAxis(1, fitted(new ColourBarAxis(z, colours, theme), upright()));
         plot.setRangeAxisLocation(1, AxisLocation.BOTTOM_OR_RIGHT);
     }
 

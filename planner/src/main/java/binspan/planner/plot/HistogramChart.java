@@ -44,7 +44,9 @@ final class HistogramChart {
         if (room.given()) {
             across.wrapped(room.width() - FRAME);
         }
-        XYPlot plot = PlotStyle.plot(across, new ScaledAxis(COUNT, up, theme), theme);
+        ScaledAxis counted = new ScaledAxis(COUNT, up, theme);
+        counted.setDense(room.given());
+        XYPlot plot = PlotStyle.plot(across, counted, theme);
         plot.setDomainGridlinesVisible(false);
         plot.setRenderer(PatternPainter.renderer(new PatternPainter(theme.fill().histogram(), i -> true, theme)));
         plot.setDomainAxis(1, LabelAxis.blank(range, theme));

@@ -3,7 +3,7 @@ package binspan.planner.plot;
 import binspan.units.Digits;
 
 /** Numbers in pictures: a true minus, thin spaces between thousands and before units, powers of ten with raised exponents. */
-final class NumberText {
+public final class NumberText {
     private static final char MINUS = '\u2212';
     private static final char TIMES = '\u00d7';
     private static final char THIN_SPACE = '\u2009';
@@ -16,13 +16,13 @@ final class NumberText {
     private NumberText() {}
 
     /** A number with at most four digits and its unit. */
-    static String withUnit(double value, String unit) {
+    public static String withUnit(double value, String unit) {
         String number = shortest(value, DIGITS);
         return unit.isEmpty() ? number : number + THIN_SPACE + unit;
     }
 
     /** A number with at most so many digits. */
-    static String shortest(double value, int digits) {
+    public static String shortest(double value, int digits) {
         String text = Digits.shortest(value, digits);
         int exponent = text.indexOf('e');
         if (exponent < 0 || !Double.isFinite(value)) {

@@ -8,17 +8,18 @@ package binspan.planner.plot;
  * @param a green to red
  * @param b blue to yellow
  */
-record OkLab(double lightness, double a, double b) {
+public record OkLab(double lightness, double a, double b) {
     private static final double LINEAR_PART = 0.0031308;
     private static final double GAMMA = 2.4;
 
     /** A colour of a lightness, a chroma and a hue in degrees. */
-    static OkLab ofHue(double lightness, double chroma, double hueDegrees) {
+    public static OkLab ofHue(double lightness, double chroma, double hueDegrees) {
         double hue = Math.toRadians(hueDegrees);
         return new OkLab(lightness, chroma * Math.cos(hue), chroma * Math.sin(hue));
     }
 
-    double distance(OkLab other) {
+    /** How different two colours look. */
+    public double distance(OkLab other) {
         double dl = lightness - other.lightness;
         double da = a - other.a;
         double db = b - other.b;
@@ -26,7 +27,7 @@ record OkLab(double lightness, double a, double b) {
     }
 
     /** The colour as 0xRRGGBB of sRGB, channels beyond it cut off. */
-    int rgb() {
+    public int rgb() {
         double l = cube(lightness + 0.3963377774 * a + 0.2158037573 * b);
         double m = cube(lightness - 0.1055613458 * a - 0.0638541728 * b);
         double s = cube(lightness - 0.0894841775 * a - 1.2914855480 * b);

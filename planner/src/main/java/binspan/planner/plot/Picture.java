@@ -17,6 +17,10 @@ public record Picture(String title, String subtitle, Panel content) {
     private static final int MAP_HEIGHT = 680;
     private static final int HEAD_HEIGHT = 70;
     private static final int LEGEND_HEIGHT = 50;
+
+    /** The legend takes room from the panels, and the panels that are left out stand in the legend. */
+    private static final int LEGEND_ROUNDS = 2;
+
     private static final double LARGE = 1e5;
 
     /** The picture as a chart in the light theme, with the size that suits it. */
@@ -36,9 +40,11 @@ public record Picture(String title, String subtitle, Panel content) {
 
     /** The picture as a chart that fills a room; parts for which there is none are left out, and the legend says how many. */
     PanelChart chart(PlotTheme theme, Room room) {
-        PanelChart guess = content.chart(theme, within(room, 0.0));
-        double around = PageFrame.height(this, legend(guess, theme).values(), theme, room.width());
-        PanelChart panel = content.chart(theme, within(room, around));
+        PanelChart panel = content.chart(theme, within(room, 0.0));
+        for (int i = 0; i < LEGEND_ROUNDS; i++) {
+            double around = PageFrame.height(this, legend(panel, theme).values(), theme, room.width());
+            panel = content.chart(theme, within(room, around));
+        }
         JFreeChart chart = PageFrame.page(
                 this, PanelGrid.alone(panel), legend(panel, theme).values(), theme);
         return new PanelChart(chart, panel.legend(), room.wide(NARROWEST), room.high(MAP_HEIGHT));

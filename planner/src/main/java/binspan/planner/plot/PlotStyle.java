@@ -112,7 +112,7 @@ final class PlotStyle {
     /** The same with as little around it as can be. */
     static JFreeChart tight(String title, Plot plot, PlotTheme theme) {
         JFreeChart chart = chart(title, plot, theme);
-        chart.setPadding(new RectangleInsets(6.0, 2.0, 1.0, 6.0));
+        chart.setPadding(new RectangleInsets(6.0, 2.0, 1.0, 14.0));
         return chart;
     }
 

@@ -10,7 +10,7 @@ import java.io.UncheckedIOException;
 import javax.imageio.ImageIO;
 
 /** A picture as PNG, two pixels for each point of its size. */
-final class PngImage {
+public final class PngImage {
     static final int SCALE = 2;
 
     private PngImage() {}
@@ -27,7 +27,7 @@ final class PngImage {
     }
 
     /** An image as the bytes of a PNG file. */
-    static byte[] encoded(BufferedImage image) {
+    public static byte[] encoded(BufferedImage image) {
         ImageIO.setUseCache(false);
         ByteArrayOutputStream bytes = new ByteArrayOutputStream();
         try {

@@ -18,6 +18,7 @@ class ScaledAxis extends NumberAxis {
     private static final long serialVersionUID = 1L;
     private static final double HORIZONTAL_SPACING = 78.0;
     private static final double VERTICAL_SPACING = 24.0;
+    private static final double DENSE_VERTICAL_SPACING = 17.0;
     private static final int MOST_LABELS = 12;
     private static final int MOST_LINES = 3;
     private static final double LEAST_SPACING = 40.0;
@@ -27,6 +28,7 @@ class ScaledAxis extends NumberAxis {
 
     private final transient Axis axis;
     private transient List<String> lines = List.of();
+    private boolean dense;
 
     ScaledAxis(Axis axis, Range positions, PlotTheme theme) {
         super(axis.title());
@@ -38,9 +40,15 @@ class ScaledAxis extends NumberAxis {
 
     /** Breaks the title into lines no longer than a given length. */
     ScaledAxis wrapped(double length) {
+        dense = true;
         lines = Words.lines(axis.title(), getLabelFont(), Math.max(SHORTEST_LINE, length), MOST_LINES);
         setLabel(lines.size() == 1 ? lines.get(0) : axis.title());
         return this;
+    }
+
+    /** Lets ticks stand as close as their labels allow. */
+    void setDense(boolean closeTicks) {
+        dense = closeTicks;
     }
 
     private double lineHeight() {
@@ -81,8 +89,9 @@ class ScaledAxis extends NumberAxis {
     @Override
     public List<NumberTick> refreshTicks(Graphics2D g2, AxisState state, Rectangle2D dataArea, RectangleEdge edge) {
         boolean horizontal = RectangleEdge.isTopOrBottom(edge);
-        double most = horizontal ? dataArea.getWidth() / HORIZONTAL_SPACING : dataArea.getHeight() / VERTICAL_SPACING;
-        List<Ticks.Tick> ticks = lines.isEmpty() || !horizontal
+        double upright = dense ? DENSE_VERTICAL_SPACING : VERTICAL_SPACING;
+        double most = horizontal ? dataArea.getWidth() / HORIZONTAL_SPACING : dataArea.getHeight() / upright;
+        List<Ticks.Tick> ticks = !dense || !horizontal
                 ? ticks((int) most)
                 : close(g2.getFontMetrics(getTickLabelFont()), dataArea, edge);
         List<NumberTick> made = new ArrayList<>();

@@ -8,6 +8,7 @@ import java.awt.geom.AffineTransform;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
+import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -17,7 +18,7 @@ import java.util.List;
  * @param stroke with its dash pattern
  * @param marker about eight pixels wide, centred on zero
  */
-record SeriesStyle(Color colour, Stroke stroke, Shape marker) {
+public record SeriesStyle(Color colour, Stroke stroke, Shape marker) {
     private static final float WIDTH = 2.2f;
     private static final double SIZE = 8.0;
 
@@ -51,8 +52,17 @@ record SeriesStyle(Color colour, Stroke stroke, Shape marker) {
             HOURGLASS);
 
     /** The style of the series with an index from 0. */
-    static SeriesStyle of(int index, PlotTheme theme) {
+    public static SeriesStyle of(int index, PlotTheme theme) {
         return new SeriesStyle(theme.seriesColour(index), dashed(index, WIDTH), marker(index, SIZE));
+    }
+
+    /** The dashes of the series with an index from 0: lengths of strokes and gaps in turn, in points; empty for a whole line. */
+    public static List<Double> dashes(int index) {
+        List<Double> lengths = new ArrayList<>();
+        for (float length : DASHES[Math.floorMod(index, DASHES.length)]) {
+            lengths.add((double) length);
+        }
+        return lengths;
     }
 
     /** A stroke of a width with the dash pattern of an index. */

@@ -8,7 +8,7 @@ import org.jfree.data.Range;
  * Where the ticks of an axis stand and what they say: steps of 1, 2 or 5 on a linear axis and, where three fit, on a
  * logarithmic one of less than a decade; 1, 2, 5 up to two decades; powers of ten beyond.
  */
-final class Ticks {
+public final class Ticks {
     private static final double DECADE = 1.0;
     private static final double FEW_DECADES = 2.0;
     private static final double SLACK = 1e-9;
@@ -37,10 +37,61 @@ final class Ticks {
      * @param position where
      * @param label its words; empty for a minor tick
      */
-    record Tick(double position, String label) {}
+    public record Tick(double position, String label) {}
+
+    /**
+     * A tick of an axis that is drawn elsewhere.
+     *
+     * @param value where, in the unit of the axis
+     * @param share the same as a share of the way along the axis, 0 to 1
+     * @param label its words; empty for a minor tick
+     */
+    public record Placed(double value, double share, String label) {}
+
+    /**
+     * The ticks of an axis that is drawn elsewhere.
+     *
+     * @param from value at its beginning; above 0 where it is logarithmic
+     * @param to value at its end, above that at its beginning
+     * @param logarithmic whether equal ratios are equally far apart
+     * @param most how many labels it has at most, at least 1
+     * @throws IllegalArgumentException if the ends are not in order, not finite or not positive on a logarithmic axis, or if there
+     *     shall be no label
+     */
+    public static List<Placed> of(double from, double to, boolean logarithmic, int most) {
+        if (!(from < to)) {
+            throw new IllegalArgumentException("found an axis from " + from + " to " + to);
+        }
+        if (most < 1) {
+            throw new IllegalArgumentException("found " + most + " labels; allowed at least 1");
+        }
+        Axis axis = new Axis("", "", logarithmic, from, to);
+        Range positions = new Range(axis.position(from), axis.position(to));
+        List<Tick> ticks = of(axis, positions, most);
+        for (int fewer = most - 1; fewer > 0 && labels(ticks) > most; fewer--) {
+            ticks = of(axis, positions, fewer);
+        }
+        for (int more = most + 1; labels(ticks) == 0; more++) {
+            ticks = of(axis, positions, more);
+        }
+        int keep = (labels(ticks) + most - 1) / most;
+        List<Placed> placed = new ArrayList<>();
+        int labelled = 0;
+        for (Tick tick : ticks) {
+            boolean shown = !tick.label().isEmpty() && labelled++ % keep == 0;
+            double share = (tick.position() - positions.getLowerBound()) / positions.getLength();
+            placed.add(new Placed(
+                    axis.value(tick.position()), Math.max(0.0, Math.min(1.0, share)), shown ? tick.label() : ""));
+        }
+        return placed;
+    }
+
+    private static int labels(List<Tick> ticks) {
+        return (int) ticks.stream().filter(tick -> !tick.label().isEmpty()).count();
+    }
 
     /** The ticks between two positions, so that at most so many labels would fill the axis. */
-    static List<Tick> of(Axis axis, Range positions, int most) {
+    public static List<Tick> of(Axis axis, Range positions, int most) {
         Ticks made = new Ticks(axis, positions, most);
         if (!axis.logarithmic()) {
             made.linear(positions.getLowerBound(), positions.getUpperBound(), niceStep(made.shortestStep));
@@ -55,7 +106,7 @@ final class Ticks {
     }
 
     /** The smallest of 1, 2, 5 times a power of ten that is not below a number. */
-    static double niceStep(double least) {
+    public static double niceStep(double least) {
         double power = Math.pow(10.0, Math.floor(Math.log10(least) + SLACK));
         double share = least / power;
         return power * (share <= 1.0 + SLACK ? 1.0 : share <= 2.0 + SLACK ? 2.0 : share <= 5.0 + SLACK ? 5.0 : 10.0);

@@ -7,7 +7,7 @@ import java.util.List;
 import java.util.OptionalDouble;
 
 /** A varied parameter in words, its values with as many digits as it takes to tell neighbours apart. */
-final class AxisWords {
+public final class AxisWords {
     private static final int FEWEST_DIGITS = 3;
     private static final int MOST_DIGITS = 9;
 
@@ -32,6 +32,16 @@ final class AxisWords {
 
     private static String stated(Axis axis, double value) {
         return glued(Figure.stated(value, ""), unit(axis));
+    }
+
+    /** A value with its unit, for a place where lines do not break. */
+    public static String plain(Axis axis, double value) {
+        return value(axis, value).replace(TextPage.GLUE, ' ');
+    }
+
+    /** A range of values likewise. */
+    public static String plainRange(Axis axis, double from, double to) {
+        return range(axis, from, to).replace(TextPage.GLUE, ' ');
     }
 
     /** A value with its unit. */

@@ -113,7 +113,7 @@ public final class Figure {
     }
 
     /** An error beyond any value that V or S can take. */
-    private static final double USELESS = 3.0;
+    public static final double USELESS = 3.0;
 
     private static int errorPlaces(double error) {
         int exponent = Digits.exponent(error, 1);

@@ -6,6 +6,7 @@ import java.util.Locale;
 /** Scenario paths in words: {@code both.detectors.jitterFwhmPs} is "jitter FWHM, both sides' detectors". */
 public final class ParameterWords {
     private static final List<String> UNITS = List.of(
+            "DbPerKm",
             "PerKmNm",
             "PerNmKm",
             "PerNmDb",
@@ -30,7 +31,7 @@ public final class ParameterWords {
             "Rad",
             "K",
             "S");
-    private static final List<String> CAPITALS = List.of("fwhm", "rms", "pmd");
+    private static final List<String> CAPITALS = List.of("fwhm", "rms", "pmd", "chsh", "qber", "car");
 
     private ParameterWords() {}
 
@@ -110,6 +111,6 @@ public final class ParameterWords {
         for (String word : CAPITALS) {
             text = text.replaceAll("\\b" + word + "\\b", word.equals("rms") ? "rms" : word.toUpperCase(Locale.ROOT));
         }
-        return text;
+        return text.replace("schmidt", "Schmidt").replace("raman", "Raman").replace("port1", "port 1");
     }
 }

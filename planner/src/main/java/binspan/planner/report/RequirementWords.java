@@ -82,7 +82,7 @@ public final class RequirementWords {
      * The predicted figure of tuned settings, "none" where there is none; best settings often meet a requirement exactly, and then it is not told to its
      * last digit.
      */
-    static String tuned(Requirement requirement, double value, double required, boolean met) {
+    public static String tuned(Requirement requirement, double value, double required, boolean met) {
         return Double.isFinite(value) ? predicted(requirement, value, met ? value : required) : "none";
     }
 
@@ -93,6 +93,14 @@ public final class RequirementWords {
             case KEY_RATE -> Figure.signedRate(margin, "bit/s");
             case FIRST_KEY, FIVE_SIGMA -> Figure.signed(margin, "h");
             default -> Figure.signed(margin, "");
+        };
+    }
+
+    /** How much a predicted figure has risen or fallen, with its sign; times in the unit that one says aloud. */
+    public static String difference(Requirement requirement, double difference) {
+        return switch (requirement) {
+            case FIRST_KEY, FIVE_SIGMA -> (difference < 0.0 ? "-" : "+") + Figure.duration(Math.abs(difference) * HOUR);
+            default -> margin(requirement, difference);
         };
     }
 

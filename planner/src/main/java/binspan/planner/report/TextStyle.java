@@ -10,6 +10,9 @@ import java.nio.charset.StandardCharsets;
  * @param unicode whether every character can be shown; otherwise ASCII alone
  */
 public record TextStyle(boolean coloured, boolean unicode) {
+    /** Every character without colour: for a window. */
+    public static final TextStyle PLAIN_UNICODE = new TextStyle(false, true);
+
     /** ASCII without colour: safe for every terminal, file and pipe. */
     public static final TextStyle PLAIN = new TextStyle(false, false);
 
@@ -57,12 +60,12 @@ public record TextStyle(boolean coloured, boolean unicode) {
     }
 
     /** Sign of a requirement that is met. */
-    String met() {
+    public String met() {
         return unicode ? "\u2713" : "+";
     }
 
     /** Sign of a requirement that is not met. */
-    String notMet() {
+    public String notMet() {
         return unicode ? "\u2717" : "!";
     }
 

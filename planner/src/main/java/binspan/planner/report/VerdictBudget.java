@@ -10,7 +10,16 @@ import binspan.scenario.Acquisition;
 import binspan.units.Digits;
 
 /** What each cause takes from the visibility, as bars that step down from 1. */
-final class VerdictBudget {
+public final class VerdictBudget {
+    /** Title. */
+    public static final String TITLE = "Visibility budget";
+
+    /** Name of the visibility that remains. */
+    public static final String RAW = "raw visibility";
+
+    /** Name of the same with accidentals subtracted. */
+    public static final String NET = "net of accidentals";
+
     private static final int NAME = 22;
     private static final int NUMBER = 9;
     private static final int BAR = 36;
@@ -22,8 +31,13 @@ final class VerdictBudget {
 
     private VerdictBudget(TextPage page, double raw) {
         this.page = page;
+        this.floor = floor(raw);
+    }
+
+    /** The visibility at which the scale of the bars begins: a tenth below the raw one, 0 or more. */
+    public static double floor(double raw) {
         double below = Math.floor((raw - 0.02) / STEP) * STEP;
-        this.floor = Double.isFinite(below) ? Math.max(0.0, below) : 0.0;
+        return Double.isFinite(below) ? Math.max(0.0, below) : 0.0;
     }
 
     static void write(LinkCheck check, TextPage page) {
@@ -31,8 +45,8 @@ final class VerdictBudget {
         VerdictBudget budget = new VerdictBudget(page, p.fringe().raw());
         page.gap();
         String scale = left(Digits.decimals(budget.floor, 1), BAR - 1) + "1";
-        page.line(page.style().strong(left("Visibility budget", NAME) + right("factor", NUMBER) + right("loss", NUMBER))
-                + "  " + scale);
+        page.line(page.style().strong(left(TITLE, NAME) + right("factor", NUMBER) + right("loss", NUMBER)) + "  "
+                + scale);
         double visibility = 1.0;
         for (VisibilityBudget.Entry entry : p.budget().entries()) {
             double after = visibility * entry.factor();
@@ -48,7 +62,7 @@ final class VerdictBudget {
     }
 
     /** Loss of one cause, or its gain. */
-    private static String loss(double factor) {
+    public static String loss(double factor) {
         double loss = 1.0 - factor;
         if (Math.abs(loss) < NOTHING) {
             return "none";
@@ -71,8 +85,8 @@ final class VerdictBudget {
 
     private void total(LinkPrediction p) {
         Acquisition scan = p.scenario().acquisition();
-        page.row("raw visibility", Figure.withError(p.fringe().raw(), p.visibilitySigma(), page.style()));
-        page.row("net of accidentals", Figure.bare(p.fringe().net()));
+        page.row(RAW, Figure.withError(p.fringe().raw(), p.visibilitySigma(), page.style()));
+        page.row(NET, Figure.bare(p.fringe().net()));
         String points = scan.fringePoints() + " points of " + Figure.stated(scan.secondsPerPoint(), "s");
         page.row("fringe scan", points + ", " + Digits.shortest(p.countsPerPoint(), 2) + " counts in each");
     }

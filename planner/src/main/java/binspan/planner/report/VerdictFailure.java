@@ -5,33 +5,29 @@ import binspan.prediction.Requirement;
 import binspan.prediction.RequirementOutcome;
 
 /** For a link that fails, in plain sentences: which requirement by how much, and what costs most. */
-final class VerdictFailure {
-    private final LargestCost cost;
-    private final TextPage page;
-
-    private VerdictFailure(LinkCheck check, TextPage page) {
-        this.cost = new LargestCost(check);
-        this.page = page;
-    }
+public final class VerdictFailure {
+    private VerdictFailure() {}
 
     static void write(LinkCheck check, TextPage page) {
         if (check.met()) {
             return;
         }
-        VerdictFailure failure = new VerdictFailure(check, page);
+        LargestCost cost = new LargestCost(check);
         page.heading("Why not");
         String told = "";
         for (RequirementOutcome outcome : check.outcomes()) {
             if (!outcome.met()) {
-                String why = failure.cost.of(outcome.requirement());
-                failure.tell(outcome, why.equals(told) ? "The cause is the same." : why);
+                String why = cost.of(outcome.requirement());
+                page.wrapped(
+                        "  - ", "    ", missed(outcome) + " " + (why.equals(told) ? "The cause is the same." : why));
                 told = why;
             }
         }
     }
 
-    private void tell(RequirementOutcome outcome, String why) {
-        page.wrapped("  - ", "    ", missed(outcome) + " " + why);
+    /** Why a link does not meet a requirement: by how much, and what costs most. */
+    public static String why(LinkCheck check, RequirementOutcome outcome) {
+        return missed(outcome) + " " + new LargestCost(check).of(outcome.requirement());
     }
 
     private static String missed(RequirementOutcome outcome) {

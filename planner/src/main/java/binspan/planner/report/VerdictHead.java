@@ -12,7 +12,7 @@ import binspan.scenario.Scenario;
 import binspan.units.Digits;
 
 /** Headline of the verdict: the link, its source and arms, and the answer. */
-final class VerdictHead {
+public final class VerdictHead {
     private static final int LABEL = 9;
 
     private VerdictHead() {}
@@ -37,23 +37,31 @@ final class VerdictHead {
     }
 
     private static void answer(LinkCheck check, TextPage page) {
+        TextStyle style = page.style();
+        if (check.outcomes().isEmpty()) {
+            page.line(answer(check));
+        } else {
+            page.line(
+                    check.met()
+                            ? style.good(style.met() + " " + answer(check))
+                            : style.bad(style.notMet() + " " + answer(check)));
+        }
+    }
+
+    /** Whether the link meets its requirements, in words without a sign. */
+    public static String answer(LinkCheck check) {
         int failed = 0;
         for (RequirementOutcome outcome : check.outcomes()) {
             failed += outcome.met() ? 0 : 1;
         }
         int all = check.outcomes().size();
-        TextStyle style = page.style();
         if (all == 0) {
-            page.line("No requirement is stated: these are predictions without a verdict.");
-        } else if (failed == 0) {
-            String words = all == 1 ? "MEETS its requirement" : "MEETS all " + all + " requirements";
-            page.line(style.good(style.met() + " " + words));
-        } else {
-            String words = all == 1
-                    ? "DOES NOT MEET its requirement"
-                    : "DOES NOT MEET " + failed + " of " + all + " requirements";
-            page.line(style.bad(style.notMet() + " " + words));
+            return "No requirement is stated: these are predictions without a verdict.";
         }
+        if (failed == 0) {
+            return all == 1 ? "MEETS its requirement" : "MEETS all " + all + " requirements";
+        }
+        return all == 1 ? "DOES NOT MEET its requirement" : "DOES NOT MEET " + failed + " of " + all + " requirements";
     }
 
     private static String source(Scenario scenario) {

@@ -10,7 +10,11 @@ import java.util.Comparator;
 import java.util.List;
 
 /** How far each quantity may drift before the first requirement fails, the tightest first. */
-final class VerdictHeadroom {
+public final class VerdictHeadroom {
+    /** How the table is ordered. */
+    public static final String ORDER = "one quantity at a time, the tightest first";
+
+    private static final String TITLE = "Headroom";
     private static final int NAME = 36;
     private static final int NUMBER = 13;
 
@@ -23,28 +27,42 @@ final class VerdictHeadroom {
     static void write(LinkCheck check, TextPage page) {
         VerdictHeadroom table = new VerdictHeadroom(page);
         if (check.headroom().isEmpty()) {
-            table.none(check);
+            table.tellNone(check);
             return;
         }
         table.title(check);
-        List<Headroom> sorted = new ArrayList<>(check.headroom());
-        sorted.sort(Comparator.comparingDouble(VerdictHeadroom::relativeRoom));
+        List<Headroom> sorted = sorted(check);
         for (int i = 0; i < sorted.size(); i++) {
             table.entry(sorted.get(i), i == 0);
         }
     }
 
-    private void none(LinkCheck check) {
-        page.heading("Headroom");
-        String why = check.outcomes().isEmpty()
+    /** The headroom of a check, the tightest first. */
+    public static List<Headroom> sorted(LinkCheck check) {
+        List<Headroom> sorted = new ArrayList<>(check.headroom());
+        sorted.sort(Comparator.comparingDouble(VerdictHeadroom::relativeRoom));
+        return sorted;
+    }
+
+    /** Why there is no headroom. */
+    public static String none(LinkCheck check) {
+        return check.outcomes().isEmpty()
                 ? "State a requirement to see how far each quantity may drift before it fails."
                 : "None: no stated requirement is met.";
-        page.wrapped("  ", "  ", why);
+    }
+
+    private void tellNone(LinkCheck check) {
+        page.heading(TITLE);
+        page.wrapped("  ", "  ", none(check));
+    }
+
+    /** What the table is about: of the requirements that are met alone, where one fails. */
+    public static String title(boolean met) {
+        return met ? TITLE : TITLE + " of what is met";
     }
 
     private void title(LinkCheck check) {
-        String which = check.met() ? "" : " of what is met";
-        page.heading("Headroom" + which, "one quantity at a time, the tightest first");
+        page.heading(title(check.met()), ORDER);
         String path = "      path " + page.style().arrow() + " what fails first";
         page.line(page.style()
                 .faint(left("  quantity", NAME)
@@ -59,16 +77,31 @@ final class VerdictHeadroom {
     }
 
     private void entry(Headroom each, boolean tightest) {
-        String unit = each.unit().equals("1/s") ? "/s" : each.unit();
-        String planned = unit.equals("/s") ? Figure.statedCounts(each.value()) : Figure.stated(each.value(), unit);
-        String limit = unit.equals("/s") ? Figure.counts(each.limit()) : Figure.in(each.limit(), unit);
-        double room = each.limit() - each.value();
-        String left = unit.equals("/s") ? Figure.signedRate(room, unit) : Figure.signed(room, unit);
         String mark = tightest ? "> " : "  ";
         String name = left(mark + DriftWords.of(each.path()), NAME);
-        String line = name + right(planned, NUMBER) + right(limit, NUMBER) + right(left, NUMBER);
+        String line = name + right(planned(each), NUMBER) + right(limit(each), NUMBER) + right(room(each), NUMBER);
         page.line(tightest ? page.style().strong(line) : line);
         String end = each.path() + " " + page.style().arrow() + " " + RequirementWords.name(each.requirement());
         page.line(page.style().faint("      " + end));
+    }
+
+    /** The planned value. */
+    public static String planned(Headroom each) {
+        return rate(each) ? Figure.statedCounts(each.value()) : Figure.stated(each.value(), each.unit());
+    }
+
+    /** The value at which the first requirement fails. */
+    public static String limit(Headroom each) {
+        return rate(each) ? Figure.counts(each.limit()) : Figure.in(each.limit(), each.unit());
+    }
+
+    /** How far it is there, with its sign. */
+    public static String room(Headroom each) {
+        double room = each.limit() - each.value();
+        return rate(each) ? Figure.signedRate(room, "/s") : Figure.signed(room, each.unit());
+    }
+
+    private static boolean rate(Headroom each) {
+        return each.unit().equals("1/s");
     }
 }

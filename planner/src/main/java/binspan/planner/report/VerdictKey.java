@@ -3,10 +3,20 @@ package binspan.planner.report;
 import binspan.prediction.FiniteKeyOutlook;
 import binspan.prediction.LinkCheck;
 import binspan.prediction.LinkPrediction;
+import binspan.scenario.Scenario;
 import binspan.units.Digits;
 
 /** Sifted, asymptotic and finite key, and the benchmark without repeaters. */
-final class VerdictKey {
+public final class VerdictKey {
+    /** Title. */
+    public static final String TITLE = "Key";
+
+    /** Name of the key of an endless run. */
+    public static final String ENDLESS = "secret, endless run";
+
+    /** Name of the time to the first key. */
+    public static final String FIRST = "time to the first key";
+
     private final LinkCheck check;
     private final LinkPrediction p;
     private final Results results;
@@ -21,7 +31,7 @@ final class VerdictKey {
 
     static void write(LinkCheck check, TextPage page) {
         VerdictKey key = new VerdictKey(check, page);
-        page.heading("Key");
+        page.heading(TITLE);
         if (Double.isNaN(key.p.key().asymptoticPerSecond())) {
             key.none();
             return;
@@ -30,6 +40,11 @@ final class VerdictKey {
         key.endless();
         key.finite();
         key.benchmark();
+    }
+
+    /** Name of the key of the scenario's run. */
+    public static String run(Scenario scenario) {
+        return "secret, run of " + Figure.statedDuration(scenario.acquisition().durationS());
     }
 
     private void none() {
@@ -51,18 +66,17 @@ final class VerdictKey {
 
     private void endless() {
         double rate = p.key().asymptoticPerSecond();
-        page.row("secret, endless run", rate > 0.0 ? Figure.bits(rate) : "none: the errors leave no secret bits");
+        page.row(ENDLESS, rate > 0.0 ? Figure.bits(rate) : "none: the errors leave no secret bits");
     }
 
     private void finite() {
         FiniteKeyOutlook finite = check.finite();
-        String run = Figure.statedDuration(p.scenario().acquisition().durationS());
         String amount = finite.bits() > 0.0
                 ? Digits.prefixed(finite.bits(), "bit", 3) + ", " + Figure.bits(finite.bitsPerSecond())
                 : "none yet";
-        page.row("secret, run of " + run, amount);
+        page.row(run(p.scenario()), amount);
         page.row(
-                "time to the first key",
+                FIRST,
                 Double.isFinite(finite.secondsToFirstKey()) ? Figure.duration(finite.secondsToFirstKey()) : "never");
     }
 

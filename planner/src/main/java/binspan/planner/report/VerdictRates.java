@@ -4,7 +4,13 @@ import binspan.prediction.LinkCheck;
 import binspan.prediction.LinkPrediction;
 
 /** Fringe and coincidence rates, Bell test, error rates. */
-final class VerdictRates {
+public final class VerdictRates {
+    /** Title of the Bell test. */
+    public static final String BELL = "Bell test";
+
+    /** Title of the error rates. */
+    public static final String ERRORS = "Error rates";
+
     private final LinkPrediction p;
     private final Results results;
     private final TextPage page;
@@ -45,7 +51,7 @@ final class VerdictRates {
 
     private void bell() {
         page.heading(
-                "Bell test",
+                BELL,
                 "after " + Figure.statedDuration(p.scenario().acquisition().durationS()));
         page.row(
                 "S",
@@ -58,7 +64,7 @@ final class VerdictRates {
     }
 
     private void errors() {
-        page.heading("Error rates");
+        page.heading(ERRORS);
         page.row("phase basis", Figure.percent(results.at("qber.phase")));
         if (results.has("qber.time")) {
             page.row("time basis", Figure.percent(results.at("qber.time")));

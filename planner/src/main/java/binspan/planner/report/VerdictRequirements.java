@@ -7,7 +7,7 @@ import binspan.prediction.LinkCheck;
 import binspan.prediction.RequirementOutcome;
 
 /** One line for each stated requirement: required, predicted, margin, and met or not in a word and a sign. */
-final class VerdictRequirements {
+public final class VerdictRequirements {
     private static final int NAME = 26;
     private static final int NUMBER = 13;
 
@@ -29,18 +29,34 @@ final class VerdictRequirements {
     }
 
     private static String line(RequirementOutcome outcome, TextStyle style) {
-        String bound = outcome.requirement().atLeast() ? style.atLeast() : style.atMost();
-        String required = bound + " " + RequirementWords.required(outcome.requirement(), outcome.required());
-        String predicted = outcome.predicted().isPresent()
-                ? RequirementWords.predicted(
-                        outcome.requirement(), outcome.predicted().getAsDouble(), outcome.required())
-                : outcome.met() ? "no limit" : "none";
-        String margin = outcome.margin().isPresent()
-                ? RequirementWords.margin(
-                        outcome.requirement(), outcome.margin().getAsDouble())
-                : "";
+        String required = required(outcome, style);
+        String predicted = predicted(outcome);
+        String margin = margin(outcome);
         String word = outcome.met() ? style.good(style.met() + " met") : style.bad(style.notMet() + " NOT MET");
         String name = left(RequirementWords.name(outcome.requirement()), NAME);
         return name + right(required, NUMBER) + right(predicted, NUMBER) + right(margin, NUMBER) + "  " + word;
+    }
+
+    /** The required figure with its sign. */
+    public static String required(RequirementOutcome outcome, TextStyle style) {
+        String bound = outcome.requirement().atLeast() ? style.atLeast() : style.atMost();
+        return bound + " " + RequirementWords.required(outcome.requirement(), outcome.required());
+    }
+
+    /** The predicted figure. */
+    public static String predicted(RequirementOutcome outcome) {
+        if (outcome.predicted().isEmpty()) {
+            return outcome.met() ? "no limit" : "none";
+        }
+        return RequirementWords.predicted(
+                outcome.requirement(), outcome.predicted().getAsDouble(), outcome.required());
+    }
+
+    /** The room that is left with its sign, empty where there is no figure. */
+    public static String margin(RequirementOutcome outcome) {
+        return outcome.margin().isEmpty()
+                ? ""
+                : RequirementWords.margin(
+                        outcome.requirement(), outcome.margin().getAsDouble());
     }
 }

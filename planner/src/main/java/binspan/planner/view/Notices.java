@@ -32,6 +32,27 @@ final class Notices {
         CANCEL
     }
 
+    /** What to do with work that a crash has left. */
+    enum LeftWork {
+        TAKE,
+        DISCARD,
+        LATER
+    }
+
+    /** Asks what to do with work that a crash has left. */
+    LeftWork leftWork(String link, String time) {
+        ButtonType take = button("dialog.recover.take", ButtonData.YES);
+        ButtonType discard = button("dialog.recover.discard", ButtonData.NO);
+        ButtonType later = button("dialog.recover.later", ButtonData.CANCEL_CLOSE);
+        Alert alert = alert(
+                AlertType.CONFIRMATION, Words.of("dialog.recover.title"), Words.of("dialog.recover", link, time));
+        alert.getButtonTypes().setAll(take, discard, later);
+        Optional<ButtonType> chosen = alert.showAndWait();
+        return chosen.filter(take::equals).isPresent()
+                ? LeftWork.TAKE
+                : chosen.filter(discard::equals).isPresent() ? LeftWork.DISCARD : LeftWork.LATER;
+    }
+
     /** Asks what to do with changes that would be lost. */
     Answer unsaved(String link) {
         ButtonType save = button("dialog.unsaved.save", ButtonData.YES);

@@ -13,7 +13,7 @@ public final class PlannerApp extends Application {
     /** Kept, so that its level stays: it would complain about JavaFX on the class path. */
     private static final Logger JAVAFX_LOG = Logger.getLogger("javafx");
 
-    private MainWindow window;
+    private Session session;
 
     /** Made by the toolkit. */
     public PlannerApp() {}
@@ -34,8 +34,8 @@ public final class PlannerApp extends Application {
     public void start(Stage stage) {
         Map<String, String> named = getParameters().getNamed();
         List<String> files = getParameters().getUnnamed();
-        window = MainWindow.usual(stage);
-        window.show(
+        session = new Session(stage, Session.Places.usual());
+        session.show(
                 files.isEmpty() ? null : files.get(0),
                 named.get("theme"),
                 named.containsKey("scale") ? Integer.valueOf(named.get("scale")) : null);
@@ -43,8 +43,8 @@ public final class PlannerApp extends Application {
 
     @Override
     public void stop() {
-        if (window != null) {
-            window.closed();
+        if (session != null) {
+            session.closed();
         }
         Platform.exit();
     }

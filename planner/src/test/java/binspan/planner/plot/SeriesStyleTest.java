@@ -2,6 +2,7 @@ package binspan.planner.plot;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.awt.BasicStroke;
 import java.awt.Shape;
 import java.awt.Stroke;
 import java.awt.geom.Area;
@@ -47,5 +48,21 @@ final class SeriesStyleTest {
         Area rest = new Area(one);
         rest.exclusiveOr(new Area(other));
         return !rest.isEmpty();
+    }
+
+    @Test
+    void dashesInNumbersAreThoseOfTheStroke() {
+        for (int i = 0; i < COUNT; i++) {
+            float[] drawn = ((BasicStroke) SeriesStyle.of(i, PlotTheme.DARK).stroke()).getDashArray();
+            double[] lengths = drawn == null
+                    ? new double[0]
+                    : IntStream.range(0, drawn.length)
+                            .mapToDouble(k -> drawn[k])
+                            .toArray();
+            assertThat(SeriesStyle.dashes(i).stream()
+                            .mapToDouble(Double::doubleValue)
+                            .toArray())
+                    .isEqualTo(lengths);
+        }
     }
 }

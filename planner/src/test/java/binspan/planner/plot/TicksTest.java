@@ -1,6 +1,7 @@
 package binspan.planner.plot;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.util.List;
 import java.util.stream.Collectors;
@@ -70,5 +71,29 @@ final class TicksTest {
         List<Ticks.Tick> ticks = Ticks.of(Axis.logarithmic("Quantity", ""), new Range(0.0, 4.0), 8);
         assertThat(ticks).hasSize(37);
         assertThat(ticks.get(1).position()).isEqualTo(Math.log10(2.0));
+    }
+
+    /** Against counting: never more labels than asked for, always within the axis, shares by proportion. */
+    @ParameterizedTest
+    @CsvSource({"0, 1, false", "-3.7, 12.2, false", "100, 1500, false", "1e-3, 0.2, true", "2, 7, true", "1, 1e9, true"
+    })
+    void ticksForOtherCanvasesKeepToTheirNumber(double from, double to, boolean logarithmic) {
+        for (int most = 1; most <= 12; most++) {
+            List<Ticks.Placed> ticks = Ticks.of(from, to, logarithmic, most);
+            assertThat(ticks.stream().filter(tick -> !tick.label().isEmpty())).hasSizeBetween(1, most);
+            for (Ticks.Placed tick : ticks) {
+                double share = logarithmic
+                        ? Math.log(tick.value() / from) / Math.log(to / from)
+                        : (tick.value() - from) / (to - from);
+                assertThat(tick.share()).isBetween(0.0, 1.0).isCloseTo(share, Offset.offset(1e-9));
+            }
+        }
+    }
+
+    @Test
+    void axisThatGoesNowhereIsRefused() {
+        assertThatThrownBy(() -> Ticks.of(1.0, 1.0, false, 5)).isInstanceOf(IllegalArgumentException.class);
+        assertThatThrownBy(() -> Ticks.of(0.0, 1.0, true, 5)).isInstanceOf(IllegalArgumentException.class);
+        assertThatThrownBy(() -> Ticks.of(Double.NaN, 1.0, false, 5)).isInstanceOf(IllegalArgumentException.class);
     }
 }

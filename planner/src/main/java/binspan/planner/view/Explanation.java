@@ -1,0 +1,113 @@
+package binspan.planner.view;
+
+import binspan.planner.viewmodel.FieldModel;
+import binspan.planner.viewmodel.Words;
+import javafx.beans.value.ChangeListener;
+import javafx.scene.control.Label;
+import javafx.scene.control.OverrunStyle;
+import javafx.scene.control.TextField;
+import javafx.scene.control.Tooltip;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
+
+/** Explains the field that is focused or pointed at: what it means, what is allowed, what stands by default, where its value comes from. */
+final class Explanation extends VBox {
+    private final Label path = new Label();
+    private final Label meaning = new Label();
+    private final Label allowed = new Label();
+    private final TextField source = new TextField();
+    private final ChangeListener<Object> renew = (changed, before, now) -> show();
+    private FieldModel focused;
+    private FieldModel shown;
+
+    Explanation() {
+        getStyleClass().add("form-explanation");
+        path.getStyleClass().add("form-path");
+        path.setTextOverrun(OverrunStyle.LEADING_ELLIPSIS);
+        meaning.getStyleClass().add("form-meaning");
+        meaning.setWrapText(true);
+        allowed.getStyleClass().addAll("form-allowed", "soft");
+        allowed.setWrapText(true);
+        source.setId("form-source");
+        source.setPromptText(Words.of("form.source.prompt"));
+        source.setOnAction(event -> said());
+        source.focusedProperty().addListener((changed, before, now) -> said());
+        Label words = new Label(Words.of("form.source.label"));
+        words.setMinWidth(USE_PREF_SIZE);
+        words.setLabelFor(source);
+        HBox line = new HBox(words, source);
+        line.getStyleClass().add("form-source");
+        HBox.setHgrow(source, Priority.ALWAYS);
+        Region space = new Region();
+        VBox.setVgrow(space, Priority.ALWAYS);
+        getChildren().addAll(path, meaning, allowed, space, line);
+        show();
+    }
+
+    /** Explains a focused field, which stays until another one is. */
+    void focused(FieldModel field) {
+        focused = field;
+        explain(field);
+    }
+
+    /** Explains a field that is pointed at; null for none, which brings back the focused one. */
+    void pointed(FieldModel field) {
+        if (!source.isFocused()) {
+            explain(field == null ? focused : field);
+        }
+    }
+
+    /** Forgets fields that are no longer there. */
+    void clear() {
+        focused(null);
+    }
+
+    private void explain(FieldModel field) {
+        if (shown != null) {
+            shown.defaultProperty().removeListener(renew);
+            shown.provenanceProperty().removeListener(renew);
+        }
+        shown = field;
+        if (field != null) {
+            field.defaultProperty().addListener(renew);
+            field.provenanceProperty().addListener(renew);
+        }
+        show();
+    }
+
+    private void show() {
+        boolean none = shown == null;
+        path.setText(none ? "" : shown.writtenPath());
+        meaning.setText(none ? Words.of("form.explain.none") : capital(shown.meaning()) + ".");
+        allowed.setText(none ? "" : allowed());
+        source.setDisable(none);
+        if (!source.isFocused()) {
+            source.setText(none ? "" : shown.provenanceProperty().get());
+        }
+        String key = none ? "" : shown.provenancePath();
+        source.setAccessibleText(none ? "" : Words.of("form.source", shown.label()));
+        source.setTooltip(none ? null : new Tooltip(Words.of("form.source.help", key, source.getText())));
+    }
+
+    private String allowed() {
+        String stands = shown.defaultProperty().get();
+        if (!shown.choices().isEmpty()) {
+            return shown.optional() ? Words.of("form.explain.default", stands) : "";
+        }
+        return shown.optional()
+                ? Words.of("form.explain.allowed", shown.allowed(), stands)
+                : Words.of("form.explain.required", shown.allowed());
+    }
+
+    private void said() {
+        if (shown != null && !source.getText().strip().equals(shown.provenanceProperty().get())) {
+            shown.source(source.getText());
+        }
+    }
+
+    private static String capital(String words) {
+        return Character.toUpperCase(words.charAt(0)) + words.substring(1);
+    }
+}

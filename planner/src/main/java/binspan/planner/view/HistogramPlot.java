@@ -1,0 +1,127 @@
+package binspan.planner.view;
+
+import binspan.optics.Window;
+import binspan.planner.plot.Ticks;
+import binspan.planner.report.Figure;
+import binspan.planner.view.TimeFrame.SlotPlotFrame;
+import binspan.planner.viewmodel.Site;
+import binspan.planner.viewmodel.SlotPlot;
+import binspan.planner.viewmodel.SlotsModel;
+import binspan.planner.viewmodel.Words;
+import binspan.units.Digits;
+import javafx.scene.AccessibleRole;
+import javafx.scene.canvas.Canvas;
+import javafx.scene.layout.Region;
+
+/** One histogram with the handles of its window and of its separation. */
+final class HistogramPlot extends Region {
+    private static final double PICO = 1e12;
+    private static final double NANO = 1e9;
+    private static final double KEY_STEP = 0.01;
+
+    private final SlotsModel model;
+    private final Look look;
+    private final Canvas canvas = new Canvas();
+    private final TimeHandle left;
+    private final TimeHandle right;
+    private final TimeHandle separation;
+    private SlotPlot plot;
+    private TimeFrame frame;
+
+    HistogramPlot(SlotsModel model, Look look, String id) {
+        this.model = model;
+        this.look = look;
+        left = new TimeHandle(look, "window-edge", this::window, model::settle);
+        right = new TimeHandle(look, "window-edge", this::window, model::settle);
+        separation = new TimeHandle(look, "separation", this::separation, model::settle);
+        left.setId("slots-" + id + "-window-left");
+        right.setId("slots-" + id + "-window-right");
+        separation.setId("slots-" + id + "-separation");
+        right.steps(steps -> model.window(model.window() * (1.0 + KEY_STEP * steps), right));
+        separation.steps(steps -> model.separation(model.separation() * (1.0 + KEY_STEP * steps), separation));
+        canvas.setManaged(false);
+        getChildren().addAll(canvas, separation, left, right);
+        getStyleClass().add("histogram");
+        setId("slots-" + id);
+        setAccessibleRole(AccessibleRole.IMAGE_VIEW);
+        look.follow(this::draw);
+    }
+
+    /** Shows a histogram. */
+    void show(SlotPlot shown) {
+        plot = shown;
+        setAccessibleText(shown.title() + ": " + shown.note());
+        draw();
+    }
+
+    @Override
+    protected void layoutChildren() {
+        draw();
+    }
+
+    private void draw() {
+        if (plot == null || getWidth() <= 0.0 || getHeight() <= 0.0) {
+            return;
+        }
+        canvas.setWidth(getWidth());
+        canvas.setHeight(getHeight());
+        TimeFrame fresh = TimeFrame.of(
+                look,
+                getWidth(),
+                getHeight(),
+                new SlotPlotFrame(
+                        plot.bins(),
+                        plot.highest(),
+                        model.logarithmicProperty().get(),
+                        titled()));
+        frame = held() && frame != null ? fresh.over(frame.from(), frame.to()) : fresh;
+        new HistogramDrawing(canvas.getGraphicsContext2D(), look, frame)
+                .draw(
+                        plot,
+                        Words.of("slots.axis.rate", Figure.in(plot.bins().width() * PICO, "ps")),
+                        titled() ? Words.of(plot.central() > 0 ? "slots.axis.time" : "slots.axis.pair", frame.unit()) : "");
+        handles();
+    }
+
+    /** The plots of both sides share one title of their time axes. */
+    private boolean titled() {
+        return !plot.id().equals(Site.ALICE.path());
+    }
+
+    /** While the separation is held the time axis stands still. */
+    private boolean held() {
+        return left.held() || right.held() || separation.held();
+    }
+
+    private void handles() {
+        Window window = plot.windows().get(plot.central());
+        left.place(frame.x(window.from()), frame.top(), frame.height());
+        right.place(frame.x(window.to()), frame.top(), frame.height());
+        double peak = plot.peaks().get(plot.peaks().size() - 1).time();
+        separation.setVisible(peak > 0.0 && peak < frame.to());
+        separation.place(frame.x(peak), frame.top(), frame.height());
+        right.setAccessibleText(Words.of("slots.handle.window", Figure.in(model.window() * PICO, "ps")));
+        separation.setAccessibleText(Words.of("slots.handle.separation", Figure.in(model.separation() * NANO, "ns")));
+    }
+
+    private void window(double x) {
+        Window window = plot.windows().get(plot.central());
+        double centre = (window.from() + window.to()) / 2.0;
+        model.window(rounded(2.0 * Math.abs(frame.time(x) - centre)), canvas);
+    }
+
+    private void separation(double x) {
+        double offset = plot.peaks().get(plot.peaks().size() - 1).time() - model.separation();
+        double wanted = frame.time(x) - offset;
+        if (wanted > 0.0) {
+            model.separation(rounded(wanted), separation);
+        }
+    }
+
+    /** A time to the last place that a pixel can tell. */
+    private double rounded(double time) {
+        double pixel = (frame.to() - frame.from()) / frame.width();
+        double step = Ticks.niceStep(pixel / 2.0);
+        return Math.max(step, Double.parseDouble(Digits.significant(Math.rint(time / step) * step, 12)));
+    }
+}

@@ -1,0 +1,277 @@
+package binspan.planner.viewmodel;
+
+import binspan.planner.document.Change;
+import binspan.planner.document.FieldEntry;
+import binspan.planner.report.ParameterWords;
+import binspan.scenario.Choice;
+import binspan.scenario.Field;
+import binspan.scenario.Range;
+import binspan.scenario.Values;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Stream;
+import javafx.beans.property.ReadOnlyBooleanProperty;
+import javafx.beans.property.ReadOnlyBooleanWrapper;
+import javafx.beans.property.ReadOnlyDoubleProperty;
+import javafx.beans.property.ReadOnlyDoubleWrapper;
+import javafx.beans.property.ReadOnlyObjectProperty;
+import javafx.beans.property.ReadOnlyObjectWrapper;
+import javafx.beans.property.ReadOnlyStringProperty;
+import javafx.beans.property.ReadOnlyStringWrapper;
+import javafx.beans.property.SimpleStringProperty;
+import javafx.beans.property.StringProperty;
+
+/**
+ * One field of the form. What is typed into it changes the design at once if it is allowed; what is not stays in the
+ * field with the reason beside it.
+ */
+public final class FieldModel implements FormRow {
+    private static final String NO_CHANNEL = "C";
+
+    private final StringProperty text = new SimpleStringProperty(this, "text", "");
+    private final ReadOnlyStringWrapper error = new ReadOnlyStringWrapper(this, "error", "");
+    private final ReadOnlyBooleanWrapper stated = new ReadOnlyBooleanWrapper(this, "stated");
+    private final ReadOnlyBooleanWrapper changed = new ReadOnlyBooleanWrapper(this, "changed");
+    private final ReadOnlyStringWrapper byDefault = new ReadOnlyStringWrapper(this, "byDefault", "");
+    private final ReadOnlyStringWrapper prompt = new ReadOnlyStringWrapper(this, "prompt", "");
+    private final ReadOnlyObjectWrapper<Origin> origin = new ReadOnlyObjectWrapper<>(this, "origin");
+    private final ReadOnlyStringWrapper provenance = new ReadOnlyStringWrapper(this, "provenance", "");
+    private final ReadOnlyDoubleWrapper value = new ReadOnlyDoubleWrapper(this, "value", Double.NaN);
+    private final ReadOnlyObjectWrapper<SliderScale> slider = new ReadOnlyObjectWrapper<>(this, "slider");
+    private final FormEdits edits;
+    private final FieldPlace place;
+    private final String idle;
+    private boolean showing;
+    private boolean typing;
+    private Object before;
+
+    FieldModel(FormEdits edits, FieldPlace place) {
+        this.edits = edits;
+        this.place = place;
+        this.idle = WithoutEffect.reason(edits.scenario(), place).orElse("");
+        refresh();
+        text.addListener((source, old, typed) -> {
+            if (!showing) {
+                typed(typed.strip());
+            }
+        });
+    }
+
+    /** Its scenario path, elements of lists by their index. */
+    public String path() {
+        return place.path();
+    }
+
+    /** Its scenario path as people write it, elements by their labels. */
+    public String writtenPath() {
+        return ElementPath.labelled(edits.scenario(), place.path());
+    }
+
+    /** The registry's entry. */
+    public Field field() {
+        return place.field();
+    }
+
+    /** What it is, in words and without its place: "dead time". */
+    public String label() {
+        return ParameterWords.name(place.field().name());
+    }
+
+    /** Its unit, empty for a bare number or a word. */
+    public String unit() {
+        return place.field().unit();
+    }
+
+    /** What is allowed, in words. */
+    public String allowed() {
+        return place.field().allowed();
+    }
+
+    /** What it means, one phrase. */
+    public String meaning() {
+        return place.field().meaning();
+    }
+
+    /** The words of a choice, none for other fields. */
+    public List<String> choices() {
+        return place.field().choices().stream().map(Choice::text).toList();
+    }
+
+    /** Whether it may be left empty. */
+    public boolean optional() {
+        return place.field().presence() != Field.Presence.REQUIRED;
+    }
+
+    /** Why it has no meaning at present, empty for a field that counts. */
+    public String withoutEffect() {
+        return idle;
+    }
+
+    /** What is typed, or what the file states; empty where the default stands. */
+    public StringProperty textProperty() {
+        return text;
+    }
+
+    /** Why what is typed is not allowed, in the command line's words; empty if it is. */
+    public ReadOnlyStringProperty errorProperty() {
+        return error.getReadOnlyProperty();
+    }
+
+    /** Whether the file states it, so that no default stands. */
+    public ReadOnlyBooleanProperty statedProperty() {
+        return stated.getReadOnlyProperty();
+    }
+
+    /** Whether its value differs from the saved one. */
+    public ReadOnlyBooleanProperty changedProperty() {
+        return changed.getReadOnlyProperty();
+    }
+
+    /** What stands if it is left empty, in words with number and unit. */
+    public ReadOnlyStringProperty defaultProperty() {
+        return byDefault.getReadOnlyProperty();
+    }
+
+    /** The same, short enough to stand in the empty field. */
+    public ReadOnlyStringProperty promptProperty() {
+        return prompt.getReadOnlyProperty();
+    }
+
+    /** Where its value comes from, as the file says; empty if it does not. */
+    public ReadOnlyStringProperty provenanceProperty() {
+        return provenance.getReadOnlyProperty();
+    }
+
+    /** The path under which the file says so, which may stand for both arms or ports. */
+    public String provenancePath() {
+        return origin.get().key();
+    }
+
+    /** Its number, stated or by default; NaN where there is none. */
+    public ReadOnlyDoubleProperty valueProperty() {
+        return value.getReadOnlyProperty();
+    }
+
+    /** The stretch of its slider, null where there is no number to begin from. */
+    public ReadOnlyObjectProperty<SliderScale> sliderProperty() {
+        return slider.getReadOnlyProperty();
+    }
+
+    /** Moves the slider to a position, 0 to 1; all until {@link #settle} is one change. */
+    public void slide(double position) {
+        SliderScale scale = slider.get();
+        if (scale != null && idle.isEmpty()) {
+            begin();
+            double moved = scale.value(position);
+            error.set(edits.put(place, written(moved)));
+            show(spelled(moved));
+        }
+    }
+
+    private Object written(double number) {
+        return place.field().kind() == Field.Kind.CHANNEL ? (Object) (NO_CHANNEL + Range.plain(number)) : number;
+    }
+
+    private void typed(String typed) {
+        begin();
+        FieldEntry entry = FieldEntry.read(place.field(), place.path(), typed);
+        if (entry instanceof FieldEntry.Refused refused) {
+            error.set(refused.problem().message());
+        } else if (((FieldEntry.Accepted) entry).change() instanceof Change.Put put) {
+            error.set(edits.put(place, put.value()));
+        } else {
+            error.set(edits.remove(place));
+        }
+    }
+
+    private void begin() {
+        if (!typing) {
+            typing = true;
+            before = edits.statedIn(place);
+        }
+    }
+
+    /** Ends the typing or sliding: what follows is a change of its own. What is not allowed stays with its error. */
+    public void settle() {
+        if (typing) {
+            typing = false;
+            edits.settle();
+            refresh();
+        }
+    }
+
+    /** Takes back what was typed since the last {@link #settle}. */
+    public void takeBack() {
+        if (typing) {
+            Object now = edits.statedIn(place);
+            if (before == null && now != null) {
+                edits.remove(place);
+            } else if (before != null && !before.equals(now)) {
+                edits.put(place, before instanceof Double number ? written(number) : before);
+            }
+        }
+        error.set("");
+        settle();
+        show(spelled(edits.statedIn(place)));
+    }
+
+    /** Says where the value comes from; an empty text takes the saying back. */
+    public void source(String said) {
+        String path = "provenance." + origin.get().key();
+        Change change = said.isBlank() ? new Change.Remove(path) : new Change.Put(path, said.strip());
+        edits.apply(Words.of("form.source", label()), List.of(change));
+    }
+
+    @Override
+    public Stream<FieldModel> fields() {
+        return Stream.of(this);
+    }
+
+    @Override
+    public void refresh() {
+        Values object = edits.stated(place);
+        Object now = object.get(place.field().name());
+        stated.set(now != null);
+        DefaultWords words = new DefaultWords(
+                edits.scenario(), place, Optional.ofNullable(place.field().byDefault().given(object.asMap())));
+        byDefault.set(words.words());
+        prompt.set(words.value());
+        origin.set(Origin.of(edits.scenario(), place.path()));
+        provenance.set(origin.get().text());
+        changed.set(differs());
+        measure(words);
+        if (!typing && error.get().isEmpty()) {
+            show(spelled(now));
+        }
+    }
+
+    private void measure(DefaultWords words) {
+        Object planned = PlannedValue.at(edits.scenario(), place.path()).orElse(null);
+        value.set(planned instanceof Double number ? number : words.number().orElse(Double.NaN));
+        SliderScale scale = slider.get();
+        boolean kept = scale != null && scale.covers(value.get());
+        if (!kept && place.field().kind().numeric()) {
+            slider.set(SliderScale.around(place.field(), value.get()).orElse(null));
+        }
+    }
+
+    private boolean differs() {
+        Optional<Object> now = PlannedValue.at(edits.scenario(), place.path());
+        return !ElementPath.in(edits.saved(), edits.scenario(), place.path())
+                .flatMap(path -> PlannedValue.at(edits.saved(), path))
+                .equals(now);
+    }
+
+    private void show(String shown) {
+        showing = true;
+        text.set(shown);
+        showing = false;
+    }
+
+    private String spelled(Object stands) {
+        if (stands instanceof Double number) {
+            return (place.field().kind() == Field.Kind.CHANNEL ? NO_CHANNEL : "") + Range.plain(number);
+        }
+        return stands instanceof Choice choice ? choice.text() : stands == null ? "" : stands.toString();
+    }
+}
