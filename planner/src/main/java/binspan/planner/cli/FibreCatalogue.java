@@ -17,17 +17,22 @@ final class FibreCatalogue {
                      dB/km at          ps/(nm km)
             class    1310  1550  1625  at 1550
             """;
+
     private FibreCatalogue() {}
 
     /** The listing for a terminal. */
     static String text() {
-        StringBuilder text = new StringBuilder(Paragraph.of(FibreClassWords.PLANNED + " " + FibreClassWords.REPLACED, 0)).append(HEAD);
+        StringBuilder text = new StringBuilder(
+                        Paragraph.of(FibreClassWords.PLANNED + " " + FibreClassWords.REPLACED, 0))
+                .append(HEAD);
         for (FibreClass fibre : FibreClass.values()) {
             text.append(planned(fibre));
         }
         text.append('\n').append(Paragraph.of(FibreClassWords.LIMITS, 0)).append('\n');
         for (FibreClass fibre : FibreClass.values()) {
-            text.append(fibre.text()).append('\n').append(Paragraph.of(String.join("; ", FibreClassWords.limits(fibre)), 4));
+            text.append(fibre.text())
+                    .append('\n')
+                    .append(Paragraph.of(String.join("; ", FibreClassWords.limits(fibre)), 4));
         }
         return text.toString();
     }

@@ -1,7 +1,7 @@
 package binspan.planner.cli;
 
-import binspan.planner.io.Preset;
 import binspan.planner.io.JsonText;
+import binspan.planner.io.Preset;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;

@@ -1,7 +1,7 @@
 package binspan.planner.cli;
 
-import binspan.planner.io.Preset;
 import binspan.planner.io.OutputFileException;
+import binspan.planner.io.Preset;
 import java.util.ArrayList;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -49,8 +49,7 @@ final class NewCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws UsageException, OutputFileException {
-        Preset found =
-                Preset.find(preset).orElseThrow(() -> UsageException.unknown("preset", preset, Preset.names()));
+        Preset found = Preset.find(preset).orElseThrow(() -> UsageException.unknown("preset", preset, Preset.names()));
         destination.write(found.scenario(), console);
         return ExitStatus.MET;
     }

@@ -78,8 +78,8 @@ final class ViewCommand implements Callable<Integer> {
         }
         if (scale != null) {
             if (scale < SMALLEST || scale > LARGEST) {
-                throw UsageException.of(String.format(
-                        Locale.ROOT, "--scale %d: allowed %d to %d", scale, SMALLEST, LARGEST));
+                throw UsageException.of(
+                        String.format(Locale.ROOT, "--scale %d: allowed %d to %d", scale, SMALLEST, LARGEST));
             }
             words.add("--scale=" + scale);
         }

@@ -28,8 +28,7 @@ final class AlternativesBox extends VBox {
         chooser.getItems().setAll(model.forms().stream().map(Form::label).toList());
         chooser.getStyleClass().add("form-chooser");
         chooser.setMaxWidth(Double.MAX_VALUE);
-        chooser.accessibleTextProperty()
-                .bind(chooser.valueProperty().map(form -> Words.of("form.alternatives", form)));
+        chooser.accessibleTextProperty().bind(chooser.valueProperty().map(form -> Words.of("form.alternatives", form)));
         model.shownProperty().addListener((source, before, now) -> show());
         chooser.valueProperty().addListener((source, before, now) -> choose());
         show();
@@ -53,7 +52,10 @@ final class AlternativesBox extends VBox {
         } else if (longNames()) {
             HBox below = new HBox(FieldRow.mark(form.models()));
             below.getStyleClass().add("form-labels");
-            getChildren().addAll(headed(List.of(), "form-labels-wide"), new FieldRow(form.models().get(0), below, explain));
+            getChildren()
+                    .addAll(
+                            headed(List.of(), "form-labels-wide"),
+                            new FieldRow(form.models().get(0), below, explain));
         } else {
             HBox beside = headed(form.models(), "form-labels");
             getChildren().add(new FieldRow(form.models().get(0), beside, explain));

@@ -27,7 +27,9 @@ final class ChoiceEntry extends ComboBox<String> {
         accessibleTextProperty()
                 .bind(Bindings.createStringBinding(
                         () -> model.label() + ", " + getConverter().toString(getValue())
-                                + (model.errorProperty().get().isEmpty() ? "" : ", " + model.errorProperty().get()),
+                                + (model.errorProperty().get().isEmpty()
+                                        ? ""
+                                        : ", " + model.errorProperty().get()),
                         valueProperty(),
                         model.errorProperty()));
     }
@@ -50,7 +52,9 @@ final class ChoiceEntry extends ComboBox<String> {
             if (word == null) {
                 return "";
             }
-            return word.isEmpty() ? Words.of("form.default", model.defaultProperty().get()) : word;
+            return word.isEmpty()
+                    ? Words.of("form.default", model.defaultProperty().get())
+                    : word;
         }
 
         @Override

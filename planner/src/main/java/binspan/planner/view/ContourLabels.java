@@ -82,8 +82,7 @@ final class ContourLabels {
     private Bounds inside(Point at, Line line, double beside) {
         double wanted = at.x() + beside - line.width() / 2.0;
         double x = Math.max(plot.getMinX(), Math.min(plot.getMaxX() - line.width(), wanted));
-        double y = Math.max(
-                plot.getMinY(), Math.min(plot.getMaxY() - line.height(), at.y() - line.height() / 2.0));
+        double y = Math.max(plot.getMinY(), Math.min(plot.getMaxY() - line.height(), at.y() - line.height() / 2.0));
         return new BoundingBox(x, y, line.width(), line.height());
     }
 

@@ -102,7 +102,8 @@ final class Explanation extends VBox {
     }
 
     private void said() {
-        if (shown != null && !source.getText().strip().equals(shown.provenanceProperty().get())) {
+        if (shown != null
+                && !source.getText().strip().equals(shown.provenanceProperty().get())) {
             shown.source(source.getText());
         }
     }

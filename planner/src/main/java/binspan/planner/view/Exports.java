@@ -68,8 +68,8 @@ final class Exports {
 
     private void check(CheckForm form, String ending, String kind) {
         String proposed = proposed(Words.of("file.name." + form.name()), ending);
-        Optional<String> file =
-                files.toSave(Words.of("file.export.title"), proposed, Words.of(kind), ending).map(Object::toString);
+        Optional<String> file = files.toSave(Words.of("file.export.title"), proposed, Words.of(kind), ending)
+                .map(Object::toString);
         file.ifPresent(name -> checked(check -> write(() -> form.write(check, name, true), name)));
     }
 
@@ -101,8 +101,9 @@ final class Exports {
                         Words.of("file.kind.picture"),
                         ".png")
                 .map(Object::toString)
-                .ifPresent(name ->
-                        write(() -> WholeFile.write(name, out -> out.write(PngImage.encoded(FxImages.of(image))), true), name));
+                .ifPresent(name -> write(
+                        () -> WholeFile.write(name, out -> out.write(PngImage.encoded(FxImages.of(image))), true),
+                        name));
     }
 
     /** Puts a picture of the page on the clipboard. */

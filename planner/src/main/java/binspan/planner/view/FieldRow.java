@@ -53,7 +53,10 @@ final class FieldRow extends VBox {
         entry.setMaxWidth(Double.MAX_VALUE);
         HBox.setHgrow(entry, Priority.ALWAYS);
         if (!model.withoutEffect().isEmpty() && model.optional()) {
-            line.getChildren().add(Buttons.remove(id("form-drop", model.path()), () -> model.textProperty().set("")));
+            line.getChildren()
+                    .add(Buttons.remove(
+                            id("form-drop", model.path()),
+                            () -> model.textProperty().set("")));
         }
         getChildren().addAll(line, new ErrorLine(model.errorProperty()));
         idle();
@@ -127,7 +130,9 @@ final class FieldRow extends VBox {
     private String spoken() {
         String unit = model.unit().isEmpty() ? "" : ", " + model.unit();
         String error = model.errorProperty().get();
-        String stands = model.statedProperty().get() ? "" : ", " + Words.of("form.default", model.defaultProperty().get());
+        String stands = model.statedProperty().get()
+                ? ""
+                : ", " + Words.of("form.default", model.defaultProperty().get());
         return model.label() + unit + stands + (error.isEmpty() ? "" : ", " + error);
     }
 

@@ -73,7 +73,8 @@ public final class FormPane extends VBox {
         fields.getChildren().setAll(model.rows().stream().map(this::node).toList());
         scroll.setVvalue(0.0);
         if (!focused.isEmpty()) {
-            Platform.runLater(() -> fields.lookupAll("#" + focused).stream().findFirst().ifPresent(this::reveal));
+            Platform.runLater(
+                    () -> fields.lookupAll("#" + focused).stream().findFirst().ifPresent(this::reveal));
         }
     }
 

@@ -8,7 +8,12 @@ import javafx.scene.control.Alert.AlertType;
 /** What the window tells about itself. */
 final class Help {
     private static final List<String> KEYS = List.of(
-            "help.keys.file", "help.keys.edit", "help.keys.pages", "help.keys.link", "help.keys.form", "help.keys.map",
+            "help.keys.file",
+            "help.keys.edit",
+            "help.keys.pages",
+            "help.keys.link",
+            "help.keys.form",
+            "help.keys.map",
             "help.keys.slots");
     private static final List<String> CARE = List.of("help.care.light", "help.care.cold", "help.care.trust");
 

@@ -197,8 +197,9 @@ final class HistogramDrawing {
     private void peaks(SlotPlot plot) {
         pen.setFont(look.font(SMALL));
         pen.setFill(look.palette().ink());
-        plot.peaks().forEach(peak -> text(
-                peak.name(), frame.x(peak.time()), frame.top() + look.em(0.2), TextAlignment.CENTER, VPos.TOP));
+        plot.peaks()
+                .forEach(peak -> text(
+                        peak.name(), frame.x(peak.time()), frame.top() + look.em(0.2), TextAlignment.CENTER, VPos.TOP));
     }
 
     private void text(String words, double x, double y, TextAlignment alignment, VPos baseline) {

@@ -70,16 +70,15 @@ final class HistogramPlot extends Region {
                 getWidth(),
                 getHeight(),
                 new SlotPlotFrame(
-                        plot.bins(),
-                        plot.highest(),
-                        model.logarithmicProperty().get(),
-                        titled()));
+                        plot.bins(), plot.highest(), model.logarithmicProperty().get(), titled()));
         frame = held() && frame != null ? fresh.over(frame.from(), frame.to()) : fresh;
         new HistogramDrawing(canvas.getGraphicsContext2D(), look, frame)
                 .draw(
                         plot,
                         Words.of("slots.axis.rate", Figure.in(plot.bins().width() * PICO, "ps")),
-                        titled() ? Words.of(plot.central() > 0 ? "slots.axis.time" : "slots.axis.pair", frame.unit()) : "");
+                        titled()
+                                ? Words.of(plot.central() > 0 ? "slots.axis.time" : "slots.axis.pair", frame.unit())
+                                : "");
         handles();
     }
 

@@ -140,7 +140,6 @@ final class LinkMouse implements EventHandler<MouseEvent> {
         drop.setVisible(where.index() != element.index());
         LinkNode node = drawing.node(held);
         drop.autosize();
-        drop.resizeRelocate(
-                where.x() - drop.getWidth() / 2.0, node.getLayoutY(), drop.prefWidth(-1), node.getHeight());
+        drop.resizeRelocate(where.x() - drop.getWidth() / 2.0, node.getLayoutY(), drop.prefWidth(-1), node.getHeight());
     }
 }

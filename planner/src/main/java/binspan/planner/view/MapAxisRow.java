@@ -135,7 +135,8 @@ final class MapAxisRow {
     }
 
     private void take(TextField field, Predicate<String> take) {
-        String shown = field == from ? text(axis.axis().from()) : text(axis.axis().to());
+        String shown =
+                field == from ? text(axis.axis().from()) : text(axis.axis().to());
         if (!field.getText().strip().equals(shown) && take.test(field.getText())) {
             show();
         }

@@ -67,7 +67,9 @@ final class MapDrawing {
         }
         axes();
         if (recommended != null) {
-            star(frame.xOf(recommended.values().get(0)), frame.yOf(recommended.values().get(1)));
+            star(
+                    frame.xOf(recommended.values().get(0)),
+                    frame.yOf(recommended.values().get(1)));
         }
         if (shape != null) {
             names(shape, recommended, handle);
@@ -239,8 +241,9 @@ final class MapDrawing {
     }
 
     private void names(MapShape shape, PointVerdict recommended, MapPoint handle) {
-        List<MapContour> drawn =
-                shape.contours().stream().filter(each -> !each.lines().isEmpty()).toList();
+        List<MapContour> drawn = shape.contours().stream()
+                .filter(each -> !each.lines().isEmpty())
+                .toList();
         List<Line> lines = new ArrayList<>();
         drawn.forEach(contour -> lines.add(line(contour)));
         List<Bounds> taken = new ArrayList<>();

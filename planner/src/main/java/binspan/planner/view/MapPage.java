@@ -107,7 +107,8 @@ public final class MapPage extends BorderPane {
 
     private void widen() {
         double least = Region.USE_PREF_SIZE;
-        List.of(0, 3, 5, 6).forEach(column -> axes.getColumnConstraints().get(column).setMinWidth(least));
+        List.of(0, 3, 5, 6)
+                .forEach(column -> axes.getColumnConstraints().get(column).setMinWidth(least));
         List.of(2, 4).forEach(column -> {
             double width = look.em(narrow ? NARROW_FIELD : FIELD);
             axes.getColumnConstraints().get(column).setPrefWidth(width);
@@ -139,10 +140,9 @@ public final class MapPage extends BorderPane {
         Button recommended = button("recommended", model::goToRecommended);
         recommended
                 .disableProperty()
-                .bind(Bindings.createBooleanBinding(
-                        () -> model.recommended().isEmpty(), model.regionProperty()));
-        FlowPane commands = new FlowPane(
-                move, recommended, button("reset", model::resetAxes), boxes(), button("copy", this::copy));
+                .bind(Bindings.createBooleanBinding(() -> model.recommended().isEmpty(), model.regionProperty()));
+        FlowPane commands =
+                new FlowPane(move, recommended, button("reset", model::resetAxes), boxes(), button("copy", this::copy));
         commands.getStyleClass().add("map-commands");
         return commands;
     }

@@ -146,7 +146,11 @@ final class MapPlane extends Region {
 
     private void redraw() {
         frame = MapFrame.of(
-                look, getWidth(), getHeight(), model.horizontal().axis(), model.vertical().axis());
+                look,
+                getWidth(),
+                getHeight(),
+                model.horizontal().axis(),
+                model.vertical().axis());
         new MapDrawing(still.getGraphicsContext2D(), look, frame)
                 .draw(
                         model.shapeProperty().get(),
@@ -164,7 +168,9 @@ final class MapPlane extends Region {
     private boolean onHandle(MouseEvent event) {
         Optional<MapPoint> at = model.handle().shown();
         return at.isPresent()
-                && Math.hypot(event.getX() - frame.xOf(at.get().x()), event.getY() - frame.yOf(at.get().y()))
+                && Math.hypot(
+                                event.getX() - frame.xOf(at.get().x()),
+                                event.getY() - frame.yOf(at.get().y()))
                         <= look.em(MapOverlay.HOLD);
     }
 
@@ -235,7 +241,8 @@ final class MapPlane extends Region {
     }
 
     private String words(MapReading reading) {
-        return Words.of("map.kind." + reading.kind()) + ": " + words(model.horizontal().axis(), reading.x()) + ", "
+        return Words.of("map.kind." + reading.kind()) + ": "
+                + words(model.horizontal().axis(), reading.x()) + ", "
                 + words(model.vertical().axis(), reading.y()) + "; "
                 + Words.of(reading.verdict().met() ? "map.all.met" : "map.not.met");
     }

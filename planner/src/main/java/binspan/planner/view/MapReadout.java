@@ -88,11 +88,15 @@ final class MapReadout extends VBox {
         place.getChildren().setAll(places(reading.verdict()));
         result.setText(result(reading.verdict()));
         result.getStyleClass().setAll("label", reading.verdict().met() ? "good" : "bad");
-        List<Requirement> shown =
-                reading.verdict().requirements().stream().map(RequirementMargin::requirement).toList();
+        List<Requirement> shown = reading.verdict().requirements().stream()
+                .map(RequirementMargin::requirement)
+                .toList();
         if (!shown.equals(requirements)) {
             requirements = shown;
-            rows.getChildren().setAll(shown.stream().map(each -> new MapReadoutRow(each, look)).toList());
+            rows.getChildren()
+                    .setAll(shown.stream()
+                            .map(each -> new MapReadoutRow(each, look))
+                            .toList());
             legend.getChildren().setAll(shown.stream().map(this::entry).toList());
         }
         fill(reading.verdict());
@@ -166,7 +170,7 @@ final class MapReadout extends VBox {
     }
 
     private static Label side(BoxSide side) {
-        return new Label(AxisWords.plainRange(
-                side.axis(), side.from().value(), side.to().value()));
+        return new Label(
+                AxisWords.plainRange(side.axis(), side.from().value(), side.to().value()));
     }
 }

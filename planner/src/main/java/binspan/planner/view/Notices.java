@@ -44,8 +44,8 @@ final class Notices {
         ButtonType take = button("dialog.recover.take", ButtonData.YES);
         ButtonType discard = button("dialog.recover.discard", ButtonData.NO);
         ButtonType later = button("dialog.recover.later", ButtonData.CANCEL_CLOSE);
-        Alert alert = alert(
-                AlertType.CONFIRMATION, Words.of("dialog.recover.title"), Words.of("dialog.recover", link, time));
+        Alert alert =
+                alert(AlertType.CONFIRMATION, Words.of("dialog.recover.title"), Words.of("dialog.recover", link, time));
         alert.getButtonTypes().setAll(take, discard, later);
         Optional<ButtonType> chosen = alert.showAndWait();
         return chosen.filter(take::equals).isPresent()

@@ -69,7 +69,9 @@ final class Session {
         look.scalePercentProperty().set(nearestScale(settings.scalePercent()));
         model = new PlannerModel(background, places.settings(), places.recovery());
         notices = new Notices(stage, look);
-        files = answers != null ? answers : new FileQuestions(stage, settings.lastDirectory().orElse(null));
+        files = answers != null
+                ? answers
+                : new FileQuestions(stage, settings.lastDirectory().orElse(null));
         filing = new Filing(model.design(), model.file(), files, notices);
         window = new MainWindow(model, WindowParts.of(model, look, files, this::showRoom), look);
         window.menus(menus().bar(this::close));
@@ -80,7 +82,8 @@ final class Session {
                 model,
                 files,
                 model.checks(),
-                new Exports.Regions(() -> (Region) window.root(), () -> window.shown().content(), window::link));
+                new Exports.Regions(
+                        () -> (Region) window.root(), () -> window.shown().content(), window::link));
         return new WindowMenus(model, look, filing, exports, window, new Help(notices));
     }
 
@@ -135,9 +138,8 @@ final class Session {
 
     private void offerLeftWork() {
         for (Recovery.Found found : Recovery.left(places.recovery())) {
-            String name = found.original()
-                    .map(path -> path.getFileName().toString())
-                    .orElse(Words.of("window.untitled"));
+            String name =
+                    found.original().map(path -> path.getFileName().toString()).orElse(Words.of("window.untitled"));
             String time = TIME.withZone(ZoneId.systemDefault()).format(found.written());
             switch (notices.leftWork(name, time)) {
                 case TAKE -> {
@@ -164,8 +166,7 @@ final class Session {
     /** Remembers settings and removes the copy of unsaved work: the window was closed in order. */
     void closed() {
         model.file().closed();
-        Settings last = settings
-                .withTheme(look.themeProperty().get().text())
+        Settings last = settings.withTheme(look.themeProperty().get().text())
                 .withScalePercent(look.scalePercentProperty().get());
         if (stage.getScene() != null) {
             last = last.withWindow(

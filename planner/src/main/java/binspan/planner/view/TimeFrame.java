@@ -98,8 +98,7 @@ record TimeFrame(
     List<Ticks.Tick> upwards(Look look) {
         double lowest = logarithmic ? highest * Math.pow(10.0, -DECADES) : 0.0;
         Axis axis = new Axis("rate", "1/s", logarithmic, logarithmic ? lowest : Double.NaN, highest);
-        Range positions =
-                logarithmic ? new Range(Math.log10(lowest), Math.log10(highest)) : new Range(lowest, highest);
+        Range positions = logarithmic ? new Range(Math.log10(lowest), Math.log10(highest)) : new Range(lowest, highest);
         int most = Math.max(2, (int) (height / look.em(LABEL_HEIGHT)));
         return Ticks.of(axis, positions, most).stream()
                 .map(tick -> new Ticks.Tick(

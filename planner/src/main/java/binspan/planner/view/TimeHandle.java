@@ -39,7 +39,9 @@ final class TimeHandle extends Region {
             event.consume();
         });
         addEventHandler(MouseEvent.MOUSE_DRAGGED, event -> {
-            move.accept(getParent().sceneToLocal(event.getSceneX(), event.getSceneY()).getX());
+            move.accept(getParent()
+                    .sceneToLocal(event.getSceneX(), event.getSceneY())
+                    .getX());
             event.consume();
         });
         addEventHandler(MouseEvent.MOUSE_RELEASED, event -> {

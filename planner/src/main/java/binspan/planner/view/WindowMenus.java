@@ -140,8 +140,7 @@ final class WindowMenus {
             item.setOnAction(event -> pages.show(key));
             menu.getItems().add(item);
         }
-        menu.getItems()
-                .addAll(new SeparatorMenuItem(), Menus.item("parts", pages::nextPart), new SeparatorMenuItem());
+        menu.getItems().addAll(new SeparatorMenuItem(), Menus.item("parts", pages::nextPart), new SeparatorMenuItem());
         ToggleGroup themes = new ToggleGroup();
         for (Theme theme : Theme.values()) {
             RadioMenuItem item = Menus.choice(

@@ -95,7 +95,8 @@ public final class AlternativesModel implements FormRow {
     }
 
     private Map<String, Object> gate(FieldPlace place) {
-        Detector detector = (Detector) PlannedValue.at(edits.scenario(), place.parent()).orElseThrow();
+        Detector detector =
+                (Detector) PlannedValue.at(edits.scenario(), place.parent()).orElseThrow();
         Gate gate = Equivalent.gate(detector);
         Map<String, Object> written = new LinkedHashMap<>();
         gate.rateMHz().ifPresent(rate -> written.put("rateMHz", rate));

@@ -34,13 +34,14 @@ public final class ClassRow implements FormRow {
     public List<String> operatingPoints() {
         List<OperatingPoint> points =
                 detectorClass().map(DetectorClass::operatingPoints).orElse(List.of());
-        return points.size() < 2 ? List.of() : points.stream().map(OperatingPoint::meaning).toList();
+        return points.size() < 2
+                ? List.of()
+                : points.stream().map(OperatingPoint::meaning).toList();
     }
 
     /** States the values of one of these settings, all at once. */
     public void operate(int point) {
-        OperatingPoint chosen =
-                detectorClass().orElseThrow().operatingPoints().get(point);
+        OperatingPoint chosen = detectorClass().orElseThrow().operatingPoints().get(point);
         List<Change> changes = new ArrayList<>();
         changes.add(put("efficiency", chosen.values().efficiency()));
         changes.add(chosen.gate()

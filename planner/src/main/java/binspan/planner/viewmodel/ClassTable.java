@@ -61,7 +61,8 @@ public record ClassTable(String meaning, List<Line> lines, List<String> limits, 
         return new ClassTable(
                 known.meaning(),
                 List.copyOf(rows.lines),
-                List.of(Words.of("form.class.wavelengths", Figure.bare(known.shortestNm()), Figure.bare(known.longestNm()))),
+                List.of(Words.of(
+                        "form.class.wavelengths", Figure.bare(known.shortestNm()), Figure.bare(known.longestNm()))),
                 List.of(known.provenance(), DetectorClassWords.PLANNED));
     }
 
@@ -101,7 +102,8 @@ public record ClassTable(String meaning, List<Line> lines, List<String> limits, 
                 ? Figure.stated(span.attenuationDbPerKm().getAsDouble(), unit)
                 : "";
         if (span.measuredLossDb().isPresent()) {
-            stated = Words.of("form.class.measured", Figure.stated(span.measuredLossDb().getAsDouble(), "dB"));
+            stated = Words.of(
+                    "form.class.measured", Figure.stated(span.measuredLossDb().getAsDouble(), "dB"));
         }
         return new Line(ParameterWords.name("attenuationDbPerKm"), Figure.in(ofClass, unit), stated);
     }
@@ -117,7 +119,8 @@ public record ClassTable(String meaning, List<Line> lines, List<String> limits, 
 
         void add(String field, double ofClass, String unit) {
             String own = stated.get(field) instanceof Double number ? Figure.stated(number, unit) : "";
-            lines.add(new Line(ParameterWords.name(field), Figure.stated(Double.parseDouble(Figure.bare(ofClass)), unit), own));
+            lines.add(new Line(
+                    ParameterWords.name(field), Figure.stated(Double.parseDouble(Figure.bare(ofClass)), unit), own));
         }
     }
 }

@@ -5,8 +5,8 @@ import binspan.planner.report.Figure;
 import binspan.scenario.Arm;
 import binspan.scenario.Choice;
 import binspan.scenario.ClassicalChannel;
-import binspan.scenario.Field;
 import binspan.scenario.FibreSpan;
+import binspan.scenario.Field;
 import binspan.scenario.Range;
 import binspan.scenario.Scenario;
 import java.util.Optional;
@@ -35,7 +35,9 @@ final class DefaultWords {
             return choice.text();
         }
         OptionalDouble number = number();
-        return number.isPresent() ? Range.plain(number.getAsDouble()) : place.field().presence() == Field.Presence.REQUIRED ? "" : words();
+        return number.isPresent()
+                ? Range.plain(number.getAsDouble())
+                : place.field().presence() == Field.Presence.REQUIRED ? "" : words();
     }
 
     /** The number that stands, absent if none does or if it takes a prediction to know it. */
@@ -47,7 +49,8 @@ final class DefaultWords {
         if (object instanceof FibreSpan span) {
             return fibre(span);
         }
-        boolean ofFibre = object instanceof ClassicalChannel && place.field().name().equals("attenuationDbPerKm");
+        boolean ofFibre =
+                object instanceof ClassicalChannel && place.field().name().equals("attenuationDbPerKm");
         return ofFibre ? channel((ClassicalChannel) object) : OptionalDouble.empty();
     }
 

@@ -233,7 +233,9 @@ public final class FieldModel implements FormRow {
         Object now = object.get(place.field().name());
         stated.set(now != null);
         DefaultWords words = new DefaultWords(
-                edits.scenario(), place, Optional.ofNullable(place.field().byDefault().given(object.asMap())));
+                edits.scenario(),
+                place,
+                Optional.ofNullable(place.field().byDefault().given(object.asMap())));
         byDefault.set(words.words());
         prompt.set(words.value());
         origin.set(Origin.of(edits.scenario(), place.path()));

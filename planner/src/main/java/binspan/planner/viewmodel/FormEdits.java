@@ -87,8 +87,8 @@ final class FormEdits {
 
     /** A gate that is only that of the class is written out as a whole. */
     private Change putting(FieldPlace place, Object value) {
-        boolean gateOfClass = place.section().name().equals("gate")
-                && stated(place).asMap().isEmpty();
+        boolean gateOfClass =
+                place.section().name().equals("gate") && stated(place).asMap().isEmpty();
         if (!gateOfClass) {
             return new Change.Put(place.path(), value);
         }

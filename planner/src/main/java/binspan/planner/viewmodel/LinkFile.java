@@ -133,8 +133,8 @@ public final class LinkFile {
      * @throws InvalidScenarioException if the copy holds no valid scenario
      */
     public void recover(Recovery.Found found) throws InvalidScenarioException {
-        ScenarioDocument left =
-                ScenarioDocument.of(found.text(), found.original().map(Path::toString).orElse("recovered"));
+        ScenarioDocument left = ScenarioDocument.of(
+                found.text(), found.original().map(Path::toString).orElse("recovered"));
         ScenarioDocument base = found.original().flatMap(this::read).orElse(null);
         boolean same = base != null && found.basedOn(base.text());
         onDisk = base == null ? null : base.text();
@@ -174,13 +174,11 @@ public final class LinkFile {
         String text = design.documentProperty().get().text();
         Path original = path.get();
         String saved = onDisk;
-        copying.run(
-                progress -> kept(modified, text, original, saved == null ? "" : saved),
-                kept -> {
-                    if (!kept) {
-                        design.notice(Words.of("file.noCopy"));
-                    }
-                });
+        copying.run(progress -> kept(modified, text, original, saved == null ? "" : saved), kept -> {
+            if (!kept) {
+                design.notice(Words.of("file.noCopy"));
+            }
+        });
     }
 
     /** Keeps the copy of unsaved work up to date; whether that could be done. */

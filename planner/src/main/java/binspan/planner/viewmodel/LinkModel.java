@@ -59,8 +59,11 @@ public final class LinkModel {
     }
 
     /** Whether the room shown is that of the present link. */
+    @SuppressWarnings("ReferenceEquality") // the design changes by giving another scenario
     public boolean roomIsPresent() {
-        return left.get().filter(known -> known.scenario().equals(design.scenario())).isPresent();
+        return left.get()
+                .filter(known -> known.scenario().equals(design.scenario()))
+                .isPresent();
     }
 
     /** Moves the source. */

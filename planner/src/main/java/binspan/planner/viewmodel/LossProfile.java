@@ -20,7 +20,7 @@ import java.util.List;
  * @param rimX outer end of the drawing, px
  */
 public record LossProfile(
-        Site site, List<Corner> line, List<Number> numbers, double totalDb, double endX, double rimX) {
+        Site site, List<Corner> line, List<LossNumber> numbers, double totalDb, double endX, double rimX) {
     private static final double DIGIT_EM = 0.52;
     private static final double GAP_EM = 0.5;
 
@@ -46,7 +46,7 @@ public record LossProfile(
      * @param width room for it, px
      * @param text the number
      */
-    public record Number(double x, double db, double width, String text) {}
+    public record LossNumber(double x, double db, double width, String text) {}
 
     /**
      * The profile of an arm.
@@ -80,14 +80,15 @@ public record LossProfile(
     }
 
     /** The larger steps first, each where no number stands yet. The last step is left to the total. */
-    private static List<Number> placed(List<Step> steps, double em) {
-        List<Number> placed = new ArrayList<>();
+    private static List<LossNumber> placed(List<Step> steps, double em) {
+        List<LossNumber> placed = new ArrayList<>();
         steps.stream()
                 .limit(Math.max(0, steps.size() - 1))
                 .sorted(Comparator.comparingDouble(Step::lossDb).reversed())
                 .forEach(step -> {
                     String text = Digits.decimals(step.db(), 1);
-                    Number number = new Number(step.x(), step.db(), (text.length() * DIGIT_EM + GAP_EM) * em, text);
+                    LossNumber number =
+                            new LossNumber(step.x(), step.db(), (text.length() * DIGIT_EM + GAP_EM) * em, text);
                     if (steps.get(steps.size() - 1).clears(number)
                             && placed.stream().noneMatch(other -> overlap(step.outward(), number, other))) {
                         placed.add(number);
@@ -96,7 +97,7 @@ public record LossProfile(
         return placed;
     }
 
-    private static boolean overlap(double outward, Number one, Number other) {
+    private static boolean overlap(double outward, LossNumber one, LossNumber other) {
         double first = one.x() * outward;
         double second = other.x() * outward;
         return first < second + other.width() && second < first + one.width();
@@ -105,7 +106,7 @@ public record LossProfile(
     /** A step of the line: where its level begins, how much it is, which way is out. */
     private record Step(double x, double db, double lossDb, double outward) {
         /** Whether a number ends before this step. */
-        boolean clears(Number number) {
+        boolean clears(LossNumber number) {
             return number.x() * outward + number.width() <= x * outward;
         }
     }

@@ -123,7 +123,8 @@ public final class MapAxis {
         String trimmed = text.strip();
         String unit = parameter().unit();
         boolean united = !unit.isEmpty() && trimmed.endsWith(unit);
-        return WrittenNumber.of(united ? trimmed.substring(0, trimmed.length() - unit.length()).strip() : trimmed);
+        return WrittenNumber.of(
+                united ? trimmed.substring(0, trimmed.length() - unit.length()).strip() : trimmed);
     }
 
     private boolean range(Supplier<Axis> changed) {

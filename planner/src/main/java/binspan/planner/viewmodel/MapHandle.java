@@ -68,8 +68,12 @@ public final class MapHandle {
     public void step(int right, int up, boolean large) {
         Optional<MapPoint> at = shown();
         double share = large ? LARGE_STEP : STEP;
-        double x = at.isPresent() ? stepped(horizontal.axis(), at.get().x(), right * share) : horizontal.axis().at(0.5);
-        double y = at.isPresent() ? stepped(vertical.axis(), at.get().y(), up * share) : vertical.axis().at(0.5);
+        double x = at.isPresent()
+                ? stepped(horizontal.axis(), at.get().x(), right * share)
+                : horizontal.axis().at(0.5);
+        double y = at.isPresent()
+                ? stepped(vertical.axis(), at.get().y(), up * share)
+                : vertical.axis().at(0.5);
         dragTo(x, y);
     }
 
@@ -94,10 +98,14 @@ public final class MapHandle {
     private void move(double x, double y, Object key) {
         double right = settable(horizontal.axis(), x);
         double up = settable(vertical.axis(), y);
-        String what = Words.of("map.change", ParameterWords.name(horizontal.path()), ParameterWords.name(vertical.path()));
-        design.change(what, key, before -> vertical.axis()
-                .parameter()
-                .with(horizontal.axis().parameter().with(before, right), up));
+        String what =
+                Words.of("map.change", ParameterWords.name(horizontal.path()), ParameterWords.name(vertical.path()));
+        design.change(
+                what,
+                key,
+                before -> vertical.axis()
+                        .parameter()
+                        .with(horizontal.axis().parameter().with(before, right), up));
     }
 
     /** A value on the axis with no more digits than one can see. */

@@ -194,7 +194,9 @@ public final class MapModel {
 
     /** Moves the design to the recommended point, if there is one. */
     public void goToRecommended() {
-        recommended().ifPresent(best -> handle.moveTo(best.values().get(0), best.values().get(1)));
+        recommended()
+                .ifPresent(best ->
+                        handle.moveTo(best.values().get(0), best.values().get(1)));
     }
 
     private void together(Runnable changes) {

@@ -130,7 +130,10 @@ final class MapParameters {
     }
 
     private void element(Content content, PathElement element, String path, int index) {
-        String place = element.label().filter(label -> !label.isEmpty()).map(label -> "." + label).orElse("[" + index + "]");
+        String place = element.label()
+                .filter(label -> !label.isEmpty())
+                .map(label -> "." + label)
+                .orElse("[" + index + "]");
         List<Section> sections = new ArrayList<>(content.byType().values());
         sections.removeIf(section -> !section.type().isInstance(element));
         sections.forEach(section -> section(section, path + place + "."));

@@ -77,9 +77,8 @@ record MapQuestion(Scenario base, Axis horizontal, Axis vertical) {
     PointVerdict verdict(double x, double y) {
         RequirementMargins stated = RequirementMargins.of(base.require());
         RequirementMargins margins = SlotFit.room(base) >= 0.0 ? stated.withSlots() : stated;
-        LinkPrediction prediction = new PointEvaluator(
-                        base, List.of(horizontal.parameter(), vertical.parameter()), margins)
-                .at(x, y);
+        LinkPrediction prediction =
+                new PointEvaluator(base, List.of(horizontal.parameter(), vertical.parameter()), margins).at(x, y);
         List<RequirementMargin> each = new ArrayList<>();
         for (int i = 0; i < margins.requirements().size(); i++) {
             each.add(new RequirementMargin(

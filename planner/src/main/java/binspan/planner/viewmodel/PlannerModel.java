@@ -27,11 +27,7 @@ public final class PlannerModel {
      * @param tune best settings
      */
     public record Studies(
-            ReachModel reach,
-            DetectorsModel detectors,
-            ToleranceModel tolerance,
-            SweepModel sweep,
-            TuneModel tune) {}
+            ReachModel reach, DetectorsModel detectors, ToleranceModel tolerance, SweepModel sweep, TuneModel tune) {}
 
     /**
      * The models of a window that begins with a starter.

@@ -39,7 +39,8 @@ public record SliderScale(double lowest, double highest, boolean logarithmic, bo
         }
         if (isCarrier(field)) {
             double width = BAND_SHARE * value;
-            return Optional.of(new SliderScale(inside(range, value - width), inside(range, value + width), false, false));
+            return Optional.of(
+                    new SliderScale(inside(range, value - width), inside(range, value + width), false, false));
         }
         if (range.lowest() < 0.0) {
             double reach = Math.max(2.0 * Math.abs(value), usual(field));
@@ -78,7 +79,9 @@ public record SliderScale(double lowest, double highest, boolean logarithmic, bo
     /** Where a value stands, 0 at the left end to 1 at the right. */
     public double position(double value) {
         double held = Math.max(lowest, Math.min(highest, value));
-        return logarithmic ? Math.log(held / lowest) / Math.log(highest / lowest) : (held - lowest) / (highest - lowest);
+        return logarithmic
+                ? Math.log(held / lowest) / Math.log(highest / lowest)
+                : (held - lowest) / (highest - lowest);
     }
 
     /** The value at a position, rounded to what a hand can mean, never beyond the ends. */

@@ -36,7 +36,8 @@ final class SlotPlots {
     private static SlotPlot side(LinkPrediction prediction, Site site) {
         ClickHistogram clicks =
                 ArrivalHistograms.side(prediction, site == Site.ALICE).all();
-        String inWindow = Figure.counts(within(clicks.recorded(), clicks.bins(), clicks.windows().get(CENTRAL)));
+        String inWindow = Figure.counts(
+                within(clicks.recorded(), clicks.bins(), clicks.windows().get(CENTRAL)));
         String rms = Figure.in(prediction.arrivalRms(site == Site.ALICE) * 1e12, "ps");
         return new SlotPlot(
                 site.path(),
@@ -44,8 +45,14 @@ final class SlotPlots {
                 Words.of("slots.note.side", inWindow, rms),
                 clicks.bins(),
                 List.of(
-                        new Layer(Kind.NOISE, Words.of("slots.layer.noise"), clicks.noise().toArray()),
-                        new Layer(Kind.LIGHT, Words.of("slots.layer.light"), clicks.light().toArray())),
+                        new Layer(
+                                Kind.NOISE,
+                                Words.of("slots.layer.noise"),
+                                clicks.noise().toArray()),
+                        new Layer(
+                                Kind.LIGHT,
+                                Words.of("slots.layer.light"),
+                                clicks.light().toArray())),
                 clicks.windows(),
                 CENTRAL,
                 named(clicks.peaks()));

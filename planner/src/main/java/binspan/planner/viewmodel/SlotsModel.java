@@ -102,8 +102,8 @@ public final class SlotsModel {
 
     private void set(String path, double wanted, Object drag) {
         Parameter parameter = ParameterPaths.find(design.scenario(), path);
-        double value = Math.max(
-                parameter.range().lowest(), Math.min(parameter.range().highest(), wanted));
+        double value =
+                Math.max(parameter.range().lowest(), Math.min(parameter.range().highest(), wanted));
         design.change(Words.of("slots.change." + path), drag, scenario -> parameter.with(scenario, value));
     }
 }

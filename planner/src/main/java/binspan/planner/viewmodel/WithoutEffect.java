@@ -26,9 +26,7 @@ final class WithoutEffect {
         if (!place.parent().startsWith("source")) {
             return Optional.empty();
         }
-        return place.parent().equals("source.pump")
-                ? pump(scenario.source().pump(), name)
-                : source(scenario, name);
+        return place.parent().equals("source.pump") ? pump(scenario.source().pump(), name) : source(scenario, name);
     }
 
     private static Optional<String> pump(Pump pump, String name) {

@@ -2,9 +2,9 @@ package binspan.planner.cli;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import binspan.planner.io.Preset;
 import binspan.planner.Main;
 import binspan.planner.io.OutputFileException;
+import binspan.planner.io.Preset;
 import binspan.planner.io.WholeFile;
 import java.io.IOException;
 import java.io.InputStream;

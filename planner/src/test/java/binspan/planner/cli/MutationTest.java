@@ -3,9 +3,9 @@ package binspan.planner.cli;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.fail;
 
-import binspan.planner.io.Preset;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.Mutations;
+import binspan.planner.io.Preset;
 import binspan.planner.io.ScenarioReader;
 import java.io.ByteArrayInputStream;
 import java.nio.charset.StandardCharsets;

@@ -4,8 +4,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
-import binspan.planner.io.Preset;
 import binspan.planner.io.InvalidScenarioException;
+import binspan.planner.io.Preset;
 import binspan.planner.io.ScenarioReader;
 import binspan.scenario.Scenario;
 import binspan.scenario.Spread;

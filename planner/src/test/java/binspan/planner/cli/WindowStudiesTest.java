@@ -7,6 +7,7 @@ import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.ScenarioReader;
 import binspan.planner.viewmodel.Background;
 import binspan.planner.viewmodel.Design;
+import binspan.planner.viewmodel.Designs;
 import binspan.planner.viewmodel.DetectorsModel;
 import binspan.planner.viewmodel.ParameterChoices;
 import binspan.planner.viewmodel.ReachModel;
@@ -23,7 +24,7 @@ import org.junit.jupiter.api.Test;
 final class WindowStudiesTest {
     private static final String FILE = "../scenarios/kestrel-dam-to-millbrook.json";
 
-    private final Design design = new Design(scenario());
+    private final Design design = Designs.of(scenario());
 
     private static Scenario scenario() {
         try {

@@ -8,7 +8,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.ScenarioReader;
 import binspan.planner.viewmodel.Background;
-import binspan.planner.viewmodel.Design;
+import binspan.planner.viewmodel.Designs;
 import binspan.planner.viewmodel.MapModel;
 import binspan.study.region.MapPoint;
 import java.util.concurrent.TimeUnit;
@@ -45,7 +45,7 @@ final class MapPageTest {
     @Start
     void show(Stage stage) throws InvalidScenarioException {
         model = new MapModel(
-                new Design(ScenarioReader.read("../scenarios/kestrel-dam-to-millbrook.json")),
+                Designs.of(ScenarioReader.read("../scenarios/kestrel-dam-to-millbrook.json")),
                 Background.of(Platform::runLater));
         page = new MapPage(model, look);
         Scene scene = new Scene(page, 630.0, 520.0);
@@ -93,7 +93,9 @@ final class MapPageTest {
         assertEquals(new MapPoint(0.04, 400.0), place());
         assertNotNull(model.reader().pickedProperty().get());
         WaitForAsyncUtils.waitFor(
-                30, TimeUnit.SECONDS, () -> page.lookup("#map-plane").getAccessibleText().contains("NOT MET"));
+                30,
+                TimeUnit.SECONDS,
+                () -> page.lookup("#map-plane").getAccessibleText().contains("NOT MET"));
         robot.clickOn("#map-move");
         assertEquals(0.25, model.horizontal().axis().share(place().x()), 0.01);
         assertEquals(0.25, model.vertical().axis().share(place().y()), 0.01);

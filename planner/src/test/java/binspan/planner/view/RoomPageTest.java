@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import binspan.planner.viewmodel.Background;
 import binspan.planner.viewmodel.Design;
+import binspan.planner.viewmodel.Designs;
 import binspan.planner.viewmodel.HeldBackground;
 import binspan.planner.viewmodel.LinkPart;
 import binspan.planner.viewmodel.PartOfPath;
@@ -71,7 +72,7 @@ final class RoomPageTest {
 
     @Test
     void showsAllThatTheModelFound(FxRobot robot) {
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         VerdictModel model = show(robot, design);
         assertThat(table(robot).getItems())
                 .isEqualTo(model.fullProperty().get().rows())
@@ -90,7 +91,7 @@ final class RoomPageTest {
 
     @Test
     void rowSelectsItsPartOfTheLink(FxRobot robot) {
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         show(robot, design);
         List<VerdictRoom.Row> rows = table(robot).getItems();
         for (VerdictRoom.Row row : rows) {
@@ -103,7 +104,7 @@ final class RoomPageTest {
 
     @Test
     void rowsAreChosenByMouseAndKeyboard(FxRobot robot) {
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         show(robot, design);
         Node top = robot.lookup(".table-row-cell").nth(0).query();
         robot.clickOn(top);
@@ -128,7 +129,7 @@ final class RoomPageTest {
     /** New figures of a row that is selected must not take the selection back from another part. */
     @Test
     void renewedRowsDoNotSelect(FxRobot robot) {
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         show(robot, design);
         robot.interact(() -> table(robot).getSelectionModel().select(0));
         String path = table(robot).getSelectionModel().getSelectedItem().path();
@@ -140,7 +141,7 @@ final class RoomPageTest {
 
     @Test
     void copiesItselfAsText(FxRobot robot) {
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         VerdictModel model = show(robot, design);
         robot.interact(() -> table(robot).requestFocus());
         robot.push(KeyCode.SHORTCUT, KeyCode.C);
@@ -154,7 +155,7 @@ final class RoomPageTest {
     @Test
     void emptyStatesAreWords(FxRobot robot) {
         Scenario failing = VerdictLinks.failing();
-        show(robot, new Design(failing));
+        show(robot, Designs.of(failing));
         assertThat(((Label) table(robot).getPlaceholder()).getText()).isEqualTo("None: no stated requirement is met.");
         assertThat(texts(robot, "#room-stability")).contains("No limit was found.");
         assertThat(texts(robot, "#room-changes")).contains("Nothing has changed since the link was saved.");
@@ -162,7 +163,7 @@ final class RoomPageTest {
 
     @Test
     void changesAreListed(FxRobot robot) {
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         show(robot, design);
         robot.interact(() -> set(design, "timing.windowWidthPs", 350.0));
         assertThat(texts(robot, "#room-changes"))
@@ -173,7 +174,7 @@ final class RoomPageTest {
 
     @Test
     void everyBlockIsReachedByTheKeyboard(FxRobot robot) {
-        show(robot, new Design(VerdictLinks.meeting()));
+        show(robot, Designs.of(VerdictLinks.meeting()));
         robot.interact(() -> table(robot).requestFocus());
         List<String> visited = new ArrayList<>();
         for (int i = 0; i < 6; i++) {
@@ -190,7 +191,7 @@ final class RoomPageTest {
     @Test
     void roomOfAnOlderLinkIsDimmed(FxRobot robot) throws TimeoutException {
         HeldBackground held = new HeldBackground();
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         VerdictModel model = new VerdictModel(design, held.background());
         show(robot, model, design);
         assertThat(((Label) table(robot).getPlaceholder()).getText()).startsWith("computing");

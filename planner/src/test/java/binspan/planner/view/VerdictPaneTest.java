@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import binspan.planner.viewmodel.Background;
 import binspan.planner.viewmodel.Design;
+import binspan.planner.viewmodel.Designs;
 import binspan.planner.viewmodel.HeldBackground;
 import binspan.planner.viewmodel.RequirementRow;
 import binspan.planner.viewmodel.VerdictLinks;
@@ -59,7 +60,7 @@ final class VerdictPaneTest {
     }
 
     private VerdictPane show(FxRobot robot, Scenario scenario) {
-        return show(robot, new VerdictModel(new Design(scenario), Background.NONE), 100);
+        return show(robot, new VerdictModel(Designs.of(scenario), Background.NONE), 100);
     }
 
     private static void set(Design design, String path, double value) {
@@ -68,7 +69,7 @@ final class VerdictPaneTest {
 
     @Test
     void rowForEachRequirement(FxRobot robot) {
-        Design design = new Design(VerdictLinks.withAll());
+        Design design = Designs.of(VerdictLinks.withAll());
         VerdictModel model = new VerdictModel(design, Background.NONE);
         show(robot, model, 100);
         assertThat(robot.lookup(".requirement").queryAll()).hasSize(8);
@@ -111,7 +112,7 @@ final class VerdictPaneTest {
     @Test
     void eightRequirementsAndAllChangesFitWithoutScrolling(FxRobot robot) {
         for (int scale : new int[] {100, 200}) {
-            Design design = new Design(VerdictLinks.withAll());
+            Design design = Designs.of(VerdictLinks.withAll());
             VerdictModel model = new VerdictModel(design, Background.NONE);
             set(design, "timing.windowWidthPs", 300.0);
             VerdictPane pane = show(robot, model, scale);
@@ -133,7 +134,7 @@ final class VerdictPaneTest {
                 "stonebridge-to-lower-weir"
             })
     void shippedLinksFitBeforeAndAfterAChange(String name, FxRobot robot) {
-        Design design = new Design(VerdictLinks.shipped(name));
+        Design design = Designs.of(VerdictLinks.shipped(name));
         VerdictPane pane = show(robot, new VerdictModel(design, Background.NONE), 100);
         assertThat(cut(robot, pane)).isEmpty();
         robot.interact(() -> set(design, "link.lengthKm", 200.0));
@@ -172,7 +173,7 @@ final class VerdictPaneTest {
 
     @Test
     void followsTheDesign(FxRobot robot) {
-        Design design = new Design(VerdictLinks.failing());
+        Design design = Designs.of(VerdictLinks.failing());
         show(robot, new VerdictModel(design, Background.NONE), 100);
         assertThat(headline(robot)).isEqualTo("\u2717 DOES NOT MEET 6 of 6 requirements");
         robot.interact(() -> set(design, "timing.cableTemperatureStepK", 0.05));
@@ -230,7 +231,7 @@ final class VerdictPaneTest {
     @Test
     void longComputingIsVisible(FxRobot robot) throws TimeoutException {
         HeldBackground held = new HeldBackground();
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         VerdictModel model = new VerdictModel(design, held.background());
         held.finish();
         show(robot, model, 100);

@@ -28,8 +28,7 @@ public final class EditedForm {
 
     private EditedForm(ScenarioDocument document) {
         design = new Design(document);
-        form = new FormModel(
-                design, path -> design.documentProperty().get().states(path), design::apply);
+        form = new FormModel(design, path -> design.documentProperty().get().states(path), design::apply);
     }
 
     /** A form over a text. */

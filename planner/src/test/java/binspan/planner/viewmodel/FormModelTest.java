@@ -31,7 +31,8 @@ class FormModelTest {
             if (content.byType().isEmpty()) {
                 paths.add(path);
             } else {
-                content.byType().forEach((type, inner) -> collect(inner, type.isEmpty() ? path : path + "." + type, paths));
+                content.byType()
+                        .forEach((type, inner) -> collect(inner, type.isEmpty() ? path : path + "." + type, paths));
             }
         }
     }
@@ -132,7 +133,8 @@ class FormModelTest {
         EditedForm form = new EditedForm(KESTREL).select(DUCT);
         String before = form.text();
         form.field("alice.path[1].label").textProperty().set("dam patch panel");
-        String expected = refusal(before.replace("\"label\": \"upper duct\"", "\"label\": \"dam patch panel\""), "label");
+        String expected =
+                refusal(before.replace("\"label\": \"upper duct\"", "\"label\": \"dam patch panel\""), "label");
         assertThat(form.field("alice.path[1].label").errorProperty().get()).contains(expected);
     }
 
@@ -145,7 +147,8 @@ class FormModelTest {
             field.textProperty().set(typed);
         }
         assertThat(field.errorProperty().get()).isEmpty();
-        assertThat(form.design().scenario().alice().detectors().get(0).efficiency()).isEqualTo(0.75);
+        assertThat(form.design().scenario().alice().detectors().get(0).efficiency())
+                .isEqualTo(0.75);
         assertThat(field.changedProperty().get()).isTrue();
         field.settle();
         assertThat(form.text()).isEqualTo(before.replaceFirst("0.82", "0.75"));
@@ -164,7 +167,8 @@ class FormModelTest {
         field.textProperty().set("0.6");
         field.settle();
         form.design().undo();
-        assertThat(form.design().scenario().alice().detectors().get(0).efficiency()).isEqualTo(0.7);
+        assertThat(form.design().scenario().alice().detectors().get(0).efficiency())
+                .isEqualTo(0.7);
     }
 
     @Test
@@ -201,14 +205,17 @@ class FormModelTest {
         assertThat(field.statedProperty().get()).isFalse();
         assertThat(field.promptProperty().get()).isEqualTo("0.8");
         assertThat(field.defaultProperty().get()).isEqualTo("of the detector class: 0.8");
-        assertThat(form.design().scenario().alice().detectors().get(0).efficiency()).isEqualTo(0.8);
+        assertThat(form.design().scenario().alice().detectors().get(0).efficiency())
+                .isEqualTo(0.8);
     }
 
     /** 0.22 dB/km at 1550 nm and 0.35 at 1310 nm of the class, on a straight line between: 0.2221 at 1546.12 nm. */
     @Test
     void theDefaultOfTheFibreClassIsSaidWithItsNumber() {
         EditedForm form = new EditedForm(KESTREL).select(DUCT);
-        assertThat(form.field("alice.path[1].attenuationDbPerKm").defaultProperty().get())
+        assertThat(form.field("alice.path[1].attenuationDbPerKm")
+                        .defaultProperty()
+                        .get())
                 .isEqualTo("of the fibre class: 0.222 dB/km");
     }
 
@@ -219,7 +226,8 @@ class FormModelTest {
         AlternativesModel centre = form.alternatives("source.signal.wavelengthNm");
         assertThat(centre.shownProperty().get()).isZero();
         centre.choose(1);
-        double frequency = form.field("source.signal.frequencyTHz").valueProperty().get();
+        double frequency =
+                form.field("source.signal.frequencyTHz").valueProperty().get();
         assertThat(frequency).isCloseTo(299_792.458 / 1546.12, within(1e-5));
         assertThat(form.text()).doesNotContain("1546.12");
         centre.choose(2);
@@ -245,10 +253,14 @@ class FormModelTest {
         AlternativesModel dark = form.alternatives("alice.detectors[0].gate");
         dark.choose(1);
         assertThat(dark.errorProperty().get()).isEmpty();
-        assertThat(form.field("alice.detectors[0].gate.darkProbability").textProperty().get())
+        assertThat(form.field("alice.detectors[0].gate.darkProbability")
+                        .textProperty()
+                        .get())
                 .isEqualTo("9e-8");
         dark.choose(0);
-        assertThat(form.field("alice.detectors[0].darkCountsPerSecond").textProperty().get())
+        assertThat(form.field("alice.detectors[0].darkCountsPerSecond")
+                        .textProperty()
+                        .get())
                 .isEqualTo("90");
     }
 
@@ -260,7 +272,10 @@ class FormModelTest {
         assertThat(dark.errorProperty().get())
                 .isEqualTo("alice.detectors[0].gate: "
                         + refusal(
-                                form.text().replaceFirst("\"darkCountsPerSecond\": 100", "\"gate\": {\"darkProbability\": 1e-7}"),
+                                form.text()
+                                        .replaceFirst(
+                                                "\"darkCountsPerSecond\": 100",
+                                                "\"gate\": {\"darkProbability\": 1e-7}"),
                                 "gate"));
         assertThat(dark.shownProperty().get()).isZero();
     }
@@ -336,7 +351,9 @@ class FormModelTest {
         EditedForm form = new EditedForm("fernhill-shared-trunk").select(DUCT);
         AddRow add = (AddRow) form.form().rows().get(form.form().rows().size() - 1);
         add.add();
-        assertThat(form.field("alice.path[1].classicalChannels[2].launchDbm").valueProperty().get())
+        assertThat(form.field("alice.path[1].classicalChannels[2].launchDbm")
+                        .valueProperty()
+                        .get())
                 .isZero();
         GroupRow third = form.form().rows().stream()
                 .filter(row -> row instanceof GroupRow group && group.title().equals("classical channel 3"))
@@ -373,8 +390,10 @@ class FormModelTest {
         EditedForm form = new EditedForm("orchard-lane-access").select(PORT);
         ClassRow row = (ClassRow) form.form().rows().get(1);
         row.operate(row.operatingPoints().indexOf("10 %, 20 us"));
-        assertThat(form.design().scenario().alice().detectors().get(0).efficiency()).isEqualTo(0.10);
-        assertThat(form.design().scenario().alice().detectors().get(0).darkCountsPerSecond()).isEqualTo(600.0);
+        assertThat(form.design().scenario().alice().detectors().get(0).efficiency())
+                .isEqualTo(0.10);
+        assertThat(form.design().scenario().alice().detectors().get(0).darkCountsPerSecond())
+                .isEqualTo(600.0);
         form.design().undo();
         assertThat(form.text()).isEqualTo(EditedForm.text("orchard-lane-access"));
     }

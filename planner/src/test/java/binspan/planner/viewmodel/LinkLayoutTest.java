@@ -5,7 +5,7 @@ import static org.assertj.core.api.Assertions.within;
 
 import binspan.planner.viewmodel.LinkItem.Kind;
 import binspan.planner.viewmodel.LinkLayout.Column;
-import binspan.planner.viewmodel.LossProfile.Number;
+import binspan.planner.viewmodel.LossProfile.LossNumber;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.Comparator;
@@ -191,7 +191,7 @@ final class LinkLayoutTest {
     void numbersAtTheProfileDoNotOverlap(Drawn drawn) {
         for (Site site : Site.values()) {
             double out = site == Site.ALICE ? -1.0 : 1.0;
-            List<Number> numbers = LossProfile.of(site, drawn.items(), layout(drawn), EM).numbers().stream()
+            List<LossNumber> numbers = LossProfile.of(site, drawn.items(), layout(drawn), EM).numbers().stream()
                     .sorted(Comparator.comparingDouble(number -> number.x() * out))
                     .toList();
             assertThat(numbers).isNotEmpty();

@@ -18,7 +18,6 @@ import org.junit.jupiter.params.provider.FieldSource;
 
 /** The drawn link: what stands in it, what its losses add up to, what its commands do to the document. */
 final class LinkModelTest {
-    private static final List<String> SHIPPED = LinkBench.SHIPPED;
     private static final String KESTREL = "kestrel-dam-to-millbrook";
 
     @Test
@@ -69,7 +68,7 @@ final class LinkModelTest {
 
     /** Against the predictor, which adds the path up for itself. */
     @ParameterizedTest
-    @FieldSource("SHIPPED")
+    @FieldSource("binspan.planner.viewmodel.LinkBench#SHIPPED")
     void lossesAddUpToThePredictedLossOfTheArm(String name) {
         LinkBench bench = new LinkBench(name);
         LinkPrediction prediction = LinkPredictor.predict(bench.design().scenario());

@@ -46,7 +46,7 @@ final class MapModelTest {
 
     @BeforeEach
     void open() {
-        design = new Design(scenario("kestrel-dam-to-millbrook.json"));
+        design = Designs.of(scenario("kestrel-dam-to-millbrook.json"));
         model = new MapModel(design, work.background(), 0);
     }
 
@@ -59,7 +59,9 @@ final class MapModelTest {
     }
 
     private double value(String path) {
-        return ParameterPaths.find(design.scenario(), path).value(design.scenario()).orElseThrow();
+        return ParameterPaths.find(design.scenario(), path)
+                .value(design.scenario())
+                .orElseThrow();
     }
 
     private void set(String path, double value) {
@@ -114,12 +116,10 @@ final class MapModelTest {
     private double margin(Requirement requirement, double x, double y) {
         Axis across = model.horizontal().axis();
         Axis up = model.vertical().axis();
-        PointEvaluator evaluator =
-                new PointEvaluator(design.scenario(), List.of(across.parameter(), up.parameter()));
+        PointEvaluator evaluator = new PointEvaluator(design.scenario(), List.of(across.parameter(), up.parameter()));
         RequirementMargins margins = evaluator.margins();
         return margins.margin(
-                margins.requirements().indexOf(requirement),
-                evaluator.at(extended(across, x), extended(up, y)));
+                margins.requirements().indexOf(requirement), evaluator.at(extended(across, x), extended(up, y)));
     }
 
     private static double extended(Axis axis, double share) {
@@ -137,8 +137,10 @@ final class MapModelTest {
                 List.of(
                         model.horizontal().axis().parameter(),
                         model.vertical().axis().parameter()));
-        for (double x : new double[] {sides.get(0).from().value(), sides.get(0).to().value()}) {
-            for (double y : new double[] {sides.get(1).from().value(), sides.get(1).to().value()}) {
+        for (double x :
+                new double[] {sides.get(0).from().value(), sides.get(0).to().value()}) {
+            for (double y :
+                    new double[] {sides.get(1).from().value(), sides.get(1).to().value()}) {
                 assertTrue(evaluator.leastMargin(x, y) >= 0.0);
             }
         }
@@ -321,9 +323,22 @@ final class MapModelTest {
         OptionalDouble none = OptionalDouble.empty();
         Scenario s = design.scenario();
         Requirements nothing = new Requirements(none, none, none, none, none, none, none, none);
-        assertTrue(design.change("requirements", null, before -> new Scenario(
-                s.formatVersion(), s.name(), s.imbalanceNs(), s.source(), s.alice(), s.bob(), s.timing(),
-                s.protocol(), s.acquisition(), nothing, s.spread(), s.provenance())));
+        assertTrue(design.change(
+                "requirements",
+                null,
+                before -> new Scenario(
+                        s.formatVersion(),
+                        s.name(),
+                        s.imbalanceNs(),
+                        s.source(),
+                        s.alice(),
+                        s.bob(),
+                        s.timing(),
+                        s.protocol(),
+                        s.acquisition(),
+                        nothing,
+                        s.spread(),
+                        s.provenance())));
         work.finish();
         assertTrue(model.messageProperty().get().startsWith("the scenario states no requirement"));
         assertNull(model.shapeProperty().get());
@@ -355,11 +370,14 @@ final class MapModelTest {
         assertEquals(300.0, value(WINDOW));
         model.reader().hover(0.02, 500.0);
         work.finish();
-        assertEquals(MapReading.Kind.UNDER_POINTER, model.reader().readingProperty().get().kind());
+        assertEquals(
+                MapReading.Kind.UNDER_POINTER,
+                model.reader().readingProperty().get().kind());
         model.reader().leave();
         model.reader().unpick();
         work.finish();
-        assertEquals(MapReading.Kind.PRESENT, model.reader().readingProperty().get().kind());
+        assertEquals(
+                MapReading.Kind.PRESENT, model.reader().readingProperty().get().kind());
         assertEquals(300.0, model.reader().readingProperty().get().y());
     }
 
@@ -390,10 +408,9 @@ final class MapModelTest {
         assertTrue(offered.size() > 60, offered.size() + " parameters");
         for (String path : offered) {
             Axis axis = MapRanges.of(scenario, MapParameters.find(scenario, path));
-            Axis other = MapRanges.of(
-                    scenario, MapParameters.find(scenario, path.equals(WINDOW) ? LENGTH : WINDOW));
-            MapShape shape = MapShape.of(
-                    MapQuestion.of(scenario, axis, other).region(3).survey(Execution.SINGLE));
+            Axis other = MapRanges.of(scenario, MapParameters.find(scenario, path.equals(WINDOW) ? LENGTH : WINDOW));
+            MapShape shape =
+                    MapShape.of(MapQuestion.of(scenario, axis, other).region(3).survey(Execution.SINGLE));
             assertFalse(shape.contours().isEmpty(), path);
         }
     }

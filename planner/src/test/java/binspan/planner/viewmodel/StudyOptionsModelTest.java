@@ -2,6 +2,7 @@ package binspan.planner.viewmodel;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import binspan.planner.document.Change;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.ScenarioReader;
 import binspan.planner.viewmodel.StudyRun.State;
@@ -12,14 +13,13 @@ import binspan.scenario.PumpMode;
 import binspan.scenario.Scenario;
 import binspan.scenario.SpreadShape;
 import java.util.List;
-import java.util.Map;
 import org.junit.jupiter.api.Test;
 
 /** Options of the studies: what they refuse, how they follow the link, what they take over into it. */
 final class StudyOptionsModelTest {
     private static final String WINDOW = "timing.windowWidthPs";
 
-    private final Design design = new Design(shipped("kestrel-dam-to-millbrook"));
+    private final Design design = Designs.of(shipped("kestrel-dam-to-millbrook"));
 
     private static Scenario shipped(String name) {
         try {
@@ -130,29 +130,12 @@ final class StudyOptionsModelTest {
 
     @Test
     void aLinkWithoutSpreadsSaysWhatToDo() {
-        ToleranceModel tolerance = new ToleranceModel(new Design(unspread()), Background.NONE);
+        ToleranceModel tolerance = new ToleranceModel(unspread(), Background.NONE);
         assertThat(tolerance.rows()).isEmpty();
         assertThat(tolerance.problemProperty().get())
                 .contains("state them in the scenario's spread section or add one");
         tolerance.add(WINDOW, SpreadShape.UNIFORM, "10");
         assertThat(tolerance.problemProperty().get()).isEmpty();
-    }
-
-    private Scenario unspread() {
-        Scenario s = design.scenario();
-        return new Scenario(
-                s.formatVersion(),
-                s.name(),
-                s.imbalanceNs(),
-                s.source(),
-                s.alice(),
-                s.bob(),
-                s.timing(),
-                s.protocol(),
-                s.acquisition(),
-                s.require(),
-                Map.of(),
-                s.provenance());
     }
 
     @Test
@@ -175,7 +158,7 @@ final class StudyOptionsModelTest {
                 .filter(each -> each.source().pump().mode() == PumpMode.CONTINUOUS)
                 .findFirst()
                 .orElseThrow();
-        DetectorsModel detectors = new DetectorsModel(new Design(continuous), Background.NONE);
+        DetectorsModel detectors = new DetectorsModel(Designs.of(continuous), Background.NONE);
         assertThat(detectors.problemProperty().get()).isEmpty();
         detectors.detectorClasses().add(DetectorClass.INGAAS_GATED);
         assertThat(detectors.problemProperty().get()).contains("has no slots to gate");
@@ -227,5 +210,11 @@ final class StudyOptionsModelTest {
         assertThat(sweep.run().resultProperty().get().found().rows()).isEqualTo(12);
         sweep.second().pathProperty().set(WINDOW);
         assertThat(sweep.problemProperty().get()).isEqualTo(WINDOW + ": found twice; allowed once");
+    }
+
+    private static Design unspread() {
+        Design unspread = new Design(Designs.shipped("kestrel-dam-to-millbrook"));
+        unspread.edit("no spreads", List.of(new Change.Remove("spread")));
+        return unspread;
     }
 }

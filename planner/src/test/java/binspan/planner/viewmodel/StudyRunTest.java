@@ -32,7 +32,7 @@ final class StudyRunTest {
     private static final long MILLI = 1_000_000L;
 
     private final Scenario kestrel = scenario();
-    private final Design design = new Design(kestrel);
+    private final Design design = Designs.of(kestrel);
     private final Deque<Runnable> work = new ArrayDeque<>();
     private final Deque<Runnable> shown = new ArrayDeque<>();
     private final AtomicLong nanos = new AtomicLong();

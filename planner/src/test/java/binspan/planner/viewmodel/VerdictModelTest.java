@@ -40,7 +40,7 @@ final class VerdictModelTest {
     @Test
     void sheetIsThatOfTheCheck() {
         Scenario scenario = VerdictLinks.withAll();
-        VerdictSheet sheet = of(new Design(scenario)).sheetProperty().get();
+        VerdictSheet sheet = of(Designs.of(scenario)).sheetProperty().get();
         LinkCheck check = LinkCheck.of(scenario);
         assertThat(sheet.requirements()).isEqualTo(RequirementRow.of(check, check));
         assertThat(sheet.cautions()).isEqualTo(check.cautions());
@@ -52,7 +52,7 @@ final class VerdictModelTest {
     @Test
     void windowAndCommandLineSayTheSame() {
         Scenario scenario = VerdictLinks.meeting();
-        VerdictModel model = of(new Design(scenario));
+        VerdictModel model = of(Designs.of(scenario));
         String page = Verdict.text(LinkCheck.of(scenario), TextStyle.PLAIN_UNICODE);
         assertThat(page).contains(model.sheetProperty().get().headline());
         model.sheetProperty()
@@ -74,7 +74,7 @@ final class VerdictModelTest {
     @Test
     void budgetStepsDownFromOneToTheRawVisibility() {
         Scenario scenario = VerdictLinks.meeting();
-        Budget budget = of(new Design(scenario)).sheetProperty().get().budget();
+        Budget budget = of(Designs.of(scenario)).sheetProperty().get().budget();
         double raw = LinkCheck.of(scenario).prediction().fringe().raw();
         double reached = 1.0;
         for (Budget.Step step : budget.steps()) {
@@ -91,7 +91,7 @@ final class VerdictModelTest {
     @Test
     void figuresAreThoseOfTheCheck() {
         Scenario scenario = VerdictLinks.meeting();
-        VerdictSheet sheet = of(new Design(scenario)).sheetProperty().get();
+        VerdictSheet sheet = of(Designs.of(scenario)).sheetProperty().get();
         LinkCheck check = LinkCheck.of(scenario);
         double singles = check.prediction().counts().loadsA().stream()
                 .mapToDouble(load -> load.recordedPerSecond())
@@ -108,9 +108,9 @@ final class VerdictModelTest {
     @Test
     void errorRatesAreShownOnce() {
         List<FigureGroup> required =
-                of(new Design(VerdictLinks.withAll())).sheetProperty().get().figures();
+                of(Designs.of(VerdictLinks.withAll())).sheetProperty().get().figures();
         List<FigureGroup> unjudged =
-                of(new Design(VerdictLinks.unjudged())).sheetProperty().get().figures();
+                of(Designs.of(VerdictLinks.unjudged())).sheetProperty().get().figures();
         assertThat(required).hasSize(4);
         assertThat(unjudged).hasSize(5);
         assertThat(unjudged.get(4).rows()).hasSize(2);
@@ -119,7 +119,7 @@ final class VerdictModelTest {
     @Test
     void changesAreAgainstTheSavedLink() {
         Scenario saved = VerdictLinks.withAll();
-        Design design = new Design(saved);
+        Design design = Designs.of(saved);
         VerdictModel model = of(design);
         window(design, 300.0);
         LinkCheck before = LinkCheck.of(saved);
@@ -144,7 +144,7 @@ final class VerdictModelTest {
 
     @Test
     void singlesChangeForNeitherBetterNorWorse() {
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         VerdictModel model = of(design);
         design.change("pairs", null, s -> VerdictLinks.with(s, "source.meanPairsPerCycle", 0.02));
         ChangeMark change = figure(model.sheetProperty().get(), "singles, bob").change();
@@ -154,7 +154,7 @@ final class VerdictModelTest {
 
     @Test
     void figureThatWasNotThereIsToldSo() {
-        Design design = new Design(VerdictLinks.failing());
+        Design design = Designs.of(VerdictLinks.failing());
         VerdictModel model = of(design);
         design.change("step", null, s -> VerdictLinks.with(s, "timing.cableTemperatureStepK", 0.05));
         ChangeMark change =
@@ -165,7 +165,7 @@ final class VerdictModelTest {
     @Test
     void roomIsThatOfTheCheckTightestFirst() {
         Scenario scenario = VerdictLinks.meeting();
-        VerdictRoom room = of(new Design(scenario)).fullProperty().get();
+        VerdictRoom room = of(Designs.of(scenario)).fullProperty().get();
         LinkCheck check = LinkCheck.of(scenario);
         assertThat(room.rows().stream().map(VerdictRoom.Row::path).toList())
                 .containsExactlyInAnyOrderElementsOf(
@@ -186,10 +186,10 @@ final class VerdictModelTest {
 
     @Test
     void emptyStatesAreWords() {
-        VerdictModel failing = of(new Design(VerdictLinks.failing()));
+        VerdictModel failing = of(Designs.of(VerdictLinks.failing()));
         assertThat(failing.fullProperty().get().none()).isEqualTo("None: no stated requirement is met.");
         assertThat(failing.fullProperty().get().tightest()).isEmpty();
-        VerdictModel unjudged = of(new Design(VerdictLinks.unjudged()));
+        VerdictModel unjudged = of(Designs.of(VerdictLinks.unjudged()));
         assertThat(unjudged.sheetProperty().get().headline()).startsWith("No requirement is stated");
         assertThat(unjudged.sheetProperty().get().judged()).isFalse();
         assertThat(unjudged.fullProperty().get().none()).startsWith("State a requirement");
@@ -198,7 +198,7 @@ final class VerdictModelTest {
     @Test
     void onePieceOfQuickWorkAtATime() {
         HeldBackground held = new HeldBackground();
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         new VerdictModel(design, held.background());
         for (double width : new double[] {390.0, 380.0, 370.0}) {
             window(design, width);
@@ -214,7 +214,7 @@ final class VerdictModelTest {
     @Test
     void sheetIsShownOnTheWayOfADragAndMarkedOld() {
         HeldBackground held = new HeldBackground();
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         VerdictModel model = new VerdictModel(design, held.background());
         Scenario first = design.scenario();
         assertThat(model.sheetProperty().get()).isNull();
@@ -234,7 +234,7 @@ final class VerdictModelTest {
     @Test
     void roomOfAnOlderStateIsMarkedOld() {
         HeldBackground held = new HeldBackground();
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         VerdictModel model = new VerdictModel(design, held.background());
         held.finish();
         assertThat(model.fullStaleProperty().get()).isFalse();
@@ -252,7 +252,7 @@ final class VerdictModelTest {
     @Test
     void undoneChangeIsNotOld() {
         HeldBackground held = new HeldBackground();
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         VerdictModel model = new VerdictModel(design, held.background());
         held.finish();
         window(design, 350.0);
@@ -268,7 +268,7 @@ final class VerdictModelTest {
     void newestWinsInAnyOrder() {
         for (int seed = 0; seed < 6; seed++) {
             HeldBackground held = new HeldBackground();
-            Design design = new Design(VerdictLinks.unjudged());
+            Design design = Designs.of(VerdictLinks.unjudged());
             VerdictModel model = new VerdictModel(design, held.background());
             List<Double> sheets = new ArrayList<>();
             List<Double> rooms = new ArrayList<>();
@@ -297,7 +297,7 @@ final class VerdictModelTest {
 
     @Test
     void textHoldsAllOfThePage() {
-        Design design = new Design(VerdictLinks.meeting());
+        Design design = Designs.of(VerdictLinks.meeting());
         VerdictModel model = of(design);
         window(design, 350.0);
         VerdictSheet sheet = model.sheetProperty().get();
