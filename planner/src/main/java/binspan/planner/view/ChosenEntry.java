@@ -8,7 +8,6 @@ import javafx.geometry.Pos;
 import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
-import javafx.scene.control.Tooltip;
 import javafx.scene.layout.HBox;
 import javafx.util.StringConverter;
 
@@ -35,7 +34,6 @@ final class ChosenEntry extends HBox {
         });
         Button apply = new Button(Words.of("studies.apply"));
         apply.setId("compare-apply");
-        apply.setTooltip(new Tooltip(Words.of("studies.apply.stale")));
         apply.disableProperty()
                 .bind(model.run().staleProperty().or(box.valueProperty().isNull()));
         apply.setOnAction(event -> model.apply(box.getValue()));

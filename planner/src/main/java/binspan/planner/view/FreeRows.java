@@ -15,11 +15,12 @@ import javafx.scene.control.CheckBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
 import javafx.scene.control.Tooltip;
+import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
 
 /** What a search may set: each parameter with a tick and, where there is room, its range; and further ones to add. */
 final class FreeRows extends VBox {
-    private static final double NUMBER = 6.0;
+    private static final double NUMBER = 5.0;
 
     private final String study;
     private final FreeParameters free;
@@ -103,6 +104,8 @@ final class FreeRows extends VBox {
         add.setId(study + "-add");
         add.disableProperty().bind(path.isEmpty());
         add.setOnAction(event -> free.add(path.get().strip()));
-        return row.with(box, add);
+        HBox more = new HBox(box, add);
+        more.getStyleClass().add("study-option");
+        return row.with(more);
     }
 }

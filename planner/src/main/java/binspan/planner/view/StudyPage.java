@@ -44,7 +44,7 @@ public final class StudyPage extends BorderPane {
      * @param look theme and scale
      * @param files asks where to write
      */
-    StudyPage(StudyModel<?> model, Node options, Look look, FileQuestions files) {
+    StudyPage(StudyModel<?> model, Region options, Look look, FileQuestions files) {
         this.model = model;
         this.picture = new StudyPicture(look, model.background());
         this.table = new StudyTableView(look, model.name() + "-table");
@@ -52,7 +52,8 @@ public final class StudyPage extends BorderPane {
         getStyleClass().add("study-page");
         setId(model.name() + "-page");
         picture.setId(model.name() + "-picture");
-        setTop(new VBox(options, new StudyStatus(model), problems(), failures(), stale()));
+        setTop(new VBox(
+                new OptionsRoom(options, this, present()), new StudyStatus(model), problems(), failures(), stale()));
         getTop().getStyleClass().add("study-top");
         setCenter(new StackPane(empty(), result(files)));
         model.run().resultProperty().addListener((source, before, after) -> show(after));

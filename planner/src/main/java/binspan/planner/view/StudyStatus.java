@@ -105,6 +105,7 @@ final class StudyStatus extends HBox {
         line.textProperty()
                 .bind(Bindings.createStringBinding(
                         this::words, run.stateProperty(), run.progressProperty(), run.elapsedProperty()));
+        line.setMinWidth(Region.USE_PREF_SIZE);
         HBox.setHgrow(line, Priority.ALWAYS);
         return line;
     }

@@ -3,6 +3,7 @@ package binspan.planner.view;
 import binspan.planner.viewmodel.TableLines;
 import binspan.planner.viewmodel.Words;
 import java.util.List;
+import java.util.regex.Pattern;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.collections.FXCollections;
 import javafx.geometry.Pos;
@@ -15,7 +16,7 @@ import javafx.scene.layout.BorderPane;
 
 /** The rows of a study; only those on the screen are made. */
 final class StudyTableView extends BorderPane {
-    private static final double WIDEST = 14.0;
+    private static final double WIDEST = 17.0;
     private static final double NARROWEST = 5.0;
     private static final double CHARACTER = 0.58;
     private static final double EDGES = 1.6;
@@ -72,10 +73,20 @@ final class StudyTableView extends BorderPane {
     private void fit() {
         for (int i = 0; i < columns.size(); i++) {
             TableColumn<List<Object>, ?> column = table.getColumns().get(i);
-            double words = Math.max(longest(i), columns.get(i).title().length() / 2.0);
+            double words = Math.max(longest(i), headed(columns.get(i).title()));
             double ems = Math.max(NARROWEST, Math.min(WIDEST, words * CHARACTER + EDGES));
             column.setPrefWidth(look.em(ems));
         }
+    }
+
+    /** Characters that a title needs side by side: two lines, no word broken. */
+    private static double headed(String title) {
+        int word = Pattern.compile(" ")
+                .splitAsStream(title)
+                .mapToInt(String::length)
+                .max()
+                .orElse(0);
+        return Math.max(word + 1.0, title.length() / 2.0 + 2.0);
     }
 
     private int longest(int index) {

@@ -4,7 +4,6 @@ import binspan.planner.viewmodel.TuneModel;
 import binspan.planner.viewmodel.Words;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
-import javafx.scene.control.Tooltip;
 import javafx.scene.layout.FlowPane;
 
 /** What the best settings would change, and the button that does it. */
@@ -14,7 +13,6 @@ final class TunedSteps extends FlowPane {
     TunedSteps(TuneModel model) {
         getStyleClass().add("study-apply");
         apply.setId("tune-apply");
-        apply.setTooltip(new Tooltip(Words.of("studies.apply.stale")));
         apply.disableProperty().bind(model.run().staleProperty());
         apply.setOnAction(event -> model.apply());
         model.run().resultProperty().addListener((source, before, after) -> show(after.found()));
