@@ -1,14 +1,8 @@
 package binspan.planner.viewmodel;
 
 import binspan.planner.document.Change;
-import binspan.planner.document.RefusedEditException;
 import binspan.planner.document.ScenarioDocument;
-import binspan.planner.io.InvalidScenarioException;
 import binspan.scenario.PathElement;
-import java.io.IOException;
-import java.io.UncheckedIOException;
-import java.nio.file.Files;
-import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -34,19 +28,13 @@ public final class LinkBench {
 
     /** The bench of a document. */
     public LinkBench(ScenarioDocument document) {
-        design = new Design(document.scenario());
-        model = new LinkModel(design, Background.NONE, new Desk(document)::edit);
+        design = new Design(document);
+        model = new LinkModel(design, Background.NONE, this::edit);
     }
 
     /** A shipped document. */
     public static ScenarioDocument shipped(String name) {
-        try {
-            return ScenarioDocument.of(Files.readString(Path.of("..", "scenarios", name + ".json")), name);
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        } catch (InvalidScenarioException e) {
-            throw new IllegalStateException(e);
-        }
+        return Designs.shipped(name);
     }
 
     /** The shared design. */
@@ -72,22 +60,11 @@ public final class LinkBench {
                 .toList();
     }
 
-    private final class Desk {
-        private ScenarioDocument document;
-
-        Desk(ScenarioDocument document) {
-            this.document = document;
-        }
-
-        boolean edit(String what, List<Change> changes) {
-            try {
-                document = document.with(changes);
-            } catch (RefusedEditException e) {
-                design.notice(e.getMessage());
-                return false;
-            }
+    private boolean edit(String what, List<Change> changes) {
+        boolean edited = design.edit(what, changes);
+        if (edited) {
             done.add(what);
-            return design.change(what, null, before -> document.scenario());
         }
+        return edited;
     }
 }
