@@ -8,6 +8,7 @@ import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.ScenarioReader;
 import binspan.planner.viewmodel.Background;
 import binspan.planner.viewmodel.Design;
+import binspan.planner.viewmodel.Designs;
 import binspan.planner.viewmodel.StudyModel;
 import binspan.planner.viewmodel.StudyRun.State;
 import binspan.planner.viewmodel.SweepModel;
@@ -53,7 +54,7 @@ final class StudyPageTest {
     @Start
     void start(Stage shown) throws InvalidScenarioException {
         stage = shown;
-        design = new Design(ScenarioReader.read("../scenarios/kestrel-dam-to-millbrook.json"));
+        design = Designs.of(ScenarioReader.read("../scenarios/kestrel-dam-to-millbrook.json"));
         sweep = new SweepModel(design, background);
         sweep.first().stepsProperty().set("9");
         tolerance = new ToleranceModel(design, background);
