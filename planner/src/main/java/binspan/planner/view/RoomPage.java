@@ -147,8 +147,7 @@ public final class RoomPage extends BorderPane {
     }
 
     private void showCautions(VerdictSheet sheet) {
-        List<String> warnings =
-                sheet.cautions().stream().map(VerdictText::line).toList();
+        List<String> warnings = sheet.cautions().stream().map(VerdictText::line).toList();
         List<Node> lines = sheet.cautions().stream().map(RoomPage::caution).toList();
         fill(cautions, VerdictNotes.CAUTIONS, lines, Words.of("verdict.cautions.none"));
         cautions.setAccessibleText(VerdictNotes.CAUTIONS + ": " + joined(warnings));
@@ -156,8 +155,7 @@ public final class RoomPage extends BorderPane {
 
     private void showChanges(VerdictSheet sheet) {
         String heading = Words.of("verdict.changes");
-        List<String> texts =
-                sheet.changes().stream().map(ScenarioChange::text).toList();
+        List<String> texts = sheet.changes().stream().map(ScenarioChange::text).toList();
         fill(changes, heading, paragraphs(texts), Words.of("verdict.changes.none"));
         changes.setAccessibleText(heading + ": " + joined(texts));
     }
