@@ -46,7 +46,7 @@ final class RequirementsView extends VBox {
         ScaleLabels scale = new ScaleLabels();
         for (double room : ROOMS) {
             String percent = String.valueOf(Math.round(100.0 * room));
-            scale.add(place(RequirementRow.barShare(Math.log1p(room))), room < 1.0 ? percent : percent + " %");
+            scale.add(place(RequirementRow.barShare(Math.log1p(room))), room > ROOMS[0] ? percent : percent + " %");
         }
         scale.add(place(-1.0), Words.of("verdict.fails"));
         Tooltip.install(scale, new Tooltip(Words.of("verdict.scale")));
