@@ -89,7 +89,8 @@ final class ChangeWriter {
     private static String memberIndentation(ScannedText scanned, TextPart object) {
         return object.slots().isEmpty()
                 ? scanned.indentation(object.start()) + "  "
-                : scanned.indentation(object.slots().get(object.slots().size() - 1).start());
+                : scanned.indentation(
+                        object.slots().get(object.slots().size() - 1).start());
     }
 
     /** A value inside the objects that are missing around it, with what these must state besides. */

@@ -70,7 +70,9 @@ record DocumentPath(List<Step> steps) {
         Section section = field.content().section("").orElse(null);
         if (section != null && entries != null && entries.member(key) == null) {
             for (Slot slot : entries.slots()) {
-                String inside = key.startsWith(slot.name() + ".") ? key.substring(slot.name().length() + 1) : "";
+                String inside = key.startsWith(slot.name() + ".")
+                        ? key.substring(slot.name().length() + 1)
+                        : "";
                 if (section.field(inside).isPresent()) {
                     return new DocumentPath(List.of(name(field.name()), name(slot.name()), name(inside)));
                 }

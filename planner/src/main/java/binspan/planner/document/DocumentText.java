@@ -55,7 +55,8 @@ final class DocumentText {
     /** The registry's entry for the last step of a path, absent for names that it does not know. */
     Optional<Field> field(DocumentPath path) {
         return path.last().named()
-                ? section(path.before(path.size() - 1)).flatMap(section -> section.field(path.last().name()))
+                ? section(path.before(path.size() - 1))
+                        .flatMap(section -> section.field(path.last().name()))
                 : Optional.empty();
     }
 
@@ -74,9 +75,11 @@ final class DocumentText {
                     return Optional.empty();
                 }
                 content = field.content();
-                section = field.kind() == Field.Kind.SECTION ? content.section("").orElse(null) : null;
+                section =
+                        field.kind() == Field.Kind.SECTION ? content.section("").orElse(null) : null;
             } else if (content != null && part != null) {
-                section = content.section(content.typed() ? text(part, Content.TYPE) : "").orElse(null);
+                section = content.section(content.typed() ? text(part, Content.TYPE) : "")
+                        .orElse(null);
             }
         }
         return Optional.ofNullable(section);

@@ -55,7 +55,8 @@ final class EntryKeys {
         int size = part.slots().size();
         if (path.size() == 2) {
             List<String> labels = before.labels(part);
-            return Optional.of(new EntryKeys(name(path), labels, (k, named, rest) -> moved(k, named, rest, size, moved)));
+            return Optional.of(
+                    new EntryKeys(name(path), labels, (k, named, rest) -> moved(k, named, rest, size, moved)));
         }
         if (path.size() != 4 || !path.last().name().equals(CHANNELS)) {
             return Optional.empty();
@@ -102,9 +103,7 @@ final class EntryKeys {
     private static EntryKeys relabelled(String arm, List<String> old, int element, String label) {
         String now = label.isEmpty() ? "[" + element + "]" : "." + label;
         return new EntryKeys(
-                arm + ".path",
-                old,
-                (k, named, rest) -> (k == element && named.startsWith(".") ? now : named) + rest);
+                arm + ".path", old, (k, named, rest) -> (k == element && named.startsWith(".") ? now : named) + rest);
     }
 
     private static List<String> labels(DocumentText document, String arm) {
@@ -141,7 +140,8 @@ final class EntryKeys {
         for (int i = 0; i < keys.size(); i++) {
             Slot slot = part.slots().get(i);
             if (!keys.get(i).isEmpty() && !keys.get(i).get(0).equals(slot.name())) {
-                names.replace(slot.start(), slot.nameEnd(), JsonText.of(keys.get(i).get(0)));
+                names.replace(
+                        slot.start(), slot.nameEnd(), JsonText.of(keys.get(i).get(0)));
             }
         }
         String changed = names.applied(text);

@@ -6,8 +6,8 @@ import binspan.planner.document.Change.Put;
 import binspan.scenario.ClassicalChannel;
 import binspan.scenario.Content;
 import binspan.scenario.Direction;
-import binspan.scenario.Field;
 import binspan.scenario.FibreSpan;
+import binspan.scenario.Field;
 import binspan.scenario.Range;
 import binspan.scenario.ScenarioSections;
 import java.math.BigDecimal;
@@ -78,6 +78,7 @@ final class FibreSplit {
         for (int i = 0; i < channels.size(); i++) {
             Map<Object, Object> channel = new LinkedHashMap<>((Map<?, ?>) channels.get(i));
             ClassicalChannel light = span.classicalChannels().get(i);
+            channel.put("direction", light.direction().text());
             if (light.direction() == Direction.FORWARD) {
                 channel.put("launchDbm", arriving(light, firstKm));
             }
@@ -111,6 +112,11 @@ final class FibreSplit {
 
     private static Content elements() {
         Field arm = ScenarioSections.SCENARIO.field("alice").orElseThrow();
-        return arm.content().section("").orElseThrow().field("path").orElseThrow().content();
+        return arm.content()
+                .section("")
+                .orElseThrow()
+                .field("path")
+                .orElseThrow()
+                .content();
     }
 }

@@ -51,7 +51,8 @@ public final class History {
 
     /** Ends a step that was made of several, such as a drag; one that led back to where it began is no step. */
     public void settle() {
-        if (coalescing != null && steps.get(at - 1).document().text().equals(current().text())) {
+        if (coalescing != null
+                && steps.get(at - 1).document().text().equals(current().text())) {
             steps.remove(at--);
         }
         coalescing = null;

@@ -34,8 +34,8 @@ public final class PumpChange {
     private static final MathContext TWO_DIGITS = new MathContext(2, RoundingMode.FLOOR);
 
     private static final String PUMP = "source.pump.";
-    private static final Set<String> OF_PAIRS = Set.of(
-            "repetitionRateMHz", "preparation", "mismatchPs", "earlyPairFraction", "phaseNoiseRmsRad");
+    private static final Set<String> OF_PAIRS =
+            Set.of("repetitionRateMHz", "preparation", "mismatchPs", "earlyPairFraction", "phaseNoiseRmsRad");
     private static final List<String> SIDES = List.of("signal", "idler");
 
     private final List<Change> changes = new ArrayList<>();
@@ -77,7 +77,8 @@ public final class PumpChange {
         } else if (pump.pairEmissionFwhmPs().isEmpty()) {
             changes.add(new Put(PUMP + "pairEmissionFwhmPs", USUAL_EMISSION_PS));
         }
-        if (mode == PumpMode.PULSE_PAIR && (pump.coherenceTimeNs().isPresent() || pump.linewidthMHz().isPresent())) {
+        if (mode == PumpMode.PULSE_PAIR
+                && (pump.coherenceTimeNs().isPresent() || pump.linewidthMHz().isPresent())) {
             changes.add(new Put(PUMP + "preparation", "modulator"));
         }
     }
@@ -95,7 +96,8 @@ public final class PumpChange {
     /** Cycles per second of a pulse pair: those stated, or the usual ones, or as many as leave room for three slots and the window. */
     private double pairRateMHz() {
         double slotsNs = SLOTS * scenario.imbalanceNs() + scenario.timing().windowWidthPs() / PICO_PER_NANO;
-        double fitting = new BigDecimal(MEGA_PER_NANO / slotsNs).round(TWO_DIGITS).doubleValue();
+        double fitting =
+                new BigDecimal(MEGA_PER_NANO / slotsNs).round(TWO_DIGITS).doubleValue();
         return scenario.source().pump().repetitionRateMHz().orElse(Math.min(USUAL_RATE_MHZ, fitting));
     }
 
@@ -103,11 +105,14 @@ public final class PumpChange {
         double perSecond = cyclesPerSecond(scenario.source().pump().mode());
         double factor = perSecond / cyclesPerSecond(mode);
         String brightness = scenario.pulsed() ? "meanPairsPerCycle" : "pairRatePerSecond";
-        OptionalDouble present =
-                scenario.pulsed() ? scenario.source().meanPairsPerCycle() : scenario.source().pairRatePerSecond();
+        OptionalDouble present = scenario.pulsed()
+                ? scenario.source().meanPairsPerCycle()
+                : scenario.source().pairRatePerSecond();
         convert("source.", brightness, present.orElseThrow(), factor);
         for (String side : SIDES) {
-            Band band = side.equals("signal") ? scenario.source().signal() : scenario.source().idler();
+            Band band = side.equals("signal")
+                    ? scenario.source().signal()
+                    : scenario.source().idler();
             String field = scenario.pulsed() ? "uncorrelatedPhotonsPerCycle" : "uncorrelatedPhotonsPerSecond";
             double photons =
                     scenario.pulsed() ? band.uncorrelatedPhotonsPerCycle() : band.uncorrelatedPhotonsPerSecond();
@@ -134,8 +139,7 @@ public final class PumpChange {
             return;
         }
         Map<String, Object> converted = new LinkedHashMap<>();
-        converted.put(
-                spread.shape().text(), spread.relative() ? spread.width() : rounded(spread.width() * factor));
+        converted.put(spread.shape().text(), spread.relative() ? spread.width() : rounded(spread.width() * factor));
         if (spread.relative()) {
             converted.put("relative", true);
         }

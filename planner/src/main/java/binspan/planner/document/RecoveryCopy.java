@@ -4,7 +4,6 @@ import binspan.planner.io.JsonText;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
-import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
@@ -24,8 +23,11 @@ import java.util.Optional;
  * @param text text of the document
  */
 record RecoveryCopy(Optional<Path> original, Instant time, Instant started, String savedDigest, String text) {
-    private static final String TITLE = "// Copy of a document that was not saved; the document begins below these lines.";
-    private static final String[] NAMES = {"// file: ", "// written: ", "// process since: ", "// saved: ", "// characters: "};
+    private static final String TITLE =
+            "// Copy of a document that was not saved; the document begins below these lines.";
+    private static final String[] NAMES = {
+        "// file: ", "// written: ", "// process since: ", "// saved: ", "// characters: "
+    };
     private static final int LINES = NAMES.length + 1;
     private static final long LARGEST_BYTES = 20_000_000;
 
@@ -49,7 +51,7 @@ record RecoveryCopy(Optional<Path> original, Instant time, Instant started, Stri
     static Optional<RecoveryCopy> read(Path file) {
         try {
             return Files.size(file) > LARGEST_BYTES ? Optional.empty() : parsed(Files.readString(file));
-        } catch (IOException | DateTimeException | InvalidPathException | NumberFormatException e) {
+        } catch (IOException | DateTimeException | IllegalArgumentException | IndexOutOfBoundsException e) {
             return Optional.empty();
         }
     }

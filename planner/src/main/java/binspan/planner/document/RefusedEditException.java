@@ -11,7 +11,8 @@ public final class RefusedEditException extends Exception {
 
     RefusedEditException(List<EditProblem> problems) {
         super(problems.stream()
-                .map(problem -> problem.path().isEmpty() ? problem.message() : problem.path() + ": " + problem.message())
+                .map(problem ->
+                        problem.path().isEmpty() ? problem.message() : problem.path() + ": " + problem.message())
                 .collect(Collectors.joining("\n")));
         this.problems = List.copyOf(problems);
     }

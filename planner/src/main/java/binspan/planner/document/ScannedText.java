@@ -43,7 +43,8 @@ final class ScannedText {
 
     /** Whether the last comment that begins in a stretch of the text goes to the end of its line. */
     boolean endsInLineComment(int from, int to) {
-        return commented(from, to) && byStart.subMap(from, true, to, false).lastEntry().getValue().line();
+        return commented(from, to)
+                && byStart.subMap(from, true, to, false).lastEntry().getValue().line();
     }
 
     /** Offset where a line begins if nothing but blanks and comments stand in it before an offset, otherwise -1. */

@@ -104,7 +104,9 @@ public final class Settings {
     /** Directory of the file opened or saved last. */
     public Optional<Path> lastDirectory() {
         try {
-            return Optional.ofNullable(values.get(DIRECTORY)).filter(path -> !path.isBlank()).map(Path::of);
+            return Optional.ofNullable(values.get(DIRECTORY))
+                    .filter(path -> !path.isBlank())
+                    .map(Path::of);
         } catch (InvalidPathException e) {
             return Optional.empty();
         }

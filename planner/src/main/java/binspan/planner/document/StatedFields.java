@@ -29,7 +29,9 @@ final class StatedFields {
             Object component = present(section.component(element, i));
             if (component != null
                     && !component.equals(byDefault(field, siblings))
-                    && section.excluding(element, field).filter(other -> !other.equals(field)).isEmpty()) {
+                    && section.excluding(element, field)
+                            .filter(other -> !other.equals(field))
+                            .isEmpty()) {
                 stated.put(field.name(), written(field, component));
             }
         }
@@ -53,7 +55,8 @@ final class StatedFields {
     }
 
     private static String channel(double number) {
-        return "C" + new BigDecimal(Double.toString(number)).stripTrailingZeros().toPlainString();
+        return "C"
+                + new BigDecimal(Double.toString(number)).stripTrailingZeros().toPlainString();
     }
 
     /** A component without its optional around it, null for an absent one. */

@@ -182,6 +182,7 @@ final class TextSurgery {
                 ? text.substring(end, comma).stripTrailing() + text.substring(comma + 1, Math.max(tail, comma + 1))
                 : text.substring(end, tail);
         boolean line = scanned.endsInLineComment(end, Math.max(tail, comma));
-        return new Piece(text.substring(slot.start(), end), comment.stripTrailing(), line);
+        int begin = alone ? scanned.behindBlanks(scanned.lineBegin(slot.start())) : slot.start();
+        return new Piece(text.substring(begin, end), comment.stripTrailing(), line);
     }
 }

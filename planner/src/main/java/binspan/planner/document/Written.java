@@ -8,7 +8,7 @@ import java.util.Map;
 
 /** New values as they are written into a file: on one line, or one member a line where that grows too long. */
 final class Written {
-    private static final int LONGEST_LINE = 120;
+    private static final int LONGEST_LINE = 140;
     private static final String STEP = "  ";
 
     private final String lineBreak;
@@ -69,8 +69,9 @@ final class Written {
         if (value instanceof Choice choice) {
             return JsonText.of(choice.text());
         }
-        boolean asJava = value instanceof Double number
+        boolean notJson = value instanceof Double number
                 && (!Double.isFinite(number) || (number == 0.0 && Math.copySign(1.0, number) < 0.0));
-        return asJava ? value.toString() : JsonText.of(value);
+        String json = notJson ? value.toString() : JsonText.of(value);
+        return value instanceof Double ? json.replace(".0E", "e").replace('E', 'e') : json;
     }
 }

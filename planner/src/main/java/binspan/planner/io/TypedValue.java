@@ -61,13 +61,18 @@ public record TypedValue(Object value, String error) {
     private static String hint(Field field, String typed) {
         Matcher comma = COMMA.matcher(typed);
         boolean number = field.kind() == Field.Kind.NUMBER || field.kind() == Field.Kind.COUNT;
-        return number && comma.matches() ? "; the decimal sign is a point: " + comma.group(1) + "." + comma.group(2) : "";
+        return number && comma.matches()
+                ? "; the decimal sign is a point: " + comma.group(1) + "." + comma.group(2)
+                : "";
     }
 
     private static Object written(Field field, Object value, String typed) {
         if (value instanceof Choice choice) {
             return choice.text();
         }
-        return field.kind() == Field.Kind.CHANNEL && !typed.startsWith("C") ? "C" + typed : field.kind() == Field.Kind.CHANNEL ? typed : value;
+        if (field.kind() != Field.Kind.CHANNEL) {
+            return value;
+        }
+        return typed.startsWith("C") ? typed : "C" + typed;
     }
 }

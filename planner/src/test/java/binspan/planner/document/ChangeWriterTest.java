@@ -48,7 +48,8 @@ final class ChangeWriterTest {
     void newMemberStandsOnItsOwnLineBehindTheCommentOfTheLast() throws RefusedEditException {
         String before = "{\n    \"a\": 1, // first\n    \"b\": 2 // last, so far\n    // remark\n}\n";
         assertThat(written(before, new Put("c", 3)))
-                .isEqualTo("{\n    \"a\": 1, // first\n    \"b\": 2, // last, so far\n    \"c\": 3\n    // remark\n}\n");
+                .isEqualTo(
+                        "{\n    \"a\": 1, // first\n    \"b\": 2, // last, so far\n    \"c\": 3\n    // remark\n}\n");
     }
 
     @Test
@@ -78,8 +79,7 @@ final class ChangeWriterTest {
         assertThat(written("{\n  \"name\": \"x\"\n}", new Put("acquisition.durationS", 60)))
                 .isEqualTo("{\n  \"name\": \"x\",\n  \"acquisition\": { \"durationS\": 60 }\n}");
         assertThat(written("{\n  \"name\": \"x\"\n}", new Put("provenance.alice.path[0].lossDb", "a.b")))
-                .isEqualTo(
-                        "{\n  \"name\": \"x\",\n  \"provenance\": {\n    \"alice.path[0].lossDb\": \"a.b\"\n  }\n}");
+                .isEqualTo("{\n  \"name\": \"x\",\n  \"provenance\": {\n    \"alice.path[0].lossDb\": \"a.b\"\n  }\n}");
     }
 
     @Test
@@ -94,7 +94,8 @@ final class ChangeWriterTest {
 
     @Test
     void removingALineTakesItsCommaAndItsComment() throws RefusedEditException {
-        String before = "{\n  // above a\n  \"a\": 1, // of a\n  // above b\n  \"b\": 2, /* of */ // b\n  \"c\": 3 // of c\n}\n";
+        String before =
+                "{\n  // above a\n  \"a\": 1, // of a\n  // above b\n  \"b\": 2, /* of */ // b\n  \"c\": 3 // of c\n}\n";
         assertThat(written(before, new Remove("a")))
                 .isEqualTo("{\n  // above a\n  // above b\n  \"b\": 2, /* of */ // b\n  \"c\": 3 // of c\n}\n");
         assertThat(written(before, new Remove("b")))
@@ -153,11 +154,13 @@ final class ChangeWriterTest {
     @Test
     void anElementMovesWithItsComment() throws RefusedEditException {
         assertThat(written(LIST, new Move("alice.path", 0, 2)))
-                .isEqualTo("{\"alice\": {\n  \"path\": [ // of alice\n    // before two\n"
-                        + "    { \"lossDb\": 2 }, // two\n    { \"lossDb\": 3 }, // three\n    { \"lossDb\": 1 } // one\n  ]\n}}");
+                .isEqualTo(
+                        "{\"alice\": {\n  \"path\": [ // of alice\n    // before two\n"
+                                + "    { \"lossDb\": 2 }, // two\n    { \"lossDb\": 3 }, // three\n    { \"lossDb\": 1 } // one\n  ]\n}}");
         assertThat(written(LIST, new Move("alice.path", 2, 0)))
-                .isEqualTo("{\"alice\": {\n  \"path\": [ // of alice\n    { \"lossDb\": 3 }, // three\n    { \"lossDb\": 1 }, // one\n"
-                        + "    // before two\n    { \"lossDb\": 2 } // two\n  ]\n}}");
+                .isEqualTo(
+                        "{\"alice\": {\n  \"path\": [ // of alice\n    { \"lossDb\": 3 }, // three\n    { \"lossDb\": 1 }, // one\n"
+                                + "    // before two\n    { \"lossDb\": 2 } // two\n  ]\n}}");
         assertThat(written("{\"alice\":{\"path\":[1, 2 /* b */, 3]}}", new Move("alice.path", 1, 2)))
                 .isEqualTo("{\"alice\":{\"path\":[1, 3, 2 /* b */]}}");
     }
@@ -172,12 +175,17 @@ final class ChangeWriterTest {
 
     @Test
     void positionsInKeysFollowTheList() throws RefusedEditException {
-        String before = "{\"alice\": { \"path\": [ {}, { \"label\": \"b.x\" }, {} ] }, \"spread\": {\n"
-                + "  \"alice.path[0].lossDb\": 1, // zero\n  \"alice.path[1].lossDb\": 2,\n"
-                + "  \"both.path[2].lossDb\": 3,\n  \"alice.path.b.x.lossDb\": 4\n}}";
+        String before = """
+                {"alice": { "path": [ {}, { "label": "b.x" }, {} ] }, "spread": {
+                  "alice.path[0].lossDb": 1, // zero
+                  "alice.path[1].lossDb": 2,
+                  "both.path[2].lossDb": 3,
+                  "alice.path.b.x.lossDb": 4
+                }}""";
         assertThat(written(before, new Insert("alice.path", 0, Map.of())))
-                .endsWith("\"spread\": {\n  \"alice.path[1].lossDb\": 1, // zero\n  \"alice.path[2].lossDb\": 2,\n"
-                        + "  \"alice.path[3].lossDb\": 3,\n  \"bob.path[2].lossDb\": 3,\n  \"alice.path.b.x.lossDb\": 4\n}}");
+                .endsWith(
+                        "\"spread\": {\n  \"alice.path[1].lossDb\": 1, // zero\n  \"alice.path[2].lossDb\": 2,\n"
+                                + "  \"alice.path[3].lossDb\": 3,\n  \"bob.path[2].lossDb\": 3,\n  \"alice.path.b.x.lossDb\": 4\n}}");
         assertThat(written(before, new Delete("alice.path", 1)))
                 .endsWith("\"spread\": {\n  \"alice.path[0].lossDb\": 1, // zero\n"
                         + "  \"alice.path[1].lossDb\": 3,\n  \"bob.path[2].lossDb\": 3\n}}");
@@ -194,9 +202,10 @@ final class ChangeWriterTest {
 
     @Test
     void channelsAndDetectorsInKeysFollowToo() throws RefusedEditException {
-        String before = "{\"bob\": { \"detectors\": [ {}, {} ], \"path\": [ { \"label\": \"t\", \"classicalChannels\": [ {}, {} ] } ] },"
-                + " \"provenance\": { \"bob.detectors[1].efficiency\": \"e\", \"bob.path.t.classicalChannels[1].launchDbm\": \"l\","
-                + " \"bob.path[0].classicalChannels[0].launchDbm\": \"m\", \"bob.detectors.efficiency\": \"all\" } }";
+        String before =
+                "{\"bob\": { \"detectors\": [ {}, {} ], \"path\": [ { \"label\": \"t\", \"classicalChannels\": [ {}, {} ] } ] },"
+                        + " \"provenance\": { \"bob.detectors[1].efficiency\": \"e\", \"bob.path.t.classicalChannels[1].launchDbm\": \"l\","
+                        + " \"bob.path[0].classicalChannels[0].launchDbm\": \"m\", \"bob.detectors.efficiency\": \"all\" } }";
         assertThat(written(before, new Delete("bob.detectors", 0)))
                 .contains("{ \"bob.detectors[0].efficiency\": \"e\",")
                 .contains("\"bob.detectors.efficiency\": \"all\"");

@@ -49,7 +49,10 @@ final class RandomEdits {
             case 2, 3 -> new Move(list, random.nextInt(size + 1), random.nextInt(size + 1));
             case 4 -> new Put(list + "[" + random.nextInt(size + 1) + "].label", "label " + random.nextInt(20));
             case 5 -> new Remove(NUMBERS.get(random.nextInt(NUMBERS.size())));
-            case 6 -> new Put("provenance." + list + "[" + random.nextInt(size + 1) + "].lossDb", "note " + random.nextInt(9));
+            case 6 ->
+                new Put(
+                        "provenance." + list + "[" + random.nextInt(size + 1) + "].lossDb",
+                        "note " + random.nextInt(9));
             case 7 -> new Remove("provenance." + list + "[" + random.nextInt(size + 1) + "].lossDb");
             default -> new Put(NUMBERS.get(random.nextInt(NUMBERS.size())), 1.0 + random.nextInt(1000) / 1000.0);
         };

@@ -9,6 +9,7 @@ import binspan.planner.document.Change.Insert;
 import binspan.planner.document.Change.Put;
 import binspan.planner.document.Change.Remove;
 import binspan.planner.io.InvalidScenarioException;
+import binspan.planner.io.ScenarioReader;
 import binspan.scenario.DetectorClass;
 import binspan.scenario.ParameterPaths;
 import binspan.scenario.Scenario;
@@ -49,19 +50,19 @@ final class ScenarioDocumentTest {
     }
 
     @ParameterizedTest
-    @CsvSource(delimiter = '|', value = {
-        "alice.detectors[0].efficiency | 1.2 | alice.detectors[0].efficiency | found 1.2; allowed 1e-06 to 1",
-        "imbalanceNs | NaN | imbalanceNs | found NaN; allowed 1e-06 to 10000 ns",
-        "timing.windowWidthPs | -Infinity | timing.windowWidthPs | found -Infinity; allowed 0.001 to 1e7 ps"
-    })
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "alice.detectors[0].efficiency | 1.2 | alice.detectors[0].efficiency | found 1.2; allowed 1e-6 to 1",
+                "imbalanceNs | NaN | imbalanceNs | found NaN; allowed 1e-6 to 10000 ns",
+                "timing.windowWidthPs | -Infinity | timing.windowWidthPs | found -Infinity; allowed 0.001 to 1e7 ps"
+            })
     void numbersOutOfRangeAreRefused(String path, double value, String where, String words) {
         RefusedEditException refused =
                 catchThrowableOfType(RefusedEditException.class, () -> with(KESTREL, new Put(path, value)));
         assertThat(refused.problems()).hasSize(1);
         assertThat(refused.problems().get(0).path()).isEqualTo(where);
-        // The numbers' spelling is that of the range in the registry.
-        assertThat(refused.problems().get(0).message().replace("1.0e-6", "1e-06").replace("1e-6", "1e-06"))
-                .isEqualTo(words.replace("1e-6 ", "1e-06 "));
+        assertThat(refused.problems().get(0).message()).isEqualTo(words);
     }
 
     @Test
@@ -69,11 +70,15 @@ final class ScenarioDocumentTest {
         RefusedEditException refused = catchThrowableOfType(
                 RefusedEditException.class,
                 () -> with(
-                        KESTREL, new Put("name", ""), new Put("bob.repairMarginDb", "1"), new Put("bob.colour", "red")));
+                        KESTREL,
+                        new Put("name", ""),
+                        new Put("bob.repairMarginDb", "1"),
+                        new Put("bob.colour", "red")));
         assertThat(refused.problems())
                 .extracting(EditProblem::path)
                 .containsExactly("name", "bob.repairMarginDb", "bob.colour");
-        assertThat(refused.problems().get(1).message()).isEqualTo("found \"1\"; allowed a number, 0 to 200 dB, without quotes");
+        assertThat(refused.problems().get(1).message())
+                .isEqualTo("found \"1\"; allowed a number, 0 to 200 dB, without quotes");
         assertThat(refused).hasMessageContaining("bob.colour: unknown field; allowed photon");
     }
 
@@ -111,7 +116,13 @@ final class ScenarioDocumentTest {
         assertThat(free.scenario().alice().detectors().get(0).gate()).isEmpty();
         ScenarioDocument gated = with(free, new Put("alice.detectors[0].gate.darkProbability", 3e-5));
         assertThat(gated.states("alice.detectors[0].darkCountsPerSecond")).isFalse();
-        assertThat(gated.scenario().alice().detectors().get(0).gate().orElseThrow().darkProbability())
+        assertThat(gated.scenario()
+                        .alice()
+                        .detectors()
+                        .get(0)
+                        .gate()
+                        .orElseThrow()
+                        .darkProbability())
                 .isEqualTo(3e-5);
     }
 
@@ -120,7 +131,13 @@ final class ScenarioDocumentTest {
         ScenarioDocument ofClass = with(AVALANCHE, new Remove("bob.detectors[1].gate"));
         assertThat(ofClass.scenario().bob().detectors().get(1).gate()).isEqualTo(DetectorClass.INGAAS_GATED.gate());
         ScenarioDocument wider = with(ofClass, new Put("bob.detectors[1].gate.widthNs", 1.5));
-        assertThat(wider.scenario().bob().detectors().get(1).gate().orElseThrow().darkProbability())
+        assertThat(wider.scenario()
+                        .bob()
+                        .detectors()
+                        .get(1)
+                        .gate()
+                        .orElseThrow()
+                        .darkProbability())
                 .isEqualTo(2e-5);
     }
 
@@ -143,14 +160,20 @@ final class ScenarioDocumentTest {
 
     @Test
     void byteOrderMarkSchemaAndLineEndsStay() throws InvalidScenarioException, RefusedEditException {
-        String text = "\ufeff" + KESTREL.text().replaceFirst("\n\\{\n", "\n{\n  \"\\$schema\": \"s.json\",\n").stripTrailing();
+        String text = "\ufeff"
+                + KESTREL.text()
+                        .replaceFirst("\n\\{\n", "\n{\n  \"\\$schema\": \"s.json\",\n")
+                        .stripTrailing();
         ScenarioDocument document = ScenarioDocument.of(text.replace("\n", "\r\n"), "marked");
         ScenarioDocument after = with(
                 document,
                 new Put("protocol.secrecyEpsilon", 1e-9),
                 new Delete("bob.path", 0),
                 new Insert("bob.path", 0, Map.of("type", "loss", "lossDb", 1)));
-        assertThat(after.text()).startsWith("\ufeff//").contains("\"$schema\": \"s.json\",\r\n").endsWith("}");
+        assertThat(after.text())
+                .startsWith("\ufeff//")
+                .contains("\"$schema\": \"s.json\",\r\n")
+                .endsWith("}");
         assertThat(after.text().replace("\r\n", "")).doesNotContain("\r").doesNotContain("\n");
         assertThat(after.name()).isEqualTo("marked");
         assertThat(after.named("other").name()).isEqualTo("other");
@@ -175,7 +198,7 @@ final class ScenarioDocumentTest {
     @Test
     void scenarioIsWhatAReaderFindsInTheText() throws InvalidScenarioException {
         for (ScenarioDocument document : ShippedDocuments.all()) {
-            Scenario read = binspan.planner.io.ScenarioReader.parse(document.text(), document.name());
+            Scenario read = ScenarioReader.parse(document.text(), document.name());
             assertThat(document.scenario()).isEqualTo(read);
         }
     }

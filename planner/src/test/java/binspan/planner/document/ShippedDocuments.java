@@ -21,12 +21,21 @@ final class ShippedDocuments {
 
     /** One of them by its file name without ending. */
     static ScenarioDocument named(String name) {
-        return all().stream().filter(each -> each.name().equals(name + ".json")).findFirst().orElseThrow();
+        return all().stream()
+                .filter(each -> each.name().equals(name + ".json"))
+                .findFirst()
+                .orElseThrow();
+    }
+
+    static boolean isPreset(ScenarioDocument document) {
+        return Files.exists(FOLDERS.get(1).resolve(document.name()));
     }
 
     private static Stream<ScenarioDocument> in(Path folder) {
         try (Stream<Path> files = Files.list(folder)) {
-            return files.filter(file -> file.toString().endsWith(".json") && !file.toString().contains("schema"))
+            return files
+                    .filter(file -> file.toString().endsWith(".json")
+                            && !file.toString().contains("schema"))
                     .sorted()
                     .map(ShippedDocuments::read)
                     .toList()
@@ -38,7 +47,8 @@ final class ShippedDocuments {
 
     private static ScenarioDocument read(Path file) {
         try {
-            return ScenarioDocument.of(Files.readString(file), file.getFileName().toString());
+            return ScenarioDocument.of(
+                    Files.readString(file), file.getFileName().toString());
         } catch (IOException | InvalidScenarioException e) {
             throw new IllegalStateException(file.toString(), e);
         }

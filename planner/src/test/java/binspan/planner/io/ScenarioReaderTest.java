@@ -121,7 +121,7 @@ final class ScenarioReaderTest {
         "C1e1",
         "C+30",
         "C٣٠",
-        "C0000000000030"
+        "C00000000000000000000000030"
     })
     void otherTextsAreNoChannel(String channel) {
         assertThat(errors(CONTINUOUS.replace("C30", channel)))
