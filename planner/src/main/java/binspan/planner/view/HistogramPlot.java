@@ -18,6 +18,7 @@ final class HistogramPlot extends Region {
     private static final double PICO = 1e12;
     private static final double NANO = 1e9;
     private static final double KEY_STEP = 0.01;
+    private static final double NAMES = 1.3;
 
     private final SlotsModel model;
     private final Look look;
@@ -89,11 +90,14 @@ final class HistogramPlot extends Region {
 
     private void handles() {
         Window window = plot.windows().get(plot.central());
-        left.place(frame.x(window.from()), frame.top(), frame.height());
-        right.place(frame.x(window.to()), frame.top(), frame.height());
+        // The names of the peaks stand above the lines.
+        double top = frame.top() + look.em(NAMES);
+        double height = frame.height() - look.em(NAMES);
+        left.place(frame.x(window.from()), top, height);
+        right.place(frame.x(window.to()), top, height);
         double peak = plot.peaks().get(plot.peaks().size() - 1).time();
         separation.setVisible(peak > 0.0 && peak < frame.to());
-        separation.place(frame.x(peak), frame.top(), frame.height());
+        separation.place(frame.x(peak), top, height);
         right.setAccessibleText(Words.of("slots.handle.window", Figure.in(model.window() * PICO, "ps")));
         separation.setAccessibleText(Words.of("slots.handle.separation", Figure.in(model.separation() * NANO, "ns")));
     }

@@ -2,6 +2,7 @@ package binspan.planner.view;
 
 import binspan.planner.view.Theme.Palette;
 import java.util.List;
+import java.util.stream.Stream;
 import javafx.beans.property.IntegerProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleIntegerProperty;
@@ -68,8 +69,11 @@ public final class Look {
 
     /** Gives a scene, such as that of a dialog, the look of this moment. */
     public void apply(Scene scene) {
-        scene.getStylesheets().setAll(SHEETS.stream().map(Look::sheet).toList());
-        scene.getStylesheets().add(sheet(theme.get().text()));
+        // At once: sheets use the colours of the theme.
+        scene.getStylesheets()
+                .setAll(Stream.concat(Stream.of(theme.get().text()), SHEETS.stream())
+                        .map(Look::sheet)
+                        .toList());
         scene.getRoot().setStyle("-fx-font-size: " + em(1.0) + "px;");
     }
 

@@ -128,6 +128,11 @@ final class MainWindow implements WindowMenus.Pages {
         return root;
     }
 
+    /** Puts the cursor where work begins: on the form. */
+    void begin() {
+        first(parts.form()).ifPresent(Node::requestFocus);
+    }
+
     @Override
     public void nextPart() {
         List<Node> stops = List.of(parts.link(), parts.form(), pages, parts.verdict());

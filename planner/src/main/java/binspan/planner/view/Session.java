@@ -128,6 +128,7 @@ final class Session {
             }
         });
         stage.show();
+        window.begin();
         if (file != null) {
             filing.open(Path.of(file));
         } else {

@@ -45,8 +45,8 @@ public final class Design {
         history.markSaved();
         selection.set(new LinkPart.Plan());
         saved.set(first.scenario());
-        notice.set("");
         show();
+        notice.set("");
     }
 
     /**

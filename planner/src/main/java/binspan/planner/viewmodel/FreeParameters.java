@@ -13,6 +13,9 @@ public final class FreeParameters {
     private final Design design;
     private final Runnable changed;
     private final ObservableList<WrittenAxis> axes = FXCollections.observableArrayList();
+    /** Kept, so that those who listen to it are not forgotten. */
+    private final ObservableList<WrittenAxis> shown = FXCollections.unmodifiableObservableList(axes);
+
     private final List<WrittenAxis> added = new ArrayList<>();
 
     /**
@@ -87,7 +90,7 @@ public final class FreeParameters {
 
     /** All parameters, whether used or not. */
     public ObservableList<WrittenAxis> axes() {
-        return FXCollections.unmodifiableObservableList(axes);
+        return shown;
     }
 
     /**

@@ -20,6 +20,9 @@ public final class SweepModel extends StudyModel<StudyTable> {
     private final WrittenAxis first;
     private final WrittenAxis second;
     private final ObservableList<FigureColumn> known = FXCollections.observableArrayList();
+    /** Kept, so that those who listen to it are not forgotten. */
+    private final ObservableList<FigureColumn> shown = FXCollections.unmodifiableObservableList(known);
+
     private final ObservableList<FigureColumn> shown = FXCollections.observableArrayList();
 
     /** The study of a link, not run yet: along the width of the window. */
@@ -87,7 +90,7 @@ public final class SweepModel extends StudyModel<StudyTable> {
 
     /** Figures of merit of the link, once they are found. */
     public ObservableList<FigureColumn> known() {
-        return FXCollections.unmodifiableObservableList(known);
+        return shown;
     }
 
     /** Figures to show; empty for the usual ones in the picture and all in the table. */

@@ -35,6 +35,9 @@ public final class ToleranceModel extends StudyModel<ToleranceResult> {
     private final ObjectProperty<Integer> builds = new SimpleObjectProperty<>(this, "builds", StudyDefaults.SAMPLES);
     private final StringProperty seed = new SimpleStringProperty(this, "seed", Long.toString(StudyDefaults.SEED));
     private final ObservableList<Row> rows = FXCollections.observableArrayList();
+    /** Kept, so that those who listen to it are not forgotten. */
+    private final ObservableList<Row> shown = FXCollections.unmodifiableObservableList(rows);
+
     private final Map<String, Spread> added = new LinkedHashMap<>();
     private final ReadOnlyStringWrapper refusal = new ReadOnlyStringWrapper(this, "refusal", "");
 
@@ -143,7 +146,7 @@ public final class ToleranceModel extends StudyModel<ToleranceResult> {
 
     /** What spreads. */
     public ObservableList<Row> rows() {
-        return FXCollections.unmodifiableObservableList(rows);
+        return shown;
     }
 
     /** Why the last spread was not added, empty if it was. */

@@ -23,51 +23,18 @@ import javax.imageio.ImageIO;
  * Opens the real window on a display, goes through all pages of two links in both themes at 100 and 200 % and takes a
  * picture of the screen each time. Run by {@code planner/pictures}.
  */
-public final class PictureTour extends Application {
+public final class PictureTour {
     private static final List<String> LINKS = List.of("kestrel-dam-to-millbrook", "stonebridge-to-lower-weir");
     private static final double WIDTH = 1280.0;
     private static final double HEIGHT = 800.0;
     private static final int PERCENT = 100;
     private static final long PATIENCE_SECONDS = 120;
 
-    /** Made by the toolkit. */
-    public PictureTour() {}
+    private PictureTour() {}
 
     /** One argument: the directory for the pictures, then if wanted the names of the pages. */
     public static void main(String[] args) {
-        launch(PictureTour.class, args);
-    }
-
-    @Override
-    public void start(Stage stage) throws IOException {
-        Path places = Files.createTempDirectory("pictures");
-        Session session = new Session(stage, new Session.Places(places, places));
-        session.show("../scenarios/" + LINKS.get(0) + ".json", "light", PERCENT);
-        Thread tour = new Thread(() -> tour(session, stage), "tour");
-        tour.setDaemon(true);
-        tour.start();
-    }
-
-    private void tour(Session session, Stage stage) {
-        List<String> arguments = getParameters().getRaw();
-        List<String> pages = arguments.size() > 1
-                ? arguments.subList(1, arguments.size())
-                : Shown.onWindowThread(session.window()::keys);
-        try {
-            for (String link : LINKS) {
-                opened(session, link);
-                for (int scale : List.of(PERCENT, 2 * PERCENT)) {
-                    for (Theme theme : Theme.values()) {
-                        looked(session, stage, theme, scale);
-                        for (String page : pages) {
-                            pictured(session, stage, page, new File(arguments.get(0), name(link, page, theme, scale)));
-                        }
-                    }
-                }
-            }
-        } finally {
-            Platform.exit();
-        }
+        Application.launch(Tour.class, args);
     }
 
     private static String name(String link, String page, Theme theme, int scale) {
@@ -84,8 +51,8 @@ public final class PictureTour extends Application {
             return link;
         });
         Studies studies = session.model().studies();
-        for (StudyModel<?> study : List.of(
-                studies.reach(), studies.detectors(), studies.tolerance(), studies.sweep(), studies.tune())) {
+        for (StudyModel<?> study :
+                List.of(studies.reach(), studies.detectors(), studies.tolerance(), studies.sweep(), studies.tune())) {
             Shown.onWindowThread(() -> {
                 study.start();
                 return study;
@@ -115,8 +82,7 @@ public final class PictureTour extends Application {
         pause(page.equals("map") ? 2500 : 900);
         WritableImage image = Shown.onWindowThread(() -> new Robot()
                 .getScreenCapture(
-                        null,
-                        new Rectangle2D(stage.getX(), stage.getY(), stage.getWidth(), stage.getHeight())));
+                        null, new Rectangle2D(stage.getX(), stage.getY(), stage.getWidth(), stage.getHeight())));
         try {
             ImageIO.write(FxImages.of(image), "png", file);
         } catch (IOException e) {
@@ -136,6 +102,48 @@ public final class PictureTour extends Application {
             Thread.sleep(millis);
         } catch (InterruptedException e) {
             Thread.currentThread().interrupt();
+        }
+    }
+
+    /** The tour as an application of the desktop. */
+    public static final class Tour extends Application {
+        /** Made by the toolkit. */
+        public Tour() {}
+
+        @Override
+        public void start(Stage stage) throws IOException {
+            Path places = Files.createTempDirectory("pictures");
+            Session session = new Session(stage, new Session.Places(places, places));
+            session.show("../scenarios/" + LINKS.get(0) + ".json", "light", PERCENT);
+            Thread tour = new Thread(() -> tour(session, stage), "tour");
+            tour.setDaemon(true);
+            tour.start();
+        }
+
+        private void tour(Session session, Stage stage) {
+            List<String> arguments = getParameters().getRaw();
+            List<String> pages = arguments.size() > 1
+                    ? arguments.subList(1, arguments.size())
+                    : Shown.onWindowThread(session.window()::keys);
+            try {
+                for (String link : LINKS) {
+                    opened(session, link);
+                    for (int scale : List.of(PERCENT, 2 * PERCENT)) {
+                        for (Theme theme : Theme.values()) {
+                            looked(session, stage, theme, scale);
+                            for (String page : pages) {
+                                pictured(
+                                        session,
+                                        stage,
+                                        page,
+                                        new File(arguments.get(0), name(link, page, theme, scale)));
+                            }
+                        }
+                    }
+                }
+            } finally {
+                Platform.exit();
+            }
         }
     }
 }

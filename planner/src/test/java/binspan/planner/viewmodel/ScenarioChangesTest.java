@@ -63,7 +63,7 @@ final class ScenarioChangesTest {
     @Test
     void numberThatWasNotStatedIsToldSo() {
         assertThat(texts(VerdictLinks.with(LINK, "source.schmidtNumber", 1.5)))
-                .containsExactly("schmidt number: not stated \u2192 1.5");
+                .containsExactly("Schmidt number: not stated \u2192 1.5");
     }
 
     @Test
