@@ -21,7 +21,7 @@ public final class SweepModel extends StudyModel<StudyTable> {
     private final WrittenAxis second;
     private final ObservableList<FigureColumn> known = FXCollections.observableArrayList();
     /** Kept, so that those who listen to it are not forgotten. */
-    private final ObservableList<FigureColumn> shown = FXCollections.unmodifiableObservableList(known);
+    private final ObservableList<FigureColumn> choices = FXCollections.unmodifiableObservableList(known);
 
     private final ObservableList<FigureColumn> shown = FXCollections.observableArrayList();
 
@@ -90,7 +90,7 @@ public final class SweepModel extends StudyModel<StudyTable> {
 
     /** Figures of merit of the link, once they are found. */
     public ObservableList<FigureColumn> known() {
-        return shown;
+        return choices;
     }
 
     /** Figures to show; empty for the usual ones in the picture and all in the table. */
