@@ -4,12 +4,14 @@ import binspan.planner.export.StudyFiles;
 import binspan.planner.export.StudyReport;
 import binspan.planner.io.OutputFileException;
 import binspan.planner.report.TextStyle;
-import binspan.planner.viewmodel.StudyModel;
+import binspan.planner.viewmodel.Background;
+import binspan.planner.viewmodel.Design;
 import binspan.planner.viewmodel.Words;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Locale;
 import java.util.function.Supplier;
+import javafx.beans.value.ObservableValue;
 import javafx.scene.control.MenuButton;
 import javafx.scene.control.MenuItem;
 import javafx.scene.image.Image;
@@ -20,15 +22,34 @@ import javafx.scene.input.ClipboardContent;
 final class StudyHandout {
     private static final TextStyle PLAIN = new TextStyle(false, true);
 
-    private final StudyModel<?> model;
-    private final StudyPicture picture;
+    private final String name;
+    private final Design design;
+    private final Background background;
+    private final ObservableValue<StudyReport> report;
+    private final Supplier<Image> picture;
     private final FileQuestions files;
 
-    StudyHandout(StudyModel<?> model, StudyPicture picture, FileQuestions files) {
-        this.model = model;
+    /**
+     * The handout of a study.
+     *
+     * @param name its name, which ids and file names hold
+     * @param desk the link and where files are made
+     * @param report what it has to show, null before it is done
+     * @param picture the picture as it is on the screen, null where there is none
+     * @param files asks for file names
+     */
+    StudyHandout(
+            String name, Desk desk, ObservableValue<StudyReport> report, Supplier<Image> picture, FileQuestions files) {
+        this.name = name;
+        this.design = desk.design();
+        this.background = desk.background();
+        this.report = report;
         this.picture = picture;
         this.files = files;
     }
+
+    /** The link and where files are made. */
+    record Desk(Design design, Background background) {}
 
     /** Writes a report to a file. */
     @FunctionalInterface
@@ -56,32 +77,30 @@ final class StudyHandout {
                 svg);
         for (MenuItem drawn : List.of(copied, png, svg)) {
             drawn.disableProperty()
-                    .bind(model.run()
-                            .resultProperty()
-                            .map(found -> found.report().picture().isEmpty()));
+                    .bind(report.map(found -> found.picture().isEmpty()).orElse(true));
         }
         return List.of(copy, export);
     }
 
     private MenuButton menu(String key, MenuItem... items) {
         MenuButton button = new MenuButton(Words.of("studies." + key), null, items);
-        button.setId(model.name() + "-" + key);
+        button.setId(name + "-" + key);
         return button;
     }
 
     private MenuItem item(String key, Runnable action) {
         MenuItem item = new MenuItem(Words.of("studies." + key));
-        item.setId(model.name() + "-" + key.replace('.', '-'));
+        item.setId(name + "-" + key.replace('.', '-'));
         item.setOnAction(event -> action.run());
         return item;
     }
 
     private StudyReport report() {
-        return model.run().resultProperty().get().report();
+        return report.getValue();
     }
 
     private void copyPicture() {
-        Image image = picture.image();
+        Image image = picture.get();
         if (image != null) {
             ClipboardContent content = new ClipboardContent();
             content.putImage(image);
@@ -90,9 +109,9 @@ final class StudyHandout {
     }
 
     private void copy(String what, Supplier<String> text) {
-        model.background().workers().execute(() -> {
+        background.workers().execute(() -> {
             String made = text.get();
-            model.background().window().execute(() -> {
+            background.window().execute(() -> {
                 ClipboardContent content = new ClipboardContent();
                 content.putString(made);
                 put(content, what);
@@ -102,19 +121,19 @@ final class StudyHandout {
 
     private void put(ClipboardContent content, String what) {
         Clipboard.getSystemClipboard().setContent(content);
-        model.design().notice(Words.of("studies.copied", Words.of("studies." + what)));
+        design.notice(Words.of("studies.copied", Words.of("studies." + what)));
     }
 
     private void export(String ending, Writing writing) {
         String kind = ending.substring(1).toUpperCase(Locale.ROOT);
         StudyReport report = report();
         files.toSave(Words.of("studies.export.title"), proposed() + ending, kind, ending)
-                .ifPresent(file -> model.background().workers().execute(() -> write(report, file, writing)));
+                .ifPresent(file -> background.workers().execute(() -> write(report, file, writing)));
     }
 
     private String proposed() {
-        String words = model.design().scenario().name().toLowerCase(Locale.ROOT).replaceAll("[^\\p{L}\\p{N}]+", "-");
-        return words + "-" + model.name();
+        String words = design.scenario().name().toLowerCase(Locale.ROOT).replaceAll("[^\\p{L}\\p{N}]+", "-");
+        return words + "-" + name;
     }
 
     /** The question has settled already whether an existing file is replaced. */
@@ -127,6 +146,6 @@ final class StudyHandout {
             words = e.getMessage();
         }
         String said = words;
-        model.background().window().execute(() -> model.design().notice(said));
+        background.window().execute(() -> design.notice(said));
     }
 }

@@ -2,6 +2,7 @@ package binspan.planner.view;
 
 import binspan.planner.export.StudyReport;
 import binspan.planner.report.TextStyle;
+import binspan.planner.view.StudyHandout.Desk;
 import binspan.planner.viewmodel.LatestTask;
 import binspan.planner.viewmodel.StudyModel;
 import binspan.planner.viewmodel.StudyRun;
@@ -114,7 +115,13 @@ public final class StudyPage extends BorderPane {
         summary.getStyleClass().add("study-summary");
         summary.setAccessibleText(Words.of("studies.summary"));
         StudyViews views = new StudyViews(model.name(), picture, summary, table);
-        views.add(new StudyHandout(model, picture, files).menus());
+        views.add(new StudyHandout(
+                        model.name(),
+                        new Desk(model.design(), model.background()),
+                        model.run().resultProperty().map(found -> found.report()),
+                        picture::image,
+                        files)
+                .menus());
         result.getChildren().addAll(views.bar(), views.shown());
         result.getStyleClass().add("study-result");
         result.visibleProperty().bind(present());
