@@ -1,6 +1,7 @@
 package binspan.planner.viewmodel;
 
 import binspan.planner.io.WrittenNumber;
+import binspan.planner.report.ParameterWords;
 import binspan.scenario.Parameter;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
@@ -41,7 +42,7 @@ public final class MapAxis {
         return axis.get().parameter().path();
     }
 
-    /** Why the last entry was refused; empty if it was not. */
+    /** Why the last entry was refused or the parameter exchanged; empty if neither. */
     public ReadOnlyStringProperty errorProperty() {
         return error.getReadOnlyProperty();
     }
@@ -60,6 +61,13 @@ public final class MapAxis {
         error.set("");
         ownRange = itsOwnRange;
         axis.set(other);
+    }
+
+    /** Shows another parameter because the scenario does not have this one any more, and says so. */
+    void replace(Scenario scenario, Parameter other) {
+        String gone = ParameterWords.name(path());
+        take(MapRanges.of(scenario, other), false);
+        error.set(Words.of("map.gone", gone, ParameterWords.name(path())));
     }
 
     boolean ownRange() {

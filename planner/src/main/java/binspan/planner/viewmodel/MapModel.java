@@ -1,7 +1,6 @@
 package binspan.planner.viewmodel;
 
 import binspan.planner.report.MissWords;
-import binspan.planner.report.ParameterWords;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.Execution;
@@ -224,9 +223,7 @@ public final class MapModel {
     private void follow(MapAxis axis, MapAxis other) {
         Scenario scenario = design.scenario();
         if (!axis.follow(scenario)) {
-            String gone = ParameterWords.name(axis.path());
-            axis.take(MapRanges.of(scenario, MapParameters.first(scenario, other.path())), false);
-            design.notice(Words.of("map.gone", gone, ParameterWords.name(axis.path())));
+            axis.replace(scenario, MapParameters.first(scenario, other.path()));
         }
     }
 

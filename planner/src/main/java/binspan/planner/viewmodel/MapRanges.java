@@ -12,6 +12,7 @@ import java.util.Map;
 final class MapRanges {
     private static final double BARE = 1.0;
     private static final double FIRST_SHARE = 0.01;
+    private static final double DECADE = 10.0;
 
     /** How far a quantity is usually looked at, by its unit (common practice). */
     private static final Map<String, Double> REACH = Map.ofEntries(
@@ -57,7 +58,14 @@ final class MapRanges {
         double to = inside(range, Math.min(range.highest(), reach), from);
         return from < to
                 ? new Axis(parameter, from, to, OperatingRegion.USUAL_STEPS, logarithmic)
-                : new Axis(parameter, range.lowest(), 10.0 * range.lowest(), OperatingRegion.USUAL_STEPS, true);
+                : decade(parameter, range);
+    }
+
+    /** The first decade of a range that begins beyond the usual reach. */
+    private static Axis decade(Parameter parameter, Range range) {
+        double lowest = range.lowest();
+        double to = inside(range, Math.min(range.highest(), DECADE * lowest), lowest);
+        return new Axis(parameter, lowest, to, OperatingRegion.USUAL_STEPS, true);
     }
 
     private static double inside(Range range, double end, double other) {

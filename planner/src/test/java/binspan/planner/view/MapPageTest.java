@@ -161,11 +161,12 @@ final class MapPageTest {
     @ParameterizedTest
     @EnumSource
     void namesOfLinesAreReadable(MapInk ink) {
+        Look other = new Look();
         for (Theme theme : Theme.values()) {
-            look.themeProperty().set(theme);
-            double one = luminance(ink.colour(look));
-            double other = luminance(theme.palette().panel());
-            double contrast = (Math.max(one, other) + 0.05) / (Math.min(one, other) + 0.05);
+            other.themeProperty().set(theme);
+            double one = luminance(ink.colour(other));
+            double ground = luminance(theme.palette().panel());
+            double contrast = (Math.max(one, ground) + 0.05) / (Math.min(one, ground) + 0.05);
             assertTrue(contrast >= LEAST_CONTRAST, theme + " " + contrast);
         }
     }
