@@ -1,22 +1,22 @@
 package binspan.planner.view;
 
+import binspan.planner.export.BoxReport;
+import binspan.planner.export.RegionReport;
+import binspan.planner.export.StudyReport;
 import binspan.planner.viewmodel.MapModel;
 import binspan.planner.viewmodel.MapModel.BoxChoice;
 import binspan.planner.viewmodel.Words;
-import binspan.study.box.OperatingBox;
-import binspan.study.region.RegionMap;
+import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import javafx.beans.binding.Bindings;
-import javafx.beans.binding.ObjectBinding;
+import javafx.beans.value.ObservableValue;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.ChoiceBox;
 import javafx.scene.control.Label;
+import javafx.scene.control.MenuButton;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.Tooltip;
-import javafx.scene.input.Clipboard;
-import javafx.scene.input.ClipboardContent;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.FlowPane;
@@ -27,7 +27,7 @@ import javafx.scene.layout.VBox;
 import javafx.util.StringConverter;
 
 /** The page of the operating map: axes, map, read-out, commands. */
-public final class MapPage extends BorderPane {
+final class MapPage extends BorderPane {
     private static final double NARROW = 42.0;
     private static final double READOUT = 18.0;
     private static final double FIELD = 5.2;
@@ -39,23 +39,22 @@ public final class MapPage extends BorderPane {
     private final MapReadout readout;
     private final ScrollPane side = new ScrollPane();
     private final GridPane axes = new GridPane();
-    private final ObjectBinding<RegionReportInputs> reportInputs;
+    private final List<MenuButton> handouts = new ArrayList<>();
     private boolean narrow;
 
     /**
-     * What a report of the region says.
+     * The page of a model.
      *
-     * @param map the exact map of the design as it is
-     * @param box the largest box on it, where one is drawn in
+     * @param model the map
+     * @param look theme and scale
+     * @param desk the link and where files are made
+     * @param files asks for file names
      */
-    public record RegionReportInputs(RegionMap map, Optional<OperatingBox> box) {}
-
-    /** The page of a model. */
-    public MapPage(MapModel model, Look look) {
+    MapPage(MapModel model, Look look, StudyHandout.Desk desk, FileQuestions files) {
         this.model = model;
         this.look = look;
         this.readout = new MapReadout(model, look);
-        this.reportInputs = Bindings.createObjectBinding(this::inputs, model.regionProperty(), model.boxProperty());
+        handouts(model, desk, files);
         getStyleClass().add("map-page");
         setId("map-page");
         body.getStyleClass().add("map-body");
@@ -77,17 +76,19 @@ public final class MapPage extends BorderPane {
         });
     }
 
-    /** The exact map and the box of the design as it is; null while they are not computed. */
-    public ObjectBinding<RegionReportInputs> regionReportInputs() {
-        return reportInputs;
-    }
-
-    private RegionReportInputs inputs() {
-        RegionMap map = model.regionProperty().get();
-        return map == null
-                ? null
-                : new RegionReportInputs(
-                        map, Optional.ofNullable(model.boxProperty().get()));
+    /** Menus to copy and to export the map, and to export the box; they wait until the exact ones are computed. */
+    private void handouts(MapModel map, StudyHandout.Desk desk, FileQuestions files) {
+        ObservableValue<StudyReport> region =
+                map.regionProperty().map(found -> RegionReport.of(map.design().scenario(), found));
+        ObservableValue<StudyReport> box =
+                map.boxProperty().map(found -> BoxReport.of(map.design().scenario(), found));
+        List<MenuButton> ofMap = new StudyHandout("map", desk, region, () -> body.snapshot(null, null), files).menus();
+        MenuButton ofBox = new StudyHandout("box", desk, box, () -> null, files).export();
+        ofBox.setText(Words.of("map.exportBox"));
+        ofMap.forEach(menu -> menu.disableProperty().bind(map.regionProperty().isNull()));
+        ofBox.disableProperty().bind(map.boxProperty().isNull());
+        handouts.addAll(ofMap);
+        handouts.add(ofBox);
     }
 
     private Node axes() {
@@ -141,8 +142,8 @@ public final class MapPage extends BorderPane {
         recommended
                 .disableProperty()
                 .bind(Bindings.createBooleanBinding(() -> model.recommended().isEmpty(), model.regionProperty()));
-        FlowPane commands =
-                new FlowPane(move, recommended, button("reset", model::resetAxes), boxes(), button("copy", this::copy));
+        FlowPane commands = new FlowPane(move, recommended, button("reset", model::resetAxes), boxes());
+        commands.getChildren().addAll(handouts);
         commands.getStyleClass().add("map-commands");
         return commands;
     }
@@ -193,11 +194,5 @@ public final class MapPage extends BorderPane {
                 body.setRight(side);
             }
         }
-    }
-
-    private void copy() {
-        ClipboardContent content = new ClipboardContent();
-        content.putImage(body.snapshot(null, null));
-        Clipboard.getSystemClipboard().setContent(content);
     }
 }

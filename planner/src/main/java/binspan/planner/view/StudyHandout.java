@@ -67,19 +67,27 @@ final class StudyHandout {
                 item(
                         "copy.summary",
                         () -> copy("summary", () -> report().summary().apply(PLAIN))));
+        copied.disableProperty().bind(undrawn());
+        return List.of(copy, export());
+    }
+
+    /** Whether there is no picture to hand out. */
+    private ObservableValue<Boolean> undrawn() {
+        return report.map(found -> found.picture().isEmpty()).orElse(true);
+    }
+
+    /** The menu to export. */
+    MenuButton export() {
         MenuItem png = item("export.png", () -> export(".png", StudyFiles::picture));
         MenuItem svg = item("export.svg", () -> export(".svg", StudyFiles::picture));
-        MenuButton export = menu(
+        png.disableProperty().bind(undrawn());
+        svg.disableProperty().bind(undrawn());
+        return menu(
                 "export",
                 item("export.csv", () -> export(".csv", StudyFiles::csv)),
                 item("export.json", () -> export(".json", StudyFiles::json)),
                 png,
                 svg);
-        for (MenuItem drawn : List.of(copied, png, svg)) {
-            drawn.disableProperty()
-                    .bind(report.map(found -> found.picture().isEmpty()).orElse(true));
-        }
-        return List.of(copy, export);
     }
 
     private MenuButton menu(String key, MenuItem... items) {

@@ -25,7 +25,13 @@ final class WindowParts {
                 new VerdictPane(model.verdict(), showRoom),
                 List.of(
                         new Page("slots", new SlotsPage(model.slots(), look)),
-                        new Page("map", new MapPage(model.map(), look)),
+                        new Page(
+                                "map",
+                                new MapPage(
+                                        model.map(),
+                                        look,
+                                        new StudyHandout.Desk(model.design(), model.background()),
+                                        files)),
                         new Page("room", new RoomPage(model.verdict(), model.design(), look)),
                         new Page("reach", studies.reach(model.studies().reach())),
                         new Page("detectors", studies.detectors(model.studies().detectors())),

@@ -7,6 +7,7 @@ import java.nio.file.Path;
 
 /** Everything that the window shows, apart from how it is drawn. */
 public final class PlannerModel {
+    private final Background background;
     private final Design design;
     private final LinkFile file;
     private final LatestTask checks;
@@ -37,6 +38,7 @@ public final class PlannerModel {
      * @param recovery directory of copies of unsaved work
      */
     public PlannerModel(Background background, Path settings, Path recovery) {
+        this.background = background;
         design = new Design(LinkFile.starter(Preset.PULSE_PAIR));
         file = new LinkFile(design, new RecentFiles(settings), new Recovery(recovery), background);
         checks = LatestTask.lengthy(background);
@@ -51,6 +53,11 @@ public final class PlannerModel {
                 new ToleranceModel(design, background),
                 new SweepModel(design, background),
                 new TuneModel(design, background));
+    }
+
+    /** Where long work is done. */
+    public Background background() {
+        return background;
     }
 
     /** The link that is being designed. */

@@ -5,12 +5,18 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertNotNull;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import binspan.planner.export.BoxReport;
+import binspan.planner.export.RegionReport;
+import binspan.planner.export.StudyFiles;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.ScenarioReader;
 import binspan.planner.viewmodel.Background;
 import binspan.planner.viewmodel.Designs;
 import binspan.planner.viewmodel.MapModel;
 import binspan.study.region.MapPoint;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Optional;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
 import javafx.application.Platform;
@@ -19,6 +25,7 @@ import javafx.scene.Scene;
 import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
+import javafx.scene.control.MenuButton;
 import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
@@ -26,6 +33,7 @@ import javafx.scene.paint.Color;
 import javafx.stage.Stage;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.extension.ExtendWith;
+import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
 import org.testfx.api.FxRobot;
@@ -39,6 +47,10 @@ final class MapPageTest {
     private static final double LEAST_CONTRAST = 4.5;
 
     private final Look look = new Look();
+
+    @TempDir
+    private Path directory;
+
     private MapModel model;
     private MapPage page;
 
@@ -47,7 +59,13 @@ final class MapPageTest {
         model = new MapModel(
                 Designs.of(ScenarioReader.read("../scenarios/kestrel-dam-to-millbrook.json")),
                 Background.of(Platform::runLater));
-        page = new MapPage(model, look);
+        page = new MapPage(
+                model, look, new StudyHandout.Desk(model.design(), Background.NONE), new FileQuestions(stage, null) {
+                    @Override
+                    Optional<Path> toSave(String title, String proposed, String kind, String... endings) {
+                        return Optional.of(directory.resolve(proposed));
+                    }
+                });
         Scene scene = new Scene(page, 630.0, 520.0);
         look.dress(scene);
         stage.setScene(scene);
@@ -149,12 +167,20 @@ final class MapPageTest {
         assertEquals("Fibre length of the link (km)", parameter.getEditor().getText());
     }
 
+    /** The files that the command line writes for the same map. */
     @Test
-    void offersTheExactMapForReports() throws TimeoutException {
-        WaitForAsyncUtils.waitFor(
-                60, TimeUnit.SECONDS, () -> page.regionReportInputs().get() != null);
-        assertEquals(
-                model.regionProperty().get(), page.regionReportInputs().get().map());
+    void exportsTheExactMapAndItsBox(FxRobot robot) throws Exception {
+        MenuButton export = robot.lookup("#map-export").queryAs(MenuButton.class);
+        MenuButton box = robot.lookup("#box-export").queryAs(MenuButton.class);
+        WaitForAsyncUtils.waitFor(60, TimeUnit.SECONDS, () -> !export.isDisabled() && !box.isDisabled());
+        robot.interact(() -> export.getItems().get(1).fire());
+        robot.interact(() -> box.getItems().get(1).fire());
+        String map = StudyFiles.jsonText(RegionReport.of(
+                model.design().scenario(), model.regionProperty().get()));
+        String found = StudyFiles.jsonText(
+                BoxReport.of(model.design().scenario(), model.boxProperty().get()));
+        assertEquals(map, Files.readString(directory.resolve("kestrel-dam-to-millbrook-map.json")));
+        assertEquals(found, Files.readString(directory.resolve("kestrel-dam-to-millbrook-box.json")));
     }
 
     /** The contrast of relative luminances of the Web Content Accessibility Guidelines 2.1, from memory. */
