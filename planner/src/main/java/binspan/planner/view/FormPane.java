@@ -117,7 +117,7 @@ public final class FormPane extends VBox {
     }
 
     private static Node adding(AddRow row) {
-        Button add = new Button(Words.of("form.add"));
+        Button add = new Button(row.text());
         add.setId("form-add");
         add.getStyleClass().add("form-button");
         add.setOnAction(event -> row.add());

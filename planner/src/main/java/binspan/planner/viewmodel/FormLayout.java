@@ -42,8 +42,11 @@ final class FormLayout {
         return List.copyOf(layout.groups);
     }
 
-    /** The list of an object to which items can be added, such as the classical channels of a fibre. */
+    /** The list to which items can be added: the classical channels of a fibre, the detectors of a side; empty if there is none. */
     static String listOf(Scenario scenario, LinkPart part) {
+        if (part instanceof LinkPart.Port port) {
+            return port.site().path() + ".detectors";
+        }
         return part instanceof LinkPart.Element element && element(scenario, element) instanceof FibreSpan
                 ? object(element) + "." + CHANNELS
                 : "";
@@ -82,10 +85,18 @@ final class FormLayout {
         } else if (part instanceof LinkPart.Analyzer analyzer) {
             section("", analyzer.site().path() + ".analyzer");
         } else if (part instanceof LinkPart.Port port) {
-            section("", port.site().path() + ".detectors[" + port.port() + "]");
+            port(port);
         } else if (part instanceof LinkPart.Element element) {
             element(element);
         }
+    }
+
+    /** One of two detectors can be removed. */
+    private void port(LinkPart.Port port) {
+        String object = port.site().path() + ".detectors[" + port.port() + "]";
+        boolean two = port.site().arm(scenario).detectors().size() > 1;
+        String title = two ? Words.of("form.port", port.port() + 1) : "";
+        groups.add(new Group(title, object, places(object, sectionAt(object)), two));
     }
 
     private void element(LinkPart.Element part) {

@@ -3,9 +3,11 @@ package binspan.planner.viewmodel;
 import binspan.planner.document.Change;
 import binspan.planner.document.EditProblem;
 import binspan.scenario.Scenario;
+import binspan.scenario.Section;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.function.Predicate;
 import javafx.beans.property.ReadOnlyObjectProperty;
@@ -122,6 +124,21 @@ public final class FormModel {
         return text.toString();
     }
 
+    /** What can be added to the part: a classical channel to a fibre, a second detector to a side that has one. */
+    private Optional<AddRow> adding(Scenario scenario) {
+        String list = FormLayout.listOf(scenario, part.get());
+        if (list.isEmpty()) {
+            return Optional.empty();
+        }
+        int size = ((List<?>) PlannedValue.at(scenario, list).orElseThrow()).size();
+        if (!(part.get() instanceof LinkPart.Port)) {
+            return Optional.of(AddRow.channel(edits, list, size));
+        }
+        Section section =
+                PlannedValue.place(scenario, list).field().content().section("").orElseThrow();
+        return size == 1 ? Optional.of(AddRow.port(edits, list, section)) : Optional.empty();
+    }
+
     private List<FormRow> made(Scenario scenario, List<FormLayout.Group> groups) {
         List<FormRow> made = new ArrayList<>();
         List<FormRow> idle = new ArrayList<>();
@@ -131,11 +148,7 @@ public final class FormModel {
             }
             rows(scenario, group, made, idle);
         }
-        String list = FormLayout.listOf(scenario, part.get());
-        if (!list.isEmpty()) {
-            int size = ((List<?>) PlannedValue.at(scenario, list).orElseThrow()).size();
-            made.add(new AddRow(edits, list, size));
-        }
+        adding(scenario).ifPresent(made::add);
         if (!idle.isEmpty()) {
             made.add(new GroupRow(edits, new FormLayout.Group(Words.of("form.group.idle"), "", List.of(), false)));
         }

@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.ScenarioReader;
 import binspan.scenario.Content;
+import binspan.scenario.Detector;
 import binspan.scenario.Field;
 import binspan.scenario.ScenarioSections;
 import binspan.scenario.Section;
@@ -14,6 +15,7 @@ import java.util.TreeSet;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
 
 class FormModelTest {
     private static final String KESTREL = "kestrel-dam-to-millbrook";
@@ -382,7 +384,7 @@ class FormModelTest {
     @Test
     void theTableOfAClassSaysWhatIsInForce() {
         EditedForm form = new EditedForm(KESTREL).select(PORT);
-        ClassRow row = (ClassRow) form.form().rows().get(1);
+        ClassRow row = classRow(form);
         ClassTable table = row.tableProperty().get().orElseThrow();
         assertThat(table.lines().get(0)).isEqualTo(new ClassTable.Line("efficiency", "0.8", "0.82"));
         assertThat(table.lines().get(4).replaced()).isFalse();
@@ -394,7 +396,7 @@ class FormModelTest {
     @Test
     void anOperatingPointIsStatedAsAWhole() {
         EditedForm form = new EditedForm("orchard-lane-access").select(PORT);
-        ClassRow row = (ClassRow) form.form().rows().get(1);
+        ClassRow row = classRow(form);
         row.operate(row.operatingPoints().indexOf("10 %, 20 us"));
         assertThat(form.design().scenario().alice().detectors().get(0).efficiency())
                 .isEqualTo(0.10);
@@ -412,5 +414,34 @@ class FormModelTest {
         assertThat(form.field(EFFICIENCY)).isSameAs(field);
         form.select(new LinkPart.Plan());
         assertThat(form.form().titleProperty().get()).isEqualTo("plan of the link");
+    }
+
+    /** A side keeps one detector at least; the second one is like the first until somebody says otherwise. */
+    @ParameterizedTest
+    @ValueSource(strings = {"kestrel-dam-to-millbrook", "orchard-lane-access"})
+    void detectorsAreRemovedAndAdded(String link) {
+        EditedForm form = new EditedForm(link);
+        Detector first = form.design().scenario().bob().detectors().get(0);
+        form.form().select(new LinkPart.Port(Site.BOB, 1));
+        GroupRow heading = (GroupRow) form.form().rows().get(0);
+        assertThat(heading.removable()).isTrue();
+        heading.remove();
+        assertThat(form.design().scenario().bob().detectors()).containsExactly(first);
+        form.form().select(new LinkPart.Port(Site.BOB, 0));
+        assertThat(form.form().rows()).noneMatch(row -> row instanceof GroupRow group && group.removable());
+        AddRow add = (AddRow) form.form().rows().stream()
+                .filter(AddRow.class::isInstance)
+                .findFirst()
+                .orElseThrow();
+        add.add();
+        assertThat(add.errorProperty().get()).isEmpty();
+        assertThat(form.design().scenario().bob().detectors()).containsExactly(first, first);
+    }
+
+    private static ClassRow classRow(EditedForm form) {
+        return (ClassRow) form.form().rows().stream()
+                .filter(ClassRow.class::isInstance)
+                .findFirst()
+                .orElseThrow();
     }
 }
