@@ -39,10 +39,21 @@ final class ReadmeTest {
         List<List<String>> commands = commands();
         assertThat(commands).hasSizeGreaterThan(6);
         for (List<String> command : commands) {
+            if (command.get(0).equals("view")) {
+                assertOpens(command);
+                continue;
+            }
             Run run = Run.of(command.toArray(String[]::new));
             assertThat(run.err()).as(command.toString()).isEmpty();
             assertThat(run.status()).as(command.toString()).isZero();
         }
+    }
+
+    /** A window would stay open: its command is read, and its file must be one that it could show. */
+    private static void assertOpens(List<String> command) {
+        Run check = Run.of("check", command.get(1));
+        assertThat(command).hasSize(2);
+        assertThat(check.err()).as(command.toString()).isEmpty();
     }
 
     @Test
