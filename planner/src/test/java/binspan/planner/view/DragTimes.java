@@ -21,10 +21,7 @@ import javafx.stage.Stage;
  */
 public final class DragTimes {
     private static final List<String> LINKS = List.of(
-            "kestrel-dam-to-millbrook",
-            "stonebridge-to-lower-weir",
-            "orchard-lane-access",
-            "eagle-tarn-to-saltmarsh");
+            "kestrel-dam-to-millbrook", "stonebridge-to-lower-weir", "orchard-lane-access", "eagle-tarn-to-saltmarsh");
     private static final int WARM_UP = 100;
     private static final int STEPS = 300;
     private static final long STEP_NANOS = 16_000_000L;
@@ -103,9 +100,11 @@ public final class DragTimes {
         private Drag repair() {
             Scenario scenario = session.model().design().scenario();
             Parameter margin = ParameterPaths.find(scenario, "alice.repairMarginDb");
-            return new Drag("margin", share -> session.model()
-                    .design()
-                    .change("margin", this, now -> margin.with(now, 0.5 + 1.5 * share)));
+            return new Drag(
+                    "margin",
+                    share -> session.model()
+                            .design()
+                            .change("margin", this, now -> margin.with(now, 0.5 + 1.5 * share)));
         }
 
         private void measure(String link, Drag drag) {

@@ -190,8 +190,7 @@ class LatestTaskTest {
     @Test
     void errorOfTheMachineComesToTheWindowTooAndTheTaskLivesOn() {
         LatestTask task = LatestTask.quick(held.background());
-        task.run(
-                LatestTaskTest::breaking, shown::add);
+        task.run(LatestTaskTest::breaking, shown::add);
         held.doWork();
         assertThatThrownBy(held::showResult).isInstanceOf(StackOverflowError.class);
         assertThat(task.runningProperty().get()).isFalse();
