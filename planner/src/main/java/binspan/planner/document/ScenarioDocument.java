@@ -12,6 +12,8 @@ public final class ScenarioDocument {
     private final String text;
     private final String name;
     private final Scenario scenario;
+    /** The text taken apart, once somebody has asked for it. */
+    private volatile TextPart root;
 
     private ScenarioDocument(String text, String name, Scenario scenario) {
         this.text = text;
@@ -53,11 +55,20 @@ public final class ScenarioDocument {
      */
     public boolean states(String path) {
         try {
-            TextPart root = TextScanner.scan(text).root();
-            return DocumentPath.of(path, root).in(root) != null;
+            TextPart whole = root();
+            return DocumentPath.of(path, whole).in(whole) != null;
         } catch (RefusedEditException e) {
             return false;
         }
+    }
+
+    private TextPart root() {
+        TextPart known = root;
+        if (known == null) {
+            known = TextScanner.scan(text).root();
+            root = known;
+        }
+        return known;
     }
 
     /**

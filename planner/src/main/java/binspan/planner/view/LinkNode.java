@@ -38,6 +38,8 @@ final class LinkNode extends Region {
     private final Label detail = label("link-detail");
     private final Label loss = label("link-loss");
     private final Tooltip tooltip = new Tooltip();
+    private Drawn last;
+    private double lastEm;
 
     LinkNode(int index) {
         getStyleClass().add("link-item");
@@ -61,6 +63,11 @@ final class LinkNode extends Region {
 
     /** Draws a thing at a text size. */
     void show(Drawn drawn, double em) {
+        if (em == lastEm && drawn.equals(last)) {
+            return;
+        }
+        last = drawn;
+        lastEm = em;
         LinkItem item = drawn.item();
         boolean scaled = item.kind() != Kind.FIBRE || drawn.column().toScale();
         String text = scaled ? item.description() : Words.of("link.described.fold", item.description());

@@ -2,7 +2,6 @@ package binspan.planner.view;
 
 import binspan.planner.viewmodel.Words;
 import javafx.beans.value.ObservableValue;
-import javafx.scene.control.CheckMenuItem;
 import javafx.scene.control.Menu;
 import javafx.scene.control.MenuItem;
 import javafx.scene.control.RadioMenuItem;
@@ -39,11 +38,6 @@ final class Menus {
         RadioMenuItem item = dressed(new RadioMenuItem(), key, action);
         item.setToggleGroup(group);
         return item;
-    }
-
-    /** An item that is on or off. */
-    static CheckMenuItem toggle(String key, Runnable action) {
-        return dressed(new CheckMenuItem(), key, action);
     }
 
     private static <T extends MenuItem> T dressed(T item, String key, Runnable action) {

@@ -75,6 +75,19 @@ final class Session {
         filing = new Filing(model.design(), model.file(), files, notices);
         window = new MainWindow(model, WindowParts.of(model, look, files, this::showRoom), look);
         window.menus(menus().bar(this::close));
+        window.followPage(this::watch);
+    }
+
+    /** Only what is shown follows each step of a drag. */
+    private void watch(String page) {
+        PlannerModel.Studies studies = model.studies();
+        model.slots().watchedProperty().set(page.equals("slots"));
+        model.map().watchedProperty().set(page.equals("map"));
+        studies.reach().watchedProperty().set(page.equals("reach"));
+        studies.detectors().watchedProperty().set(page.equals("detectors"));
+        studies.tolerance().watchedProperty().set(page.equals("tolerance"));
+        studies.sweep().watchedProperty().set(page.equals("sweep"));
+        studies.tune().watchedProperty().set(page.equals("tune"));
     }
 
     private WindowMenus menus() {

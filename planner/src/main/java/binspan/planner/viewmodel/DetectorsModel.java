@@ -38,7 +38,7 @@ public final class DetectorsModel extends StudyModel<List<Comparison.Entry>> {
     public DetectorsModel(Design design, Background background) {
         super("compare", design, background);
         follow(fibres, detectorClasses, fibreClasses, present, mixed, retuned, aim);
-        design.scenarioProperty().addListener((source, before, after) -> check());
+        followDesign(this::check);
         check();
     }
 

@@ -19,7 +19,7 @@ public final class FreeParameters {
     private final List<WrittenAxis> added = new ArrayList<>();
 
     /**
-     * The usual parameters, which follow the link.
+     * The usual parameters of the link as it is now.
      *
      * @param design the link
      * @param changed is called when anything changes
@@ -27,11 +27,13 @@ public final class FreeParameters {
     FreeParameters(Design design, Runnable changed) {
         this.design = design;
         this.changed = changed;
-        design.scenarioProperty().addListener((source, before, after) -> {
-            renew(after);
-            changed.run();
-        });
         renew(design.scenario());
+    }
+
+    /** Follows the link. */
+    void follow() {
+        renew(design.scenario());
+        changed.run();
     }
 
     private void renew(Scenario scenario) {

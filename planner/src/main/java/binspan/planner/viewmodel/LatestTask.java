@@ -120,6 +120,12 @@ public final class LatestTask {
                 background.window().execute(LatestTask.this::ended);
             } catch (RuntimeException e) {
                 background.window().execute(() -> finish(() -> fail.accept(e)));
+            } catch (Error e) {
+                background
+                        .window()
+                        .execute(() -> finish(() -> {
+                            throw e;
+                        }));
             }
         }
 

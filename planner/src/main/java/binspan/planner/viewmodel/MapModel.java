@@ -16,11 +16,13 @@ import java.util.Optional;
 import java.util.concurrent.CancellationException;
 import javafx.beans.binding.Bindings;
 import javafx.beans.binding.BooleanBinding;
+import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.ReadOnlyStringWrapper;
+import javafx.beans.property.SimpleBooleanProperty;
 import javafx.beans.property.SimpleObjectProperty;
 
 /**
@@ -49,8 +51,12 @@ public final class MapModel {
     private final ReadOnlyObjectWrapper<OperatingBox> box = new ReadOnlyObjectWrapper<>(this, "box");
     private final ReadOnlyStringWrapper message = new ReadOnlyStringWrapper(this, "message", "");
     private final ObjectProperty<BoxChoice> boxChoice = new SimpleObjectProperty<>(this, "boxChoice", BoxChoice.SHARE);
+    private final BooleanProperty watched = new SimpleBooleanProperty(this, "watched", true);
     private final BooleanBinding computing;
     private MapQuestion question;
+    /** Whether the question was put while nobody looked. */
+    private boolean unanswered;
+
     private boolean swapping;
 
     /** Which box is drawn in. */
@@ -88,7 +94,13 @@ public final class MapModel {
         horizontal.axisProperty().addListener((source, before, after) -> axisChanged());
         vertical.axisProperty().addListener((source, before, after) -> axisChanged());
         boxChoice.addListener((source, before, after) -> findBox());
+        watched.addListener((source, before, after) -> ask());
         ask();
+    }
+
+    /** Whether anybody looks: otherwise a changed design computes nothing until somebody does. */
+    public BooleanProperty watchedProperty() {
+        return watched;
     }
 
     /** The parameter across the map and its range. */
@@ -245,9 +257,19 @@ public final class MapModel {
                 shape.set(null);
                 message.set("");
             }
-            boxing.cancel();
-            survey(next);
-            solve(next);
+            cancel();
+            unanswered = true;
+        }
+        if (watched.get()) {
+            answer();
+        }
+    }
+
+    private void answer() {
+        if (unanswered) {
+            unanswered = false;
+            survey(question);
+            solve(question);
         }
         reader.read();
     }
@@ -257,14 +279,20 @@ public final class MapModel {
             throw reason;
         }
         question = null;
+        unanswered = false;
         quick.cancel();
-        exact.cancel();
-        boxing.cancel();
+        cancel();
         region.set(null);
         box.set(null);
         shape.set(null);
         reader.read();
         message.set(reason.getMessage());
+    }
+
+    /** Stops what takes long; a quick grid still ends, so that a drag is followed. */
+    private void cancel() {
+        exact.cancel();
+        boxing.cancel();
     }
 
     private boolean current(MapQuestion asked) {

@@ -38,6 +38,7 @@ public final class ReachModel extends StudyModel<Reach.Outcome> {
     public ReachModel(Design design, Background background) {
         super("reach", design, background);
         free = new FreeParameters(design, this::check);
+        followDesign(free::follow);
         follow(place, share, retuned, aim);
         check();
     }

@@ -4,8 +4,10 @@ import binspan.scenario.Scenario;
 import binspan.study.Execution;
 import java.util.function.Function;
 import javafx.beans.Observable;
+import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.ReadOnlyStringWrapper;
+import javafx.beans.property.SimpleBooleanProperty;
 
 /**
  * A study of the design with its options: says at once what is wrong with them and runs in the background. All methods
@@ -18,7 +20,10 @@ public abstract class StudyModel<F> {
     private final Design design;
     private final Background background;
     private final StudyRun<F> run;
+    private final BooleanProperty watched = new SimpleBooleanProperty(this, "watched", true);
     private final ReadOnlyStringWrapper problem = new ReadOnlyStringWrapper(this, "problem", "");
+    private Runnable renew = this::check;
+    private boolean behind;
 
     /**
      * A study that has not run.
@@ -50,6 +55,28 @@ public abstract class StudyModel<F> {
         }
     }
 
+    /** Follows the link: at once while somebody looks, else as soon as somebody does or the study is run. */
+    final void followDesign(Runnable followed) {
+        renew = followed;
+        design.scenarioProperty().addListener((source, before, after) -> {
+            behind = true;
+            catchUp(watched.get());
+        });
+        watched.addListener((source, before, now) -> catchUp(now));
+    }
+
+    private void catchUp(boolean wanted) {
+        if (wanted && behind) {
+            behind = false;
+            renew.run();
+        }
+    }
+
+    /** Whether anybody looks: otherwise options do not follow each step of a drag. */
+    public final BooleanProperty watchedProperty() {
+        return watched;
+    }
+
     /** Looks whether the options can be followed. */
     final void check() {
         try {
@@ -62,6 +89,7 @@ public abstract class StudyModel<F> {
 
     /** Runs the study, unless its options are wrong. */
     public final void start() {
+        catchUp(true);
         check();
         if (problem.get().isEmpty()) {
             run.start(work(design.scenario()), design.scenario());

@@ -35,7 +35,7 @@ public final class SweepModel extends StudyModel<StudyTable> {
         follow(first.parts());
         follow(second.parts());
         follow(shown);
-        design.scenarioProperty().addListener((source, before, after) -> renew(after));
+        followDesign(() -> renew(design.scenario()));
         check();
     }
 

@@ -53,7 +53,7 @@ public final class ToleranceModel extends StudyModel<ToleranceResult> {
     public ToleranceModel(Design design, Background background) {
         super("tolerance", design, background);
         follow(builds, seed);
-        design.scenarioProperty().addListener((source, before, after) -> list());
+        followDesign(this::list);
         list();
     }
 
@@ -64,10 +64,18 @@ public final class ToleranceModel extends StudyModel<ToleranceResult> {
                 .map(spread ->
                         new Row(spread, added.containsKey(spread.parameter().path())))
                 .toList();
-        if (!present.equals(rows)) {
+        if (!said(present).equals(said(rows))) {
             rows.setAll(present);
         }
         check();
+    }
+
+    /** What distinguishes rows: the same parameter of another scenario is another object. */
+    private static List<List<Object>> said(List<Row> rows) {
+        return rows.stream()
+                .map(row -> List.<Object>of(
+                        row.spread().parameter().path(), row.spread().spread(), row.added()))
+                .toList();
     }
 
     private static boolean leads(Scenario scenario, String path) {

@@ -43,6 +43,7 @@ public final class TuneModel extends StudyModel<TuneModel.Tuned> {
     public TuneModel(Design design, Background background) {
         super("tune", design, background);
         free = new FreeParameters(design, this::check);
+        followDesign(free::follow);
         follow(aim);
         check();
     }

@@ -3,6 +3,7 @@ package binspan.planner.viewmodel;
 import binspan.prediction.LinkCheck;
 import binspan.prediction.LinkPredictor;
 import binspan.scenario.Scenario;
+import java.util.concurrent.CancellationException;
 import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.beans.property.ReadOnlyBooleanWrapper;
 import javafx.beans.property.ReadOnlyObjectProperty;
@@ -10,9 +11,13 @@ import javafx.beans.property.ReadOnlyObjectWrapper;
 
 /**
  * The verdict on the link as it is designed, compared with the link as saved. The sheet follows every step of a drag;
- * the room, which asks for hundreds of predictions, comes after it. All methods are for the window's thread.
+ * the room, which asks for hundreds of predictions, comes after it, where it takes long when nothing moves. All methods are for the window's thread.
  */
 public final class VerdictModel {
+    private static final long SLOW_NANOS = 20_000_000L;
+    private static final long STILL_MILLIS = 80;
+    private static final long NAP_MILLIS = 10;
+
     private final Design design;
     private final LatestTask quick;
     private final LatestTask search;
@@ -29,6 +34,9 @@ public final class VerdictModel {
     private final ReadOnlyObjectWrapper<VerdictRoom> full = new ReadOnlyObjectWrapper<>(this, "full");
     private final ReadOnlyBooleanWrapper fullStale = new ReadOnlyBooleanWrapper(this, "fullStale", true);
     private LinkCheck savedCheck;
+    private volatile Scenario newest;
+    /** Whether the last search took so long that the next leaves the processors to what follows the hand. */
+    private volatile boolean slow;
 
     /** What the quick work finds. */
     private record Found(VerdictSheet sheet, LinkCheck saved) {}
@@ -65,6 +73,7 @@ public final class VerdictModel {
 
     private void changed() {
         Scenario scenario = design.scenario();
+        newest = scenario;
         Scenario saved = design.savedProperty().get();
         LinkCheck known =
                 savedCheck != null && savedCheck.prediction().scenario().equals(saved) ? savedCheck : null;
@@ -87,7 +96,31 @@ public final class VerdictModel {
         markStale();
         if (fullStale.get() || search.runningProperty().get()) {
             Scenario scenario = found.sheet().scenario();
-            search.run(progress -> VerdictRoom.of(LinkCheck.of(scenario)), this::show);
+            search.run(progress -> room(scenario), this::show);
+        }
+    }
+
+    private VerdictRoom room(Scenario scenario) {
+        if (slow) {
+            waitWhileStill(scenario);
+        }
+        long start = System.nanoTime();
+        VerdictRoom found = VerdictRoom.of(LinkCheck.of(scenario));
+        slow = System.nanoTime() - start > SLOW_NANOS;
+        return found;
+    }
+
+    private void waitWhileStill(Scenario scenario) {
+        try {
+            for (long waited = 0; waited < STILL_MILLIS; waited += NAP_MILLIS) {
+                if (!scenario.equals(newest)) {
+                    throw new CancellationException("not still");
+                }
+                Thread.sleep(NAP_MILLIS);
+            }
+        } catch (InterruptedException e) {
+            Thread.currentThread().interrupt();
+            throw new CancellationException("interrupted");
         }
     }
 

@@ -76,6 +76,33 @@ final class MapModelTest {
     }
 
     @Test
+    void nothingIsComputedWhileNobodyLooksAndTheNewestAfterwards() {
+        work.finish();
+        model.watchedProperty().set(false);
+        set("alice.repairMarginDb", 1.5);
+        set("alice.repairMarginDb", 2.0);
+        assertEquals(0, work.waiting());
+        assertNull(model.regionProperty().get(), "the exact map is no longer that of the design");
+        model.watchedProperty().set(true);
+        work.finish();
+        MapModel fresh = new MapModel(design, Background.NONE, 0);
+        assertEquals(fresh.shapeProperty().get(), model.shapeProperty().get());
+    }
+
+    @Test
+    void mapThatStillHoldsIsNotComputedAgainWhenSomebodyLooks() {
+        work.finish();
+        RegionMap known = model.regionProperty().get();
+        model.watchedProperty().set(false);
+        set(WINDOW, 350.0);
+        model.watchedProperty().set(true);
+        assertSame(known, model.regionProperty().get());
+        assertEquals(1, work.waiting(), "the read-out of the present point alone");
+        work.finish();
+        assertEquals(350.0, model.reader().readingProperty().get().y());
+    }
+
+    @Test
     void exactLinesArePlacesWithoutRoomAndTurnTheirHoldingSideToTheLeft() {
         work.finish();
         assertTrue(model.shapeProperty().get().exact());
