@@ -16,6 +16,8 @@ import javafx.scene.input.MouseButton;
 final class HeadroomTable extends TableView<VerdictRoom.Row> {
     private static final double CELL = 1.75;
     private static final double HEAD = 2.1;
+    private static final double NUMBER_NARROWEST = 5.3;
+    private static final double TEXT_NARROWEST = 6.0;
     private static final int FEWEST = 3;
     private static final int MOST = 8;
 
@@ -55,7 +57,10 @@ final class HeadroomTable extends TableView<VerdictRoom.Row> {
         column.setCellValueFactory(cell -> new ReadOnlyStringWrapper(text.apply(cell.getValue())));
         column.setSortable(false);
         column.setReorderable(false);
-        look.follow(() -> column.setPrefWidth(look.em(width)));
+        look.follow(() -> {
+            column.setMinWidth(look.em(number ? NUMBER_NARROWEST : TEXT_NARROWEST));
+            column.setPrefWidth(look.em(width));
+        });
         if (number) {
             column.getStyleClass().add("number");
         }

@@ -99,6 +99,7 @@ public final class RoomPage extends BorderPane {
         HBox.setHgrow(gap, Priority.ALWAYS);
         HBox head = new HBox(title, Columns.label(VerdictHeadroom.ORDER, "soft", "small"), gap, computing);
         head.getStyleClass().add("room-head");
+        title.setMinWidth(Region.USE_PREF_SIZE);
         VBox left = new VBox(cautions, safety);
         VBox right = new VBox(stability, changes);
         left.getStyleClass().add("room-column");
@@ -190,8 +191,13 @@ public final class RoomPage extends BorderPane {
     }
 
     private static Node pair(String name, String value) {
-        GridPane pair = Columns.grid(72.0, -28.0);
-        pair.addRow(0, Columns.wrapped(name), Columns.label(value, "figure"));
+        Label quantity = Columns.wrapped(name);
+        quantity.setMaxWidth(Double.MAX_VALUE);
+        HBox.setHgrow(quantity, Priority.ALWAYS);
+        Label figure = Columns.label(value, "figure");
+        figure.setMinWidth(Region.USE_PREF_SIZE);
+        HBox pair = new HBox(quantity, figure);
+        pair.getStyleClass().add("line");
         return pair;
     }
 

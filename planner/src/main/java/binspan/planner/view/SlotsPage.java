@@ -10,6 +10,7 @@ import javafx.beans.property.BooleanProperty;
 import javafx.scene.canvas.Canvas;
 import javafx.scene.control.CheckBox;
 import javafx.scene.control.Label;
+import javafx.scene.control.Tooltip;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
@@ -49,6 +50,7 @@ final class SlotsPage extends VBox {
         Label flat = new Label(Words.of("slots.flat"));
         flat.getStyleClass().add("soft");
         flat.visibleProperty().bind(model.plotsProperty().map(each -> each.size() == 1));
+        flat.managedProperty().bind(flat.visibleProperty());
         HBox choices = new HBox(logarithmic, allPorts, flat);
         choices.getStyleClass().add("choices");
         return choices;
@@ -57,6 +59,7 @@ final class SlotsPage extends VBox {
     private static CheckBox choice(String id, String key, BooleanProperty property) {
         CheckBox box = new CheckBox(Words.of(key));
         box.setId(id);
+        box.setMinWidth(Region.USE_PREF_SIZE);
         box.selectedProperty().bindBidirectional(property);
         return box;
     }
@@ -70,6 +73,7 @@ final class SlotsPage extends VBox {
             Shown each = shown.get(i);
             each.title().setText(now.get(i).title());
             each.note().setText(now.get(i).note());
+            each.note().setTooltip(new Tooltip(now.get(i).note()));
             each.plot().show(now.get(i));
         }
     }

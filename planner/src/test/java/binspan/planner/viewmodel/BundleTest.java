@@ -115,9 +115,9 @@ class BundleTest {
             String name = rest.substring(0, rest.length() - ending.length());
             int dot = name.indexOf('.');
             return LITERALS.contains(name)
-                    || dot > 0
+                    || (dot > 0
                             && LITERALS.contains(name.substring(0, dot))
-                            && LITERALS.contains(name.substring(dot + 1));
+                            && LITERALS.contains(name.substring(dot + 1)));
         });
     }
 
