@@ -55,9 +55,11 @@ final class MapRanges {
         double wanted = logarithmic ? FIRST_SHARE * reach : -reach;
         double from = inside(range, Math.max(range.lowest(), wanted), reach);
         double to = inside(range, Math.min(range.highest(), reach), from);
-        return from < to
-                ? new Axis(parameter, from, to, OperatingRegion.USUAL_STEPS, logarithmic)
-                : new Axis(parameter, range.lowest(), 10.0 * range.lowest(), OperatingRegion.USUAL_STEPS, true);
+        if (from < to) {
+            return new Axis(parameter, from, to, OperatingRegion.USUAL_STEPS, logarithmic);
+        }
+        double decade = Math.min(range.highest(), 10.0 * range.lowest());
+        return new Axis(parameter, range.lowest(), decade, OperatingRegion.USUAL_STEPS, true);
     }
 
     private static double inside(Range range, double end, double other) {

@@ -337,8 +337,7 @@ final class MapModelTest {
 
     @Test
     void fallsBackWhereTheParameterIsGone() {
-        Scenario continuous = scenario("stonebridge-to-lower-weir.json");
-        assertTrue(design.change("another link", null, s -> continuous));
+        design.begin(Designs.shipped("stonebridge-to-lower-weir"));
         assertEquals("source.pairRatePerSecond", model.horizontal().path());
         assertTrue(design.noticeProperty().get().contains("mean pairs per cycle"));
         work.finish();
