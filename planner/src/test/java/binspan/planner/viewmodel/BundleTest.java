@@ -114,10 +114,9 @@ class BundleTest {
         return ENDINGS.stream().filter(rest::endsWith).anyMatch(ending -> {
             String name = rest.substring(0, rest.length() - ending.length());
             int dot = name.indexOf('.');
-            return LITERALS.contains(name)
-                    || (dot > 0
-                            && LITERALS.contains(name.substring(0, dot))
-                            && LITERALS.contains(name.substring(dot + 1)));
+            boolean ofTwo =
+                    dot > 0 && LITERALS.contains(name.substring(0, dot)) && LITERALS.contains(name.substring(dot + 1));
+            return ofTwo || LITERALS.contains(name);
         });
     }
 
