@@ -28,6 +28,8 @@ final class HistogramPlot extends Region {
     private final TimeHandle separation;
     private SlotPlot plot;
     private TimeFrame frame;
+    /** From the separation to the last peak; does not change with the separation. */
+    private double offset;
 
     HistogramPlot(SlotsModel model, Look look, String id) {
         this.model = model;
@@ -96,6 +98,8 @@ final class HistogramPlot extends Region {
         left.place(frame.x(window.from()), top, height);
         right.place(frame.x(window.to()), top, height);
         double peak = plot.peaks().get(plot.peaks().size() - 1).time();
+        // While a newer plot is on its way, this one is not that of the present separation.
+        offset = model.runningProperty().get() ? offset : peak - model.separation();
         separation.setVisible(peak > 0.0 && peak < frame.to());
         separation.place(frame.x(peak), top, height);
         right.setAccessibleText(Words.of("slots.handle.window", Figure.in(model.window() * PICO, "ps")));
@@ -109,7 +113,6 @@ final class HistogramPlot extends Region {
     }
 
     private void separation(double x) {
-        double offset = plot.peaks().get(plot.peaks().size() - 1).time() - model.separation();
         double wanted = frame.time(x) - offset;
         if (wanted > 0.0) {
             model.separation(rounded(wanted), separation);

@@ -29,6 +29,8 @@ public final class LinkFile {
     /** What the file held when it was read or written; null without a file. */
     private String onDisk;
 
+    private boolean ended;
+
     /**
      * The file of a design.
      *
@@ -137,9 +139,11 @@ public final class LinkFile {
                 found.text(), found.original().map(Path::toString).orElse("recovered"));
         ScenarioDocument base = found.original().flatMap(this::read).orElse(null);
         boolean same = base != null && found.basedOn(base.text());
-        onDisk = base == null ? null : base.text();
+        // A file that is another now counts as changed elsewhere: saving asks before it replaces it.
+        onDisk = same ? base.text() : null;
         path.set(found.original().orElse(null));
         design.resume(left, same ? base : null, Words.of("file.recovered.step"));
+        copy();
         found.discard();
         design.notice(Words.of("file.recovered"));
         retitle();
@@ -156,7 +160,10 @@ public final class LinkFile {
     /** Removes the copy of unsaved work: the program ends in order. */
     public void closed() {
         copying.cancel();
-        recovery.clear();
+        synchronized (recovery) {
+            ended = true;
+            recovery.clear();
+        }
     }
 
     private void remember(Path file) {
@@ -183,15 +190,18 @@ public final class LinkFile {
 
     /** Keeps the copy of unsaved work up to date; whether that could be done. */
     private boolean kept(boolean modified, String text, Path original, String saved) {
-        if (!modified) {
-            recovery.clear();
-            return true;
-        }
-        try {
-            recovery.write(text, original, saved);
-            return true;
-        } catch (OutputFileException e) {
-            return false;
+        // The end waits for a copy that is being written, and none is written after it.
+        synchronized (recovery) {
+            if (!modified || ended) {
+                recovery.clear();
+                return true;
+            }
+            try {
+                recovery.write(text, original, saved);
+                return true;
+            } catch (OutputFileException e) {
+                return false;
+            }
         }
     }
 

@@ -4,6 +4,7 @@ import binspan.prediction.LinkPredictor;
 import binspan.scenario.Parameter;
 import binspan.scenario.ParameterPaths;
 import binspan.scenario.Scenario;
+import binspan.units.Digits;
 import java.util.List;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ReadOnlyBooleanProperty;
@@ -17,6 +18,7 @@ public final class SlotsModel {
     private static final String IMBALANCE = "imbalanceNs";
     private static final double PICO = 1e12;
     private static final double NANO = 1e9;
+    private static final int DIGITS = 12;
 
     private final Design design;
     private final LatestTask task;
@@ -102,8 +104,10 @@ public final class SlotsModel {
 
     private void set(String path, double wanted, Object drag) {
         Parameter parameter = ParameterPaths.find(design.scenario(), path);
+        // Without the last digits, which the change of unit has left.
+        double plain = Double.parseDouble(Digits.significant(wanted, DIGITS));
         double value =
-                Math.max(parameter.range().lowest(), Math.min(parameter.range().highest(), wanted));
+                Math.max(parameter.range().lowest(), Math.min(parameter.range().highest(), plain));
         design.change(Words.of("slots.change." + path), drag, scenario -> parameter.with(scenario, value));
     }
 }

@@ -16,9 +16,9 @@ import java.util.Map;
  * @param out standard output
  * @param err standard error
  */
-record Run(int status, String out, String err) {
+public record Run(int status, String out, String err) {
     /** Runs a command line with an empty standard input. */
-    static Run of(String... args) {
+    public static Run of(String... args) {
         return reading(new byte[0], args);
     }
 
@@ -47,7 +47,7 @@ record Run(int status, String out, String err) {
         return new PrintStream(stream, true, StandardCharsets.UTF_8);
     }
 
-    List<String> errLines() {
+    public List<String> errLines() {
         return err.lines().toList();
     }
 }
