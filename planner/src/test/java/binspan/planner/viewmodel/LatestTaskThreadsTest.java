@@ -105,7 +105,7 @@ class LatestTaskThreadsTest {
         most.accumulateAndGet(working.incrementAndGet(), Math::max);
         try {
             LockSupport.parkNanos(workNanos);
-            if (request % 4 == 0 && progress.cancelled() || request % 7 == 3 && request < REQUESTS - 1) {
+            if ((request % 4 == 0 && progress.cancelled()) || (request % 7 == 3 && request < REQUESTS - 1)) {
                 throw new CancellationException();
             }
             return request;
