@@ -45,8 +45,9 @@ public final class Design {
         history.markSaved();
         selection.set(new LinkPart.Plan());
         saved.set(first.scenario());
-        show();
+        // Before others hear of it: they may have something to say about the new link.
         notice.set("");
+        show();
     }
 
     /**

@@ -28,10 +28,11 @@ import org.testfx.framework.junit5.Start;
 @ExtendWith(ApplicationExtension.class)
 class LookTest {
     private final Look look = new Look();
-    private final Label label = new Label("ink");
+    private Label label;
 
     @Start
     void show(Stage stage) {
+        label = new Label("ink");
         label.setStyle("-fx-text-fill: -ink;");
         Scene scene = new Scene(new StackPane(label), 200.0, 100.0);
         look.dress(scene);
