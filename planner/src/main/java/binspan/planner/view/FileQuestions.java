@@ -32,6 +32,11 @@ class FileQuestions {
         return answered(chooser.showSaveDialog(owner));
     }
 
+    /** Begins the next questions in the directory of a file. */
+    final void begin(Path file) {
+        directory = file.toAbsolutePath().getParent();
+    }
+
     /** The directory of the last answer, null before the first. */
     Path directory() {
         return directory;
@@ -51,7 +56,7 @@ class FileQuestions {
         if (file == null) {
             return Optional.empty();
         }
-        directory = file.toPath().toAbsolutePath().getParent();
+        begin(file.toPath());
         return Optional.of(file.toPath());
     }
 }

@@ -37,27 +37,39 @@ final class Filing {
     void open() {
         if (mayLeave()) {
             files.toOpen(Words.of("file.open.title"), Words.of("file.kind.scenario"), ENDING)
-                    .ifPresent(this::opened);
+                    .ifPresent(this::opening);
         }
     }
 
     /** Opens a file. */
     void open(Path path) {
         if (mayLeave()) {
-            opened(path);
+            opening(path);
         }
     }
 
-    private void opened(Path path) {
+    private void opening(Path path) {
+        opened(path).ifPresent(errors -> refuse(path, errors));
+    }
+
+    /** Opens a file; gives what is wrong with one that cannot be opened, the present link then stays. */
+    Optional<InvalidScenarioException> opened(Path path) {
         try {
             file.open(path);
+            files.begin(path);
+            return Optional.empty();
         } catch (InvalidScenarioException e) {
-            notices.lines(
-                    AlertType.ERROR,
-                    Words.of("file.open.title"),
-                    Words.of("file.open.refused", path.getFileName()),
-                    e.lines());
+            return Optional.of(e);
         }
+    }
+
+    /** Tells why a file cannot be opened. */
+    void refuse(Path path, InvalidScenarioException errors) {
+        notices.lines(
+                AlertType.ERROR,
+                Words.of("file.open.title"),
+                Words.of("file.open.refused", path.getFileName()),
+                errors.lines());
     }
 
     /** Saves; asks for a name where there is none yet. */

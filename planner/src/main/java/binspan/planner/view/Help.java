@@ -1,6 +1,8 @@
 package binspan.planner.view;
 
+import binspan.planner.report.VerdictNotes;
 import binspan.planner.report.Version;
+import binspan.planner.viewmodel.Design;
 import binspan.planner.viewmodel.Words;
 import java.util.List;
 import javafx.scene.control.Alert.AlertType;
@@ -15,22 +17,23 @@ final class Help {
             "help.keys.form",
             "help.keys.map",
             "help.keys.slots");
-    private static final List<String> CARE = List.of("help.care.light", "help.care.cold", "help.care.trust");
 
     private final Notices notices;
+    private final Design design;
 
-    Help(Notices notices) {
+    Help(Notices notices, Design design) {
         this.notices = notices;
+        this.design = design;
     }
 
     /** Keys of the window. */
     void keys() {
-        say("dialog.keys.title", KEYS);
+        say("dialog.keys.title", KEYS.stream().map(Words::of).toList());
     }
 
     /** Invisible light, cold, and what a plan is worth. */
     void care() {
-        say("dialog.care.title", CARE);
+        say("dialog.care.title", VerdictNotes.safety(design.scenario()));
     }
 
     /** Version and licence. */
@@ -38,8 +41,7 @@ final class Help {
         notices.say(AlertType.INFORMATION, Words.of("dialog.about.title"), Words.of("dialog.about", Version.text()));
     }
 
-    private void say(String title, List<String> keys) {
-        String text = String.join("\n\n", keys.stream().map(Words::of).toList());
-        notices.say(AlertType.INFORMATION, Words.of(title), text);
+    private void say(String title, List<String> texts) {
+        notices.say(AlertType.INFORMATION, Words.of(title), String.join("\n\n", texts));
     }
 }

@@ -5,9 +5,14 @@ import binspan.optics.Window;
 import binspan.planner.viewmodel.SlotPlot;
 import binspan.planner.viewmodel.SlotPlot.Kind;
 import binspan.planner.viewmodel.SlotPlot.Layer;
+import binspan.planner.viewmodel.SlotPlot.NamedPeak;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
 import javafx.geometry.VPos;
 import javafx.scene.canvas.GraphicsContext;
 import javafx.scene.paint.Color;
+import javafx.scene.text.Text;
 import javafx.scene.text.TextAlignment;
 
 /** Draws a histogram: layers on one another, windows as bands, names over the peaks, axes. */
@@ -193,12 +198,24 @@ final class HistogramDrawing {
         pen.restore();
     }
 
+    /** Names over the peaks; of names that would touch the later ones are left out, the middle one first in line. */
     private void peaks(SlotPlot plot) {
         pen.setFont(look.font(SMALL));
         pen.setFill(look.palette().ink());
-        plot.peaks()
-                .forEach(peak -> text(
-                        peak.name(), frame.x(peak.time()), frame.top() + look.em(0.2), TextAlignment.CENTER, VPos.TOP));
+        List<NamedPeak> order = new ArrayList<>(plot.peaks());
+        order.sort(Comparator.comparingDouble(peak -> Math.abs(peak.time())));
+        List<double[]> taken = new ArrayList<>();
+        for (NamedPeak peak : order) {
+            Text words = new Text(peak.name());
+            words.setFont(look.font(SMALL));
+            double half = words.getLayoutBounds().getWidth() / 2.0 + look.em(0.3);
+            double x = frame.x(peak.time());
+            boolean free = taken.stream().allMatch(other -> x + half < other[0] || x - half > other[1]);
+            if (free && x - half > frame.left() && x + half < frame.left() + frame.width()) {
+                taken.add(new double[] {x - half, x + half});
+                text(peak.name(), x, frame.top() + look.em(0.2), TextAlignment.CENTER, VPos.TOP);
+            }
+        }
     }
 
     private void text(String words, double x, double y, TextAlignment alignment, VPos baseline) {

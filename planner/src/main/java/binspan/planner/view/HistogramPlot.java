@@ -28,15 +28,18 @@ final class HistogramPlot extends Region {
     private final TimeHandle separation;
     private SlotPlot plot;
     private TimeFrame frame;
+    private final Runnable held;
+    private boolean still;
     /** From the separation to the last peak; does not change with the separation. */
     private double offset;
 
-    HistogramPlot(SlotsModel model, Look look, String id) {
+    HistogramPlot(SlotsModel model, Look look, String id, Runnable held) {
         this.model = model;
         this.look = look;
-        left = new TimeHandle(look, "window-edge", this::window, model::settle);
-        right = new TimeHandle(look, "window-edge", this::window, model::settle);
-        separation = new TimeHandle(look, "separation", this::separation, model::settle);
+        left = new TimeHandle(look, "window-edge", this::window, this::settled);
+        right = new TimeHandle(look, "window-edge", this::window, this::settled);
+        separation = new TimeHandle(look, "separation", this::separation, this::settled);
+        this.held = held;
         left.setId("slots-" + id + "-window-left");
         right.setId("slots-" + id + "-window-right");
         separation.setId("slots-" + id + "-separation");
@@ -74,7 +77,7 @@ final class HistogramPlot extends Region {
                 getHeight(),
                 new SlotPlotFrame(
                         plot.bins(), plot.highest(), model.logarithmicProperty().get(), titled()));
-        frame = held() && frame != null ? fresh.over(frame.from(), frame.to()) : fresh;
+        frame = still && frame != null ? fresh.over(frame.from(), frame.to()) : fresh;
         new HistogramDrawing(canvas.getGraphicsContext2D(), look, frame)
                 .draw(plot, Words.of("slots.axis.rate"), titled() ? Words.of(plot.timeAxis(), frame.unit()) : "");
         handles();
@@ -85,9 +88,15 @@ final class HistogramPlot extends Region {
         return !plot.id().equals(Site.ALICE.path());
     }
 
-    /** While the separation is held the time axis stands still. */
-    private boolean held() {
+    /** Whether the mouse holds one of its handles. */
+    boolean held() {
         return left.held() || right.held() || separation.held();
+    }
+
+    /** Lets the time axis stand still, or follow the histogram again. */
+    void still(boolean axis) {
+        still = axis;
+        draw();
     }
 
     private void handles() {
@@ -106,13 +115,20 @@ final class HistogramPlot extends Region {
         separation.setAccessibleText(Words.of("slots.handle.separation", Figure.in(model.separation() * NANO, "ns")));
     }
 
+    private void settled() {
+        model.settle();
+        held.run();
+    }
+
     private void window(double x) {
+        held.run();
         Window window = plot.windows().get(plot.central());
         double centre = (window.from() + window.to()) / 2.0;
         model.window(rounded(2.0 * Math.abs(frame.time(x) - centre)), canvas);
     }
 
     private void separation(double x) {
+        held.run();
         double wanted = frame.time(x) - offset;
         if (wanted > 0.0) {
             model.separation(rounded(wanted), separation);

@@ -9,6 +9,7 @@ import javafx.geometry.Insets;
 import javafx.scene.Node;
 import javafx.scene.Parent;
 import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.control.Tab;
 import javafx.scene.control.TabPane;
 import javafx.scene.layout.BorderPane;
@@ -29,6 +30,7 @@ final class MainWindow implements WindowMenus.Pages {
     private static final double VERDICT_WIDTH = 27.5;
     private static final double VERDICT_NARROWEST = 24.0;
     private static final double PAGES_NARROWEST = 34.0;
+    private static final double PAGES_LOWEST = 34.0;
     private static final double LINK_HEIGHT = 15.8;
 
     private final Look look;
@@ -72,7 +74,12 @@ final class MainWindow implements WindowMenus.Pages {
         whole = new HBox(left, parts.verdict());
         HBox.setHgrow(left, Priority.ALWAYS);
         root.setId("planner");
-        root.setCenter(whole);
+        ScrollPane room = new ScrollPane(whole);
+        room.setId("planner-scroll");
+        room.setFitToWidth(true);
+        room.setFitToHeight(true);
+        room.setFocusTraversable(false);
+        root.setCenter(room);
         root.setBottom(status(model));
         look.follow(this::sizes);
     }
@@ -86,8 +93,9 @@ final class MainWindow implements WindowMenus.Pages {
         width(parts.form(), FORM_NARROWEST, FORM_WIDTH);
         width(parts.verdict(), VERDICT_NARROWEST, VERDICT_WIDTH);
         // Form and verdict get their usual width first; what is left belongs to link and pages.
-        left.setMinWidth(0.0);
-        left.setPrefWidth(look.em(FORM_NARROWEST + PAGES_NARROWEST));
+        left.setMinWidth(look.em(FORM_NARROWEST + PAGES_NARROWEST) + gap);
+        left.setPrefWidth(look.em(FORM_NARROWEST + PAGES_NARROWEST) + gap);
+        lower.setMinHeight(look.em(PAGES_LOWEST));
         pages.setMinWidth(look.em(PAGES_NARROWEST));
         pages.setPrefWidth(look.em(PAGES_NARROWEST));
         parts.link().setMinSize(0.0, look.em(LINK_HEIGHT));
@@ -183,8 +191,8 @@ final class MainWindow implements WindowMenus.Pages {
         return parts.pages().get(pages.getSelectionModel().getSelectedIndex());
     }
 
-    /** Calls back with the key of the page that is shown, now and whenever it changes. */
-    void followPage(Consumer<String> change) {
+    @Override
+    public void followPage(Consumer<String> change) {
         pages.getSelectionModel()
                 .selectedIndexProperty()
                 .addListener((source, before, now) -> change.accept(keys().get(now.intValue())));

@@ -12,6 +12,7 @@ import java.time.ZoneId;
 import java.time.format.DateTimeFormatter;
 import java.time.format.FormatStyle;
 import java.util.Locale;
+import java.util.Optional;
 import javafx.application.Platform;
 import javafx.scene.Scene;
 import javafx.scene.control.Alert.AlertType;
@@ -97,7 +98,7 @@ final class Session {
                 model.checks(),
                 new Exports.Regions(
                         () -> (Region) window.root(), () -> window.shown().content(), window::link));
-        return new WindowMenus(model, look, filing, exports, window, new Help(notices));
+        return new WindowMenus(model, look, filing, exports, window, new Help(notices, model.design()));
     }
 
     private void showRoom() {
@@ -140,11 +141,11 @@ final class Session {
                 event.consume();
             }
         });
+        Optional<InvalidScenarioException> refused = file == null ? Optional.empty() : filing.opened(Path.of(file));
         stage.show();
         window.begin();
-        if (file != null) {
-            filing.open(Path.of(file));
-        } else {
+        refused.ifPresent(errors -> filing.refuse(Path.of(file), errors));
+        if (file == null) {
             model.design().notice(Words.of("dialog.new"));
         }
         offerLeftWork();

@@ -82,7 +82,7 @@ final class SlotsPage extends VBox {
         shown.clear();
         plots.getChildren().clear();
         for (SlotPlot plot : now) {
-            Shown each = new Shown(new Label(), new Label(), new HistogramPlot(model, look, plot.id()));
+            Shown each = new Shown(new Label(), new Label(), new HistogramPlot(model, look, plot.id(), this::held));
             each.title().getStyleClass().add("heading");
             each.title().setMinWidth(Region.USE_PREF_SIZE);
             each.note().getStyleClass().add("soft");
@@ -95,6 +95,12 @@ final class SlotsPage extends VBox {
             plots.getChildren().add(box);
             shown.add(each);
         }
+    }
+
+    /** While a handle of one plot is held the time axes of all stand still. */
+    private void held() {
+        boolean held = shown.stream().anyMatch(each -> each.plot().held());
+        shown.forEach(each -> each.plot().still(held));
     }
 
     /** One entry for each kind of layer that is drawn. */

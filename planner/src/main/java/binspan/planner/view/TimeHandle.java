@@ -13,7 +13,6 @@ final class TimeHandle extends Region {
 
     private final Look look;
     private final Runnable settle;
-    private double place;
     private boolean held;
 
     /**
@@ -83,7 +82,6 @@ final class TimeHandle extends Region {
 
     /** Puts it at a pixel. */
     void place(double x, double top, double height) {
-        place = x;
         double width = look.em(WIDTH);
         resizeRelocate(x - width / 2.0, top, width, height);
     }
@@ -92,10 +90,5 @@ final class TimeHandle extends Region {
     protected void layoutChildren() {
         double line = Math.max(1.0, look.em(0.12));
         getChildren().get(0).resizeRelocate((getWidth() - line) / 2.0, 0.0, line, getHeight());
-    }
-
-    @Override
-    public String toString() {
-        return "handle at " + place;
     }
 }

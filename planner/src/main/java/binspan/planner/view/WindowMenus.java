@@ -3,10 +3,14 @@ package binspan.planner.view;
 import binspan.planner.document.RecentFiles;
 import binspan.planner.io.Preset;
 import binspan.planner.viewmodel.Design;
+import binspan.planner.viewmodel.LinkCommands;
+import binspan.planner.viewmodel.LinkItem;
 import binspan.planner.viewmodel.PlannerModel;
+import binspan.planner.viewmodel.Site;
 import binspan.planner.viewmodel.Words;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Consumer;
 import javafx.beans.value.ObservableValue;
 import javafx.collections.ListChangeListener;
 import javafx.scene.control.Menu;
@@ -34,6 +38,9 @@ final class WindowMenus {
         /** Shows a page. */
         void show(String key);
 
+        /** Calls back with the key of the page that is shown, now and whenever it changes. */
+        void followPage(Consumer<String> change);
+
         /** Goes to the next part of the window. */
         void nextPart();
     }
@@ -50,7 +57,7 @@ final class WindowMenus {
 
     /** The bar. */
     MenuBar bar(Runnable close) {
-        MenuBar bar = new MenuBar(file(close), edit(), show(), helping());
+        MenuBar bar = new MenuBar(file(close), edit(), link(), show(), helping());
         bar.setId("menus");
         return bar;
     }
@@ -129,12 +136,41 @@ final class WindowMenus {
         return item;
     }
 
+    /** The commands of the drawn link, for those who look for them in a menu. */
+    private Menu link() {
+        LinkCommands commands = model.link().commands();
+        Menu add = Menus.menu("link.add");
+        add.disableProperty().bind(commands.add().enabledProperty().not());
+        for (LinkItem.Kind kind : LinkCommands.ADDABLE) {
+            MenuItem item = new MenuItem(Words.of("link.kind." + kind.name()));
+            item.setOnAction(event -> commands.add(kind, false));
+            add.getItems().add(item);
+        }
+        return Menus.menu(
+                "link",
+                add,
+                Menus.item("link.split", commands.split().enabledProperty(), commands.split()::run),
+                Menus.item(
+                        "link.alice",
+                        commands.towards(Site.ALICE).enabledProperty(),
+                        commands.towards(Site.ALICE)::run),
+                Menus.item("link.bob", commands.towards(Site.BOB).enabledProperty(), commands.towards(Site.BOB)::run),
+                Menus.item("link.remove", commands.remove().enabledProperty(), commands.remove()::run));
+    }
+
     private Menu show() {
         Menu menu = Menus.menu("show");
         List<String> keys = pages.keys();
+        ToggleGroup shown = new ToggleGroup();
         for (int i = 0; i < keys.size(); i++) {
             String key = keys.get(i);
-            MenuItem item = new MenuItem(Words.of("page." + key));
+            RadioMenuItem item = new RadioMenuItem(Words.of("page." + key));
+            item.setToggleGroup(shown);
+            pages.followPage(now -> {
+                if (now.equals(key)) {
+                    item.setSelected(true);
+                }
+            });
             item.setId("menu-page-" + key);
             item.setAccelerator(KeyCombination.valueOf(Words.of("menu.page.keys", i + 1)));
             item.setOnAction(event -> pages.show(key));
