@@ -19,6 +19,7 @@ import java.util.List;
 /** Turns the histograms of a prediction into what the page of the slots draws. */
 final class SlotPlots {
     private static final int CENTRAL = 1;
+    private static final double PICO = 1e12;
 
     private SlotPlots() {}
 
@@ -34,65 +35,62 @@ final class SlotPlots {
     }
 
     private static SlotPlot side(LinkPrediction prediction, Site site) {
-        ClickHistogram clicks =
-                ArrivalHistograms.side(prediction, site == Site.ALICE).all();
-        String inWindow = Figure.counts(
-                within(clicks.recorded(), clicks.bins(), clicks.windows().get(CENTRAL)));
-        String rms = Figure.in(prediction.arrivalRms(site == Site.ALICE) * 1e12, "ps");
+        boolean alice = site == Site.ALICE;
+        ClickHistogram clicks = ArrivalHistograms.side(prediction, alice).all();
+        double inWindow =
+                within(clicks.recorded(), clicks.bins(), clicks.windows().get(CENTRAL));
+        String note = Words.of(
+                "slots.note.side",
+                Figure.counts(inWindow),
+                Figure.in(prediction.arrivalRms(alice) * PICO, "ps"),
+                Figure.in(clicks.bins().width() * PICO, "ps"));
         return new SlotPlot(
                 site.path(),
                 Words.of("slots.title." + site.path()),
-                Words.of(
-                        "slots.note.side",
-                        inWindow,
-                        rms,
-                        Figure.in(clicks.bins().width() * 1e12, "ps")),
+                note,
                 "slots.axis.time",
                 clicks.bins(),
                 List.of(
-                        new Layer(
-                                Kind.NOISE,
-                                Words.of("slots.layer.noise"),
-                                clicks.noise().toArray()),
-                        new Layer(
-                                Kind.LIGHT,
-                                Words.of("slots.layer.light"),
-                                clicks.light().toArray())),
+                        layer(Kind.NOISE, "noise", clicks.noise().toArray()),
+                        layer(Kind.LIGHT, "light", clicks.light().toArray())),
                 clicks.windows(),
                 CENTRAL,
                 named(clicks.peaks()));
     }
 
+    private static Layer layer(Kind kind, String name, double[] perSecond) {
+        return new Layer(kind, Words.of("slots.layer." + name), perSecond);
+    }
+
     private static SlotPlot pair(LinkPrediction prediction, boolean allPorts) {
         PairHistogram pair = ArrivalHistograms.pair(prediction);
         CoincidenceHistogram shown = allPorts ? pair.all() : pair.first();
+        boolean pulsed = prediction.scenario().pulsed();
+        String title = (pulsed ? "slots.title.pair" : "slots.title.difference") + (allPorts ? ".all" : "");
+        return new SlotPlot(
+                "pair",
+                Words.of(title),
+                note(shown),
+                pulsed ? "slots.axis.pair" : "slots.axis.difference",
+                shown.bins(),
+                layers(shown),
+                List.of(shown.window()),
+                0,
+                named(shown.peaks()));
+    }
+
+    private static List<Layer> layers(CoincidenceHistogram shown) {
         double[] worst = shown.centralWorst().toArray();
         double[] contrast = shown.centralBest().toArray();
         for (int i = 0; i < contrast.length; i++) {
             // Of unequal ports the best phase is the other's worst: all ports together may show no contrast at all.
             contrast[i] = Math.max(0.0, contrast[i] - worst[i]);
         }
-        return new SlotPlot(
-                "pair",
-                Words.of((prediction.scenario().pulsed() ? "slots.title.pair" : "slots.title.difference")
-                        + (allPorts ? ".all" : "")),
-                note(shown),
-                prediction.scenario().pulsed() ? "slots.axis.pair" : "slots.axis.difference",
-                shown.bins(),
-                List.of(
-                        new Layer(
-                                Kind.NOISE,
-                                Words.of("slots.layer.accidentals"),
-                                shown.accidentals().toArray()),
-                        new Layer(
-                                Kind.LIGHT,
-                                Words.of("slots.layer.sidePeaks"),
-                                shown.sidePeaks().toArray()),
-                        new Layer(Kind.WORST, Words.of("slots.layer.worst"), worst),
-                        new Layer(Kind.CONTRAST, Words.of("slots.layer.best"), contrast)),
-                List.of(shown.window()),
-                0,
-                named(shown.peaks()));
+        return List.of(
+                layer(Kind.NOISE, "accidentals", shown.accidentals().toArray()),
+                layer(Kind.LIGHT, "sidePeaks", shown.sidePeaks().toArray()),
+                layer(Kind.WORST, "worst", worst),
+                layer(Kind.CONTRAST, "best", contrast));
     }
 
     private static String note(CoincidenceHistogram shown) {
