@@ -2,7 +2,6 @@ package binspan.planner.cli;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
-
 import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
 import binspan.planner.io.Preset;
@@ -79,8 +78,7 @@ final class ViewCommandTest {
                 .scenario()
                 .replace("\"imbalanceNs\": 2.0", "\"imbalanceNs\": -2.0")
                 .replace("\"formatVersion\": 1", "\"formatVersion\": 7");
-        String file =
-                Files.writeString(directory.resolve("broken.json"), text).toString();
+        String file = Files.writeString(directory.resolve("broken.json"), text).toString();
         Run run = Run.of("view", file);
         assertThat(run.status()).isEqualTo(ExitStatus.REFUSED);
         assertThat(run.err()).isEqualTo(Run.of("check", file).err()).isNotEmpty();
@@ -105,8 +103,7 @@ final class ViewCommandTest {
 
     @Test
     void onLinuxTheCommandEndsThere() {
-        assumeTrue(
-                System.getProperty("os.name").contains("Linux"));
+        assumeTrue(System.getProperty("os.name").contains("Linux"));
         refused(Run.of("view"), "no display");
     }
 
@@ -119,8 +116,7 @@ final class ViewCommandTest {
 
     @Test
     void failuresOfTheStartAreTold() {
-        assertThat(NoDisplay.because(
-                        new RuntimeException(new UnsupportedOperationException("Unable to open DISPLAY"))))
+        assertThat(NoDisplay.because(new RuntimeException(new UnsupportedOperationException("Unable to open DISPLAY"))))
                 .hasMessageContaining("leads to none");
         assertThat(NoDisplay.because(new RuntimeException(new UnsatisfiedLinkError("libgtk-3.so.0"))))
                 .hasMessageContaining("libgtk-3-0");
