@@ -159,6 +159,7 @@ final class MapPage extends BorderPane {
     private Node boxes() {
         ChoiceBox<BoxChoice> choice = new ChoiceBox<>();
         choice.setId("map-box");
+        choice.setAccessibleText(Words.of("map.box"));
         choice.getItems().setAll(BoxChoice.values());
         choice.setConverter(new StringConverter<>() {
             @Override

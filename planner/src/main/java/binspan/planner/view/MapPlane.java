@@ -176,6 +176,7 @@ final class MapPlane extends Region {
 
     private void pressed(MouseEvent event) {
         requestFocus();
+        event.consume(); // or the pages take the focus, which lets go of the handle
         if (event.getButton() != MouseButton.PRIMARY) {
             return;
         }

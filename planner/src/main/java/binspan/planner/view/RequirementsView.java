@@ -98,7 +98,10 @@ final class RequirementsView extends VBox {
             second.add(margin, 2, 0);
             getChildren().addAll(first, second);
             Tooltip.install(this, tooltip);
-            setOnMousePressed(event -> requestFocus());
+            setOnMousePressed(event -> {
+                requestFocus();
+                event.consume(); // or the scroll pane takes the focus
+            });
         }
 
         void show(RequirementRow row) {

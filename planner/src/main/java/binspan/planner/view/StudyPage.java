@@ -14,6 +14,7 @@ import javafx.beans.binding.BooleanBinding;
 import javafx.css.PseudoClass;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextArea;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyEvent;
@@ -98,10 +99,24 @@ public final class StudyPage extends BorderPane {
         notes.getStyleClass().add("soft");
         VBox box = new VBox(question, answer, notes);
         box.getStyleClass().add("study-empty");
-        box.setMaxHeight(Region.USE_PREF_SIZE);
         box.getChildren().forEach(each -> wrapped((Label) each));
-        box.visibleProperty().bind(present().not());
-        return box;
+        return explained(box, question);
+    }
+
+    /** In a low window the explanation is longer than its room. */
+    private ScrollPane explained(VBox box, Label question) {
+        ScrollPane scroll = new ScrollPane(box);
+        scroll.setId(model.name() + "-explanation");
+        scroll.setFitToWidth(true);
+        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        scroll.setAccessibleText(question.getText());
+        scroll.focusTraversableProperty()
+                .bind(Bindings.createBooleanBinding(
+                        () -> box.getHeight() > scroll.getViewportBounds().getHeight(),
+                        box.heightProperty(),
+                        scroll.viewportBoundsProperty()));
+        scroll.visibleProperty().bind(present().not());
+        return scroll;
     }
 
     private static void wrapped(Label label) {

@@ -175,12 +175,30 @@ public final class FieldModel implements FormRow {
     private void typed(String typed) {
         begin();
         FieldEntry entry = FieldEntry.read(place.field(), place.path(), typed);
+        String refusal = refusal(entry);
+        if (!refusal.isEmpty()) {
+            // What was typed on the way, such as the 1 of 1.2, does not stay in the link.
+            restore();
+        }
+        error.set(refusal);
+    }
+
+    private String refusal(FieldEntry entry) {
         if (entry instanceof FieldEntry.Refused refused) {
-            error.set(refused.problem().message());
-        } else if (((FieldEntry.Accepted) entry).change() instanceof Change.Put put) {
-            error.set(edits.put(place, put.value()));
-        } else {
-            error.set(edits.remove(place));
+            return refused.problem().message();
+        }
+        return ((FieldEntry.Accepted) entry).change() instanceof Change.Put put
+                ? edits.put(place, put.value())
+                : edits.remove(place);
+    }
+
+    /** Gives the link the value that it had before the typing. */
+    private void restore() {
+        Object now = edits.statedIn(place);
+        if (before == null && now != null) {
+            edits.remove(place);
+        } else if (before != null && !before.equals(now)) {
+            edits.put(place, before instanceof Double number ? written(number) : before);
         }
     }
 
@@ -203,12 +221,7 @@ public final class FieldModel implements FormRow {
     /** Takes back what was typed since the last {@link #settle}. */
     public void takeBack() {
         if (typing) {
-            Object now = edits.statedIn(place);
-            if (before == null && now != null) {
-                edits.remove(place);
-            } else if (before != null && !before.equals(now)) {
-                edits.put(place, before instanceof Double number ? written(number) : before);
-            }
+            restore();
         }
         error.set("");
         settle();
