@@ -4,11 +4,11 @@ import binspan.planner.plot.Point;
 import binspan.planner.plot.Ticks;
 import binspan.planner.view.ContourLabels.Line;
 import binspan.planner.viewmodel.MapContour;
+import binspan.planner.viewmodel.MapRecommendation;
 import binspan.planner.viewmodel.MapShape;
 import binspan.planner.viewmodel.Words;
 import binspan.study.box.OperatingBox;
 import binspan.study.region.MapPoint;
-import binspan.study.window.PointVerdict;
 import java.util.ArrayList;
 import java.util.List;
 import javafx.geometry.BoundingBox;
@@ -50,7 +50,7 @@ final class MapDrawing {
     }
 
     /** Draws everything; what is null is left out. */
-    void draw(MapShape shape, PointVerdict recommended, OperatingBox box, MapPoint handle) {
+    void draw(MapShape shape, MapRecommendation recommended, OperatingBox box, MapPoint handle) {
         pen.setLineDashes();
         pen.clearRect(0.0, 0.0, pen.getCanvas().getWidth(), pen.getCanvas().getHeight());
         pen.setFill(look.palette().panel());
@@ -67,9 +67,7 @@ final class MapDrawing {
         }
         axes();
         if (recommended != null) {
-            star(
-                    frame.xOf(recommended.values().get(0)),
-                    frame.yOf(recommended.values().get(1)));
+            star(frame.xOf(recommended.x()), frame.yOf(recommended.y()));
         }
         if (shape != null) {
             names(shape, recommended, handle);
@@ -240,7 +238,7 @@ final class MapDrawing {
         pen.strokePolygon(xs, ys, STAR_CORNERS);
     }
 
-    private void names(MapShape shape, PointVerdict recommended, MapPoint handle) {
+    private void names(MapShape shape, MapRecommendation recommended, MapPoint handle) {
         List<MapContour> drawn = shape.contours().stream()
                 .filter(each -> !each.lines().isEmpty())
                 .toList();
@@ -248,7 +246,7 @@ final class MapDrawing {
         drawn.forEach(contour -> lines.add(line(contour)));
         List<Bounds> taken = new ArrayList<>();
         if (recommended != null) {
-            taken.add(about(recommended.values().get(0), recommended.values().get(1)));
+            taken.add(about(recommended.x(), recommended.y()));
         }
         if (handle != null) {
             taken.add(about(handle.x(), handle.y()));

@@ -5,6 +5,7 @@ import binspan.planner.export.RegionReport;
 import binspan.planner.export.StudyReport;
 import binspan.planner.viewmodel.MapModel;
 import binspan.planner.viewmodel.MapModel.BoxChoice;
+import binspan.planner.viewmodel.MapRecommendation;
 import binspan.planner.viewmodel.Words;
 import java.util.ArrayList;
 import java.util.List;
@@ -139,13 +140,19 @@ final class MapPage extends BorderPane {
         Button move = button("move", () -> model.reader().moveToPicked());
         move.disableProperty().bind(model.reader().pickedProperty().isNull());
         Button recommended = button("recommended", model::goToRecommended);
+        recommended.disableProperty().bind(model.recommendedProperty().isNull());
         recommended
-                .disableProperty()
-                .bind(Bindings.createBooleanBinding(() -> model.recommended().isEmpty(), model.regionProperty()));
+                .getTooltip()
+                .textProperty()
+                .bind(model.recommendedProperty().map(MapPage::recommendation).orElse(Words.of("map.recommended.tip")));
         FlowPane commands = new FlowPane(move, recommended, button("reset", model::resetAxes), boxes());
         commands.getChildren().addAll(handouts);
         commands.getStyleClass().add("map-commands");
         return commands;
+    }
+
+    private static String recommendation(MapRecommendation point) {
+        return Words.of("map.recommended.tip") + ": " + Words.of("map.star." + point.kind());
     }
 
     private static Button button(String name, Runnable command) {

@@ -11,7 +11,9 @@ import binspan.study.Axis;
 import binspan.study.region.MapPoint;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Consumer;
 import java.util.stream.Stream;
+import javafx.event.EventType;
 import javafx.scene.AccessibleAttribute;
 import javafx.scene.AccessibleRole;
 import javafx.scene.Cursor;
@@ -65,7 +67,7 @@ final class MapPlane extends Region {
     private void follow() {
         look.follow(this::redraw);
         model.shapeProperty().addListener((source, before, after) -> redraw());
-        model.regionProperty().addListener((source, before, after) -> redraw());
+        model.recommendedProperty().addListener((source, before, after) -> redraw());
         model.boxProperty().addListener((source, before, after) -> redraw());
         model.horizontal().axisProperty().addListener((source, before, after) -> redraw());
         model.vertical().axisProperty().addListener((source, before, after) -> redraw());
@@ -77,14 +79,22 @@ final class MapPlane extends Region {
     }
 
     private void hear() {
-        addEventHandler(MouseEvent.MOUSE_PRESSED, this::pressed);
-        addEventHandler(MouseEvent.MOUSE_DRAGGED, this::dragged);
-        addEventHandler(MouseEvent.MOUSE_RELEASED, event -> settle());
+        take(MouseEvent.MOUSE_PRESSED, this::pressed);
+        take(MouseEvent.MOUSE_DRAGGED, this::dragged);
+        take(MouseEvent.MOUSE_RELEASED, event -> settle());
         addEventHandler(MouseEvent.MOUSE_MOVED, this::moved);
         addEventHandler(MouseEvent.MOUSE_EXITED, event -> model.reader().leave());
         addEventHandler(KeyEvent.KEY_PRESSED, this::key);
         addEventHandler(KeyEvent.KEY_RELEASED, event -> settle());
         focusedProperty().addListener((source, before, after) -> settle());
+    }
+
+    /** Hears what nobody else may hear: a pane of tabs would take the focus at a press, and the drag would end. */
+    private void take(EventType<MouseEvent> type, Consumer<MouseEvent> heard) {
+        addEventHandler(type, event -> {
+            heard.accept(event);
+            event.consume();
+        });
     }
 
     @Override
@@ -154,7 +164,7 @@ final class MapPlane extends Region {
         new MapDrawing(still.getGraphicsContext2D(), look, frame)
                 .draw(
                         model.shapeProperty().get(),
-                        model.recommended().orElse(null),
+                        model.recommendedProperty().get(),
                         model.boxProperty().get(),
                         model.handle().shown().orElse(null));
         redrawMoving();

@@ -5,6 +5,7 @@ import binspan.planner.report.ParameterWords;
 import binspan.planner.report.RequirementText;
 import binspan.planner.viewmodel.MapModel;
 import binspan.planner.viewmodel.MapReading;
+import binspan.planner.viewmodel.MapRecommendation;
 import binspan.planner.viewmodel.Words;
 import binspan.prediction.Requirement;
 import binspan.study.Axis;
@@ -44,7 +45,7 @@ final class MapReadout extends VBox {
         extras.setId("map-extras");
         arrange(false);
         model.reader().readingProperty().addListener((source, before, after) -> show(after));
-        model.regionProperty().addListener((source, before, after) -> showExtras());
+        model.recommendedProperty().addListener((source, before, after) -> showExtras());
         model.boxProperty().addListener((source, before, after) -> showExtras());
         look.follow(this::rebuild);
     }
@@ -148,10 +149,12 @@ final class MapReadout extends VBox {
 
     private void showExtras() {
         List<Node> lines = new ArrayList<>();
-        model.recommended().ifPresent(best -> {
+        MapRecommendation recommended = model.recommendedProperty().get();
+        if (recommended != null) {
             lines.add(heading("★ " + Words.of("map.star.heading")));
-            lines.add(new Label(values(best)));
-        });
+            lines.add(new Label(values(recommended.point())));
+            lines.add(Columns.wrapped(Words.of("map.star." + recommended.kind()), "soft"));
+        }
         OperatingBox box = model.boxProperty().get();
         if (box != null) {
             lines.add(heading("▭ " + Words.of("map.box.heading")));

@@ -6,14 +6,9 @@ import binspan.study.Axis;
 import binspan.study.Execution;
 import binspan.study.Progress;
 import binspan.study.box.OperatingBox;
-import binspan.study.box.ToleranceBox;
 import binspan.study.region.MarginGrid;
-import binspan.study.region.OperatingRegion;
 import binspan.study.region.RegionMap;
-import binspan.study.window.PointVerdict;
 import java.util.List;
-import java.util.Optional;
-import java.util.concurrent.CancellationException;
 import javafx.beans.binding.Bindings;
 import javafx.beans.binding.BooleanBinding;
 import javafx.beans.property.BooleanProperty;
@@ -23,7 +18,6 @@ import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.ReadOnlyStringWrapper;
 import javafx.beans.property.SimpleBooleanProperty;
-import javafx.beans.property.SimpleObjectProperty;
 
 /**
  * The operating map: where two parameters of the design may lie so that all requirements hold. Lines interpolated on a
@@ -35,22 +29,16 @@ public final class MapModel {
     public static final int QUICK_STEPS = 128;
 
     private static final long STILL_MILLIS = 300;
-    private static final long NAP_MILLIS = 10;
 
     private final Design design;
-    private final long stillMillis;
     private final MapAxis horizontal;
     private final MapAxis vertical;
     private final MapHandle handle;
     private final LatestTask quick;
-    private final LatestTask exact;
-    private final LatestTask boxing;
+    private final MapSolution solution;
     private final MapReader reader;
     private final ReadOnlyObjectWrapper<MapShape> shape = new ReadOnlyObjectWrapper<>(this, "shape");
-    private final ReadOnlyObjectWrapper<RegionMap> region = new ReadOnlyObjectWrapper<>(this, "region");
-    private final ReadOnlyObjectWrapper<OperatingBox> box = new ReadOnlyObjectWrapper<>(this, "box");
     private final ReadOnlyStringWrapper message = new ReadOnlyStringWrapper(this, "message", "");
-    private final ObjectProperty<BoxChoice> boxChoice = new SimpleObjectProperty<>(this, "boxChoice", BoxChoice.SHARE);
     private final BooleanProperty watched = new SimpleBooleanProperty(this, "watched", true);
     private final BooleanBinding computing;
     private MapQuestion question;
@@ -74,26 +62,23 @@ public final class MapModel {
     /** The same with another time for which nothing must change before the exact lines are computed. */
     MapModel(Design design, Background background, long stillMillis) {
         this.design = design;
-        this.stillMillis = stillMillis;
         Scenario scenario = design.scenario();
         this.horizontal = new MapAxis(scenario, MapParameters.first(scenario, ""));
         this.vertical = new MapAxis(scenario, MapParameters.first(scenario, horizontal.path()));
         this.handle = new MapHandle(design, horizontal, vertical);
         this.quick = LatestTask.quick(background);
-        this.exact = LatestTask.lengthy(background);
-        this.boxing = LatestTask.lengthy(background);
+        this.solution = new MapSolution(background, stillMillis, design::notice);
         this.reader = new MapReader(() -> question, handle, background);
         this.computing = Bindings.createBooleanBinding(
                 () -> quick.runningProperty().get()
-                        || exact.runningProperty().get()
-                        || boxing.runningProperty().get(),
+                        || solution.solving().get()
+                        || solution.boxing().get(),
                 quick.runningProperty(),
-                exact.runningProperty(),
-                boxing.runningProperty());
+                solution.solving(),
+                solution.boxing());
         design.scenarioProperty().addListener((source, before, after) -> follow());
         horizontal.axisProperty().addListener((source, before, after) -> axisChanged());
         vertical.axisProperty().addListener((source, before, after) -> axisChanged());
-        boxChoice.addListener((source, before, after) -> findBox());
         watched.addListener((source, before, after) -> ask());
         ask();
     }
@@ -135,17 +120,17 @@ public final class MapModel {
 
     /** The exact map of the design as it is; null while it is not computed. */
     public ReadOnlyObjectProperty<RegionMap> regionProperty() {
-        return region.getReadOnlyProperty();
+        return solution.region().getReadOnlyProperty();
     }
 
     /** The largest box on the exact map; null while it is not computed, or where there is none. */
     public ReadOnlyObjectProperty<OperatingBox> boxProperty() {
-        return box.getReadOnlyProperty();
+        return solution.box().getReadOnlyProperty();
     }
 
     /** Which box is drawn in. */
     public ObjectProperty<BoxChoice> boxChoiceProperty() {
-        return boxChoice;
+        return solution.boxChoice();
     }
 
     /** What is read off the map. */
@@ -198,16 +183,17 @@ public final class MapModel {
         });
     }
 
-    /** The point with the most room, once the exact map is known and has a region. */
-    public Optional<PointVerdict> recommended() {
-        return Optional.ofNullable(region.get()).map(RegionMap::best).filter(PointVerdict::met);
+    /** The middle of the largest box, or the best point where no box is drawn in; null until that is known, and where nothing holds. */
+    public ReadOnlyObjectProperty<MapRecommendation> recommendedProperty() {
+        return solution.recommended().getReadOnlyProperty();
     }
 
     /** Moves the design to the recommended point, if there is one. */
     public void goToRecommended() {
-        recommended()
-                .ifPresent(best ->
-                        handle.moveTo(best.values().get(0), best.values().get(1)));
+        MapRecommendation there = recommendedProperty().get();
+        if (there != null) {
+            handle.moveTo(there.x(), there.y());
+        }
     }
 
     private void together(Runnable changes) {
@@ -251,13 +237,11 @@ public final class MapModel {
         if (!current(next)) {
             boolean sameAxes = question != null && question.sameAxes(next);
             question = next;
-            region.set(null);
-            box.set(null);
+            solution.forget();
             if (!sameAxes) {
                 shape.set(null);
                 message.set("");
             }
-            cancel();
             unanswered = true;
         }
         if (watched.get()) {
@@ -268,8 +252,9 @@ public final class MapModel {
     private void answer() {
         if (unanswered) {
             unanswered = false;
-            survey(question);
-            solve(question);
+            MapQuestion asked = question;
+            survey(asked);
+            solution.solve(asked, (map, found) -> showExact(asked, map, found), this::refuse);
         }
         reader.read();
     }
@@ -281,18 +266,10 @@ public final class MapModel {
         question = null;
         unanswered = false;
         quick.cancel();
-        cancel();
-        region.set(null);
-        box.set(null);
+        solution.forget();
         shape.set(null);
         reader.read();
         message.set(reason.getMessage());
-    }
-
-    /** Stops what takes long; a quick grid still ends, so that a drag is followed. */
-    private void cancel() {
-        exact.cancel();
-        boxing.cancel();
     }
 
     private boolean current(MapQuestion asked) {
@@ -317,88 +294,19 @@ public final class MapModel {
     }
 
     private void showQuick(MapQuestion asked, MapShape found) {
-        if (question != null && question.sameAxes(asked) && region.get() == null) {
+        if (question != null && question.sameAxes(asked) && solution.region().get() == null) {
             shape.set(found);
             message.set(found.anywhere() ? "" : Words.of("map.nowhere"));
         }
     }
 
-    private void solve(MapQuestion asked) {
-        exact.run(
-                progress -> {
-                    waitWhileStill(progress);
-                    RegionMap map = asked.region(OperatingRegion.USUAL_STEPS).run(considerate(progress));
-                    return new Solved(map, MapShape.of(map));
-                },
-                found -> showExact(asked, found),
-                reason -> refuse(asked, reason));
-    }
-
-    private record Solved(RegionMap map, MapShape shape) {}
-
-    /** One processor is left for what follows the hand. */
-    private static Execution considerate(Progress progress) {
-        Execution all = Execution.parallel(progress);
-        return new Execution(Math.max(1, all.threads() - 1), progress, all.from(), all.to());
-    }
-
-    private void waitWhileStill(Progress progress) {
-        try {
-            for (long waited = 0; waited < stillMillis && !progress.cancelled(); waited += NAP_MILLIS) {
-                Thread.sleep(NAP_MILLIS);
-            }
-        } catch (InterruptedException e) {
-            Thread.currentThread().interrupt();
-            throw new CancellationException("interrupted");
-        }
-        if (progress.cancelled()) {
-            throw new CancellationException("not still");
-        }
-    }
-
-    private void showExact(MapQuestion asked, Solved found) {
-        if (current(asked)) {
-            region.set(found.map());
-            shape.set(found.shape());
-            message.set(found.map()
-                    .nearest()
-                    .map(nearest -> Words.of(
-                            "map.nearest",
-                            Words.of("map.nowhere"),
-                            MissWords.at(List.of(asked.horizontal(), asked.vertical()), nearest)))
-                    .orElse(""));
-            findBox();
-        }
-    }
-
-    private void findBox() {
-        box.set(null);
-        boxing.cancel();
-        MapQuestion asked = question;
-        if (asked == null || boxChoice.get() == BoxChoice.NONE || recommended().isEmpty()) {
-            return;
-        }
-        ToleranceBox.Sense sense =
-                boxChoice.get() == BoxChoice.SHARE ? ToleranceBox.Sense.SHARE : ToleranceBox.Sense.TOLERANCE;
-        boxing.run(
-                progress -> asked.box(sense).run(considerate(progress)),
-                found -> showBox(asked, found),
-                reason -> showNoBox(asked, reason));
-    }
-
-    private void showBox(MapQuestion asked, OperatingBox found) {
-        if (current(asked)) {
-            box.set(found.found() ? found : null);
-        }
-    }
-
-    /** A box of equal tolerances needs ranges that do not touch zero. */
-    private void showNoBox(MapQuestion asked, RuntimeException reason) {
-        if (!(reason instanceof IllegalArgumentException)) {
-            throw reason;
-        }
-        if (current(asked)) {
-            design.notice(reason.getMessage());
-        }
+    private void showExact(MapQuestion asked, RegionMap map, MapShape found) {
+        shape.set(found);
+        message.set(map.nearest()
+                .map(nearest -> Words.of(
+                        "map.nearest",
+                        Words.of("map.nowhere"),
+                        MissWords.at(List.of(asked.horizontal(), asked.vertical()), nearest)))
+                .orElse(""));
     }
 }

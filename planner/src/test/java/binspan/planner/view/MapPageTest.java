@@ -16,6 +16,7 @@ import binspan.planner.viewmodel.MapModel;
 import binspan.study.region.MapPoint;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
@@ -26,9 +27,12 @@ import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.MenuButton;
+import javafx.scene.control.Tab;
+import javafx.scene.control.TabPane;
 import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
+import javafx.scene.layout.VBox;
 import javafx.scene.paint.Color;
 import javafx.stage.Stage;
 import org.junit.jupiter.api.Test;
@@ -100,6 +104,40 @@ final class MapPageTest {
         WaitForAsyncUtils.waitForFxEvents();
         assertEquals(0.3, model.horizontal().axis().share(place().x()), 0.01);
         assertEquals(0.8, model.vertical().axis().share(place().y()), 0.01);
+    }
+
+    /** A pane of tabs takes the focus when it hears a press. */
+    @Test
+    void draggingWorksInAPaneOfTabs(FxRobot robot) {
+        robot.interact(() -> {
+            Scene scene = page.getScene();
+            scene.setRoot(new VBox());
+            TabPane tabs = new TabPane(new Tab("map", page), new Tab("other", new VBox()));
+            scene.setRoot(tabs);
+            tabs.applyCss();
+            tabs.layout();
+            page.lookup("#map-plane").requestFocus();
+        });
+        WaitForAsyncUtils.waitForFxEvents();
+        draggingTheHandleMovesTheDesign(robot);
+        assertTrue(page.lookup("#map-plane").isFocused());
+    }
+
+    @Test
+    void saysWhichPointIsRecommended(FxRobot robot) throws TimeoutException {
+        Button go = robot.lookup("#map-recommended").queryAs(Button.class);
+        WaitForAsyncUtils.waitFor(60, TimeUnit.SECONDS, () -> !go.isDisabled());
+        assertTrue(extras(robot).contains("middle of the largest box"), extras(robot)::toString);
+        assertTrue(go.getTooltip().getText().endsWith(": middle of the largest box"));
+        robot.interact(() -> model.boxChoiceProperty().set(MapModel.BoxChoice.NONE));
+        assertTrue(extras(robot).contains("largest least margin"));
+        assertTrue(go.getTooltip().getText().endsWith(": largest least margin"));
+    }
+
+    private List<String> extras(FxRobot robot) {
+        return robot.from(page.lookup("#map-extras")).lookup(".label").queryAllAs(Label.class).stream()
+                .map(Label::getText)
+                .toList();
     }
 
     @Test

@@ -31,6 +31,7 @@ import java.util.OptionalDouble;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.EnumSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 /** The map against predictions of single points by the model library, and what it computes when. */
@@ -154,10 +155,8 @@ final class MapModelTest {
     }
 
     @Test
-    void recommendsThePointOfTheStudyAndDrawsABoxInTheRegion() {
+    void drawsABoxInTheRegion() {
         work.finish();
-        RegionMap map = model.regionProperty().get();
-        assertEquals(map.best(), model.recommended().orElseThrow());
         List<BoxSide> sides = model.boxProperty().get().sides();
         PointEvaluator evaluator = new PointEvaluator(
                 design.scenario(),
@@ -171,10 +170,64 @@ final class MapModelTest {
                 assertTrue(evaluator.leastMargin(x, y) >= 0.0);
             }
         }
+    }
+
+    /** On these logarithmic axes the middle of a side is the geometric mean of its ends. */
+    @ParameterizedTest
+    @EnumSource(names = {"SHARE", "TOLERANCE"})
+    void recommendsTheMiddleOfTheBoxThatIsDrawn(BoxChoice choice) {
+        model.boxChoiceProperty().set(choice);
+        work.finish();
+        RegionMap map = model.regionProperty().get();
+        List<BoxSide> sides = model.boxProperty().get().sides();
+        MapRecommendation there = model.recommendedProperty().get();
+        assertEquals(MapRecommendation.Kind.BOX_MIDDLE, there.kind());
+        assertEquals(geometricMean(sides.get(0)), there.x(), 1e-9 * there.x());
+        assertEquals(geometricMean(sides.get(1)), there.y(), 1e-9 * there.y());
+        assertTrue(there.point().met());
         model.goToRecommended();
-        assertEquals(map.best().values().get(0), value(PAIRS), 1e-3 * value(PAIRS));
-        assertEquals(map.best().values().get(1), value(WINDOW), 1e-3 * value(WINDOW));
+        Axis across = model.horizontal().axis();
+        Axis up = model.vertical().axis();
+        assertEquals(across.share(there.x()), across.share(value(PAIRS)), 1e-3, "but for digits nobody sees");
+        assertEquals(up.share(there.y()), up.share(value(WINDOW)), 1e-3);
         assertSame(map, model.regionProperty().get());
+    }
+
+    private static double geometricMean(BoxSide side) {
+        return Math.sqrt(side.from().value() * side.to().value());
+    }
+
+    @Test
+    void recommendsThePointOfTheStudyWithoutABox() {
+        model.boxChoiceProperty().set(BoxChoice.NONE);
+        work.finish();
+        MapRecommendation best = new MapRecommendation(
+                MapRecommendation.Kind.LEAST_MARGIN,
+                model.regionProperty().get().best());
+        assertEquals(best, model.recommendedProperty().get());
+        model.boxChoiceProperty().set(BoxChoice.SHARE);
+        assertNull(model.recommendedProperty().get(), "while the box is being searched");
+        work.finish();
+        assertEquals(
+                MapRecommendation.Kind.BOX_MIDDLE,
+                model.recommendedProperty().get().kind());
+    }
+
+    /** The best point of this link lies outside of its largest box. */
+    @Test
+    void recommendedPointLiesInTheBox() {
+        design.begin(Designs.shipped("orchard-lane-access"));
+        work.finish();
+        MapRecommendation there = model.recommendedProperty().get();
+        List<BoxSide> sides = model.boxProperty().get().sides();
+        assertEquals(0.5, shareOf(sides.get(0), there.x()), 1e-6);
+        assertEquals(0.5, shareOf(sides.get(1), there.y()), 1e-6);
+    }
+
+    /** How far along a side a value lies, on a logarithmic axis. */
+    private static double shareOf(BoxSide side, double value) {
+        return Math.log(value / side.from().value())
+                / Math.log(side.to().value() / side.from().value());
     }
 
     @Test
@@ -390,7 +443,7 @@ final class MapModelTest {
     void saysWhereItComesNearestIfNothingHolds() {
         set("require.rawVisibilityAtLeast", 0.9999);
         work.finish();
-        assertTrue(model.recommended().isEmpty());
+        assertNull(model.recommendedProperty().get());
         assertNull(model.boxProperty().get());
         assertTrue(model.messageProperty().get().startsWith("nowhere in these ranges do all requirements hold"));
         assertTrue(model.messageProperty().get().contains("required at least 0.9999"));
