@@ -76,7 +76,7 @@ public final class ComparisonPicture {
                     entries.get(i).meets(),
                     text));
         }
-        return new BarPanel(axis(name, unit, values), bars, line(entries, requirement, unit));
+        return new BarPanel(axis(name, unit, values), bars, line(entries, requirement));
     }
 
     private static Axis axis(String name, String unit, double... values) {
@@ -93,7 +93,7 @@ public final class ComparisonPicture {
 
     /** The requirement, where all links state the same. */
     private static Optional<RequirementLine> line(
-            List<Comparison.Entry> entries, Requirement requirement, String unit) {
+            List<Comparison.Entry> entries, Requirement requirement) {
         if (requirement == null) {
             return Optional.empty();
         }
@@ -102,7 +102,10 @@ public final class ComparisonPicture {
                 .distinct()
                 .toList();
         return required.size() == 1 && required.get(0).isPresent()
-                ? Optional.of(RequirementLine.atLeast(required.get(0).getAsDouble(), unit))
+                ? Optional.of(RequirementLines.of(
+                        requirement,
+                        required.get(0).getAsDouble(),
+                        required.get(0).getAsDouble()))
                 : Optional.empty();
     }
 }

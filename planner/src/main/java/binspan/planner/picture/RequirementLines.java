@@ -2,6 +2,8 @@ package binspan.planner.picture;
 
 import binspan.planner.plot.RequirementLine;
 import binspan.planner.report.RequiredFigure;
+import binspan.planner.report.RequirementWords;
+import binspan.prediction.Requirement;
 import binspan.scenario.Requirements;
 import binspan.study.FigureColumn;
 import java.util.Optional;
@@ -15,8 +17,17 @@ final class RequirementLines {
         return RequiredFigure.of(require).stream()
                 .filter(required -> required.figure().equals(column.field().name()))
                 .findFirst()
-                .map(required -> required.requirement().atLeast()
-                        ? RequirementLine.atLeast(required.limit(), column.unit())
-                        : RequirementLine.atMost(required.limit(), column.unit()));
+                .map(required -> of(required.requirement(), required.required(), required.limit()));
+    }
+
+    /**
+     * A line in the words of the verdict.
+     *
+     * @param requirement which
+     * @param required required figure, in the requirement's unit
+     * @param limit the same in the unit of the axis
+     */
+    static RequirementLine of(Requirement requirement, double required, double limit) {
+        return RequirementLine.of(RequirementWords.required(requirement, required), limit, requirement.atLeast());
     }
 }

@@ -47,7 +47,8 @@ public record Picture(String title, String subtitle, Panel content) {
         }
         JFreeChart chart = PageFrame.page(
                 this, PanelGrid.alone(panel), legend(panel, theme).values(), theme);
-        return new PanelChart(chart, panel.legend(), room.wide(NARROWEST), room.high(MAP_HEIGHT));
+        return new PanelChart(
+                chart, panel.legend(), room.wide(NARROWEST), room.high(MAP_HEIGHT), panel.leftOut());
     }
 
     private static Room within(Room room, double around) {
@@ -65,6 +66,16 @@ public record Picture(String title, String subtitle, Panel content) {
         PanelChart panel = content.chart(PlotTheme.LIGHT, room);
         double around = PageFrame.height(this, legend(panel, PlotTheme.LIGHT).values(), PlotTheme.LIGHT, width);
         return (int) Math.ceil(content.fullHeight(room.width()) + around);
+    }
+
+    /**
+     * How many panels have no room in a size.
+     *
+     * @param width width in points
+     * @param height height in points
+     */
+    public int leftOut(int width, int height) {
+        return chart(PlotTheme.LIGHT, new Room(width, height)).leftOut();
     }
 
     /** The same picture without title and subtitle, for a surface that shows them itself. */

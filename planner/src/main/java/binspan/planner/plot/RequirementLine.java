@@ -8,18 +8,17 @@ package binspan.planner.plot;
  * @param atLeast whether larger values meet it; otherwise smaller ones do
  */
 public record RequirementLine(String label, double value, boolean atLeast) {
-    /** The same with sign and number alone, where there is little room. */
+    private static final String REQUIRED = "required ";
+
+    /** The same without the word, where there is little room. */
     RequirementLine brief() {
-        return new RequirementLine((atLeast ? "\u2265 " : "\u2264 ") + NumberText.withUnit(value, ""), value, atLeast);
+        return label.startsWith(REQUIRED)
+                ? new RequirementLine(label.substring(REQUIRED.length()), value, atLeast)
+                : this;
     }
 
-    /** A lower limit in the usual words. */
-    public static RequirementLine atLeast(double value, String unit) {
-        return new RequirementLine("required \u2265 " + NumberText.withUnit(value, unit), value, true);
-    }
-
-    /** An upper limit in the usual words. */
-    public static RequirementLine atMost(double value, String unit) {
-        return new RequirementLine("required \u2264 " + NumberText.withUnit(value, unit), value, false);
+    /** A limit in the usual words, its value written in a unit of its own. */
+    public static RequirementLine of(String written, double value, boolean atLeast) {
+        return new RequirementLine(REQUIRED + (atLeast ? "\u2265 " : "\u2264 ") + written, value, atLeast);
     }
 }

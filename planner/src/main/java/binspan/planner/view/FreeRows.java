@@ -6,6 +6,8 @@ import binspan.planner.viewmodel.FreeParameters;
 import binspan.planner.viewmodel.Words;
 import binspan.planner.viewmodel.WrittenAxis;
 import binspan.scenario.ParameterPaths;
+import java.util.ArrayList;
+import java.util.List;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
 import javafx.collections.ListChangeListener;
@@ -13,14 +15,16 @@ import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.CheckBox;
 import javafx.scene.control.Label;
-import javafx.scene.control.TextField;
 import javafx.scene.control.Tooltip;
+import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 
 /** What a search may set: each parameter with a tick and, where there is room, its range; and further ones to add. */
 final class FreeRows extends VBox {
-    private static final double NUMBER = 5.0;
+    private static final double NUMBER = 4.6;
+    private static final double NAME = 15.0;
 
     private final String study;
     private final FreeParameters free;
@@ -49,18 +53,22 @@ final class FreeRows extends VBox {
     }
 
     private void arrange() {
-        OptionRow together = new OptionRow(study, look);
+        OptionRow row = new OptionRow(study, look);
+        GridPane table = new GridPane();
+        table.getStyleClass().add("study-ranges");
         getChildren().clear();
         for (int i = 0; i < free.axes().size(); i++) {
             WrittenAxis axis = free.axes().get(i);
-            OptionRow row = ranges ? new OptionRow(study, look) : together;
-            row.with(tick(i, axis));
             if (ranges) {
-                range(row, i, axis);
-                getChildren().add(row);
+                table.addRow(i, line(i, axis));
+            } else {
+                row.with(tick(i, axis));
             }
         }
-        getChildren().add(adding(together));
+        if (ranges) {
+            getChildren().add(table);
+        }
+        getChildren().add(adding(row));
     }
 
     private CheckBox tick(int index, WrittenAxis axis) {
@@ -69,24 +77,24 @@ final class FreeRows extends VBox {
         box.setId(study + "-free-" + index);
         box.setTooltip(new Tooltip(path));
         box.selectedProperty().bindBidirectional(axis.usedProperty());
-        if (ranges) {
-            look.follow(() -> box.setPrefWidth(look.em(15.0)));
-        }
         return box;
     }
 
-    private void range(OptionRow row, int index, WrittenAxis axis) {
-        row.with(number(row, index, "from", axis.fromProperty()), number(row, index, "to", axis.toProperty()));
-        row.with(new Label(unit(axis.pathProperty().get())));
-        CheckBox log = row.check("log", axis.logarithmicProperty());
+    private Node[] line(int index, WrittenAxis axis) {
+        CheckBox tick = tick(index, axis);
+        tick.setWrapText(true);
+        tick.setMinHeight(USE_PREF_SIZE);
+        look.follow(() -> tick.setPrefWidth(look.em(NAME)));
+        GridPane.setHgrow(tick, Priority.SOMETIMES);
+        OptionRow maker = new OptionRow(study, look);
+        CheckBox log = maker.tick("log", axis.logarithmicProperty());
         log.setId(study + "-log-" + index);
-    }
-
-    private Node number(OptionRow row, int index, String name, StringProperty value) {
-        TextField field = row.field(name, value, NUMBER);
-        Node pair = row.labelled(name, field);
-        field.setId(study + "-" + name + "-" + index);
-        return pair;
+        Label unit = new Label(unit(axis.pathProperty().get()));
+        unit.setMinWidth(USE_PREF_SIZE);
+        List<Node> line = new ArrayList<>(List.of(tick));
+        line.addAll(maker.ends(Integer.toString(index), axis.fromProperty(), axis.toProperty(), NUMBER));
+        line.addAll(List.of(unit, log));
+        return line.toArray(Node[]::new);
     }
 
     private String unit(String path) {

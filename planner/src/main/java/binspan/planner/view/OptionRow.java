@@ -43,6 +43,15 @@ final class OptionRow extends FlowPane {
         return this;
     }
 
+    /** Adds what belongs together and stays in one line. */
+    HBox together(Node... nodes) {
+        HBox group = new HBox(nodes);
+        group.getStyleClass().add("study-option");
+        group.setAlignment(Pos.CENTER_LEFT);
+        getChildren().add(group);
+        return group;
+    }
+
     /** Adds a choice. */
     <T> ComboBox<T> choice(String name, Property<T> value, List<T> items, Function<T, String> words) {
         ComboBox<T> box = new ComboBox<>();
@@ -75,15 +84,34 @@ final class OptionRow extends FlowPane {
         TextField field = new TextField();
         field.textProperty().bindBidirectional(value);
         look.follow(() -> field.setPrefWidth(look.em(ems)));
+        field.setMinWidth(Region.USE_PREF_SIZE);
         return named(name, field);
     }
 
     /** Adds something to tick. */
     CheckBox check(String name, BooleanProperty value) {
-        CheckBox box = named(name, new CheckBox(word(name)));
-        box.selectedProperty().bindBidirectional(value);
+        CheckBox box = tick(name, value);
         getChildren().add(box);
         return box;
+    }
+
+    /** Something to tick. */
+    CheckBox tick(String name, BooleanProperty value) {
+        CheckBox box = named(name, new CheckBox(word(name)));
+        box.selectedProperty().bindBidirectional(value);
+        box.setMinWidth(Region.USE_PREF_SIZE);
+        return box;
+    }
+
+    /** Both ends of a range, their ids ending as given. */
+    List<Node> ends(String number, StringProperty from, StringProperty to, double ems) {
+        TextField lower = field("from", from, ems);
+        TextField upper = field("to", to, ems);
+        lower.setId(study + "-from-" + number);
+        upper.setId(study + "-to-" + number);
+        Label until = new Label(word("to"));
+        until.setMinWidth(Region.USE_PREF_SIZE);
+        return List.of(lower, until, upper);
     }
 
     /** A control with its label before it. */

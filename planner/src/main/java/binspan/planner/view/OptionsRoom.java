@@ -8,7 +8,7 @@ import javafx.scene.layout.Region;
 /** Keeps options from taking more than their share of a page; they scroll where it is too small. */
 final class OptionsRoom extends Region {
     private static final double ALONE = 0.58;
-    private static final double BESIDE_RESULT = 0.36;
+    private static final double BESIDE_RESULT = 0.3;
 
     private final Region options;
     private final Region page;

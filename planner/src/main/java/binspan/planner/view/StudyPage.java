@@ -48,7 +48,7 @@ public final class StudyPage extends BorderPane {
      */
     StudyPage(StudyModel<?> model, Region options, Look look, FileQuestions files) {
         this.model = model;
-        this.picture = new StudyPicture(look, model.background());
+        this.picture = new StudyPicture(model.name(), look, model.background());
         this.table = new StudyTableView(look, model.name() + "-table");
         this.contents = LatestTask.lengthy(model.background());
         getStyleClass().add("study-page");

@@ -5,17 +5,21 @@ import binspan.planner.viewmodel.Background;
 import binspan.planner.viewmodel.LatestTask;
 import binspan.planner.viewmodel.Words;
 import java.util.function.Supplier;
+import javafx.geometry.Dimension2D;
+import javafx.geometry.Pos;
 import javafx.scene.AccessibleRole;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.image.Image;
 import javafx.scene.image.ImageView;
 import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
 import javafx.stage.Window;
 
 /**
- * A picture of the plotting library in the size, theme and sharpness of the screen; it scrolls where there is too little
- * room to read it. It is drawn in the background; while one is drawn, newer sizes wait and replace each other.
+ * A picture of the plotting library in the size, theme and sharpness of the screen; it fits its
+ * place, or shows all its panels and scrolls. It is drawn in the background; while one is drawn, newer sizes wait and replace each other.
  */
 final class StudyPicture extends BorderPane {
     private static final double SMALLEST = 40.0;
@@ -26,17 +30,22 @@ final class StudyPicture extends BorderPane {
     private final ImageView view = new ImageView();
     private final ScrollPane scroll = new ScrollPane(view);
     private final Label words = new Label();
+    private final FitChoice fit;
     private Supplier<Picture> picture;
 
-    StudyPicture(Look look, Background background) {
+    StudyPicture(String study, Look look, Background background) {
         this.look = look;
         this.drawing = LatestTask.quick(background);
         getStyleClass().add("study-picture");
         words.getStyleClass().add("soft");
         words.setWrapText(true);
+        words.setMaxWidth(Double.MAX_VALUE);
+        HBox.setHgrow(words, Priority.ALWAYS);
+        fit = new FitChoice(study);
+        fit.wholeProperty().addListener((source, before, after) -> draw());
         scroll.setAccessibleRole(AccessibleRole.IMAGE_VIEW);
         scroll.setFocusTraversable(true);
-        setTop(words);
+        setTop(head());
         setCenter(scroll);
         scroll.widthProperty().addListener((source, before, after) -> draw());
         scroll.heightProperty().addListener((source, before, after) -> draw());
@@ -47,11 +56,19 @@ final class StudyPicture extends BorderPane {
         look.follow(this::draw);
     }
 
+    private HBox head() {
+        HBox head = new HBox(words, fit);
+        head.getStyleClass().add("study-picture-head");
+        head.setAlignment(Pos.CENTER_LEFT);
+        return head;
+    }
+
     /** Shows another picture; null for none. */
     void show(Supplier<Picture> another, String title) {
         picture = another;
         scroll.setAccessibleText(title);
         view.setImage(null);
+        fit.setNeeded(false);
         words.setText(Words.of(another == null ? "studies.picture.none" : "studies.drawing"));
         draw();
     }
@@ -68,8 +85,8 @@ final class StudyPicture extends BorderPane {
             return;
         }
         ScreenPicture size = new ScreenPicture(
-                width,
-                scroll.getHeight() - 2.0,
+                new Dimension2D(width, scroll.getHeight() - 2.0),
+                fit.wholeProperty().get(),
                 look.em(1.0),
                 sharpness(),
                 look.themeProperty().get());
@@ -87,6 +104,7 @@ final class StudyPicture extends BorderPane {
             view.setFitWidth(drawn.width());
             view.setFitHeight(drawn.height());
             words.setText(drawn.subtitle());
+            fit.setNeeded(drawn.crowded());
         }
     }
 

@@ -6,9 +6,10 @@ import binspan.planner.viewmodel.SweepModel;
 import binspan.planner.viewmodel.Words;
 import binspan.planner.viewmodel.WrittenAxis;
 import binspan.study.FigureColumn;
+import java.util.List;
 import javafx.beans.binding.Bindings;
-import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.StringProperty;
+import javafx.beans.value.ObservableBooleanValue;
 import javafx.collections.ListChangeListener;
 import javafx.scene.Node;
 import javafx.scene.control.CheckBox;
@@ -29,33 +30,28 @@ final class SweepOptions extends VBox {
     SweepOptions(SweepModel model, Look look) {
         this.model = model;
         this.look = look;
-        OptionRow first = new OptionRow(model.name(), look);
-        axis(first, "1", model.first());
-        OptionRow second = new OptionRow(model.name(), look);
-        CheckBox both = second.check("second", model.second().usedProperty());
-        axis(second, "2", model.second());
-        second.getChildren().stream()
-                .filter(each -> each != both)
-                .forEach(each -> each.disableProperty()
-                        .bind(model.second().usedProperty().not()));
-        getChildren().addAll(first, second, new OptionRow(model.name(), look).with(figures()));
+        OptionRow row = new OptionRow(model.name(), look);
+        axis(row, "1", model.first());
+        row.check("second", model.second().usedProperty());
+        axis(row, "2", model.second()).forEach(each -> onlyIf(each, model.second().usedProperty()));
+        row.with(figures());
+        getChildren().add(row);
     }
 
-    private void axis(OptionRow row, String number, WrittenAxis axis) {
+    private static void onlyIf(Node node, ObservableBooleanValue wanted) {
+        node.visibleProperty().bind(wanted);
+        node.managedProperty().bind(wanted);
+    }
+
+    private List<Node> axis(OptionRow row, String number, WrittenAxis axis) {
         ParameterBox box = new ParameterBox("sweep-path-" + number, model.design(), axis.pathProperty(), look);
         box.setOnAction(event -> axis.propose(model.design().scenario()));
         row.with(box);
-        row.with(text(row, "from", number, axis.fromProperty()), text(row, "to", number, axis.toProperty()));
-        row.with(steps(row, number, axis.stepsProperty()));
-        BooleanProperty logarithmic = axis.logarithmicProperty();
-        row.check("log", logarithmic).setId("sweep-log-" + number);
-    }
-
-    private Node text(OptionRow row, String name, String number, StringProperty value) {
-        TextField field = row.field(name, value, NUMBER);
-        Node pair = row.labelled(name, field);
-        field.setId("sweep-" + name + "-" + number);
-        return pair;
+        Node range = row.together(row.ends(number, axis.fromProperty(), axis.toProperty(), NUMBER)
+                .toArray(Node[]::new));
+        CheckBox logarithmic = row.tick("log", axis.logarithmicProperty());
+        logarithmic.setId("sweep-log-" + number);
+        return List.of(box, range, row.together(steps(row, number, axis.stepsProperty()), logarithmic));
     }
 
     private Node steps(OptionRow row, String number, StringProperty value) {

@@ -1,5 +1,6 @@
 package binspan.planner.viewmodel;
 
+import binspan.planner.report.ParameterWords;
 import binspan.scenario.Arm;
 import binspan.scenario.Content;
 import binspan.scenario.Field;
@@ -32,6 +33,16 @@ public final class ParameterChoices {
         choices.add(LinkLength.PATH);
         choices.section(ScenarioSections.SCENARIO, "");
         return List.copyOf(choices.paths);
+    }
+
+    /** A parameter in words with its unit; a path that leads nowhere stays as it is. */
+    public static String words(Scenario scenario, String path) {
+        try {
+            String unit = ParameterPaths.find(scenario, path).unit();
+            return ParameterWords.name(path) + (unit.isEmpty() ? "" : " (" + unit + ")");
+        } catch (IllegalArgumentException e) {
+            return path;
+        }
     }
 
     private void section(Section section, String prefix) {

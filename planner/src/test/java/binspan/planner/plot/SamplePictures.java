@@ -47,11 +47,11 @@ final class SamplePictures {
                 List.of(
                         series("deployed fibre", w -> 0.96 - w * 5e-5),
                         series("patch cord", w -> w > 300.0 && w < 400.0 ? Double.NaN : 0.97 - w * 3e-5)),
-                Optional.of(RequirementLine.atLeast(0.88, "")));
+                Optional.of(RequirementLine.of("0.88", 0.88, true)));
         CurvePanel key = new CurvePanel(
                 Axis.logarithmic("Key rate", "bit/s"),
                 List.of(series("deployed fibre", w -> w < 70.0 ? 0.0 : w / 10.0)),
-                Optional.of(RequirementLine.atLeast(20.0, "bit/s")));
+                Optional.of(RequirementLine.of("20 bit/s", 20.0, true)));
         return new Curves(
                 "",
                 WINDOW,
@@ -83,7 +83,7 @@ final class SamplePictures {
         BarPanel key = new BarPanel(
                 Axis.logarithmic("Key rate", "bit/s"),
                 List.of(new Bar(120.0, true, "120"), new Bar(45.0, false, "45"), new Bar(Double.NaN, false, "no key")),
-                Optional.of(RequirementLine.atLeast(100.0, "bit/s")));
+                Optional.of(RequirementLine.of("100 bit/s", 100.0, true)));
         BarPanel change = new BarPanel(
                 Axis.linear("Change of visibility", ""),
                 List.of(new Bar(0.01, true, ""), new Bar(-0.02, false, ""), new Bar(0.0, true, "")),
@@ -101,7 +101,7 @@ final class SamplePictures {
                 "Spread of the visibility",
                 Axis.linear("Visibility", ""),
                 bins,
-                Optional.of(RequirementLine.atLeast(0.88, "")),
+                Optional.of(RequirementLine.of("0.88", 0.88, true)),
                 List.of(new Mark("5 % of trials lie below", 0.885), new Mark("median", 0.91)));
     }
 
