@@ -33,7 +33,8 @@ final class SweepOptions extends VBox {
         OptionRow row = new OptionRow(model.name(), look);
         axis(row, "1", model.first());
         row.check("second", model.second().usedProperty());
-        axis(row, "2", model.second()).forEach(each -> onlyIf(each, model.second().usedProperty()));
+        axis(row, "2", model.second())
+                .forEach(each -> onlyIf(each, model.second().usedProperty()));
         row.with(figures());
         getChildren().add(row);
     }
@@ -47,8 +48,8 @@ final class SweepOptions extends VBox {
         ParameterBox box = new ParameterBox("sweep-path-" + number, model.design(), axis.pathProperty(), look);
         box.setOnAction(event -> axis.propose(model.design().scenario()));
         row.with(box);
-        Node range = row.together(row.ends(number, axis.fromProperty(), axis.toProperty(), NUMBER)
-                .toArray(Node[]::new));
+        Node range = row.together(
+                row.ends(number, axis.fromProperty(), axis.toProperty(), NUMBER).toArray(Node[]::new));
         CheckBox logarithmic = row.tick("log", axis.logarithmicProperty());
         logarithmic.setId("sweep-log-" + number);
         return List.of(box, range, row.together(steps(row, number, axis.stepsProperty()), logarithmic));
