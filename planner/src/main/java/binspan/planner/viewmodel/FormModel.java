@@ -144,7 +144,7 @@ public final class FormModel {
     private String structure(Scenario scenario, List<FormLayout.Group> groups) {
         StringBuilder text = new StringBuilder(part.get().toString());
         for (FormLayout.Group group : groups) {
-            text.append('\n').append(group.object());
+            text.append('\n').append(group.object()).append(group.title()).append(group.inList());
             for (FieldPlace place : group.fields()) {
                 boolean idle = WithoutEffect.reason(scenario, place).isPresent();
                 text.append(' ').append(place.field().name());

@@ -154,7 +154,13 @@ class FormPaneTest {
     @Test
     void theSourcesOfAClassUnfoldWithItsField(FxRobot robot) {
         TitledPane sources = robot.lookup("#form-class-sources").queryAs(TitledPane.class);
-        robot.interact(() -> robot.lookup(EFFICIENCY).queryAs(TextField.class).requestFocus());
+        robot.interact(() -> {
+            robot.lookup(EFFICIENCY).queryAs(TextField.class).requestFocus();
+            sources.setExpanded(false);
+        });
+        robot.interact(() -> robot.lookup("#form-alice-detectors-0-dead-time-ns")
+                .queryAs(TextField.class)
+                .requestFocus());
         assertThat(sources.isExpanded()).isFalse();
         robot.interact(() -> robot.lookup("#form-alice-detectors-0-class")
                 .queryAs(ComboBox.class)
@@ -168,7 +174,9 @@ class FormPaneTest {
         robot.interact(() -> robot.lookup(EFFICIENCY).queryAs(TextField.class).requestFocus());
         double needed = robot.lookup(".form-explanation").queryAs(Region.class).getHeight();
         assertThat(needed).isBetween(40.0, 105.0);
-        robot.interact(() -> edited.select(new LinkPart.Clock(Site.ALICE)));
+        robot.moveTo("#form-part");
+        robot.interact(() -> edited.select(new LinkPart.Promise()));
+        robot.interact(() -> robot.lookup("#form-part").query().requestFocus());
         assertThat(robot.lookup(".form-explanation").queryAs(Region.class).getHeight())
                 .isLessThan(needed);
     }
