@@ -188,11 +188,20 @@ final class FieldRow extends VBox {
         model.settle();
     }
 
+    /** Cells of a list that is still closed claim the focus too. */
+    private boolean ownsFocus() {
+        Node owner = getScene() == null ? null : getScene().getFocusOwner();
+        while (owner != null && owner != this) {
+            owner = owner.getParent();
+        }
+        return owner == this;
+    }
+
     private void explained(BiConsumer<FieldModel, Boolean> explain) {
         setOnMouseEntered(event -> explain.accept(model, false));
         setOnMouseExited(event -> explain.accept(null, false));
         focusWithinProperty().addListener((source, before, within) -> {
-            if (within) {
+            if (within && ownsFocus()) {
                 explain.accept(model, true);
             }
         });

@@ -86,10 +86,10 @@ final class Filing {
         }
         boolean may = mayLeaveOut()
                 && (!file.changedElsewhere()
-                || notices.confirmed(
-                        Words.of("file.save.title"),
-                        Words.of("file.save.changedElsewhere", path.getFileName()),
-                        Words.of("file.save.replace")));
+                        || notices.confirmed(
+                                Words.of("file.save.title"),
+                                Words.of("file.save.changedElsewhere", path.getFileName()),
+                                Words.of("file.save.replace")));
         return may && written(path);
     }
 

@@ -309,8 +309,7 @@ public final class FieldModel implements FormRow {
         value.set(planned instanceof Double number ? number : words.number().orElse(Double.NaN));
         SliderScale scale = slider.get();
         if (!sliding && place.field().kind().numeric()) {
-            SliderScale fresh =
-                    SliderScale.around(place.field(), value.get()).orElse(null);
+            SliderScale fresh = SliderScale.around(place.field(), value.get()).orElse(null);
             slider.set(scale != null && fresh != null && scale.serves(value.get(), fresh) ? scale : fresh);
         }
     }

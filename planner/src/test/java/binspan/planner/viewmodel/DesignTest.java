@@ -126,8 +126,7 @@ class DesignTest {
     }
 
     private String selected() {
-        LinkPart.Element element =
-                (LinkPart.Element) design.selectionProperty().get();
+        LinkPart.Element element = (LinkPart.Element) design.selectionProperty().get();
         return design.scenario().alice().path().get(element.index()).label().orElseThrow();
     }
 
