@@ -42,6 +42,11 @@ final class ClassTablePane extends VBox {
         show(model.tableProperty().get());
     }
 
+    /** Unfolds limits and sources. */
+    void unfold() {
+        more.setExpanded(true);
+    }
+
     private void show(Optional<ClassTable> table) {
         setVisible(table.isPresent());
         setManaged(table.isPresent());

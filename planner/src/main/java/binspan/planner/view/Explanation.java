@@ -2,14 +2,15 @@ package binspan.planner.view;
 
 import binspan.planner.viewmodel.FieldModel;
 import binspan.planner.viewmodel.Words;
+import java.util.List;
 import javafx.beans.value.ChangeListener;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.OverrunStyle;
 import javafx.scene.control.TextField;
 import javafx.scene.control.Tooltip;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
-import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
 /** Explains the field that is focused or pointed at: what it means, what is allowed, what stands by default, where its value comes from. */
@@ -17,6 +18,7 @@ final class Explanation extends VBox {
     private final Label path = new Label();
     private final Label meaning = new Label();
     private final Label allowed = new Label();
+    private final HBox line = new HBox();
     private final TextField source = new TextField();
     private final ChangeListener<Object> renew = (changed, before, now) -> show();
     private FieldModel focused;
@@ -28,6 +30,8 @@ final class Explanation extends VBox {
         path.setTextOverrun(OverrunStyle.LEADING_ELLIPSIS);
         meaning.getStyleClass().add("form-meaning");
         meaning.setWrapText(true);
+        meaning.setMinHeight(USE_PREF_SIZE);
+        allowed.setMinHeight(USE_PREF_SIZE);
         allowed.getStyleClass().addAll("form-allowed", "soft");
         allowed.setWrapText(true);
         source.setId("form-source");
@@ -37,17 +41,16 @@ final class Explanation extends VBox {
         Label words = new Label(Words.of("form.source.label"));
         words.setMinWidth(USE_PREF_SIZE);
         words.setLabelFor(source);
-        HBox line = new HBox(words, source);
+        line.getChildren().setAll(words, source);
         line.getStyleClass().add("form-source");
         HBox.setHgrow(source, Priority.ALWAYS);
-        Region space = new Region();
-        VBox.setVgrow(space, Priority.ALWAYS);
-        getChildren().addAll(path, meaning, allowed, space, line);
+        getChildren().addAll(path, meaning, allowed, line);
         show();
     }
 
     /** Explains a focused field, which stays until another one is. */
     void focused(FieldModel field) {
+        setMinHeight(USE_PREF_SIZE);
         focused = field;
         explain(field);
     }
@@ -55,6 +58,8 @@ final class Explanation extends VBox {
     /** Explains a field that is pointed at; null for none, which brings back the focused one. */
     void pointed(FieldModel field) {
         if (!source.isFocused()) {
+            // It does not shrink under the pointer: the rows above would move to and fro.
+            setMinHeight(Math.max(getMinHeight(), getHeight()));
             explain(field == null ? focused : field);
         }
     }
@@ -80,8 +85,15 @@ final class Explanation extends VBox {
     private void show() {
         boolean none = shown == null;
         path.setText(none ? "" : shown.writtenPath());
-        meaning.setText(none ? Words.of("form.explain.none") : capital(shown.meaning()) + ".");
+        meaning.setText(none ? Words.of("form.explain.none") : capital(shown.meaning()) + "." + remark());
         allowed.setText(none ? "" : allowed());
+        for (Node each : List.of(path, allowed, line)) {
+            each.setVisible(!none);
+            each.setManaged(!none);
+        }
+        if (allowed.getText().isEmpty()) {
+            allowed.setManaged(false);
+        }
         source.setDisable(none);
         if (!source.isFocused()) {
             source.setText(none ? "" : shown.provenanceProperty().get());
@@ -89,6 +101,10 @@ final class Explanation extends VBox {
         String key = none ? "" : shown.provenancePath();
         source.setAccessibleText(none ? "" : Words.of("form.source", shown.label()));
         source.setTooltip(none ? null : new Tooltip(Words.of("form.source.help", key, source.getText())));
+    }
+
+    private String remark() {
+        return shown.remark().isEmpty() ? "" : " " + shown.remark();
     }
 
     private String allowed() {

@@ -20,6 +20,11 @@ import javafx.scene.layout.VBox;
 
 /** One field: label, slider, entry and unit on a line, below it what is wrong. */
 final class FieldRow extends VBox {
+    private static final int MOST_DIGITS = 13;
+    private static final double NARROWEST = 4.6;
+    private static final double AROUND = 1.0;
+    private static final double PER_DIGIT = 0.64;
+
     private final FieldModel model;
     private final Control entry;
 
@@ -34,13 +39,20 @@ final class FieldRow extends VBox {
         this.model = model;
         this.entry = model.choices().isEmpty() ? text() : new ChoiceEntry(model);
         entry.setId(id("form", model.path()));
-        entry.setDisable(!model.withoutEffect().isEmpty());
+        entry.disableProperty().bind(model.withoutEffectProperty().isNotEmpty());
         getStyleClass().add("form-field");
         HBox line = new HBox(label(heading));
         line.getStyleClass().add("form-line");
         line.setAlignment(Pos.CENTER_LEFT);
         if (model.choices().isEmpty() && model.field().kind().numeric()) {
-            line.getChildren().addAll(new FieldSlider(model), entry, unit());
+            Label unit = unit();
+            line.getChildren().addAll(new FieldSlider(model), entry, unit);
+            if (model.idleInPlace()) {
+                Label reason = stoppedBy();
+                unit.visibleProperty().bind(reason.visibleProperty().not());
+                unit.managedProperty().bind(unit.visibleProperty());
+                line.getChildren().add(reason);
+            }
         } else {
             line.getChildren().add(entry);
             entry.getStyleClass().add("form-wide");
@@ -92,6 +104,10 @@ final class FieldRow extends VBox {
         field.textProperty().bindBidirectional(model.textProperty());
         field.promptTextProperty().bind(model.promptProperty());
         field.getStyleClass().add("form-entry");
+        if (model.field().kind().numeric()) {
+            field.textProperty().addListener((source, before, now) -> fit(field));
+            fit(field);
+        }
         field.setOnAction(event -> model.settle());
         field.focusedProperty().addListener((source, before, focused) -> left(field, focused));
         field.addEventFilter(KeyEvent.KEY_PRESSED, event -> {
@@ -106,6 +122,13 @@ final class FieldRow extends VBox {
                 .bind(Bindings.createStringBinding(
                         this::spoken, model.errorProperty(), model.promptProperty(), model.statedProperty()));
         return field;
+    }
+
+    /** As wide as its number, within bounds; lengths in em. */
+    private static void fit(TextField field) {
+        int digits = Math.min(MOST_DIGITS, field.getText().length());
+        double width = Math.max(NARROWEST, AROUND + PER_DIGIT * digits);
+        field.setStyle(String.format(Locale.ROOT, "-fx-pref-width: %1$.2fem; -fx-min-width: %1$.2fem", width));
     }
 
     private void left(TextField field, boolean focused) {
@@ -132,20 +155,32 @@ final class FieldRow extends VBox {
         return unit;
     }
 
+    /** The reason in place of slider and unit, for a field that keeps its place. */
+    private Label stoppedBy() {
+        Label reason = new Label();
+        reason.textProperty().bind(model.withoutEffectProperty());
+        reason.getStyleClass().addAll("form-note", "soft");
+        reason.setMinWidth(USE_PREF_SIZE);
+        reason.visibleProperty().bind(model.withoutEffectProperty().isNotEmpty());
+        reason.managedProperty().bind(reason.visibleProperty());
+        return reason;
+    }
+
     private void idle() {
-        if (!model.withoutEffect().isEmpty()) {
-            Label reason = new Label(model.withoutEffect());
-            reason.getStyleClass().addAll("form-note", "soft");
-            reason.setWrapText(true);
-            reason.setMaxWidth(Double.MAX_VALUE);
-            HBox.setHgrow(reason, Priority.ALWAYS);
-            HBox line = new HBox(reason);
-            line.getStyleClass().add("form-idle");
-            if (model.optional()) {
-                line.getChildren().add(Buttons.remove(id("form-drop", model.path()), this::drop));
-            }
-            getChildren().add(line);
+        if (model.idleInPlace() || model.withoutEffect().isEmpty()) {
+            return;
         }
+        Label reason = new Label(model.withoutEffect());
+        reason.getStyleClass().addAll("form-note", "soft");
+        reason.setWrapText(true);
+        reason.setMaxWidth(Double.MAX_VALUE);
+        HBox.setHgrow(reason, Priority.ALWAYS);
+        HBox line = new HBox(reason);
+        line.getStyleClass().add("form-idle");
+        if (model.optional()) {
+            line.getChildren().add(Buttons.remove(id("form-drop", model.path()), this::drop));
+        }
+        getChildren().add(line);
     }
 
     private void drop() {
@@ -153,11 +188,20 @@ final class FieldRow extends VBox {
         model.settle();
     }
 
+    /** Cells of a list that is still closed claim the focus too. */
+    private boolean ownsFocus() {
+        Node owner = getScene() == null ? null : getScene().getFocusOwner();
+        while (owner != null && owner != this) {
+            owner = owner.getParent();
+        }
+        return owner == this;
+    }
+
     private void explained(BiConsumer<FieldModel, Boolean> explain) {
         setOnMouseEntered(event -> explain.accept(model, false));
         setOnMouseExited(event -> explain.accept(null, false));
         focusWithinProperty().addListener((source, before, within) -> {
-            if (within) {
+            if (within && ownsFocus()) {
                 explain.accept(model, true);
             }
         });

@@ -23,6 +23,7 @@ final class FieldSlider extends Slider {
         setAccessibleText(Words.of("form.slider", model.label()));
         managedProperty().bind(visibleProperty());
         model.valueProperty().addListener((source, before, now) -> follow());
+        model.withoutEffectProperty().addListener((source, before, now) -> follow());
         model.sliderProperty().addListener((source, before, now) -> follow());
         valueProperty().addListener((source, before, now) -> moved(now.doubleValue()));
         valueChangingProperty().addListener((source, before, changing) -> released(changing));

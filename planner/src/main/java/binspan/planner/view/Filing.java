@@ -4,10 +4,12 @@ import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
 import binspan.planner.io.Preset;
 import binspan.planner.viewmodel.Design;
+import binspan.planner.viewmodel.FormModel.RefusedEntry;
 import binspan.planner.viewmodel.LinkFile;
 import binspan.planner.viewmodel.Words;
 import java.nio.file.Path;
 import java.util.Optional;
+import java.util.function.Supplier;
 import javafx.scene.control.Alert.AlertType;
 
 /** Opens and saves scenario files, asking where something could be lost. */
@@ -18,12 +20,28 @@ final class Filing {
     private final LinkFile file;
     private final FileQuestions files;
     private final Notices notices;
+    private final Supplier<Optional<RefusedEntry>> refused;
 
-    Filing(Design design, LinkFile file, FileQuestions files, Notices notices) {
+    /**
+     * Files of a design.
+     *
+     * @param design what is saved
+     * @param file where
+     * @param files asks for file names
+     * @param notices asks the rest
+     * @param refused an entry that is shown and not part of the design
+     */
+    Filing(
+            Design design,
+            LinkFile file,
+            FileQuestions files,
+            Notices notices,
+            Supplier<Optional<RefusedEntry>> refused) {
         this.design = design;
         this.file = file;
         this.files = files;
         this.notices = notices;
+        this.refused = refused;
     }
 
     /** Begins with a starter, unless unsaved changes are to be kept. */
@@ -78,16 +96,30 @@ final class Filing {
         if (path == null) {
             return saveAs();
         }
-        boolean may = !file.changedElsewhere()
-                || notices.confirmed(
-                        Words.of("file.save.title"),
-                        Words.of("file.save.changedElsewhere", path.getFileName()),
-                        Words.of("file.save.replace"));
+        boolean may = mayLeaveOut()
+                && (!file.changedElsewhere()
+                        || notices.confirmed(
+                                Words.of("file.save.title"),
+                                Words.of("file.save.changedElsewhere", path.getFileName()),
+                                Words.of("file.save.replace")));
         return may && written(path);
+    }
+
+    /** A refused entry is not saved, which nobody should learn from the file. */
+    private boolean mayLeaveOut() {
+        return refused.get()
+                .map(entry -> notices.confirmed(
+                        Words.of("file.save.title"),
+                        Words.of("file.save.refused", entry.text(), entry.path(), entry.part(), entry.error()),
+                        Words.of("file.save.without")))
+                .orElse(true);
     }
 
     /** Asks for a name and saves. */
     boolean saveAs() {
+        if (!mayLeaveOut()) {
+            return false;
+        }
         Path path = file.pathProperty().get();
         String proposed = path == null ? fileName(design.scenario().name()) : String.valueOf(path.getFileName());
         Optional<Path> answer =

@@ -32,6 +32,8 @@ public final class FormPane extends VBox {
     private final VBox fields = new VBox();
     private final ScrollPane scroll = new ScrollPane(fields);
     private final Explanation explanation = new Explanation();
+    private boolean following;
+    private ClassTablePane table;
     private final BooleanProperty classOpen = new SimpleBooleanProperty(this, "classOpen", false);
 
     /** Shows the form of a model. */
@@ -53,18 +55,28 @@ public final class FormPane extends VBox {
         part.setId("form-part");
         part.setMaxWidth(Double.MAX_VALUE);
         part.setAccessibleText(Words.of("form.part"));
-        part.setItems(model.parts());
         part.setConverter(new Names());
         part.setVisibleRowCount(20);
-        part.setValue(model.partProperty().get());
         model.titleProperty().addListener((source, before, now) -> part.setConverter(new Names()));
-        model.partProperty().addListener((source, before, now) -> part.setValue(now));
+        model.partProperty().addListener((source, before, now) -> follow());
+        model.parts().addListener((ListChangeListener<LinkPart>) change -> follow());
+        follow();
         part.valueProperty().addListener((source, before, now) -> {
-            if (now != null) {
+            if (now != null && !following) {
                 model.select(now);
             }
         });
         return part;
+    }
+
+    /** New entries take the value of a choice away; the part that is shown stays in it. */
+    private void follow() {
+        following = true;
+        if (!part.getItems().equals(model.parts())) {
+            part.getItems().setAll(model.parts());
+        }
+        part.setValue(model.partProperty().get());
+        following = false;
     }
 
     private void fill() {
@@ -95,9 +107,10 @@ public final class FormPane extends VBox {
         if (row instanceof AlternativesModel alternatives) {
             return new AlternativesBox(alternatives, this::explain);
         }
-        if (row instanceof ClassRow table) {
+        if (row instanceof ClassRow known) {
             classOpen.unbind();
-            return new ClassTablePane(table, classOpen);
+            table = new ClassTablePane(known, classOpen);
+            return table;
         }
         return row instanceof GroupRow group ? heading(group) : adding((AddRow) row);
     }
@@ -129,6 +142,9 @@ public final class FormPane extends VBox {
     private void explain(FieldModel field, boolean focused) {
         if (focused) {
             explanation.focused(field);
+            if (field.isClass() && table != null) {
+                table.unfold();
+            }
         } else {
             explanation.pointed(field);
         }

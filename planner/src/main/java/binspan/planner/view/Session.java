@@ -73,7 +73,7 @@ final class Session {
         files = answers != null
                 ? answers
                 : new FileQuestions(stage, settings.lastDirectory().orElse(null));
-        filing = new Filing(model.design(), model.file(), files, notices);
+        filing = new Filing(model.design(), model.file(), files, notices, model.form()::refused);
         window = new MainWindow(model, WindowParts.of(model, look, files, this::showRoom), look);
         window.menus(menus().bar(this::close));
         window.followPage(this::watch);

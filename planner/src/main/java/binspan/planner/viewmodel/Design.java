@@ -12,6 +12,8 @@ import java.util.function.UnaryOperator;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.beans.property.ReadOnlyBooleanWrapper;
+import javafx.beans.property.ReadOnlyIntegerProperty;
+import javafx.beans.property.ReadOnlyIntegerWrapper;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.ReadOnlyStringProperty;
@@ -32,6 +34,7 @@ public final class Design {
     private final ReadOnlyStringWrapper notice = new ReadOnlyStringWrapper(this, "notice", "");
     private final ObjectProperty<LinkPart> selection =
             new SimpleObjectProperty<>(this, "selection", new LinkPart.Plan());
+    private final ReadOnlyIntegerWrapper turns = new ReadOnlyIntegerWrapper(this, "turns");
     private History history;
 
     /** Begins with a document, taken as saved. */
@@ -47,6 +50,7 @@ public final class Design {
         saved.set(first.scenario());
         // Before others hear of it: they may have something to say about the new link.
         notice.set("");
+        turn();
         show();
     }
 
@@ -101,6 +105,15 @@ public final class Design {
     /** What would be done again, in words; empty if there is nothing. */
     public ReadOnlyStringProperty redoTextProperty() {
         return redoText.getReadOnlyProperty();
+    }
+
+    /** Changes before something is undone, done again or begun anew: what is half typed is then given up. */
+    public ReadOnlyIntegerProperty turnsProperty() {
+        return turns.getReadOnlyProperty();
+    }
+
+    private void turn() {
+        turns.set(turns.get() + 1);
     }
 
     /** The part of the link whose form is shown. */
@@ -184,6 +197,7 @@ public final class Design {
     /** Takes the last change back. */
     public void undo() {
         if (history.canUndo()) {
+            turn();
             history.undo();
             show();
         }
@@ -192,6 +206,7 @@ public final class Design {
     /** Does again what was taken back. */
     public void redo() {
         if (history.canRedo()) {
+            turn();
             history.redo();
             show();
         }
@@ -206,23 +221,13 @@ public final class Design {
 
     private void show() {
         ScenarioDocument current = history.current();
-        keepSelection(current.scenario());
+        if (scenario.get() != null) {
+            selection.set(PartKept.part(selection.get(), scenario.get(), current.scenario()));
+        }
         modified.set(history.modified());
         undoText.set(history.canUndo() ? history.undoText() : "");
         redoText.set(history.canRedo() ? history.redoText() : "");
         document.set(current);
         scenario.set(current.scenario());
-    }
-
-    /** What is selected may have gone. */
-    private void keepSelection(Scenario now) {
-        LinkPart part = selection.get();
-        boolean elementGone = part instanceof LinkPart.Element element
-                && element.index() >= element.site().arm(now).path().size();
-        boolean portGone = part instanceof LinkPart.Port port
-                && port.port() >= port.site().arm(now).detectors().size();
-        if (elementGone || portGone) {
-            selection.set(new LinkPart.Plan());
-        }
     }
 }

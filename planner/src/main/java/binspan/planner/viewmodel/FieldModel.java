@@ -8,7 +8,9 @@ import binspan.scenario.Field;
 import binspan.scenario.Range;
 import binspan.scenario.Values;
 import java.util.List;
+import java.util.Objects;
 import java.util.Optional;
+import java.util.Set;
 import java.util.stream.Stream;
 import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.beans.property.ReadOnlyBooleanWrapper;
@@ -26,6 +28,7 @@ import javafx.beans.property.StringProperty;
  * field with the reason beside it.
  */
 public final class FieldModel implements FormRow {
+    private static final Set<String> CLASSES = Set.of("class", "fibre");
     private static final String NO_CHANNEL = "C";
 
     private final StringProperty text = new SimpleStringProperty(this, "text", "");
@@ -40,21 +43,28 @@ public final class FieldModel implements FormRow {
     private final ReadOnlyObjectWrapper<SliderScale> slider = new ReadOnlyObjectWrapper<>(this, "slider");
     private final FormEdits edits;
     private final FieldPlace place;
-    private final String idle;
+    private final ReadOnlyStringWrapper idle = new ReadOnlyStringWrapper(this, "withoutEffect", "");
     private boolean showing;
     private boolean typing;
+    private boolean sliding;
+    private boolean editing;
+    private Object seen;
     private Object before;
 
     FieldModel(FormEdits edits, FieldPlace place) {
         this.edits = edits;
         this.place = place;
-        this.idle = WithoutEffect.reason(edits.scenario(), place).orElse("");
         refresh();
         text.addListener((source, old, typed) -> {
             if (!showing) {
                 typed(typed.strip());
             }
         });
+    }
+
+    /** Whether it names a class of the catalogue. */
+    public boolean isClass() {
+        return CLASSES.contains(place.field().name());
     }
 
     /** Its scenario path, elements of lists by their index. */
@@ -104,7 +114,23 @@ public final class FieldModel implements FormRow {
 
     /** Why it has no meaning at present, empty for a field that counts. */
     public String withoutEffect() {
-        return idle;
+        return idle.get();
+    }
+
+    /** The same, as it changes. */
+    public ReadOnlyStringProperty withoutEffectProperty() {
+        return idle.getReadOnlyProperty();
+    }
+
+    /** Whether it keeps its place among the others while it has no meaning, as that may end with what is typed next. */
+    public boolean idleInPlace() {
+        return WithoutEffect.inPlace(place);
+    }
+
+    /** What else is to be known of it as the link is now, empty for most. */
+    public String remark() {
+        boolean fixed = place.field().name().equals("lengthKm") && WithoutEffect.measured(edits.scenario(), place);
+        return fixed ? Words.of("form.remark.length") : "";
     }
 
     /** What is typed, or what the file states; empty where the default stands. */
@@ -160,10 +186,11 @@ public final class FieldModel implements FormRow {
     /** Moves the slider to a position, 0 to 1; all until {@link #settle} is one change. */
     public void slide(double position) {
         SliderScale scale = slider.get();
-        if (scale != null && idle.isEmpty()) {
+        if (scale != null && withoutEffect().isEmpty()) {
             begin();
+            sliding = true;
             double moved = scale.value(position);
-            error.set(edits.put(place, written(moved)));
+            error.set(put(written(moved)));
             show(spelled(moved));
         }
     }
@@ -187,19 +214,31 @@ public final class FieldModel implements FormRow {
         if (entry instanceof FieldEntry.Refused refused) {
             return refused.problem().message();
         }
-        return ((FieldEntry.Accepted) entry).change() instanceof Change.Put put
-                ? edits.put(place, put.value())
-                : edits.remove(place);
+        return ((FieldEntry.Accepted) entry).change() instanceof Change.Put put ? put(put.value()) : remove();
     }
 
     /** Gives the link the value that it had before the typing. */
     private void restore() {
         Object now = edits.statedIn(place);
         if (before == null && now != null) {
-            edits.remove(place);
+            remove();
         } else if (before != null && !before.equals(now)) {
-            edits.put(place, before instanceof Double number ? written(number) : before);
+            put(before instanceof Double number ? written(number) : before);
         }
+    }
+
+    private String put(Object value) {
+        editing = true;
+        String refusal = edits.put(place, value);
+        editing = false;
+        return refusal;
+    }
+
+    private String remove() {
+        editing = true;
+        String refusal = edits.remove(place);
+        editing = false;
+        return refusal;
     }
 
     private void begin() {
@@ -213,6 +252,7 @@ public final class FieldModel implements FormRow {
     public void settle() {
         if (typing) {
             typing = false;
+            sliding = false;
             edits.settle();
             refresh();
         }
@@ -225,6 +265,14 @@ public final class FieldModel implements FormRow {
         }
         error.set("");
         settle();
+        show(spelled(edits.statedIn(place)));
+    }
+
+    /** Gives up what was typed, allowed or not, and shows what stands. */
+    void forget() {
+        typing = false;
+        sliding = false;
+        error.set("");
         show(spelled(edits.statedIn(place)));
     }
 
@@ -245,6 +293,13 @@ public final class FieldModel implements FormRow {
         Values object = edits.stated(place);
         Object now = object.get(place.field().name());
         stated.set(now != null);
+        idle.set(WithoutEffect.reason(edits.scenario(), place)
+                .or(() -> WithoutEffect.replaced(edits.scenario(), place))
+                .orElse(""));
+        if (!editing && !Objects.equals(now, seen)) {
+            forget();
+        }
+        seen = now;
         DefaultWords words = new DefaultWords(
                 edits.scenario(),
                 place,
@@ -264,9 +319,9 @@ public final class FieldModel implements FormRow {
         Object planned = PlannedValue.at(edits.scenario(), place.path()).orElse(null);
         value.set(planned instanceof Double number ? number : words.number().orElse(Double.NaN));
         SliderScale scale = slider.get();
-        boolean kept = scale != null && scale.covers(value.get());
-        if (!kept && place.field().kind().numeric()) {
-            slider.set(SliderScale.around(place.field(), value.get()).orElse(null));
+        if (!sliding && place.field().kind().numeric()) {
+            SliderScale fresh = SliderScale.around(place.field(), value.get()).orElse(null);
+            slider.set(scale != null && fresh != null && scale.serves(value.get(), fresh) ? scale : fresh);
         }
     }
 

@@ -10,6 +10,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.function.Predicate;
+import java.util.stream.Stream;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.ReadOnlyStringProperty;
@@ -19,8 +20,6 @@ import javafx.collections.ObservableList;
 
 /** The form of the selected part of the link: all its fields, as rows. */
 public final class FormModel {
-    private static final Set<String> CLASSES = Set.of("class", "fibre");
-
     private final ObservableList<FormRow> rows = FXCollections.observableArrayList();
     private final ObservableList<LinkPart> parts = FXCollections.observableArrayList();
     private final ReadOnlyObjectWrapper<LinkPart> part = new ReadOnlyObjectWrapper<>(this, "part");
@@ -54,6 +53,7 @@ public final class FormModel {
     public FormModel(Design design, Predicate<String> states, Editing editing) {
         this.design = design;
         this.edits = new FormEdits(design, states, editing);
+        design.turnsProperty().addListener((source, before, now) -> forget());
         design.selectionProperty().addListener((source, before, now) -> follow());
         design.scenarioProperty().addListener((source, before, now) -> follow());
         design.savedProperty().addListener((source, before, now) -> follow());
@@ -90,15 +90,45 @@ public final class FormModel {
         design.selectionProperty().set(wanted);
     }
 
+    /**
+     * An entry that is not part of the design.
+     *
+     * @param part name of the part whose form has it
+     * @param path its field's scenario path, elements by their labels
+     * @param text what is typed
+     * @param error why it is not allowed
+     */
+    public record RefusedEntry(String part, String path, String text, String error) {}
+
+    /** The first field that shows a refused entry, absent while all that is shown is in the design. */
+    public Optional<RefusedEntry> refused() {
+        return fields().filter(field -> !field.errorProperty().get().isEmpty())
+                .findFirst()
+                .map(field -> new RefusedEntry(
+                        title.get(),
+                        field.writtenPath(),
+                        field.textProperty().get(),
+                        field.errorProperty().get()));
+    }
+
+    private Stream<FieldModel> fields() {
+        return rows.stream().flatMap(FormRow::fields);
+    }
+
+    /** What is undone or opened anew is not to be mixed with what was typed before. */
+    private void forget() {
+        fields().forEach(FieldModel::forget);
+    }
+
     private void follow() {
         edits.follow();
         Scenario scenario = design.scenario();
         List<LinkPart> present = PartName.all(scenario);
+        LinkPart wanted = design.selectionProperty().get();
+        part.set(present.contains(wanted) ? wanted : new LinkPart.Plan());
         if (!parts.equals(present)) {
             parts.setAll(present);
         }
-        LinkPart wanted = design.selectionProperty().get();
-        part.set(present.contains(wanted) ? wanted : new LinkPart.Plan());
         title.set(name(part.get()));
         List<FormLayout.Group> groups = FormLayout.of(scenario, part.get());
         String now = structure(scenario, groups);
@@ -114,7 +144,7 @@ public final class FormModel {
     private String structure(Scenario scenario, List<FormLayout.Group> groups) {
         StringBuilder text = new StringBuilder(part.get().toString());
         for (FormLayout.Group group : groups) {
-            text.append('\n').append(group.object());
+            text.append('\n').append(group.object()).append(group.title()).append(group.inList());
             for (FieldPlace place : group.fields()) {
                 boolean idle = WithoutEffect.reason(scenario, place).isPresent();
                 text.append(' ').append(place.field().name());
@@ -164,8 +194,9 @@ public final class FormModel {
                 idle.add(new FieldModel(edits, place));
             } else if (!without && done.add(place.field().name())) {
                 done.addAll(place.rivals());
-                made.add(row(place));
-                if (CLASSES.contains(place.field().name())) {
+                FormRow row = row(place);
+                made.add(row);
+                if (row instanceof FieldModel field && field.isClass()) {
                     made.add(new ClassRow(edits, place));
                 }
             }

@@ -16,7 +16,9 @@ import java.util.Optional;
  * @param whole whether only whole numbers are meant
  */
 public record SliderScale(double lowest, double highest, boolean logarithmic, boolean whole) {
-    private static final double FACTOR = 20.0;
+    private static final double FACTOR = 4.0;
+    private static final double FAR = 0.3;
+    private static final double TOO_WIDE = 4.0;
     private static final double SMALL_SHARE = 0.05;
     private static final double BAND_SHARE = 0.02;
     private static final int DIGITS = 3;
@@ -62,9 +64,14 @@ public record SliderScale(double lowest, double highest, boolean logarithmic, bo
     }
 
     private static SliderScale positive(Range range, double value, boolean whole) {
-        return value < SMALL_SHARE * range.highest()
-                ? new SliderScale(inside(range, value / FACTOR), inside(range, value * FACTOR), true, whole)
-                : new SliderScale(range.lowest(), range.highest(), false, whole);
+        boolean share = range.highest() <= 1.0 && value >= SMALL_SHARE * range.highest();
+        if (share) {
+            return new SliderScale(range.lowest(), range.highest(), false, whole);
+        }
+        double low = whole ? Math.floor(value / FACTOR) : value / FACTOR;
+        double high = whole ? Math.ceil(value * FACTOR) : value * FACTOR;
+        double lowest = inside(range, low);
+        return new SliderScale(lowest, inside(range, high), lowest > 0.0, whole);
     }
 
     private static double inside(Range range, double end) {
@@ -74,6 +81,12 @@ public record SliderScale(double lowest, double highest, boolean logarithmic, bo
     /** Whether a value lies on the scale. */
     public boolean covers(double value) {
         return value >= lowest && value <= highest;
+    }
+
+    /** Whether a value can go on being moved on this scale although another one would be chosen for it. */
+    boolean serves(double value, SliderScale fresh) {
+        boolean near = Math.abs(position(value) - fresh.position(value)) <= FAR;
+        return covers(value) && near && highest - lowest <= TOO_WIDE * (fresh.highest - fresh.lowest);
     }
 
     /** Where a value stands, 0 at the left end to 1 at the right. */

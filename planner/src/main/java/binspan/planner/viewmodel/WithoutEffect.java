@@ -1,5 +1,6 @@
 package binspan.planner.viewmodel;
 
+import binspan.scenario.FibreSpan;
 import binspan.scenario.Pump;
 import binspan.scenario.PumpMode;
 import binspan.scenario.Scenario;
@@ -15,7 +16,29 @@ final class WithoutEffect {
             Set.of("meanPairsPerCycle", "uncorrelatedPhotonsPerCycle", "schmidtNumber", "unheraldedG2");
     private static final Set<String> CONTINUOUS_ONLY = Set.of("pairRatePerSecond", "uncorrelatedPhotonsPerSecond");
 
+    private static final Set<String> IN_MEASURED_LOSS =
+            Set.of("attenuationDbPerKm", "connectors", "connectorLossDb", "splices", "spliceLossDb");
+
     private WithoutEffect() {}
+
+    /** Why a field of a span is idle while its measured loss stands; it keeps its place, as the loss may be taken away. */
+    static Optional<String> replaced(Scenario scenario, FieldPlace place) {
+        boolean replaced = inPlace(place) && measured(scenario, place);
+        return replaced ? Optional.of(Words.of("form.idle.measured")) : Optional.empty();
+    }
+
+    /** Whether a field can be idle without leaving its place. */
+    static boolean inPlace(FieldPlace place) {
+        return IN_MEASURED_LOSS.contains(place.field().name());
+    }
+
+    /** Whether a field belongs to a span whose loss is stated as measured. */
+    static boolean measured(Scenario scenario, FieldPlace place) {
+        return PlannedValue.at(scenario, place.parent())
+                .filter(FibreSpan.class::isInstance)
+                .filter(span -> ((FibreSpan) span).measuredLossDb().isPresent())
+                .isPresent();
+    }
 
     /** The reason in words, absent for a field that counts. */
     static Optional<String> reason(Scenario scenario, FieldPlace place) {

@@ -2,6 +2,7 @@ package binspan.planner.view;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import binspan.planner.document.ElementEdits;
 import binspan.planner.viewmodel.EditedForm;
 import binspan.planner.viewmodel.LinkPart;
 import binspan.planner.viewmodel.Site;
@@ -11,7 +12,10 @@ import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.Slider;
 import javafx.scene.control.TextField;
+import javafx.scene.control.TitledPane;
 import javafx.scene.input.KeyCode;
+import javafx.scene.layout.Region;
+import javafx.scene.text.Text;
 import javafx.stage.Stage;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.extension.ExtendWith;
@@ -115,6 +119,60 @@ class FormPaneTest {
         robot.push(KeyCode.ENTER);
         assertThat(edited.design().scenario().provenance())
                 .containsEntry("alice.detectors[0].deadTimeNs", "data sheet");
+    }
+
+    private Object chosen(FxRobot robot) {
+        return robot.lookup("#form-part").queryAs(ComboBox.class).getValue();
+    }
+
+    @Test
+    void theChosenPartStaysWhileElementsComeAndGo(FxRobot robot) {
+        robot.interact(() -> edited.select(new LinkPart.Element(Site.ALICE, 1)));
+        robot.interact(() ->
+                edited.design().edit("added", ElementEdits.add(edited.design().scenario(), "alice", "loss", 0)));
+        assertThat(chosen(robot)).isEqualTo(new LinkPart.Element(Site.ALICE, 2));
+        robot.interact(() -> edited.design().undo());
+        assertThat(chosen(robot)).isEqualTo(new LinkPart.Element(Site.ALICE, 1));
+        robot.interact(() -> edited.design().edit("removed", ElementEdits.remove("alice", 0)));
+        assertThat(chosen(robot)).isEqualTo(new LinkPart.Element(Site.ALICE, 0));
+        assertThat(edited.design().selectionProperty().get()).isEqualTo(chosen(robot));
+    }
+
+    @Test
+    void aLongNumberIsSeenAsAWhole(FxRobot robot) {
+        type(robot, "#form-alice-detectors-0-dead-time-ns", "54774.86");
+        TextField field = robot.lookup("#form-alice-detectors-0-dead-time-ns").queryAs(TextField.class);
+        Text shown = (Text) field.lookup(".text");
+        assertThat(shown.getText()).isEqualTo("54774.86");
+        assertThat(shown.getLayoutBounds().getWidth())
+                .isPositive()
+                .isLessThan(field.getWidth()
+                        - field.getInsets().getLeft()
+                        - field.getInsets().getRight());
+    }
+
+    @Test
+    void theSourcesOfAClassUnfoldWithItsField(FxRobot robot) {
+        TitledPane sources = robot.lookup("#form-class-sources").queryAs(TitledPane.class);
+        robot.interact(() -> robot.lookup(EFFICIENCY).queryAs(TextField.class).requestFocus());
+        assertThat(sources.isExpanded()).isFalse();
+        robot.interact(() -> robot.lookup("#form-alice-detectors-0-class")
+                .queryAs(ComboBox.class)
+                .requestFocus());
+        assertThat(sources.isExpanded()).isTrue();
+    }
+
+    /** Five lines of 12 px with the usual leading are 85 px; the source is a field of its own. */
+    @Test
+    void theExplanationTakesWhatItNeeds(FxRobot robot) {
+        robot.interact(() -> robot.lookup(EFFICIENCY).queryAs(TextField.class).requestFocus());
+        double needed = robot.lookup(".form-explanation").queryAs(Region.class).getHeight();
+        assertThat(needed).isBetween(40.0, 105.0);
+        robot.moveTo("#form-part");
+        robot.interact(() -> edited.select(new LinkPart.Promise()));
+        robot.interact(() -> robot.lookup("#form-part").query().requestFocus());
+        assertThat(robot.lookup(".form-explanation").queryAs(Region.class).getHeight())
+                .isLessThan(needed);
     }
 
     @Test

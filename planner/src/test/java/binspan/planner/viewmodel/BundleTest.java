@@ -27,7 +27,7 @@ class BundleTest {
     private static final int MOST_INSERTS = 10;
     /** What the code itself puts behind a name that it is given. */
     private static final List<String> ENDINGS =
-            List.of("", ".done", ".keys", ".tip", ".hint", ".what", ".name", ".question", ".answer", ".notes", ".all");
+            List.of("", ".keys", ".tip", ".hint", ".what", ".name", ".question", ".answer", ".notes", ".all", ".done");
 
     private static final ResourceBundle BUNDLE = ResourceBundle.getBundle("binspan.planner.view.words", Locale.ROOT);
     private static final List<String> SOURCES = Stream.of("view", "viewmodel")

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import binspan.planner.document.Change;
 import binspan.planner.document.EditProblem;
+import binspan.planner.document.ElementEdits;
 import binspan.planner.document.ScenarioDocument;
 import binspan.scenario.ParameterPaths;
 import binspan.scenario.Scenario;
@@ -108,7 +109,7 @@ class DesignTest {
     }
 
     @Test
-    void selectionOfWhatHasGoneFallsBackToThePlan() {
+    void selectionOfWhatHasGoneFallsBackToItsNeighbour() {
         int last = design.scenario().alice().path().size() - 1;
         LinkPart gone = new LinkPart.Element(Site.ALICE, last);
         LinkPart stays = new LinkPart.Element(Site.ALICE, last - 1);
@@ -118,10 +119,36 @@ class DesignTest {
         design.undo();
         design.selectionProperty().set(gone);
         design.redo();
-        assertThat(design.selectionProperty().get()).isEqualTo(new LinkPart.Plan());
+        assertThat(design.selectionProperty().get()).isEqualTo(stays);
         design.selectionProperty().set(new LinkPart.Port(Site.BOB, 1));
         design.edit("removed", List.of(new Change.Delete("bob.detectors", 1)));
-        assertThat(design.selectionProperty().get()).isEqualTo(new LinkPart.Plan());
+        assertThat(design.selectionProperty().get()).isEqualTo(new LinkPart.Port(Site.BOB, 0));
+    }
+
+    private String selected() {
+        LinkPart.Element element = (LinkPart.Element) design.selectionProperty().get();
+        return design.scenario().alice().path().get(element.index()).label().orElseThrow();
+    }
+
+    @Test
+    void selectionStaysOnItsElementWhereverItMoves() {
+        design.selectionProperty().set(new LinkPart.Element(Site.ALICE, 1));
+        design.edit("added", ElementEdits.add(design.scenario(), "alice", "loss", 0));
+        assertThat(selected()).isEqualTo("upper duct");
+        assertThat(design.selectionProperty().get()).isEqualTo(new LinkPart.Element(Site.ALICE, 2));
+        design.undo();
+        assertThat(selected()).isEqualTo("upper duct");
+        design.redo();
+        assertThat(selected()).isEqualTo("upper duct");
+        design.edit("moved", ElementEdits.move("alice", 2, 0));
+        assertThat(selected()).isEqualTo("upper duct");
+        design.edit("length", List.of(new Change.Put("alice.path[0].lengthKm", 20.0)));
+        assertThat(selected()).isEqualTo("upper duct");
+        design.undo();
+        design.undo();
+        assertThat(design.selectionProperty().get()).isEqualTo(new LinkPart.Element(Site.ALICE, 2));
+        design.edit("renamed", List.of(new Change.Put("alice.path[2].label", "duct")));
+        assertThat(selected()).isEqualTo("duct");
     }
 
     /** Whoever hears of another scenario must find what belongs to it. */

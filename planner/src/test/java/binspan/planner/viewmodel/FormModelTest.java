@@ -3,6 +3,7 @@ package binspan.planner.viewmodel;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import binspan.planner.document.Change;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.ScenarioReader;
 import binspan.scenario.Content;
@@ -10,6 +11,7 @@ import binspan.scenario.Detector;
 import binspan.scenario.Field;
 import binspan.scenario.ScenarioSections;
 import binspan.scenario.Section;
+import java.util.List;
 import java.util.Set;
 import java.util.TreeSet;
 import org.junit.jupiter.api.Test;
@@ -312,10 +314,104 @@ class FormModelTest {
         length.slide(0.6);
         length.slide(0.75);
         length.settle();
-        assertThat(length.valueProperty().get()).isCloseTo(30.2 * Math.sqrt(20.0), within(1.0));
+        assertThat(length.valueProperty().get()).isCloseTo(30.2 * Math.sqrt(4.0), within(0.5));
         assertThat(length.sliderProperty().get()).isEqualTo(scale);
         form.design().undo();
         assertThat(form.text()).isEqualTo(before);
+    }
+
+    /** The middle of a stretch of equal factors is the geometric mean of its ends. */
+    @Test
+    void theSliderComesBackToTheValueAfterAFarOne() {
+        EditedForm form = new EditedForm(KESTREL).select(DUCT);
+        FieldModel length = form.field("alice.path[1].lengthKm");
+        length.textProperty().set("900");
+        length.settle();
+        assertThat(length.sliderProperty().get().covers(900.0)).isTrue();
+        form.design().undo();
+        SliderScale scale = length.sliderProperty().get();
+        assertThat(Math.sqrt(scale.lowest() * scale.highest())).isCloseTo(30.2, within(1e-6));
+        assertThat(scale.highest() / scale.lowest()).isCloseTo(16.0, within(1e-6));
+        length.slide(1.0);
+        assertThat(length.sliderProperty().get()).as("while it is moved").isEqualTo(scale);
+        length.settle();
+        assertThat(length.sliderProperty().get().highest()).isGreaterThan(scale.highest());
+    }
+
+    @Test
+    void everySliderCoversItsValue() {
+        int sliders = 0;
+        for (String name : EditedForm.SHIPPED) {
+            EditedForm form = new EditedForm(name);
+            for (LinkPart part : form.form().parts()) {
+                for (FieldModel field : form.select(part).fields()) {
+                    SliderScale scale = field.sliderProperty().get();
+                    if (scale != null) {
+                        sliders++;
+                        double value = field.valueProperty().get();
+                        assertThat(scale.covers(value)).as(field.path()).isTrue();
+                        assertThat(scale.value(scale.position(value)))
+                                .as(field.path())
+                                .isCloseTo(value, within(0.01 * (scale.highest() - scale.lowest())));
+                    }
+                }
+            }
+        }
+        assertThat(sliders).isGreaterThan(200);
+    }
+
+    @Test
+    void aRefusedEntryGoesWhenItsValueIsUndoneOrChangedElsewhere() {
+        EditedForm form = new EditedForm(KESTREL).select(DUCT);
+        FieldModel length = form.field("alice.path[1].lengthKm");
+        length.textProperty().set("35");
+        length.textProperty().set("35x");
+        length.settle();
+        assertThat(length.textProperty().get()).isEqualTo("35x");
+        form.design().undo();
+        assertThat(length.textProperty().get()).isEqualTo("30.2");
+        assertThat(length.errorProperty().get()).isEmpty();
+        length.textProperty().set("x");
+        form.design().edit("elsewhere", List.of(new Change.Put("alice.path[1].lengthKm", 12.0)));
+        assertThat(length.textProperty().get()).isEqualTo("12");
+        assertThat(length.errorProperty().get()).isEmpty();
+        length.textProperty().set("y");
+        form.design().undo();
+        assertThat(length.textProperty().get()).isEqualTo("30.2");
+    }
+
+    @Test
+    void aRefusedEntryIsToldWithItsPlace() {
+        EditedForm form = new EditedForm(KESTREL).select(DUCT);
+        assertThat(form.form().refused()).isEmpty();
+        FieldModel length = form.field("alice.path[1].lengthKm");
+        length.textProperty().set("9000");
+        assertThat(form.form().refused())
+                .contains(new FormModel.RefusedEntry(
+                        "alice: upper duct (fibre)",
+                        "alice.path.upper duct.lengthKm",
+                        "9000",
+                        length.errorProperty().get()));
+        length.takeBack();
+        assertThat(form.form().refused()).isEmpty();
+    }
+
+    /** The worksheet computes the loss from these fields only where no measured loss stands. */
+    @Test
+    void aMeasuredLossStopsWhatItReplacesWithoutMovingTheRows() {
+        EditedForm form = new EditedForm(KESTREL).select(DUCT);
+        FieldModel splices = form.field("alice.path[1].splices");
+        FieldModel measured = form.field("alice.path[1].measuredLossDb");
+        assertThat(splices.withoutEffect()).isEqualTo("measured loss stands");
+        assertThat(form.field("alice.path[1].dispersionPsPerNmKm").withoutEffect())
+                .isEmpty();
+        assertThat(form.field("alice.path[1].lengthKm").remark()).contains("stays as it is");
+        measured.textProperty().set("");
+        assertThat(form.field("alice.path[1].splices")).isSameAs(splices);
+        assertThat(splices.withoutEffect()).isEmpty();
+        assertThat(form.field("alice.path[1].lengthKm").remark()).isEmpty();
+        measured.textProperty().set("6");
+        assertThat(splices.withoutEffect()).isNotEmpty();
     }
 
     @Test
