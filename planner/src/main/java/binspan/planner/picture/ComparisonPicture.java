@@ -92,8 +92,7 @@ public final class ComparisonPicture {
     }
 
     /** The requirement, where all links state the same. */
-    private static Optional<RequirementLine> line(
-            List<Comparison.Entry> entries, Requirement requirement) {
+    private static Optional<RequirementLine> line(List<Comparison.Entry> entries, Requirement requirement) {
         if (requirement == null) {
             return Optional.empty();
         }

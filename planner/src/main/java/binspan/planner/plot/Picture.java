@@ -47,8 +47,7 @@ public record Picture(String title, String subtitle, Panel content) {
         }
         JFreeChart chart = PageFrame.page(
                 this, PanelGrid.alone(panel), legend(panel, theme).values(), theme);
-        return new PanelChart(
-                chart, panel.legend(), room.wide(NARROWEST), room.high(MAP_HEIGHT), panel.leftOut());
+        return new PanelChart(chart, panel.legend(), room.wide(NARROWEST), room.high(MAP_HEIGHT), panel.leftOut());
     }
 
     private static Room within(Room room, double around) {

@@ -134,7 +134,9 @@ final class RankedBarsChart {
     }
 
     private RequirementLine told(RequirementLine requirement) {
-        return Words.length(requirement.label(), PlotStyle.TICK) < LABEL_SHARE * panelWidth() ? requirement : requirement.brief();
+        return Words.length(requirement.label(), PlotStyle.TICK) < LABEL_SHARE * panelWidth()
+                ? requirement
+                : requirement.brief();
     }
 
     /** Which of the bars that are drawn is filled. */

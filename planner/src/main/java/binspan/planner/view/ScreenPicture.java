@@ -40,7 +40,8 @@ record ScreenPicture(Dimension2D place, boolean whole, double em, double sharpne
         int wanted = whole && crowded ? bare.fullHeight(points) : bare.leastHeight(points);
         double high = Math.max(place.getHeight(), scale * wanted);
         PlotTheme colours = theme == Theme.DARK ? PlotTheme.DARK : PlotTheme.LIGHT;
-        Image image = FxImages.of(PictureImage.of(bare, colours, pixels(place.getWidth()), pixels(high), scale * sharpness));
+        Image image =
+                FxImages.of(PictureImage.of(bare, colours, pixels(place.getWidth()), pixels(high), scale * sharpness));
         return new Drawn(image, place.getWidth(), high, picture.subtitle(), crowded);
     }
 

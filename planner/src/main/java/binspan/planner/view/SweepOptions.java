@@ -10,8 +10,8 @@ import binspan.study.FigureColumn;
 import binspan.study.window.OperatingWindow;
 import java.util.List;
 import java.util.Locale;
-import javafx.beans.binding.BooleanBinding;
 import javafx.beans.binding.Bindings;
+import javafx.beans.binding.BooleanBinding;
 import javafx.beans.property.StringProperty;
 import javafx.beans.value.ObservableBooleanValue;
 import javafx.collections.ListChangeListener;
@@ -69,8 +69,8 @@ final class SweepOptions extends VBox {
         ParameterBox box = new ParameterBox("sweep-path-" + number, model.design(), axis.pathProperty(), look);
         box.setOnAction(event -> axis.propose(model.design().scenario()));
         row.with(box);
-        Node range = row.together(row.ends(number, axis.fromProperty(), axis.toProperty(), NUMBER)
-                .toArray(Node[]::new));
+        Node range = row.together(
+                row.ends(number, axis.fromProperty(), axis.toProperty(), NUMBER).toArray(Node[]::new));
         CheckBox logarithmic = row.tick("log", axis.logarithmicProperty());
         logarithmic.setId("sweep-log-" + number);
         return List.of(box, range, row.together(steps(row, number, axis.stepsProperty()), logarithmic));

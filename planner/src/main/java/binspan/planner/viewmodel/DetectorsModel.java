@@ -71,7 +71,8 @@ public final class DetectorsModel extends StudyModel<List<Comparison.Entry>> {
         }
         switch (kind.get()) {
             case DETECTORS -> detectors(scenario, options);
-            case FIBRES -> fibreClasses.stream().sorted().forEach(each -> options.add(LinkOptions.fibre(scenario, each)));
+            case FIBRES ->
+                fibreClasses.stream().sorted().forEach(each -> options.add(LinkOptions.fibre(scenario, each)));
             case WITHOUT ->
                 labels(scenario).stream()
                         .filter(leftOut::contains)

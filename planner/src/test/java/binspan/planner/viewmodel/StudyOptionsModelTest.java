@@ -213,7 +213,8 @@ final class StudyOptionsModelTest {
         sweep.first().stepsProperty().set("3");
         sweep.second().stepsProperty().set("4");
         sweep.start();
-        assertThat(StudyFiles.csvText(sweep.run().resultProperty().get().report()).lines())
+        assertThat(StudyFiles.csvText(sweep.run().resultProperty().get().report())
+                        .lines())
                 .hasSize(13);
         sweep.second().pathProperty().set(WINDOW);
         assertThat(sweep.problemProperty().get()).isEqualTo(WINDOW + ": found twice; allowed once");
@@ -259,9 +260,9 @@ final class StudyOptionsModelTest {
         detectors.leftOut().add(label);
         detectors.start();
         var entries = detectors.run().resultProperty().get().found();
-        assertThat(entries).singleElement().satisfies(entry -> assertThat(
-                        entry.option().name())
-                .isEqualTo("without " + label));
+        assertThat(entries)
+                .singleElement()
+                .satisfies(entry -> assertThat(entry.option().name()).isEqualTo("without " + label));
         assertThat(detectors.apply(entries.get(0))).isTrue();
         assertThat(elements(design.scenario())).isLessThan(elements);
         assertThat(DetectorsModel.labels(design.scenario())).doesNotContain(label);
