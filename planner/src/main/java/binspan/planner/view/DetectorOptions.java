@@ -28,7 +28,7 @@ final class DetectorOptions extends VBox {
                 "kind",
                 model.kindProperty(),
                 List.of(Kind.values()),
-                kind -> Words.of("studies.compare." + kind.name().toLowerCase(Locale.ROOT)));
+                kind -> Words.of("studies.compare.kind." + kind.name().toLowerCase(Locale.ROOT)));
         row.check("present", model.presentProperty());
         CheckBox mixed = row.check("mixed", model.mixedProperty());
         mixed.visibleProperty().bind(model.kindProperty().isEqualTo(Kind.DETECTORS));
