@@ -6,6 +6,7 @@ import binspan.planner.export.StudyReport;
 import binspan.planner.export.WindowReport;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.OutputFileException;
+import binspan.planner.report.MissWords;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.box.OperatingBox;
@@ -52,7 +53,6 @@ import picocli.CommandLine.Option;
 final class WindowCommand implements Callable<Integer> {
     private static final int SCAN = OperatingWindow.FEWEST_SAMPLES;
     private static final int MAP = OperatingRegion.USUAL_STEPS;
-    private static final String NOWHERE = "nowhere in these ranges do all requirements hold";
 
     private final Console console;
 
@@ -96,7 +96,7 @@ final class WindowCommand implements Callable<Integer> {
         OperatingWindow window = UsageException.unless("--vary", () -> new OperatingWindow(scenario, axes.get(0)));
         OperatingIntervals found = ProgressBar.during(console, window::run);
         if (found.windows().isEmpty()) {
-            throw NoFeasiblePoint.of(NOWHERE, axes, found.nearest().orElseThrow());
+            throw UsageException.of(MissWords.nowhere(axes, found.nearest().orElseThrow()));
         }
         return WindowReport.of(scenario, found);
     }
@@ -106,7 +106,7 @@ final class WindowCommand implements Callable<Integer> {
                 UsageException.unless("--vary", () -> new OperatingRegion(scenario, axes.get(0), axes.get(1)));
         RegionMap map = ProgressBar.during(console, region::run);
         if (map.nearest().isPresent()) {
-            throw NoFeasiblePoint.of(NOWHERE, axes, map.nearest().get());
+            throw UsageException.of(MissWords.nowhere(axes, map.nearest().get()));
         }
         return RegionReport.of(scenario, map);
     }
@@ -117,7 +117,7 @@ final class WindowCommand implements Callable<Integer> {
                 "--vary", () -> new ToleranceBox(scenario, axes, sense, centred, ToleranceBox.USUAL_SEED));
         OperatingBox found = ProgressBar.during(console, question::run);
         if (!found.found()) {
-            throw NoFeasiblePoint.of(NOWHERE, axes, found.nearest().orElseThrow());
+            throw UsageException.of(MissWords.nowhere(axes, found.nearest().orElseThrow()));
         }
         return BoxReport.of(scenario, found);
     }

@@ -68,6 +68,18 @@ public record Picture(String title, String subtitle, Panel content) {
     }
 
     /**
+     * The height in which one panel can be read with the legend of all.
+     *
+     * @param width width in points
+     * @return height in points
+     */
+    public int leastHeight(int width) {
+        PanelChart panel = content.chart(PlotTheme.LIGHT, within(new Room(width, 1.0), 0.0));
+        double around = PageFrame.height(this, legend(panel, PlotTheme.LIGHT).values(), PlotTheme.LIGHT, width);
+        return (int) Math.ceil(content.least().height() + around);
+    }
+
+    /**
      * How many panels have no room in a size.
      *
      * @param width width in points

@@ -17,6 +17,9 @@ import org.jfree.data.xy.XYIntervalSeries;
 
 /** Puts ranked bars into panels that share their labels. */
 final class RankedBarsChart {
+    /** Share of a panel's width that words above it may take, for they may stand at its edge. */
+    private static final double LABEL_SHARE = 0.7;
+
     private static final int LABEL_MARGIN = 40;
     private static final int MOST_LABEL_WIDTH = 460;
     private static final int LETTER_WIDTH = 8;
@@ -131,7 +134,9 @@ final class RankedBarsChart {
     }
 
     private RequirementLine told(RequirementLine requirement) {
-        return Words.length(requirement.label(), PlotStyle.TICK) < panelWidth() ? requirement : requirement.brief();
+        return Words.length(requirement.label(), PlotStyle.TICK) < LABEL_SHARE * panelWidth()
+                ? requirement
+                : requirement.brief();
     }
 
     /** Which of the bars that are drawn is filled. */

@@ -46,6 +46,11 @@ public final class MissWords {
         return what + "; at the nearest point " + of(margins, prediction);
     }
 
+    /** That nothing within the ranges of some axes meets the requirements, and how near it comes. */
+    public static String nowhere(List<Axis> axes, PointVerdict nearest) {
+        return "nowhere in these ranges do all requirements hold; nearest at " + at(axes, nearest);
+    }
+
     private static String of(Requirement requirement, double required, double predicted) {
         if (requirement == Requirement.SLOTS) {
             return SlotWords.END;

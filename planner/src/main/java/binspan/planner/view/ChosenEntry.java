@@ -37,6 +37,8 @@ final class ChosenEntry extends HBox {
         apply.disableProperty()
                 .bind(model.run().staleProperty().or(box.valueProperty().isNull()));
         apply.setOnAction(event -> model.apply(box.getValue()));
+        label.setMinWidth(USE_PREF_SIZE);
+        apply.setMinWidth(USE_PREF_SIZE);
         getChildren().addAll(label, box, apply);
         model.run().resultProperty().addListener((source, before, after) -> fill(after.found()));
     }

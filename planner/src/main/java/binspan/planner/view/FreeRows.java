@@ -18,12 +18,11 @@ import javafx.scene.control.Label;
 import javafx.scene.control.Tooltip;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
-import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 
 /** What a search may set: each parameter with a tick and, where there is room, its range; and further ones to add. */
 final class FreeRows extends VBox {
-    private static final double NUMBER = 4.6;
+    private static final double NUMBER = 4.2;
     private static final double NAME = 15.0;
 
     private final String study;
@@ -85,7 +84,6 @@ final class FreeRows extends VBox {
         tick.setWrapText(true);
         tick.setMinHeight(USE_PREF_SIZE);
         look.follow(() -> tick.setPrefWidth(look.em(NAME)));
-        GridPane.setHgrow(tick, Priority.SOMETIMES);
         OptionRow maker = new OptionRow(study, look);
         CheckBox log = maker.tick("log", axis.logarithmicProperty());
         log.setId(study + "-log-" + index);

@@ -109,7 +109,7 @@ final class OptionRow extends FlowPane {
         TextField upper = field("to", to, ems);
         lower.setId(study + "-from-" + number);
         upper.setId(study + "-to-" + number);
-        Label until = new Label(word("to"));
+        Label until = new Label(Words.of("studies.to"));
         until.setMinWidth(Region.USE_PREF_SIZE);
         return List.of(lower, until, upper);
     }

@@ -11,7 +11,7 @@ import javafx.scene.image.Image;
  *
  * @param place which it fills
  * @param whole whether all panels are drawn, if it must be higher than the place for them; otherwise those that have no
- *     room are left out
+ *     room are left out, down to one
  * @param em size of ordinary text
  * @param sharpness pixels of the screen for each of these lengths
  * @param theme light or dark
@@ -37,8 +37,8 @@ record ScreenPicture(Dimension2D place, boolean whole, double em, double sharpne
         Picture bare = picture.untitled();
         int points = (int) Math.floor(place.getWidth() / scale);
         boolean crowded = bare.leftOut(points, (int) Math.floor(place.getHeight() / scale)) > 0;
-        double high =
-                whole && crowded ? Math.max(place.getHeight(), scale * bare.fullHeight(points)) : place.getHeight();
+        int wanted = whole && crowded ? bare.fullHeight(points) : bare.leastHeight(points);
+        double high = Math.max(place.getHeight(), scale * wanted);
         PlotTheme colours = theme == Theme.DARK ? PlotTheme.DARK : PlotTheme.LIGHT;
         Image image =
                 FxImages.of(PictureImage.of(bare, colours, pixels(place.getWidth()), pixels(high), scale * sharpness));

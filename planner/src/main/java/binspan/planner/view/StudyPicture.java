@@ -10,6 +10,7 @@ import javafx.geometry.Pos;
 import javafx.scene.AccessibleRole;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
+import javafx.scene.control.Tooltip;
 import javafx.scene.image.Image;
 import javafx.scene.image.ImageView;
 import javafx.scene.layout.BorderPane;
@@ -38,7 +39,9 @@ final class StudyPicture extends BorderPane {
         this.drawing = LatestTask.quick(background);
         getStyleClass().add("study-picture");
         words.getStyleClass().add("soft");
-        words.setWrapText(true);
+        Tooltip whole = new Tooltip();
+        whole.textProperty().bind(words.textProperty());
+        words.setTooltip(whole);
         words.setMaxWidth(Double.MAX_VALUE);
         HBox.setHgrow(words, Priority.ALWAYS);
         fit = new FitChoice(study);
@@ -68,6 +71,7 @@ final class StudyPicture extends BorderPane {
         picture = another;
         scroll.setAccessibleText(title);
         view.setImage(null);
+        words.setWrapText(false);
         fit.setNeeded(false);
         words.setText(Words.of(another == null ? "studies.picture.none" : "studies.drawing"));
         draw();
@@ -109,6 +113,7 @@ final class StudyPicture extends BorderPane {
     }
 
     private void refuse(RuntimeException failure) {
+        words.setWrapText(true);
         words.setText(Words.of("studies.failed", failure.toString()));
     }
 }

@@ -3,11 +3,15 @@ package binspan.planner.view;
 import binspan.planner.export.StudyDefaults;
 import binspan.planner.report.FigureWords;
 import binspan.planner.viewmodel.SweepModel;
+import binspan.planner.viewmodel.SweepModel.Kind;
 import binspan.planner.viewmodel.Words;
 import binspan.planner.viewmodel.WrittenAxis;
 import binspan.study.FigureColumn;
+import binspan.study.window.OperatingWindow;
 import java.util.List;
+import java.util.Locale;
 import javafx.beans.binding.Bindings;
+import javafx.beans.binding.BooleanBinding;
 import javafx.beans.property.StringProperty;
 import javafx.beans.value.ObservableBooleanValue;
 import javafx.collections.ListChangeListener;
@@ -22,7 +26,7 @@ import javafx.scene.layout.VBox;
 /** What the sweep varies and shows. */
 final class SweepOptions extends VBox {
     private static final double NUMBER = 4.6;
-    private static final double COUNT = 3.4;
+    private static final double COUNT = 4.0;
 
     private final SweepModel model;
     private final Look look;
@@ -31,12 +35,29 @@ final class SweepOptions extends VBox {
         this.model = model;
         this.look = look;
         OptionRow row = new OptionRow(model.name(), look);
+        row.choice(
+                "kind",
+                model.kindProperty(),
+                List.of(Kind.values()),
+                kind -> Words.of("studies.sweep.kind." + kind.name().toLowerCase(Locale.ROOT)));
         axis(row, "1", model.first());
-        row.check("second", model.second().usedProperty());
-        axis(row, "2", model.second())
-                .forEach(each -> onlyIf(each, model.second().usedProperty()));
-        row.with(figures());
+        onlyIf(row.check("second", model.second().usedProperty()), sweeps());
+        BooleanBinding both = sweeps().and(model.second().usedProperty());
+        axis(row, "2", model.second()).forEach(each -> onlyIf(each, both));
+        MenuButton figures = figures();
+        onlyIf(figures, sweeps());
+        row.with(figures);
         getChildren().add(row);
+    }
+
+    private BooleanBinding sweeps() {
+        return model.kindProperty().isEqualTo(Kind.SWEEP);
+    }
+
+    private String usualSteps() {
+        boolean window = model.kindProperty().get() == Kind.WINDOW;
+        int both = model.second().usedProperty().get() ? 1 : 0;
+        return Integer.toString(window ? OperatingWindow.FEWEST_SAMPLES : StudyDefaults.SWEEP_STEPS.get(both));
     }
 
     private static void onlyIf(Node node, ObservableBooleanValue wanted) {
@@ -59,9 +80,7 @@ final class SweepOptions extends VBox {
         TextField field = row.field("steps", value, COUNT);
         field.promptTextProperty()
                 .bind(Bindings.createStringBinding(
-                        () -> Integer.toString(StudyDefaults.SWEEP_STEPS.get(
-                                model.second().usedProperty().get() ? 1 : 0)),
-                        model.second().usedProperty()));
+                        this::usualSteps, model.second().usedProperty(), model.kindProperty()));
         Node pair = row.labelled("steps", field);
         field.setId("sweep-steps-" + number);
         return pair;

@@ -15,6 +15,7 @@ import binspan.study.tuning.Objective;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Function;
+import java.util.stream.Stream;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleBooleanProperty;
@@ -22,9 +23,10 @@ import javafx.beans.property.SimpleObjectProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableSet;
 
-/** Which detectors or fibres serve the link best. */
+/** Which detectors or fibres serve the link best, or what an element of its path costs. */
 public final class DetectorsModel extends StudyModel<List<Comparison.Entry>> {
-    private final BooleanProperty fibres = new SimpleBooleanProperty(this, "fibres", false);
+    private final ObjectProperty<Kind> kind = new SimpleObjectProperty<>(this, "kind", Kind.DETECTORS);
+    private final ObservableSet<String> leftOut = FXCollections.observableSet();
     private final ObservableSet<DetectorClass> detectorClasses =
             FXCollections.observableSet(DetectorClass.SNSPD, DetectorClass.INGAAS_FREE_RUNNING);
     private final ObservableSet<FibreClass> fibreClasses =
@@ -34,10 +36,17 @@ public final class DetectorsModel extends StudyModel<List<Comparison.Entry>> {
     private final BooleanProperty retuned = new SimpleBooleanProperty(this, "retuned", true);
     private final ObjectProperty<Aim> aim = new SimpleObjectProperty<>(this, "aim", Aim.USUAL);
 
+    /** What is exchanged. */
+    public enum Kind {
+        DETECTORS,
+        FIBRES,
+        WITHOUT
+    }
+
     /** The study of a link, not run yet. */
     public DetectorsModel(Design design, Background background) {
         super("compare", design, background);
-        follow(fibres, detectorClasses, fibreClasses, present, mixed, retuned, aim);
+        follow(kind, detectorClasses, fibreClasses, leftOut, present, mixed, retuned, aim);
         followDesign(this::check);
         check();
     }
@@ -60,15 +69,28 @@ public final class DetectorsModel extends StudyModel<List<Comparison.Entry>> {
         if (present.get()) {
             options.add(LinkOption.of(Words.of("studies.compare.present"), scenario));
         }
-        if (fibres.get()) {
-            fibreClasses.stream().sorted().forEach(fibre -> options.add(LinkOptions.fibre(scenario, fibre)));
-        } else {
-            detectors(scenario, options);
+        switch (kind.get()) {
+            case DETECTORS -> detectors(scenario, options);
+            case FIBRES ->
+                fibreClasses.stream().sorted().forEach(each -> options.add(LinkOptions.fibre(scenario, each)));
+            case WITHOUT ->
+                labels(scenario).stream()
+                        .filter(leftOut::contains)
+                        .forEach(label -> options.add(LinkOptions.without(scenario, label)));
         }
         if (options.isEmpty()) {
             throw new IllegalArgumentException(Words.of("studies.compare.nothing"));
         }
         return options;
+    }
+
+    /** Labels of the elements of both paths, each once. */
+    public static List<String> labels(Scenario scenario) {
+        return Stream.of(scenario.alice(), scenario.bob())
+                .flatMap(arm -> arm.path().stream())
+                .flatMap(element -> element.label().stream())
+                .distinct()
+                .toList();
     }
 
     private void detectors(Scenario scenario, List<LinkOption> options) {
@@ -92,20 +114,28 @@ public final class DetectorsModel extends StudyModel<List<Comparison.Entry>> {
             return false;
         }
         Scenario chosen = entry.prediction().scenario();
-        return design().change(change(entry.option().name()), null, scenario -> chosen);
+        return design().change(change(entry.option().name(), design().scenario()), null, scenario -> chosen);
     }
 
-    private static String change(String option) {
+    private static String change(String option, Scenario scenario) {
         if (option.equals(Words.of("studies.compare.present"))) {
             return Words.of("studies.compare.change.written");
+        }
+        if (labels(scenario).stream().anyMatch(label -> option.equals("without " + label))) {
+            return option;
         }
         boolean fibre = Choice.texts(FibreClass.class).contains(option);
         return Words.of(fibre ? "studies.compare.change.fibres" : "studies.compare.change", option);
     }
 
-    /** Whether fibres are compared instead of detectors. */
-    public BooleanProperty fibresProperty() {
-        return fibres;
+    /** What is exchanged. */
+    public ObjectProperty<Kind> kindProperty() {
+        return kind;
+    }
+
+    /** Labels of the elements that are left out, one in each link. */
+    public ObservableSet<String> leftOut() {
+        return leftOut;
     }
 
     /** Detector classes to compare. */

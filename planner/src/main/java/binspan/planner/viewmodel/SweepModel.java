@@ -2,6 +2,8 @@ package binspan.planner.viewmodel;
 
 import binspan.planner.export.StudyDefaults;
 import binspan.planner.export.SweepReport;
+import binspan.planner.export.WindowReport;
+import binspan.planner.report.MissWords;
 import binspan.scenario.Scenario;
 import binspan.study.Axis;
 import binspan.study.Execution;
@@ -9,14 +11,19 @@ import binspan.study.FigureColumn;
 import binspan.study.FigureColumns;
 import binspan.study.StudyTable;
 import binspan.study.Sweep;
+import binspan.study.window.OperatingIntervals;
+import binspan.study.window.OperatingWindow;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Function;
+import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.SimpleObjectProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
 
-/** The figures of merit along one or two parameters. */
-public final class SweepModel extends StudyModel<StudyTable> {
+/** The figures of merit along one or two parameters, or the windows of one. */
+public final class SweepModel extends StudyModel<SweepModel.Kind> {
+    private final ObjectProperty<Kind> kind = new SimpleObjectProperty<>(this, "kind", Kind.SWEEP);
     private final WrittenAxis first;
     private final WrittenAxis second;
     private final ObservableList<FigureColumn> known = FXCollections.observableArrayList();
@@ -25,6 +32,12 @@ public final class SweepModel extends StudyModel<StudyTable> {
 
     private final ObservableList<FigureColumn> shown = FXCollections.observableArrayList();
 
+    /** What is sought. */
+    public enum Kind {
+        SWEEP,
+        WINDOW
+    }
+
     /** The study of a link, not run yet: along the width of the window. */
     public SweepModel(Design design, Background background) {
         super("sweep", design, background);
@@ -32,6 +45,7 @@ public final class SweepModel extends StudyModel<StudyTable> {
         first = new WrittenAxis(scenario, "timing.windowWidthPs");
         second = new WrittenAxis(scenario, scenario.pulsed() ? "source.meanPairsPerCycle" : "source.pairRatePerSecond");
         second.usedProperty().set(false);
+        follow(kind);
         follow(first.parts());
         follow(second.parts());
         follow(shown);
@@ -46,7 +60,24 @@ public final class SweepModel extends StudyModel<StudyTable> {
     }
 
     @Override
-    Function<Execution, StudyRun.Result<StudyTable>> work(Scenario scenario) {
+    Function<Execution, StudyRun.Result<Kind>> work(Scenario scenario) {
+        return kind.get() == Kind.WINDOW ? window(scenario) : sweep(scenario);
+    }
+
+    private Function<Execution, StudyRun.Result<Kind>> window(Scenario scenario) {
+        Axis axis = first.axis(scenario, OperatingWindow.FEWEST_SAMPLES);
+        OperatingWindow window = new OperatingWindow(scenario, axis);
+        return execution -> {
+            OperatingIntervals found = window.run(execution);
+            if (found.windows().isEmpty()) {
+                throw new IllegalArgumentException(
+                        MissWords.nowhere(List.of(axis), found.nearest().orElseThrow()));
+            }
+            return new StudyRun.Result<>(WindowReport.of(scenario, found), Kind.WINDOW);
+        };
+    }
+
+    private Function<Execution, StudyRun.Result<Kind>> sweep(Scenario scenario) {
         int steps = StudyDefaults.SWEEP_STEPS.get(second.usedProperty().get() ? 1 : 0);
         List<Axis> axes = new ArrayList<>(List.of(first.axis(scenario, steps)));
         if (second.usedProperty().get()) {
@@ -58,7 +89,7 @@ public final class SweepModel extends StudyModel<StudyTable> {
             List<FigureColumn> asked = names.isEmpty() ? List.of() : FigureColumns.named(scenario, names);
             Sweep sweep = new Sweep(scenario, axes, SweepReport.computed(scenario, asked));
             StudyTable table = sweep.run(execution);
-            return new StudyRun.Result<>(SweepReport.of(sweep, table, asked), table);
+            return new StudyRun.Result<>(SweepReport.of(sweep, table, asked), Kind.SWEEP);
         };
     }
 
@@ -76,6 +107,11 @@ public final class SweepModel extends StudyModel<StudyTable> {
             known.setAll(found);
             shown.retainAll(found);
         }
+    }
+
+    /** What is sought; for the windows the first parameter counts alone. */
+    public ObjectProperty<Kind> kindProperty() {
+        return kind;
     }
 
     /** The first parameter, always used. */

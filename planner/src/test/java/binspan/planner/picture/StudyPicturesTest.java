@@ -76,7 +76,7 @@ final class StudyPicturesTest {
                 .contains("Operating windows", "Kestrel Dam to Millbrook; everything else as written")
                 .contains("Window width (ps)", "Raw visibility", "CHSH S", "Phase-basis error rate")
                 .contains("Time-basis error rate", "Secret key rate (bit/s)", "Time to the first key (s)")
-                .contains("required \u2265 0.88", "required \u2264 0.05", "required \u2265 1000 bit/s")
+                .contains("required \u2265 0.88", "required \u2264 5 %", "required \u2265 1.00 kbit/s")
                 .contains("as written", "all requirements met", "failing side of a requirement");
         Curves curves = (Curves) picture.content();
         assertThat(curves.panels()).hasSize(6);
@@ -173,7 +173,7 @@ final class StudyPicturesTest {
         assertThat(drawn(picture))
                 .contains("Best settings for the secret key rate", "Mean pairs per cycle", "Window width (ps)")
                 .contains("Secret key rate (bit/s)", "Raw visibility", "best", "as written", "all requirements met")
-                .contains("required \u2265 1000 bit/s", "required \u2265 0.88");
+                .contains("required \u2265 1.00 kbit/s", "required \u2265 0.88");
         List<Curves> panels = ((PanelGroup) picture.content())
                 .panels().stream().map(Curves.class::cast).toList();
         for (int i = 0; i < 2; i++) {
@@ -240,7 +240,7 @@ final class StudyPicturesTest {
         assertThat(drawn(picture))
                 .contains("Two links", "settings as written; the best stands on top", "G.652.D", "G.654.E")
                 .contains("Secret key rate (bit/s)", "Raw visibility", "Reach of all requirements (km)")
-                .contains("required \u2265 1000 bit/s", "required \u2265 0.88")
+                .contains("required \u2265 1.00 kbit/s", "required \u2265 0.88")
                 .contains("meets the requirements", "does not meet them");
         RankedBars bars = (RankedBars) picture.content();
         assertThat(bars.labels()).containsExactly("G.654.E", "G.652.D");

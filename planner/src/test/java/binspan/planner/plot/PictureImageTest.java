@@ -97,6 +97,16 @@ final class PictureImageTest {
     }
 
     @Test
+    void theLeastHeightShowsAPanelAndTheLegendWithinIt() throws Exception {
+        Picture picture = curves(8);
+        Room room = new Room(300.0, picture.leastHeight(300));
+        assertThat(picture.leftOut(300, picture.leastHeight(300))).isEqualTo(7);
+        assertThat(picture.leftOut(300, picture.fullHeight(300))).isZero();
+        assertThat(TextBoxes.of(picture.chart(PlotTheme.LIGHT, room), room))
+                .allSatisfy(word -> assertThat(word.box().getMaxY()).isLessThanOrEqualTo(room.height()));
+    }
+
+    @Test
     void lowPanelsStandInTwoColumns() throws Exception {
         assertThat(words(curves(6), SMALL)).contains("Figure 0", "Figure 5").noneMatch(word -> word.contains("more"));
     }

@@ -129,7 +129,7 @@ final class PictureTest {
         CurvePanel panel = new CurvePanel(
                 Axis.logarithmic("Key rate", "bit/s"),
                 List.of(SamplePictures.series("key", w -> 0.0)),
-                Optional.of(RequirementLine.of("5 bit/s", 5.0, true)));
+                Optional.of(RequirementLine.of("5\u2009bit/s", 5.0, true)));
         Curves curves = new Curves("", SamplePictures.WINDOW, List.of(panel), List.of(), List.of());
         Histogram histogram =
                 new Histogram("", Axis.linear("Key rate", "bit/s"), List.of(), Optional.empty(), List.of());

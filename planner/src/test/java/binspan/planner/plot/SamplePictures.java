@@ -51,7 +51,7 @@ final class SamplePictures {
         CurvePanel key = new CurvePanel(
                 Axis.logarithmic("Key rate", "bit/s"),
                 List.of(series("deployed fibre", w -> w < 70.0 ? 0.0 : w / 10.0)),
-                Optional.of(RequirementLine.of("20 bit/s", 20.0, true)));
+                Optional.of(RequirementLine.of("20\u2009bit/s", 20.0, true)));
         return new Curves(
                 "",
                 WINDOW,
@@ -83,7 +83,7 @@ final class SamplePictures {
         BarPanel key = new BarPanel(
                 Axis.logarithmic("Key rate", "bit/s"),
                 List.of(new Bar(120.0, true, "120"), new Bar(45.0, false, "45"), new Bar(Double.NaN, false, "no key")),
-                Optional.of(RequirementLine.of("100 bit/s", 100.0, true)));
+                Optional.of(RequirementLine.of("100\u2009bit/s", 100.0, true)));
         BarPanel change = new BarPanel(
                 Axis.linear("Change of visibility", ""),
                 List.of(new Bar(0.01, true, ""), new Bar(-0.02, false, ""), new Bar(0.0, true, "")),

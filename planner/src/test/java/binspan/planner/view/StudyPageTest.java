@@ -233,6 +233,48 @@ final class StudyPageTest {
     }
 
     @Test
+    void parametersStandInWordsAndMayBeWrittenAsPaths() {
+        ParameterBox box = part("sweep-path-1", ParameterBox.class);
+        assertThat(box.getEditor().getText()).isEqualTo("window width (ps)");
+        Shown.onWindowThread(() -> {
+            box.getEditor().setText("source.pump.wavelen");
+            return null;
+        });
+        assertThat(sweep.first().pathProperty().get()).isEqualTo("source.pump.wavelen");
+        assertThat(sweep.problemProperty().get()).isNotEmpty();
+        Shown.onWindowThread(() -> {
+            box.getEditor().setText("source.meanPairsPerCycle");
+            box.commitValue();
+            return null;
+        });
+        assertThat(sweep.first().pathProperty().get()).isEqualTo("source.meanPairsPerCycle");
+        assertThat(box.getEditor().getText()).isEqualTo("mean pairs per cycle");
+        assertThat(sweep.first().toProperty().get()).isEqualTo("0.8");
+    }
+
+    @Test
+    void aPictureFitsItsPlaceUntilAllPanelsAreWanted() throws TimeoutException {
+        Shown.onWindowThread(() -> {
+            stage.setWidth(390.0);
+            stage.setHeight(430.0);
+            return null;
+        });
+        press(KeyCode.ENTER);
+        untilDone(sweep);
+        StudyPicture picture = part("sweep-picture", StudyPicture.class);
+        ToggleButton all = part("sweep-all-panels", ToggleButton.class);
+        until(() -> picture.image() != null && all.getParent().isVisible());
+        double place = picture.getHeight();
+        assertThat(place).isGreaterThan(0.4 * 430.0);
+        assertThat(picture.image().getHeight()).isLessThanOrEqualTo(place);
+        Shown.onWindowThread(() -> {
+            all.fire();
+            return null;
+        });
+        until(() -> picture.image().getHeight() > 1.5 * place);
+    }
+
+    @Test
     void oneOfTheViewsIsAlwaysShown() throws TimeoutException {
         press(KeyCode.ENTER);
         untilDone(sweep);

@@ -3,6 +3,8 @@ package binspan.planner.viewmodel;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import binspan.planner.document.Change;
+import binspan.planner.export.StudyFiles;
+import binspan.planner.export.WindowReport;
 import binspan.planner.io.InvalidScenarioException;
 import binspan.planner.io.ScenarioReader;
 import binspan.planner.viewmodel.StudyRun.State;
@@ -12,6 +14,10 @@ import binspan.scenario.ParameterPaths;
 import binspan.scenario.PumpMode;
 import binspan.scenario.Scenario;
 import binspan.scenario.SpreadShape;
+import binspan.study.Axis;
+import binspan.study.DefaultAxes;
+import binspan.study.Execution;
+import binspan.study.window.OperatingWindow;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 
@@ -192,10 +198,10 @@ final class StudyOptionsModelTest {
     @Test
     void nothingToCompareIsRefused() {
         DetectorsModel detectors = new DetectorsModel(design, Background.NONE);
-        detectors.fibresProperty().set(true);
+        detectors.kindProperty().set(DetectorsModel.Kind.FIBRES);
         detectors.presentProperty().set(false);
         detectors.fibreClasses().clear();
-        assertThat(detectors.problemProperty().get()).isEqualTo("nothing to compare; choose a class");
+        assertThat(detectors.problemProperty().get()).isEqualTo("nothing to compare; choose one");
         detectors.fibreClasses().add(FibreClass.G652D);
         assertThat(detectors.problemProperty().get()).isEmpty();
     }
@@ -207,9 +213,63 @@ final class StudyOptionsModelTest {
         sweep.first().stepsProperty().set("3");
         sweep.second().stepsProperty().set("4");
         sweep.start();
-        assertThat(sweep.run().resultProperty().get().found().rows()).isEqualTo(12);
+        assertThat(StudyFiles.csvText(sweep.run().resultProperty().get().report())
+                        .lines())
+                .hasSize(13);
         sweep.second().pathProperty().set(WINDOW);
         assertThat(sweep.problemProperty().get()).isEqualTo(WINDOW + ": found twice; allowed once");
+    }
+
+    /** Against the study itself, as the command line runs it. */
+    @Test
+    void windowsOfTheFirstParameterAreThoseOfTheCommandLine() {
+        SweepModel sweep = new SweepModel(design, Background.NONE);
+        sweep.second().usedProperty().set(true);
+        sweep.kindProperty().set(SweepModel.Kind.WINDOW);
+        sweep.start();
+        assertThat(sweep.run().failureProperty().get()).isEmpty();
+        Scenario link = design.scenario();
+        Axis usual = DefaultAxes.of(link, ParameterPaths.find(link, WINDOW));
+        Axis axis = new Axis(
+                usual.parameter(), usual.from(), usual.to(), OperatingWindow.FEWEST_SAMPLES, usual.logarithmic());
+        assertThat(StudyFiles.csvText(sweep.run().resultProperty().get().report()))
+                .isEqualTo(StudyFiles.csvText(
+                        WindowReport.of(link, new OperatingWindow(link, axis).run(Execution.SINGLE))));
+    }
+
+    @Test
+    void aRangeWithoutAWindowSaysHowNearItComes() {
+        SweepModel sweep = new SweepModel(design, Background.NONE);
+        sweep.kindProperty().set(SweepModel.Kind.WINDOW);
+        sweep.first().fromProperty().set("20");
+        sweep.first().toProperty().set("40");
+        sweep.start();
+        assertThat(sweep.run().failureProperty().get())
+                .startsWith("nowhere in these ranges do all requirements hold; nearest at " + WINDOW + " 40 ps: the ");
+    }
+
+    @Test
+    void aLinkWithoutAnElementIsComparedAndTakenOver() {
+        DetectorsModel detectors = new DetectorsModel(design, Background.NONE);
+        detectors.kindProperty().set(DetectorsModel.Kind.WITHOUT);
+        detectors.retunedProperty().set(false);
+        detectors.presentProperty().set(false);
+        assertThat(detectors.problemProperty().get()).isEqualTo("nothing to compare; choose one");
+        String label = DetectorsModel.labels(design.scenario()).get(0);
+        int elements = elements(design.scenario());
+        detectors.leftOut().add(label);
+        detectors.start();
+        var entries = detectors.run().resultProperty().get().found();
+        assertThat(entries)
+                .singleElement()
+                .satisfies(entry -> assertThat(entry.option().name()).isEqualTo("without " + label));
+        assertThat(detectors.apply(entries.get(0))).isTrue();
+        assertThat(elements(design.scenario())).isLessThan(elements);
+        assertThat(DetectorsModel.labels(design.scenario())).doesNotContain(label);
+    }
+
+    private static int elements(Scenario scenario) {
+        return scenario.alice().path().size() + scenario.bob().path().size();
     }
 
     private static Design unspread() {
