@@ -121,6 +121,22 @@ public final class Figure {
         return leadingOne ? 1 - exponent : -exponent;
     }
 
+    /** Unit of a difference of ratios in per cent. */
+    static final String POINTS = "percentage points";
+
+    private static final String POINTS_SHORT = "pt";
+
+    /** A difference of two ratios with its sign in percentage points, short: {@code +1.2 pt}. */
+    public static String points(double difference) {
+        return signed(PERCENT * difference, POINTS_SHORT);
+    }
+
+    /** The same with the unit in full; any other figure as it is. */
+    public static String spelt(String figure) {
+        String end = " " + POINTS_SHORT;
+        return figure.endsWith(end) ? figure.substring(0, figure.length() - POINTS_SHORT.length()) + POINTS : figure;
+    }
+
     /** A difference with its sign, two digits and a unit. */
     public static String signed(double value, String unit) {
         String number = Digits.significant(value, 2);

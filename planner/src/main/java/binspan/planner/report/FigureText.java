@@ -5,14 +5,12 @@ import binspan.units.Digits;
 
 /** Figures of merit as a person reads them: rates with prefixes, times in the unit one says aloud, error rates in per cent. */
 public final class FigureText {
-    private static final double PERCENT = 100.0;
-
     private FigureText() {}
 
-    /** A difference of a figure with its sign and unit, error rates in per cent. */
+    /** A difference of a figure with its sign and unit, error rates in percentage points. */
     public static String difference(FigureColumn column, double difference) {
         if (column.field().name().startsWith("qber.")) {
-            return Figure.signed(PERCENT * difference, "%");
+            return Figure.points(difference);
         }
         return switch (column.unit()) {
             case "s" -> (difference < 0.0 ? "-" : "+") + Figure.duration(Math.abs(difference));

@@ -53,6 +53,14 @@ public final class RequirementWords {
         };
     }
 
+    /** The word in place of a figure that there is not. */
+    public static String missing(Requirement requirement) {
+        return switch (requirement) {
+            case FIRST_KEY, FIVE_SIGMA -> "never";
+            default -> "none";
+        };
+    }
+
     /** The required figure as it was stated. */
     public static String required(Requirement requirement, double value) {
         return switch (requirement) {
@@ -79,11 +87,11 @@ public final class RequirementWords {
     }
 
     /**
-     * The predicted figure of tuned settings, "none" where there is none; best settings often meet a requirement exactly, and then it is not told to its
+     * The predicted figure of tuned settings, or that there is none; best settings often meet a requirement exactly, and then it is not told to its
      * last digit.
      */
     public static String tuned(Requirement requirement, double value, double required, boolean met) {
-        return Double.isFinite(value) ? predicted(requirement, value, met ? value : required) : "none";
+        return Double.isFinite(value) ? predicted(requirement, value, met ? value : required) : missing(requirement);
     }
 
     /** How much room is left, with its sign, in the requirement's own unit. */
@@ -96,11 +104,20 @@ public final class RequirementWords {
         };
     }
 
+    /** The same where a bare % could be taken for a share of the figure: error rates in percentage points. */
+    public static String room(Requirement requirement, double margin) {
+        return errorRate(requirement) ? Figure.points(margin) : margin(requirement, margin);
+    }
+
+    private static boolean errorRate(Requirement requirement) {
+        return requirement == Requirement.PHASE_QBER || requirement == Requirement.TIME_QBER;
+    }
+
     /** How much a predicted figure has risen or fallen, with its sign; times in the unit that one says aloud. */
     public static String difference(Requirement requirement, double difference) {
         return switch (requirement) {
             case FIRST_KEY, FIVE_SIGMA -> (difference < 0.0 ? "-" : "+") + Figure.duration(Math.abs(difference) * HOUR);
-            default -> margin(requirement, difference);
+            default -> room(requirement, difference);
         };
     }
 
@@ -108,7 +125,7 @@ public final class RequirementWords {
     static String amount(Requirement requirement, double missing) {
         return switch (requirement) {
             case FIRST_KEY, FIVE_SIGMA -> Figure.duration(missing * HOUR);
-            case PHASE_QBER, TIME_QBER -> Figure.digits(missing * PERCENT, 2, "percentage points");
+            case PHASE_QBER, TIME_QBER -> Figure.digits(missing * PERCENT, 2, Figure.POINTS);
             default -> margin(requirement, -missing).substring(1);
         };
     }

@@ -95,6 +95,11 @@ public final class VerdictHeadroom {
         return rate(each) ? Figure.counts(each.limit()) : Figure.in(each.limit(), each.unit());
     }
 
+    /** On which side of the planned value the limit lies. */
+    public static String side(Headroom each) {
+        return each.limit() < each.value() ? "down to" : "up to";
+    }
+
     /** How far it is there, with its sign. */
     public static String room(Headroom each) {
         double room = each.limit() - each.value();

@@ -46,7 +46,7 @@ public final class VerdictRequirements {
     /** The predicted figure. */
     public static String predicted(RequirementOutcome outcome) {
         if (outcome.predicted().isEmpty()) {
-            return outcome.met() ? "no limit" : "none";
+            return outcome.met() ? "no limit" : RequirementWords.missing(outcome.requirement());
         }
         return RequirementWords.predicted(
                 outcome.requirement(), outcome.predicted().getAsDouble(), outcome.required());

@@ -37,11 +37,11 @@ final class HeadroomTable extends TableView<VerdictRoom.Row> {
         setId("room-headroom");
         getStyleClass().add("headroom");
         setColumnResizePolicy(TableView.CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN);
-        column("quantity", 17.5, VerdictRoom.Row::name, false);
-        column("planned", 6.0, VerdictRoom.Row::planned, true);
-        column("limit", 5.9, VerdictRoom.Row::limit, true);
-        column("room", 6.2, VerdictRoom.Row::room, true);
-        column("fails", 13.4, VerdictRoom.Row::fails, false);
+        column("quantity", 16.4, VerdictRoom.Row::name, false);
+        column("planned", 5.6, VerdictRoom.Row::planned, true);
+        column("limit", 8.6, VerdictRoom.Row::sidedLimit, true);
+        column("room", 5.8, VerdictRoom.Row::room, true);
+        column("fails", 12.6, VerdictRoom.Row::fails, false);
         setAccessibleText(Words.of("verdict.room.help"));
         setRowFactory(table -> row());
         getSelectionModel().selectedItemProperty().addListener((source, before, row) -> {
@@ -80,7 +80,7 @@ final class HeadroomTable extends TableView<VerdictRoom.Row> {
     }
 
     private static Tooltip tooltip(VerdictRoom.Row row) {
-        return new Tooltip(Words.of("verdict.room.row", row.name(), row.path(), row.limit(), row.fails()));
+        return new Tooltip(Words.of("verdict.room.row", row.name(), row.path(), row.sidedLimit(), row.fails()));
     }
 
     /** Shows other rows; the one that was selected stays so, and is not chosen again. */

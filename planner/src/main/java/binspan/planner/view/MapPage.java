@@ -141,6 +141,7 @@ final class MapPage extends BorderPane {
         move.disableProperty().bind(model.reader().pickedProperty().isNull());
         Button recommended = button("recommended", model::goToRecommended);
         recommended.disableProperty().bind(model.recommendedProperty().isNull());
+        recommended.accessibleTextProperty().bind(recommended.getTooltip().textProperty());
         recommended
                 .getTooltip()
                 .textProperty()

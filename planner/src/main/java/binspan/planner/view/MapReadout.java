@@ -43,6 +43,7 @@ final class MapReadout extends VBox {
         rows.getStyleClass().add("map-rows");
         legend.getStyleClass().add("map-legend");
         extras.setId("map-extras");
+        result.setWrapText(true);
         arrange(false);
         model.reader().readingProperty().addListener((source, before, after) -> show(after));
         model.recommendedProperty().addListener((source, before, after) -> showExtras());

@@ -1,5 +1,6 @@
 package binspan.planner.view;
 
+import binspan.planner.report.Figure;
 import binspan.planner.report.RequirementText;
 import binspan.planner.report.RequirementWords;
 import binspan.planner.viewmodel.Words;
@@ -27,6 +28,7 @@ final class MapReadoutRow extends VBox {
         first.getStyleClass().add("map-line");
         second.getStyleClass().add("map-line");
         figure.setMinWidth(Region.USE_PREF_SIZE);
+        margin.setMinWidth(Region.USE_PREF_SIZE);
         sign.setMinWidth(Region.USE_PREF_SIZE);
         name.setTooltip(new Tooltip(RequirementText.name(requirement)));
         getChildren().setAll(first, second);
@@ -42,7 +44,8 @@ final class MapReadoutRow extends VBox {
                         ? RequirementText.name(found.requirement())
                         : RequirementText.of(found.requirement(), found.required()));
         figure.setText(figure(found));
-        margin.setText((tightest ? Words.of("map.tightest") + " " : "") + room(found));
+        margin.setText((tightest ? Words.of("map.least") + " " : "") + room(found));
+        margin.setTooltip(new Tooltip(Words.of("verdict.margin.spoken", Figure.spelt(room(found)))));
     }
 
     /** The predicted figure; nothing for the slots, which have none. */
@@ -52,7 +55,7 @@ final class MapReadoutRow extends VBox {
         }
         return Double.isFinite(found.predicted())
                 ? RequirementWords.predicted(found.requirement(), found.predicted(), found.required())
-                : Words.of("map.no.figure");
+                : RequirementWords.missing(found.requirement());
     }
 
     private static String room(RequirementMargin found) {
@@ -60,6 +63,6 @@ final class MapReadoutRow extends VBox {
             return "";
         }
         double room = found.predicted() - found.required();
-        return RequirementWords.margin(found.requirement(), found.requirement().atLeast() ? room : -room);
+        return RequirementWords.room(found.requirement(), found.requirement().atLeast() ? room : -room);
     }
 }

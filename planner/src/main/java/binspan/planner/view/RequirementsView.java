@@ -19,6 +19,7 @@ final class RequirementsView extends VBox {
     private static final double[] COLUMNS = {24.0, 50.0, -26.0};
     private static final double[] ROOMS = {0.01, 0.1, 1.0};
     private static final double MIDDLE = 0.5;
+    private static final String NO_MARGIN = "-";
 
     private final List<Row> rows = new ArrayList<>();
 
@@ -114,7 +115,7 @@ final class RequirementsView extends VBox {
             predicted.setText(row.predicted());
             change.show(row.change());
             required.setText(row.required());
-            margin.setText(row.margin());
+            margin.setText(row.margin().isEmpty() ? NO_MARGIN : row.margin());
             bar.show(MIDDLE, place(row.barShare()), !row.met());
             setAccessibleText(row.spoken());
             tooltip.setText(row.spoken());

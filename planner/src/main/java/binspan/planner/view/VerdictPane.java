@@ -5,69 +5,58 @@ import binspan.planner.viewmodel.FigureGroup;
 import binspan.planner.viewmodel.VerdictModel;
 import binspan.planner.viewmodel.VerdictRoom;
 import binspan.planner.viewmodel.VerdictSheet;
-import binspan.planner.viewmodel.Words;
 import java.util.ArrayList;
 import java.util.List;
 import javafx.css.PseudoClass;
 import javafx.scene.AccessibleRole;
-import javafx.scene.control.Hyperlink;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
-import javafx.scene.control.Tooltip;
 import javafx.scene.layout.BorderPane;
-import javafx.scene.layout.HBox;
-import javafx.scene.layout.Priority;
-import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
-/** The verdict beside the link: whether it meets its requirements, what the visibility is lost to, figures of merit, and links to the room page. */
+/** The verdict beside the link: whether it meets its requirements, what the visibility is lost to, figures of merit, and links to the headroom page. */
 public final class VerdictPane extends BorderPane {
     private static final PseudoClass STALE = PseudoClass.getPseudoClass("stale");
+    private static final double SCROLL_BORDER = 4.0;
 
     private final Label headline = Columns.wrapped("", "headline");
-    private final Label computing = Columns.label(Words.of("verdict.computing"), "computing");
-    private final Label legend = Columns.label(Words.of("verdict.change.legend"), "soft", "small");
     private final RequirementsView requirements = new RequirementsView();
     private final BudgetView budget = new BudgetView();
     private final List<FiguresView> figures = new ArrayList<>();
     private final VBox groups = new VBox();
     private final VBox content = new VBox();
-    private final Hyperlink tightest = new Hyperlink();
-    private final Hyperlink cautions = new Hyperlink();
+    private final VerdictFoot foot;
 
     /**
      * Shows a verdict.
      *
      * @param model what is shown
-     * @param showRoom shows the page with headroom, stability, cautions and changes
+     * @param showHeadroom shows the page with headroom, stability, cautions and changes
      */
-    public VerdictPane(VerdictModel model, Runnable showRoom) {
+    public VerdictPane(VerdictModel model, Runnable showHeadroom) {
         getStyleClass().addAll("panel", "verdict");
         setId("verdict");
-        build(showRoom);
+        foot = new VerdictFoot(showHeadroom);
+        build();
         model.sheetProperty().addListener((source, before, sheet) -> show(sheet));
-        model.fullProperty().addListener((source, before, room) -> show(room));
+        model.fullProperty().addListener((source, before, room) -> showRoom(room));
         if (model.sheetProperty().get() != null) {
             show(model.sheetProperty().get());
         }
-        show(model.fullProperty().get());
+        showRoom(model.fullProperty().get());
         Staleness.follow(model.sheetStaleProperty(), old -> {
             content.pseudoClassStateChanged(STALE, old);
             headline.pseudoClassStateChanged(STALE, old);
-            computing.setVisible(old);
-            computing.setManaged(old);
+            foot.showComputing(old);
         });
-        Staleness.follow(model.fullStaleProperty(), old -> tightest.pseudoClassStateChanged(STALE, old));
+        Staleness.follow(model.fullStaleProperty(), foot::showStale);
     }
 
-    private void build(Runnable showRoom) {
+    private void build() {
         headline.setId("verdict-headline");
         headline.setMaxWidth(Double.MAX_VALUE);
         headline.setFocusTraversable(true);
         headline.setAccessibleRole(AccessibleRole.TEXT);
-        computing.setVisible(false);
-        computing.setManaged(false);
-        computing.setId("verdict-computing");
         content.getStyleClass().add("verdict-content");
         content.getChildren().addAll(requirements, budget, groups);
         groups.getStyleClass().add("figure-groups");
@@ -78,27 +67,16 @@ public final class VerdictPane extends BorderPane {
         scroll.setId("verdict-scroll");
         setTop(headline);
         setCenter(scroll);
-        setBottom(foot(showRoom));
+        setBottom(foot);
     }
 
-    private VBox foot(Runnable showRoom) {
-        tightest.setId("verdict-tightest");
-        cautions.setId("verdict-cautions");
-        for (Hyperlink link : List.of(tightest, cautions)) {
-            link.setTooltip(new Tooltip(Words.of("verdict.tightest.help")));
-            link.setWrapText(true);
-            link.setOnAction(event -> {
-                link.setVisited(false);
-                showRoom.run();
-            });
-        }
-        Region gap = new Region();
-        HBox.setHgrow(gap, Priority.ALWAYS);
-        HBox last = new HBox(cautions, gap, computing, legend);
-        last.getStyleClass().add("line");
-        VBox foot = new VBox(tightest, last);
-        foot.getStyleClass().add("verdict-foot");
-        return foot;
+    /** The foot takes what the requirements and figures leave. */
+    @Override
+    protected void layoutChildren() {
+        double inside = getWidth() - snappedLeftInset() - snappedRightInset();
+        double left = getHeight() - snappedTopInset() - snappedBottomInset() - headline.prefHeight(inside);
+        foot.fit(inside, left - content.prefHeight(inside) - SCROLL_BORDER);
+        super.layoutChildren();
     }
 
     private void show(VerdictSheet sheet) {
@@ -110,10 +88,8 @@ public final class VerdictPane extends BorderPane {
         requirements.show(sheet.requirements());
         budget.show(sheet.budget());
         show(sheet.figures());
-        int count = sheet.cautions().size();
-        cautions.setText(count == 0 ? Words.of("verdict.cautions.no") : Words.of("verdict.cautions", count));
-        legend.setVisible(sheet.figuresChanged());
-        legend.setManaged(sheet.figuresChanged());
+        foot.show(sheet);
+        requestLayout();
     }
 
     private void show(List<FigureGroup> shown) {
@@ -128,12 +104,8 @@ public final class VerdictPane extends BorderPane {
         }
     }
 
-    private void show(VerdictRoom room) {
-        tightest.setText(
-                room == null
-                        ? Words.of("verdict.computing")
-                        : room.tightest()
-                                .map(row -> Words.of("verdict.tightest", row.name(), row.room()))
-                                .orElse(Words.of("verdict.tightest.none")));
+    private void showRoom(VerdictRoom room) {
+        foot.show(room);
+        requestLayout();
     }
 }

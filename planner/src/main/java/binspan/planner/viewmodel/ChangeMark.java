@@ -1,5 +1,6 @@
 package binspan.planner.viewmodel;
 
+import binspan.planner.report.Figure;
 import java.util.function.DoubleFunction;
 
 /**
@@ -64,13 +65,18 @@ public record ChangeMark(String text, Effect effect) {
         };
     }
 
+    /** 1 where the figure has risen, -1 where it has fallen, 0 where there is no difference to tell. */
+    public int direction() {
+        return text.startsWith("+") ? 1 : text.startsWith("-") ? -1 : 0;
+    }
+
     /** The change for somebody who hears it; empty without change. */
     public String spoken() {
         return switch (effect) {
             case NONE -> "";
-            case BETTER -> Words.of("verdict.change.better", text);
-            case WORSE -> Words.of("verdict.change.worse", text);
-            case OTHER -> Words.of("verdict.change.other", text);
+            case BETTER -> Words.of("verdict.change.better", Figure.spelt(text));
+            case WORSE -> Words.of("verdict.change.worse", Figure.spelt(text));
+            case OTHER -> Words.of("verdict.change.other", Figure.spelt(text));
         };
     }
 }

@@ -1,5 +1,6 @@
 package binspan.planner.viewmodel;
 
+import binspan.planner.report.Figure;
 import binspan.planner.report.RequirementWords;
 import binspan.planner.report.TextStyle;
 import binspan.planner.report.VerdictFailure;
@@ -48,7 +49,7 @@ public record RequirementRow(
                     RequirementWords.name(outcome.requirement()),
                     VerdictRequirements.required(outcome, TextStyle.PLAIN_UNICODE),
                     VerdictRequirements.predicted(outcome),
-                    VerdictRequirements.margin(outcome),
+                    margin(outcome),
                     outcome.met(),
                     barShare(margins.margin(i, now.prediction())),
                     change(outcome, now, saved),
@@ -69,6 +70,12 @@ public record RequirementRow(
         return Math.copySign(Math.min(1.0, Math.log1p(SHARPNESS * room) / Math.log1p(SHARPNESS)), logRatio);
     }
 
+    private static String margin(RequirementOutcome outcome) {
+        return outcome.margin().isEmpty()
+                ? ""
+                : RequirementWords.room(outcome.requirement(), outcome.margin().getAsDouble());
+    }
+
     private static ChangeMark change(RequirementOutcome outcome, LinkCheck now, LinkCheck saved) {
         Requirement requirement = outcome.requirement();
         return ChangeMark.of(
@@ -83,7 +90,7 @@ public record RequirementRow(
     public String spoken() {
         String verdict = Words.of(met ? "verdict.met" : "verdict.not-met");
         String text = Words.of("verdict.requirement.spoken", verdict, name, predicted, required);
-        String room = margin.isEmpty() ? "" : ", " + Words.of("verdict.margin.spoken", margin);
+        String room = margin.isEmpty() ? "" : ", " + Words.of("verdict.margin.spoken", Figure.spelt(margin));
         String since = change.spoken().isEmpty() ? "" : "; " + change.spoken();
         return text + room + since + (why.isEmpty() ? "" : ". " + why);
     }

@@ -26,16 +26,23 @@ public record VerdictRoom(LinkCheck check, String title, String none, List<Row> 
      * @param path scenario path of the quantity
      * @param name the quantity
      * @param planned planned value
+     * @param side whether the limit lies below or above it, in words
      * @param limit value at which the first requirement fails
      * @param room how far it is there
      * @param fails which requirement that is
      */
-    public record Row(String path, String name, String planned, String limit, String room, String fails) {
+    public record Row(String path, String name, String planned, String side, String limit, String room, String fails) {
+        /** The limit with the word for its side. */
+        public String sidedLimit() {
+            return side + " " + limit;
+        }
+
         private static Row of(Headroom headroom) {
             return new Row(
                     headroom.path(),
                     DriftWords.of(headroom.path()),
                     VerdictHeadroom.planned(headroom),
+                    VerdictHeadroom.side(headroom),
                     VerdictHeadroom.limit(headroom),
                     VerdictHeadroom.room(headroom),
                     RequirementWords.name(headroom.requirement()));
@@ -67,8 +74,13 @@ public record VerdictRoom(LinkCheck check, String title, String none, List<Row> 
         return check.prediction().scenario();
     }
 
-    /** The quantity with the least room for its size. */
+    /** The quantity with the least headroom for its size. */
     public Optional<Row> tightest() {
         return rows.stream().findFirst();
+    }
+
+    /** The one with the least of the others. */
+    public Optional<Row> nextTightest() {
+        return rows.stream().skip(1).findFirst();
     }
 }

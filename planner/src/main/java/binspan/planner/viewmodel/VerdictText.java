@@ -46,7 +46,7 @@ public final class VerdictText {
                     Words.of("verdict.column.limit"),
                     Words.of("verdict.column.room"),
                     Words.of("verdict.column.fails"));
-            room.rows().forEach(row -> columns(row.name(), row.planned(), row.limit(), row.room(), row.fails()));
+            room.rows().forEach(row -> columns(row.name(), row.planned(), row.sidedLimit(), row.room(), row.fails()));
         }
         heading(VerdictStability.TITLE + ", " + VerdictStability.MEANING);
         room.limits().forEach(limit -> columns(limit.quantity(), limit.value()));

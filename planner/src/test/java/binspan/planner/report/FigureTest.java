@@ -38,6 +38,14 @@ final class FigureTest {
     }
 
     @ParameterizedTest
+    @CsvSource({"0.0123, +1.2 pt, +1.2 percentage points", "-0.34, -34 pt, -34 percentage points"})
+    void differencesOfRatiosAreInPercentagePoints(double difference, String text, String spelt) {
+        assertThat(Figure.points(difference)).isEqualTo(text);
+        assertThat(Figure.spelt(text)).isEqualTo(spelt);
+        assertThat(Figure.spelt("+1.2 kbit/s")).isEqualTo("+1.2 kbit/s");
+    }
+
+    @ParameterizedTest
     @CsvSource({"30, 30 s", "3600, 1 h", "5400, 1.5 h", "120, 2 min", "864000, 10 days"})
     void statedDurationsKeepNoZeros(double seconds, String text) {
         assertThat(Figure.statedDuration(seconds)).isEqualTo(text);

@@ -12,6 +12,7 @@ import binspan.planner.viewmodel.VerdictLinks;
 import binspan.planner.viewmodel.VerdictModel;
 import binspan.planner.viewmodel.VerdictRoom;
 import binspan.planner.viewmodel.VerdictText;
+import binspan.planner.viewmodel.Words;
 import binspan.scenario.Scenario;
 import java.util.ArrayList;
 import java.util.List;
@@ -87,6 +88,17 @@ final class RoomPageTest {
                         .toList());
         assertThat(texts(robot, "#room-safety"))
                 .containsAll(model.sheetProperty().get().safety());
+    }
+
+    @Test
+    void limitsHaveTheirSideInTheTable(FxRobot robot) {
+        Design design = Designs.of(VerdictLinks.meeting());
+        VerdictModel model = show(robot, design);
+        for (int i = 0; i < table(robot).getItems().size(); i++) {
+            assertThat(table(robot).getColumns().get(2).getCellData(i))
+                    .isEqualTo(model.fullProperty().get().rows().get(i).sidedLimit());
+        }
+        assertThat(Words.of("page.room")).isEqualTo(model.fullProperty().get().title());
     }
 
     @Test

@@ -3,6 +3,7 @@ package binspan.planner.view;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import binspan.planner.viewmodel.Background;
+import binspan.planner.viewmodel.ChangeMark;
 import binspan.planner.viewmodel.Design;
 import binspan.planner.viewmodel.Designs;
 import binspan.planner.viewmodel.HeldBackground;
@@ -180,7 +181,31 @@ final class VerdictPaneTest {
         assertThat(headline(robot)).isEqualTo("\u2713 MEETS all 6 requirements");
         Node row = robot.lookup("#verdict-requirement-rawVisibilityAtLeast").query();
         assertThat(row.getAccessibleText()).startsWith("met: ").contains("better than saved: +");
-        assertThat(texts(robot, row)).anyMatch(text -> text.startsWith("\u25b2 +"));
+        assertThat(texts(robot, row)).anyMatch(text -> text.startsWith("\u2191 +"));
+    }
+
+    /** A time that has risen is worse: the arrow follows the number, the sign says what it means. */
+    @Test
+    void marksSayDirectionAndMeaning(FxRobot robot) {
+        Label[] label = new Label[1];
+        robot.interact(() -> {
+            ChangeLabel change = new ChangeLabel();
+            change.show(new ChangeMark("+71.1 ms", ChangeMark.Effect.WORSE));
+            label[0] = change;
+        });
+        assertThat(label[0].getText()).isEqualTo("\u2191 +71.1 ms !");
+        assertThat(label[0].getStyleClass()).contains("bad");
+        assertThat(label[0].getAccessibleText()).isEqualTo("worse than saved: +71.1 ms");
+        robot.interact(() -> ((ChangeLabel) label[0]).show(new ChangeMark("-1.2 pt", ChangeMark.Effect.BETTER)));
+        assertThat(label[0].getText()).isEqualTo("\u2193 -1.2 pt");
+        assertThat(label[0].getTooltip().getText()).isEqualTo("better than saved: -1.2 percentage points");
+    }
+
+    @Test
+    void marginThatThereIsNotIsADash(FxRobot robot) {
+        show(robot, VerdictLinks.with(VerdictLinks.withAll(), "timing.cableTemperatureStepK", 1.0));
+        Node row = robot.lookup("#verdict-requirement-firstKeyWithinHours").query();
+        assertThat(texts(robot, row)).contains("never", "-");
     }
 
     @Test
@@ -209,7 +234,7 @@ final class VerdictPaneTest {
         VerdictPane pane = show(robot, VerdictLinks.withAll());
         robot.interact(() -> robot.lookup("#verdict-headline").query().requestFocus());
         List<String> visited = new ArrayList<>();
-        for (int i = 0; i < 16; i++) {
+        for (int i = 0; i < 20; i++) {
             Node owner = pane.getScene().getFocusOwner();
             visited.add(owner.getId());
             if (!(owner instanceof Hyperlink)) {

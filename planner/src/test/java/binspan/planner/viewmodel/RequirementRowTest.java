@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.within;
 
 import binspan.planner.report.RequirementText;
 import binspan.prediction.LinkCheck;
+import binspan.prediction.Requirement;
 import binspan.prediction.RequirementOutcome;
 import java.util.List;
 import org.junit.jupiter.api.Test;
@@ -67,6 +68,51 @@ final class RequirementRowTest {
         double ratio = check.prediction().fringe().raw() / 0.85;
         assertThat(RequirementRow.of(check, check).get(0).barShare())
                 .isCloseTo(Math.log(1.0 + 100.0 * (ratio - 1.0)) / Math.log(101.0), within(1e-9));
+    }
+
+    private static RequirementRow row(LinkCheck check, Requirement requirement) {
+        return RequirementRow.of(check, check).stream()
+                .filter(row -> row.requirement() == requirement)
+                .findFirst()
+                .orElseThrow();
+    }
+
+    /** The figure of merit below says the same word. */
+    @Test
+    void keyThatNeverComesHasNoMargin() {
+        LinkCheck check = LinkCheck.of(VerdictLinks.with(VerdictLinks.withAll(), "timing.cableTemperatureStepK", 1.0));
+        RequirementRow first = row(check, Requirement.FIRST_KEY);
+        assertThat(first.met()).isFalse();
+        assertThat(first.predicted()).isEqualTo("never");
+        assertThat(first.margin()).isEmpty();
+        assertThat(VerdictFigures.of(check, check).stream().flatMap(group -> group.rows().stream()))
+                .contains(new FigureRow("time to the first key", "never", ChangeMark.NONE));
+    }
+
+    @Test
+    void marginsOfErrorRatesAreInPercentagePoints() {
+        LinkCheck check = LinkCheck.of(VerdictLinks.withAll());
+        RequirementRow phase = row(check, Requirement.PHASE_QBER);
+        double points = 100.0 * (0.08 - check.prediction().key().errors().phase());
+        assertThat(phase.margin()).endsWith(" pt");
+        assertThat(Double.parseDouble(phase.margin().replace(" pt", ""))).isCloseTo(points, within(0.05));
+        assertThat(phase.spoken()).contains(phase.margin().replace("pt", "percentage points"));
+    }
+
+    /** A time that rises is worse, and its arrow still goes up. */
+    @Test
+    void directionOfAChangeIsThatOfTheNumber() {
+        LinkCheck saved = LinkCheck.of(VerdictLinks.withAll());
+        LinkCheck now = LinkCheck.of(VerdictLinks.with(VerdictLinks.withAll(), "timing.windowWidthPs", 200.0));
+        RequirementRow sigma = RequirementRow.of(now, saved).stream()
+                .filter(row -> row.requirement() == Requirement.FIVE_SIGMA)
+                .findFirst()
+                .orElseThrow();
+        double before = saved.prediction().bell().secondsTo(5.0);
+        double after = now.prediction().bell().secondsTo(5.0);
+        assertThat(sigma.change().direction()).isEqualTo((int) Math.signum(after - before));
+        assertThat(sigma.change().effect())
+                .isEqualTo(after > before ? ChangeMark.Effect.WORSE : ChangeMark.Effect.BETTER);
     }
 
     @Test

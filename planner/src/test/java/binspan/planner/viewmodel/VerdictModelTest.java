@@ -58,7 +58,7 @@ final class VerdictModelTest {
         model.sheetProperty()
                 .get()
                 .requirements()
-                .forEach(row -> assertThat(page).contains(row.required(), row.predicted(), row.margin()));
+                .forEach(row -> assertThat(page).contains(row.required(), row.predicted(), inPerCent(row.margin())));
         model.fullProperty()
                 .get()
                 .rows()
@@ -69,6 +69,27 @@ final class VerdictModelTest {
                 .budget()
                 .steps()
                 .forEach(step -> assertThat(page).contains(step.cause(), step.factor(), step.loss()));
+    }
+
+    /** The command line has the column of per cent above its margins. */
+    private static String inPerCent(String margin) {
+        return margin.replace(" pt", " %");
+    }
+
+    @Test
+    void limitsSayOnWhichSideTheyLie() {
+        LinkCheck check = LinkCheck.of(VerdictLinks.meeting());
+        VerdictRoom room = of(Designs.of(VerdictLinks.meeting())).fullProperty().get();
+        List<String> pairs = room.rows().stream()
+                .filter(row -> row.path().equals("source.meanPairsPerCycle"))
+                .map(VerdictRoom.Row::side)
+                .toList();
+        assertThat(pairs).containsExactlyInAnyOrder("down to", "up to");
+        for (VerdictRoom.Row row : room.rows()) {
+            assertThat(row.room()).startsWith(row.side().equals("up to") ? "+" : "-");
+            assertThat(row.sidedLimit()).isEqualTo(row.side() + " " + row.limit());
+        }
+        assertThat(room.rows()).hasSameSizeAs(check.headroom());
     }
 
     @Test
@@ -160,6 +181,7 @@ final class VerdictModelTest {
         ChangeMark change =
                 figure(model.sheetProperty().get(), "time to the first key").change();
         assertThat(change).isEqualTo(new ChangeMark("was never", ChangeMark.Effect.BETTER));
+        assertThat(change.direction()).isZero();
     }
 
     @Test
@@ -305,7 +327,8 @@ final class VerdictModelTest {
         String text = VerdictText.of(sheet, room);
         room.rows()
                 .forEach(row -> assertThat(text)
-                        .contains(String.join("\t", row.name(), row.planned(), row.limit(), row.room(), row.fails())));
+                        .contains(String.join(
+                                "\t", row.name(), row.planned(), row.sidedLimit(), row.room(), row.fails())));
         sheet.cautions().forEach(caution -> assertThat(text).contains(caution.text(), "[" + caution.code() + "]"));
         assertThat(text).contains("window width: 400 ps \u2192 350 ps");
         assertThat(VerdictText.of(sheet, null)).doesNotContain("Headroom");
