@@ -19,6 +19,8 @@ import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
@@ -45,6 +47,7 @@ public final class FormPane extends VBox {
         scroll.setFocusTraversable(false);
         VBox.setVgrow(scroll, Priority.ALWAYS);
         getChildren().addAll(parts(), scroll, explanation);
+        addEventFilter(KeyEvent.KEY_PRESSED, this::undoing);
         model.rows().addListener((ListChangeListener<FormRow>) change -> fill());
         fill();
     }
@@ -65,6 +68,18 @@ public final class FormPane extends VBox {
             }
         });
         return part;
+    }
+
+    /** Undo is that of the link in an entry, too: the entry's own would count as typing. */
+    private void undoing(KeyEvent event) {
+        if (event.isShortcutDown() && !event.isAltDown() && event.getCode() == KeyCode.Z) {
+            if (event.isShiftDown()) {
+                model.redo();
+            } else {
+                model.undo();
+            }
+            event.consume();
+        }
     }
 
     private void fill() {

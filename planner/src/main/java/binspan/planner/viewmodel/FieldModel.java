@@ -228,6 +228,16 @@ public final class FieldModel implements FormRow {
         show(spelled(edits.statedIn(place)));
     }
 
+    /** Ends the typing and gives up what is not allowed; whether there was any. */
+    boolean giveUp() {
+        boolean refused = !error.get().isEmpty();
+        if (refused) {
+            takeBack();
+        }
+        settle();
+        return refused;
+    }
+
     /** Says where the value comes from; an empty text takes the saying back. */
     public void source(String said) {
         String path = "provenance." + origin.get().key();

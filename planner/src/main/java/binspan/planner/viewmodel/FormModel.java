@@ -88,6 +88,25 @@ public final class FormModel {
         design.selectionProperty().set(wanted);
     }
 
+    /** Gives up entries that are not allowed, or else takes the last change of the link back. */
+    public void undo() {
+        if (!givenUp()) {
+            design.undo();
+        }
+    }
+
+    /** Gives up entries that are not allowed, or else does the change again that was taken back last. */
+    public void redo() {
+        if (!givenUp()) {
+            design.redo();
+        }
+    }
+
+    private boolean givenUp() {
+        List<FieldModel> fields = rows.stream().flatMap(FormRow::fields).toList();
+        return fields.stream().filter(FieldModel::giveUp).count() > 0;
+    }
+
     private void follow() {
         edits.follow();
         Scenario scenario = design.scenario();

@@ -162,7 +162,10 @@ final class MapPageTest {
     @EnumSource
     void namesOfLinesAreReadable(MapInk ink) {
         for (Theme theme : Theme.values()) {
-            look.themeProperty().set(theme);
+            Shown.onWindowThread(() -> {
+                look.themeProperty().set(theme);
+                return theme;
+            });
             double one = luminance(ink.colour(look));
             double other = luminance(theme.palette().panel());
             double contrast = (Math.max(one, other) + 0.05) / (Math.min(one, other) + 0.05);
