@@ -19,6 +19,8 @@ import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
@@ -47,6 +49,7 @@ public final class FormPane extends VBox {
         scroll.setFocusTraversable(false);
         VBox.setVgrow(scroll, Priority.ALWAYS);
         getChildren().addAll(parts(), scroll, explanation);
+        addEventFilter(KeyEvent.KEY_PRESSED, this::undoing);
         model.rows().addListener((ListChangeListener<FormRow>) change -> fill());
         fill();
     }
@@ -69,6 +72,7 @@ public final class FormPane extends VBox {
         return part;
     }
 
+<<<<<<< HEAD
     /** New entries take the value of a choice away; the part that is shown stays in it. */
     private void follow() {
         following = true;
@@ -77,6 +81,18 @@ public final class FormPane extends VBox {
         }
         part.setValue(model.partProperty().get());
         following = false;
+=======
+    /** Undo is that of the link in an entry, too: the entry's own would count as typing. */
+    private void undoing(KeyEvent event) {
+        if (event.isShortcutDown() && !event.isAltDown() && event.getCode() == KeyCode.Z) {
+            if (event.isShiftDown()) {
+                model.redo();
+            } else {
+                model.undo();
+            }
+            event.consume();
+        }
+>>>>>>> w-proof
     }
 
     private void fill() {

@@ -268,12 +268,23 @@ public final class FieldModel implements FormRow {
         show(spelled(edits.statedIn(place)));
     }
 
+<<<<<<< HEAD
     /** Gives up what was typed, allowed or not, and shows what stands. */
     void forget() {
         typing = false;
         sliding = false;
         error.set("");
         show(spelled(edits.statedIn(place)));
+=======
+    /** Ends the typing and gives up what is not allowed; whether there was any. */
+    boolean giveUp() {
+        boolean refused = !error.get().isEmpty();
+        if (refused) {
+            takeBack();
+        }
+        settle();
+        return refused;
+>>>>>>> w-proof
     }
 
     /** Says where the value comes from; an empty text takes the saying back. */

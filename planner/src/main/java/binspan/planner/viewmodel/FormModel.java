@@ -90,6 +90,7 @@ public final class FormModel {
         design.selectionProperty().set(wanted);
     }
 
+<<<<<<< HEAD
     /**
      * An entry that is not part of the design.
      *
@@ -118,6 +119,25 @@ public final class FormModel {
     /** What is undone or opened anew is not to be mixed with what was typed before. */
     private void forget() {
         fields().forEach(FieldModel::forget);
+=======
+    /** Gives up entries that are not allowed, or else takes the last change of the link back. */
+    public void undo() {
+        if (!givenUp()) {
+            design.undo();
+        }
+    }
+
+    /** Gives up entries that are not allowed, or else does the change again that was taken back last. */
+    public void redo() {
+        if (!givenUp()) {
+            design.redo();
+        }
+    }
+
+    private boolean givenUp() {
+        List<FieldModel> fields = rows.stream().flatMap(FormRow::fields).toList();
+        return fields.stream().filter(FieldModel::giveUp).count() > 0;
+>>>>>>> w-proof
     }
 
     private void follow() {

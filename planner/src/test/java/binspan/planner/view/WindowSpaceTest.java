@@ -134,15 +134,22 @@ final class WindowSpaceTest {
         for (String page : window.session().window().keys()) {
             window.page(page);
             window.until("quiet", () -> window.working() == 0);
-            List<String> faint = window.get(() -> all().stream()
-                    .filter(each -> each instanceof Text text && !text.getText().isBlank() && !each.isDisabled())
-                    .flatMap(each -> faint((Text) each))
-                    .toList());
+            assertThat(window.get(() -> texts().size())).isGreaterThan(100);
+            List<String> faint = window.get(
+                    () -> texts().stream().flatMap(WindowSpaceTest::faint).toList());
             assertThat(faint).as(page).isEmpty();
         }
     }
 
-    /** The guidelines ask no contrast of what cannot be used at present. */
+    /** What is written on the window; the guidelines ask no contrast of what cannot be used at present. */
+    private List<Text> texts() {
+        return all().stream()
+                .filter(each -> each instanceof Text && !each.isDisabled())
+                .map(Text.class::cast)
+                .filter(text -> !text.getText().isBlank())
+                .toList();
+    }
+
     private static Stream<String> faint(Text text) {
         double least = colours(text.getFill()).stream()
                 .flatMap(ink -> grounds(text.getParent()).stream().map(ground -> contrast(over(ink, ground), ground)))

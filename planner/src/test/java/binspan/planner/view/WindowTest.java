@@ -145,6 +145,7 @@ final class WindowTest {
         undone(1);
         assertThat(lengthKm()).isEqualTo(30.2);
         assertThat(changed()).isFalse();
+        assertThat(window.get(window.menu("menu-undo")::isDisable)).isTrue();
         window.keys(KeyCode.Z, KeyCombination.SHORTCUT_DOWN, KeyCombination.SHIFT_DOWN);
         assertThat(lengthKm()).isEqualTo(42.5);
     }
