@@ -72,7 +72,6 @@ public final class FormPane extends VBox {
         return part;
     }
 
-<<<<<<< HEAD
     /** New entries take the value of a choice away; the part that is shown stays in it. */
     private void follow() {
         following = true;
@@ -81,7 +80,8 @@ public final class FormPane extends VBox {
         }
         part.setValue(model.partProperty().get());
         following = false;
-=======
+    }
+
     /** Undo is that of the link in an entry, too: the entry's own would count as typing. */
     private void undoing(KeyEvent event) {
         if (event.isShortcutDown() && !event.isAltDown() && event.getCode() == KeyCode.Z) {
@@ -92,7 +92,6 @@ public final class FormPane extends VBox {
             }
             event.consume();
         }
->>>>>>> w-proof
     }
 
     private void fill() {

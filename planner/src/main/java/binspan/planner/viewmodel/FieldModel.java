@@ -268,14 +268,14 @@ public final class FieldModel implements FormRow {
         show(spelled(edits.statedIn(place)));
     }
 
-<<<<<<< HEAD
     /** Gives up what was typed, allowed or not, and shows what stands. */
     void forget() {
         typing = false;
         sliding = false;
         error.set("");
         show(spelled(edits.statedIn(place)));
-=======
+    }
+
     /** Ends the typing and gives up what is not allowed; whether there was any. */
     boolean giveUp() {
         boolean refused = !error.get().isEmpty();
@@ -284,7 +284,6 @@ public final class FieldModel implements FormRow {
         }
         settle();
         return refused;
->>>>>>> w-proof
     }
 
     /** Says where the value comes from; an empty text takes the saying back. */

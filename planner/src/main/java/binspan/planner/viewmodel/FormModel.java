@@ -90,7 +90,6 @@ public final class FormModel {
         design.selectionProperty().set(wanted);
     }
 
-<<<<<<< HEAD
     /**
      * An entry that is not part of the design.
      *
@@ -119,7 +118,8 @@ public final class FormModel {
     /** What is undone or opened anew is not to be mixed with what was typed before. */
     private void forget() {
         fields().forEach(FieldModel::forget);
-=======
+    }
+
     /** Gives up entries that are not allowed, or else takes the last change of the link back. */
     public void undo() {
         if (!givenUp()) {
@@ -135,9 +135,7 @@ public final class FormModel {
     }
 
     private boolean givenUp() {
-        List<FieldModel> fields = rows.stream().flatMap(FormRow::fields).toList();
-        return fields.stream().filter(FieldModel::giveUp).count() > 0;
->>>>>>> w-proof
+        return fields().toList().stream().filter(FieldModel::giveUp).count() > 0;
     }
 
     private void follow() {

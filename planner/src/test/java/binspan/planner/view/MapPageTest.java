@@ -227,20 +227,10 @@ final class MapPageTest {
     void namesOfLinesAreReadable(MapInk ink) {
         Look other = new Look();
         for (Theme theme : Theme.values()) {
-<<<<<<< HEAD
             other.themeProperty().set(theme);
             double one = luminance(ink.colour(other));
             double ground = luminance(theme.palette().panel());
             double contrast = (Math.max(one, ground) + 0.05) / (Math.min(one, ground) + 0.05);
-=======
-            Shown.onWindowThread(() -> {
-                look.themeProperty().set(theme);
-                return theme;
-            });
-            double one = luminance(ink.colour(look));
-            double other = luminance(theme.palette().panel());
-            double contrast = (Math.max(one, other) + 0.05) / (Math.min(one, other) + 0.05);
->>>>>>> w-proof
             assertTrue(contrast >= LEAST_CONTRAST, theme + " " + contrast);
         }
     }
