@@ -23,11 +23,7 @@ final class DetectorOptions extends VBox {
         this.model = model;
         this.look = look;
         OptionRow row = new OptionRow(model.name(), look);
-        row.choice(
-                "kind",
-                model.kindProperty(),
-                List.of(Kind.values()),
-                DetectorOptions::words);
+        row.choice("kind", model.kindProperty(), List.of(Kind.values()), DetectorOptions::words);
         row.check("present", model.presentProperty());
         CheckBox mixed = row.check("mixed", model.mixedProperty());
         mixed.visibleProperty().bind(model.kindProperty().isEqualTo(Kind.DETECTORS));
