@@ -7,7 +7,6 @@ import binspan.scenario.Choice;
 import binspan.scenario.DetectorClass;
 import binspan.scenario.FibreClass;
 import java.util.List;
-import java.util.Locale;
 import java.util.function.Function;
 import javafx.collections.ObservableSet;
 import javafx.scene.control.CheckBox;
@@ -24,11 +23,7 @@ final class DetectorOptions extends VBox {
         this.model = model;
         this.look = look;
         OptionRow row = new OptionRow(model.name(), look);
-        row.choice(
-                "kind",
-                model.kindProperty(),
-                List.of(Kind.values()),
-                kind -> Words.of("studies.compare.kind." + kind.name().toLowerCase(Locale.ROOT)));
+        row.choice("kind", model.kindProperty(), List.of(Kind.values()), DetectorOptions::words);
         row.check("present", model.presentProperty());
         CheckBox mixed = row.check("mixed", model.mixedProperty());
         mixed.visibleProperty().bind(model.kindProperty().isEqualTo(Kind.DETECTORS));
@@ -39,6 +34,14 @@ final class DetectorOptions extends VBox {
         classes(Kind.DETECTORS, List.of(DetectorClass.values()), model.detectorClasses(), DetectorClass::meaning);
         classes(Kind.FIBRES, List.of(FibreClass.values()), model.fibreClasses(), FibreClass::meaning);
         elements();
+    }
+
+    private static String words(Kind kind) {
+        return switch (kind) {
+            case DETECTORS -> Words.of("studies.compare.kind.detectors");
+            case FIBRES -> Words.of("studies.compare.kind.fibres");
+            case WITHOUT -> Words.of("studies.compare.kind.without");
+        };
     }
 
     private <E extends Enum<E> & Choice> void classes(

@@ -1,6 +1,9 @@
 package binspan.planner.viewmodel;
 
+import binspan.planner.document.Change;
+import binspan.planner.document.Differences;
 import binspan.planner.export.CompareReport;
+import binspan.scenario.Arm;
 import binspan.scenario.Choice;
 import binspan.scenario.DetectorClass;
 import binspan.scenario.FibreClass;
@@ -14,6 +17,7 @@ import binspan.study.comparison.LinkOptions;
 import binspan.study.tuning.Objective;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.Function;
 import java.util.stream.Stream;
 import javafx.beans.property.BooleanProperty;
@@ -114,15 +118,41 @@ public final class DetectorsModel extends StudyModel<List<Comparison.Entry>> {
             return false;
         }
         Scenario chosen = entry.prediction().scenario();
-        return design().change(change(entry.option().name(), design().scenario()), null, scenario -> chosen);
+        Optional<String> label = labels(design().scenario()).stream()
+                .filter(each -> entry.option().name().equals("without " + each))
+                .findFirst();
+        if (label.isPresent()) {
+            return design().edit(entry.option().name(), removal(label.get(), chosen));
+        }
+        return design().change(change(entry.option().name()), null, scenario -> chosen);
     }
 
-    private static String change(String option, Scenario scenario) {
+    /** Leaves an element out on both sides, then takes the settings over. */
+    private List<Change> removal(String label, Scenario chosen) {
+        Scenario scenario = design().scenario();
+        List<Change> changes = new ArrayList<>();
+        changes.addAll(deleted("alice.path", scenario.alice(), label));
+        changes.addAll(deleted("bob.path", scenario.bob(), label));
+        Scenario without =
+                LinkOptions.without(scenario, label).settings().get(0).scenario();
+        changes.addAll(Differences.between(without, chosen));
+        return changes;
+    }
+
+    /** From the last to the first, so that the numbers of the others stay. */
+    private static List<Change> deleted(String list, Arm arm, String label) {
+        List<Change> deleted = new ArrayList<>();
+        for (int i = arm.path().size() - 1; i >= 0; i--) {
+            if (arm.path().get(i).label().filter(label::equals).isPresent()) {
+                deleted.add(new Change.Delete(list, i));
+            }
+        }
+        return deleted;
+    }
+
+    private static String change(String option) {
         if (option.equals(Words.of("studies.compare.present"))) {
             return Words.of("studies.compare.change.written");
-        }
-        if (labels(scenario).stream().anyMatch(label -> option.equals("without " + label))) {
-            return option;
         }
         boolean fibre = Choice.texts(FibreClass.class).contains(option);
         return Words.of(fibre ? "studies.compare.change.fibres" : "studies.compare.change", option);
