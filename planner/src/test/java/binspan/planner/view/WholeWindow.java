@@ -11,7 +11,6 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
-import java.util.Collections;
 import java.util.Deque;
 import java.util.List;
 import java.util.Optional;
@@ -22,9 +21,6 @@ import java.util.function.BooleanSupplier;
 import java.util.function.Predicate;
 import java.util.function.Supplier;
 import java.util.function.ToDoubleFunction;
-import java.util.logging.Handler;
-import java.util.logging.LogRecord;
-import java.util.logging.Logger;
 import javafx.application.Platform;
 import javafx.scene.Node;
 import javafx.scene.Parent;
@@ -45,30 +41,12 @@ import org.testfx.util.WaitForAsyncUtils;
 /** The whole window without a display, in directories of its own; fails in the end if anything was thrown or warned of. */
 final class WholeWindow {
     private static final long PATIENCE_SECONDS = 60;
-    private static final Logger SHEETS = Logger.getLogger("javafx.css");
 
     private final FxRobot robot;
     private final Path directory;
     private final Deque<Path> answers = new ArrayDeque<>();
-    private final List<String> complaints = Collections.synchronizedList(new ArrayList<>());
+    private final Complaints complaints = new Complaints();
     private final AtomicInteger working = new AtomicInteger();
-    private final Thread.UncaughtExceptionHandler handlerBefore = Thread.getDefaultUncaughtExceptionHandler();
-    private final Handler listener = new Handler() {
-        @Override
-        public void publish(LogRecord record) {
-            complaints.add("style sheets: " + record.getMessage());
-        }
-
-        @Override
-        public void flush() {
-            // nothing is held back
-        }
-
-        @Override
-        public void close() {
-            // nothing is open
-        }
-    };
     private Session session;
     private Stage stage;
 
@@ -76,17 +54,6 @@ final class WholeWindow {
     WholeWindow(FxRobot robot, Path directory) {
         this.robot = robot;
         this.directory = directory;
-        Thread.setDefaultUncaughtExceptionHandler(
-                (thread, thrown) -> complaints.add(thread.getName() + ": " + thrown + " at " + where(thrown)));
-        SHEETS.addHandler(listener);
-    }
-
-    private static String where(Throwable thrown) {
-        return List.of(thrown.getStackTrace()).stream()
-                .filter(each -> each.getClassName().startsWith("binspan"))
-                .map(StackTraceElement::toString)
-                .findFirst()
-                .orElse("nowhere of ours");
     }
 
     /** Copies a shipped scenario into a directory. */
@@ -196,7 +163,7 @@ final class WholeWindow {
         long end = System.nanoTime() + TimeUnit.SECONDS.toNanos(PATIENCE_SECONDS);
         while (!Shown.onWindowThread(condition::getAsBoolean)) {
             assertThat(System.nanoTime())
-                    .as("waited in vain: %s; %s", what, complaints)
+                    .as("waited in vain: %s; %s", what, complaints.all())
                     .isLessThan(end);
             WaitForAsyncUtils.sleep(10, TimeUnit.MILLISECONDS);
         }
@@ -341,9 +308,8 @@ final class WholeWindow {
             }
             act(() -> stage.hide());
         } finally {
-            SHEETS.removeHandler(listener);
-            Thread.setDefaultUncaughtExceptionHandler(handlerBefore);
+            complaints.close();
         }
-        assertThat(complaints).isEmpty();
+        assertThat(complaints.all()).isEmpty();
     }
 }
