@@ -17,7 +17,6 @@ import javafx.scene.layout.VBox;
 /** The verdict beside the link: whether it meets its requirements, what the visibility is lost to, figures of merit, and links to the headroom page. */
 public final class VerdictPane extends BorderPane {
     private static final PseudoClass STALE = PseudoClass.getPseudoClass("stale");
-    private static final double SCROLL_BORDER = 4.0;
 
     private final Label headline = Columns.wrapped("", "headline");
     private final RequirementsView requirements = new RequirementsView();
@@ -68,15 +67,6 @@ public final class VerdictPane extends BorderPane {
         setTop(headline);
         setCenter(scroll);
         setBottom(foot);
-    }
-
-    /** The foot takes what the requirements and figures leave. */
-    @Override
-    protected void layoutChildren() {
-        double inside = getWidth() - snappedLeftInset() - snappedRightInset();
-        double left = getHeight() - snappedTopInset() - snappedBottomInset() - headline.prefHeight(inside);
-        foot.fit(inside, left - content.prefHeight(inside) - SCROLL_BORDER);
-        super.layoutChildren();
     }
 
     private void show(VerdictSheet sheet) {

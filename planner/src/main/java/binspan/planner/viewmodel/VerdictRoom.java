@@ -78,9 +78,4 @@ public record VerdictRoom(LinkCheck check, String title, String none, List<Row> 
     public Optional<Row> tightest() {
         return rows.stream().findFirst();
     }
-
-    /** The one with the least of the others. */
-    public Optional<Row> nextTightest() {
-        return rows.stream().skip(1).findFirst();
-    }
 }

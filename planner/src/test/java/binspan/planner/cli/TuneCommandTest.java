@@ -121,7 +121,7 @@ final class TuneCommandTest {
         assertThat(failing.out())
                 .contains("As written the link does not meet its requirements; tuned it does.")
                 .containsPattern("CHSH S +\\S+ 2.5 +2.55 +2.05  \\S fails\n")
-                .containsPattern("time to the first key +\\S+ 1 h +\\d+ ms +none  \\S fails\n");
+                .containsPattern("time to the first key +\\S+ 1 h +\\d+ ms +never  \\S fails\n");
     }
 
     @Test

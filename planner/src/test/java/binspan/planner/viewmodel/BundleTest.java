@@ -9,6 +9,7 @@ import binspan.scenario.DetectorClass;
 import binspan.scenario.PumpMode;
 import java.text.MessageFormat;
 import java.util.Arrays;
+import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Locale;
@@ -39,22 +40,36 @@ class BundleTest {
             .collect(Collectors.toSet());
 
     /** Keys that are built of a beginning and the name of a constant. */
-    private static final Map<String, List<String>> BUILT = Map.of(
-            "form.part.",
-                    lower(Arrays.stream(LinkPart.class.getPermittedSubclasses())
-                            .map(Class::getSimpleName)
-                            .filter(name -> !name.equals("Element") && !name.equals("Port")) // have names of their own
-                            .toList()),
-            "link.kind.", names(LinkItem.Kind.values()),
-            "link.source.", Stream.of(PumpMode.values()).map(PumpMode::text).toList(),
-            "link.detector.",
-                    Stream.of(DetectorClass.values()).map(DetectorClass::text).toList(),
-            "slots.peak.", names(Peak.Kind.values()),
-            "slots.title.", Stream.of(Site.values()).map(Site::path).toList(),
-            "map.kind.", names(MapReading.Kind.values()),
-            "map.box.", names(BoxChoice.values()),
-            "map.short.", names(Requirement.values()),
-            "studies.reach.place.", lower(names(ReachModel.Place.values())));
+    private static final Map<String, List<String>> BUILT = with(
+            Map.of(
+                    "form.part.",
+                            lower(Arrays.stream(LinkPart.class.getPermittedSubclasses())
+                                    .map(Class::getSimpleName)
+                                    .filter(name ->
+                                            !name.equals("Element") && !name.equals("Port")) // have names of their own
+                                    .toList()),
+                    "link.kind.", names(LinkItem.Kind.values()),
+                    "link.source.",
+                            Stream.of(PumpMode.values()).map(PumpMode::text).toList(),
+                    "link.detector.",
+                            Stream.of(DetectorClass.values())
+                                    .map(DetectorClass::text)
+                                    .toList(),
+                    "slots.peak.", names(Peak.Kind.values()),
+                    "slots.title.", Stream.of(Site.values()).map(Site::path).toList(),
+                    "map.kind.", names(MapReading.Kind.values()),
+                    "map.box.", names(BoxChoice.values()),
+                    "map.short.", names(Requirement.values()),
+                    "studies.reach.place.", lower(names(ReachModel.Place.values()))),
+            "map.star.",
+            names(MapRecommendation.Kind.values()));
+
+    private static Map<String, List<String>> with(
+            Map<String, List<String>> built, String beginning, List<String> words) {
+        Map<String, List<String>> more = new HashMap<>(built);
+        more.put(beginning, words);
+        return Map.copyOf(more);
+    }
 
     private static List<String> names(Enum<?>[] constants) {
         return Arrays.stream(constants).map(Enum::name).toList();

@@ -368,7 +368,7 @@ class FormModelTest {
         length.textProperty().set("35x");
         length.settle();
         assertThat(length.textProperty().get()).isEqualTo("35x");
-        form.design().undo();
+        form.form().undo();
         assertThat(length.textProperty().get()).isEqualTo("30.2");
         assertThat(length.errorProperty().get()).isEmpty();
         length.textProperty().set("x");
