@@ -16,8 +16,7 @@ import javafx.scene.input.MouseButton;
 final class HeadroomTable extends TableView<VerdictRoom.Row> {
     private static final double CELL = 1.75;
     private static final double HEAD = 2.1;
-    private static final double NUMBER_NARROWEST = 5.3;
-    private static final double TEXT_NARROWEST = 6.0;
+    private static final double TEXT_NARROWEST = 4.0;
     private static final int FEWEST = 3;
     private static final int MOST = 8;
 
@@ -37,11 +36,11 @@ final class HeadroomTable extends TableView<VerdictRoom.Row> {
         setId("room-headroom");
         getStyleClass().add("headroom");
         setColumnResizePolicy(TableView.CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN);
-        column("quantity", 16.4, VerdictRoom.Row::name, false);
-        column("planned", 5.6, VerdictRoom.Row::planned, true);
-        column("limit", 8.6, VerdictRoom.Row::sidedLimit, true);
-        column("room", 5.8, VerdictRoom.Row::room, true);
-        column("fails", 12.6, VerdictRoom.Row::fails, false);
+        column("quantity", 13.4, VerdictRoom.Row::name, false);
+        column("planned", 6.2, VerdictRoom.Row::planned, true);
+        column("limit", 10.2, VerdictRoom.Row::sidedLimit, true);
+        column("room", 7.2, VerdictRoom.Row::room, true);
+        column("fails", 11.0, VerdictRoom.Row::fails, false);
         setAccessibleText(Words.of("verdict.room.help"));
         setRowFactory(table -> row());
         getSelectionModel().selectedItemProperty().addListener((source, before, row) -> {
@@ -58,7 +57,7 @@ final class HeadroomTable extends TableView<VerdictRoom.Row> {
         column.setSortable(false);
         column.setReorderable(false);
         look.follow(() -> {
-            column.setMinWidth(look.em(number ? NUMBER_NARROWEST : TEXT_NARROWEST));
+            column.setMinWidth(look.em(number ? width : TEXT_NARROWEST));
             column.setPrefWidth(look.em(width));
         });
         if (number) {

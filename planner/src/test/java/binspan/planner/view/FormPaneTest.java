@@ -39,6 +39,7 @@ class FormPaneTest {
         new Look().dress(scene);
         stage.setScene(scene);
         stage.show();
+        stage.sizeToScene();
     }
 
     private double efficiency() {

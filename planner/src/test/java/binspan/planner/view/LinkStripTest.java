@@ -44,6 +44,7 @@ final class LinkStripTest {
         look.dress(scene);
         stage.setScene(scene);
         stage.show();
+        stage.sizeToScene();
     }
 
     private Node item(FxRobot robot, int index) {

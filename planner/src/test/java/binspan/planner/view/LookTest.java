@@ -38,6 +38,7 @@ class LookTest {
         look.dress(scene);
         stage.setScene(scene);
         stage.show();
+        stage.sizeToScene();
     }
 
     @Test

@@ -74,6 +74,7 @@ final class MapPageTest {
         look.dress(scene);
         stage.setScene(scene);
         stage.show();
+        stage.sizeToScene();
     }
 
     private MapFrame frame() {

@@ -79,7 +79,7 @@ public final class PictureTour {
             return page;
         });
         // Long enough for the exact map, which waits until nothing moves.
-        pause(page.equals("map") ? 2500 : 900);
+        pause(page.equals("map") ? 3500 : 1500);
         WritableImage image = Shown.onWindowThread(() -> new Robot()
                 .getScreenCapture(
                         null, new Rectangle2D(stage.getX(), stage.getY(), stage.getWidth(), stage.getHeight())));

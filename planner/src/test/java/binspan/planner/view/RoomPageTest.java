@@ -47,6 +47,7 @@ final class RoomPageTest {
             look.dress(scene);
             stage.setScene(scene);
             stage.show();
+            stage.sizeToScene();
         });
     }
 

@@ -46,6 +46,7 @@ class SlotsPageTest {
         look.dress(scene);
         stage.setScene(scene);
         stage.show();
+        stage.sizeToScene();
     }
 
     private SlotPlot plot(String id) {

@@ -75,6 +75,7 @@ final class StudyPageTest {
         look.dress(scene);
         stage.setScene(scene);
         stage.show();
+        stage.sizeToScene();
     }
 
     private <T extends Node> T part(String id, Class<T> type) {

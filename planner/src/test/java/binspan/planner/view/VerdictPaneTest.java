@@ -56,6 +56,7 @@ final class VerdictPaneTest {
             look.dress(scene);
             stage.setScene(scene);
             stage.show();
+            stage.sizeToScene();
         });
         return pane[0];
     }
